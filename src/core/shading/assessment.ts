@@ -1,0 +1,83 @@
+import type { Problem } from '../survey/problem.ts';
+import type { TranspositionId } from '../survey/survey.ts';
+
+/** Twelve monthly values; null in a month without sun on the plane. */
+export type MonthlyShares = (number | null)[];
+
+/** What the survey's obstructions cost. Irradiation in kWh/m2 (a year or a month), shares 0 to 1. */
+export interface Assessment {
+  climate: { source: string; name: string; reference: string; warnings: readonly string[] };
+  transposition: TranspositionId;
+  stepMinutes: number;
+  /** What a person should know of the survey (a station that serves no plane). */
+  warnings: Problem[];
+  planes: PlaneAssessment[];
+}
+
+export interface PlaneAssessment {
+  id: string;
+  name: string;
+  surfaceTilt: number;
+  surfaceAzimuth: number;
+  /** Unshaded irradiation on the plane, over that on the best-lying plane at this site. */
+  orientationFactor: number;
+  /** How the best-lying plane lies. */
+  bestPlane: { surfaceTilt: number; surfaceAzimuth: number };
+  unshaded: Irradiation;
+  /** Mean over the plane's stations; null where no station serves it. */
+  solarAccess: PlaneAccess | null;
+  stations: StationAssessment[];
+}
+
+export interface Irradiation {
+  annual: number;
+  /** Twelve. */
+  monthly: number[];
+}
+
+export interface PlaneAccess {
+  annual: number;
+  monthly: MonthlyShares;
+  method: 'stations-mean';
+  /** Lowest annual access among the stations. */
+  lowest: number;
+  count: number;
+}
+
+export interface StationAssessment {
+  id: string;
+  name: string;
+  solarAccess: {
+    annual: number;
+    monthly: MonthlyShares;
+    /** [month][hour], hours of local standard time; null where the month has no light in that hour. */
+    hourly: (number | null)[][];
+  };
+  /** Share of the plane's unshaded energy that comes through azimuths somebody observed. */
+  coverage: number;
+  irradiation: Irradiation;
+  /** Most gain first. */
+  obstructions: ObstructionShading[];
+  /** Obstructions that hide each other: removing all gives more than the sum of removing each. */
+  groups: ObstructionGroup[];
+}
+
+export interface ObstructionShading {
+  id: string;
+  name: string;
+  /** Solar access gained, over the year, if this one goes and the others stay. */
+  gainIfRemoved: number;
+  /** Solar access lost, over the year, if only this one stood. */
+  lossIfAlone: number;
+  /** `gainIfRemoved` by month, as a share of that month. */
+  monthly: MonthlyShares;
+}
+
+export interface ObstructionGroup {
+  /** Ids, in the order of the station's list. */
+  obstructions: string[];
+  /** Solar access gained over the year if all of them go. */
+  gainIfAllRemoved: number;
+  /** Sum of what each would give back by itself. */
+  sumOfSingleGains: number;
+}

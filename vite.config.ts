@@ -1,0 +1,46 @@
+import { defineConfig } from 'vitest/config';
+import { VitePWA } from 'vite-plugin-pwa';
+
+const jsx = { jsx: { runtime: 'automatic', importSource: 'preact' } } as const;
+
+export default defineConfig({
+  oxc: jsx,
+  build: { target: 'es2022', sourcemap: false },
+  worker: { format: 'es' },
+  plugins: [
+    VitePWA({
+      strategies: 'injectManifest',
+      srcDir: 'src/service-worker',
+      filename: 'service-worker.ts',
+      injectRegister: false,
+      includeManifestIcons: false,
+      manifest: {
+        name: 'Noonmark',
+        short_name: 'Noonmark',
+        description: 'Solar site surveys, offline: what blocks the sun and what it costs.',
+        theme_color: '#fbf8f0',
+        background_color: '#fbf8f0',
+        display: 'standalone',
+        start_url: '/',
+        icons: [
+          { src: '/icon.svg', sizes: 'any', type: 'image/svg+xml' },
+          { src: '/icon-192.png', sizes: '192x192', type: 'image/png' },
+          { src: '/icon-512.png', sizes: '512x512', type: 'image/png' },
+          { src: '/icon-maskable-512.png', sizes: '512x512', type: 'image/png', purpose: 'maskable' },
+        ],
+      },
+      injectManifest: { globPatterns: ['**/*.{js,css,html,svg,png,json,bin,webmanifest}'], maximumFileSizeToCacheInBytes: 3_000_000 },
+    }),
+  ],
+  test: {
+    projects: [
+      {
+        oxc: jsx,
+        test: { name: 'unit', include: ['tests/**/*.test.{ts,tsx}'], exclude: ['tests/browser/**'], environment: 'node', testTimeout: 60_000 },
+      },
+      {
+        test: { name: 'browser', include: ['tests/browser/**/*.test.ts'], environment: 'node', testTimeout: 120_000, hookTimeout: 180_000, fileParallelism: false },
+      },
+    ],
+  },
+});
