@@ -80,7 +80,6 @@ module.exports = {
     tsPreCompilationDeps: true,
     exclude: { path: 'eslint[.]config[.]js$' },
     doNotFollow: { path: 'node_modules' },
-    tsConfig: { fileName: 'src/tsconfig.json' },
     enhancedResolveOptions: { exportsFields: ['exports'], conditionNames: ['import', 'types', 'node', 'default'] },
   },
 };
