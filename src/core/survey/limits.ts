@@ -1,0 +1,28 @@
+/** What a survey file may hold. Beyond, it is refused at once, with the limit named. */
+export const LIMITS = {
+  /** Characters of the file's text; 20 MB where all is plain ASCII. */
+  textLength: 20_000_000,
+  /** Values in the file, counted one by one. */
+  values: 5_000_000,
+  /** Lists and objects inside each other. */
+  depth: 64,
+  planes: 2_000,
+  stations: 2_000,
+  obstructions: 2_000,
+  runs: 20_000,
+  /** In all stations together. */
+  traces: 2_000,
+  /** In all traces together. */
+  sightings: 20_000,
+  /** In one outline, where every edge is held against every other. */
+  outlineSightings: 2_000,
+  readings: 200_000,
+  headingChecks: 2_000,
+  /** Characters of an id, a name, and a longer text. */
+  idLength: 200,
+  nameLength: 10_000,
+  notesLength: 200_000,
+} as const;
+
+/** Problems or warnings listed for one file; the rest is counted. */
+export const MOST_PROBLEMS = 100;

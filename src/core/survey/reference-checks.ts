@@ -1,0 +1,63 @@
+import { isRecord, shown } from './json-value.ts';
+import type { JsonRecord } from './json-value.ts';
+import type { ProblemList } from './problem-list.ts';
+import { pathBelow } from './record-path.ts';
+import { rowsOf, textsOf, tracesOf } from './record-rows.ts';
+import type { Row } from './record-rows.ts';
+
+/** Adds a problem for each id given twice in its list (sightings: in the whole survey) and each reference to nothing. */
+export function addReferenceProblems(document: JsonRecord, problems: ProblemList): void {
+  const stations = rowsOf(document, 'stations');
+  const traces = tracesOf(document);
+  const sightings = traces.flatMap(({ value, path }) => rowsOf(value, 'sightings', path));
+  const ids = (rows: Row[], what: string) => uniqueIds(rows, what, problems);
+  const planes = ids(rowsOf(document, 'planes'), 'plane');
+  const obstructions = ids(rowsOf(document, 'obstructions'), 'obstruction');
+  const runs = ids(rowsOf(document, 'runs'), 'run');
+  const readings = ids(rowsOf(document, 'readings'), 'reading');
+  ids(stations, 'station');
+  ids(sightings, 'sighting');
+  const refer = (rows: Row[], key: string, known: Set<unknown>, what: string) => {
+    for (const { value, path } of rows) addDangling(value[key], pathBelow(path, key), known, what, problems);
+  };
+  refer(rowsOf(document, 'readings'), 'run', runs, 'run');
+  refer(traces, 'obstruction', obstructions, 'obstruction');
+  refer(sightings, 'reading', readings, 'reading');
+  for (const { value, path } of stations) {
+    ids(rowsOf(value, 'traces', path), 'trace of this station');
+    const checks = rowsOf(value, 'headingChecks', path);
+    ids(checks, 'heading check of this station');
+    refer(checks, 'reading', readings, 'reading');
+    for (const plane of textsOf(value, 'serves', path))
+      addDangling(plane.text, plane.path, planes, 'plane', problems);
+    const position = value.position;
+    if (isRecord(position))
+      addDangling(position.on, pathBelow(path, 'position.on'), planes, 'plane', problems);
+  }
+}
+
+function uniqueIds(rows: Row[], what: string, problems: ProblemList): Set<unknown> {
+  const seen = new Map<string, string>();
+  for (const { value, path } of rows) {
+    if (typeof value.id !== 'string') continue;
+    const first = seen.get(value.id);
+    if (first === undefined) seen.set(value.id, path);
+    else
+      problems.add(
+        pathBelow(path, 'id'),
+        `The id ${shown(value.id)} already names the ${what} at ${first}. Give this one an id of its own.`,
+      );
+  }
+  return new Set(seen.keys());
+}
+
+function addDangling(
+  id: unknown,
+  path: string,
+  known: Set<unknown>,
+  what: string,
+  problems: ProblemList,
+): void {
+  if (typeof id !== 'string' || known.has(id)) return;
+  problems.add(path, `No ${what} has the id ${shown(id)}. Add that ${what}, or name one that is there.`);
+}

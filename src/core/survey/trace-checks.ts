@@ -1,0 +1,144 @@
+import { turnBetween } from '../angles/angles.ts';
+import type { JsonRecord } from './json-value.ts';
+import { traceEdge } from './obstruction-kinds.ts';
+import { ordered } from './order.ts';
+import { LIMITS } from './limits.ts';
+import { outlineCrossing } from './outline-crossing.ts';
+import type { ProblemList } from './problem-list.ts';
+import { rowsOf, tracesOf } from './record-rows.ts';
+import type { Row } from './record-rows.ts';
+import { pathBelow } from './record-path.ts';
+import { sightingDirection } from './sighting-direction.ts';
+import type { Obstruction, Sighting, Trace } from './survey.ts';
+
+/** Fewest sightings that make each shape. */
+const FEWEST = { skyline: 2, outline: 3, line: 2 } as const;
+/** A turn this close to half a circle could go either way. */
+const HALF_CIRCLE = 180 - 1e-9;
+
+/** One sighting of a trace, where it stands in the file and where it points. */
+interface Pointed {
+  path: string;
+  azimuth: number;
+  elevation: number;
+}
+
+/** Adds a problem for each trace that cannot be drawn, and each sighting that points nowhere. */
+export function addTraceProblems(document: JsonRecord, problems: ProblemList): void {
+  const kinds = new Map(rowsOf(document, 'obstructions').map(({ value }) => [value.id, value.kind]));
+  for (const trace of tracesOf(document)) {
+    addPartProblems(trace, problems);
+    const pointed = pointedSightings(trace, problems);
+    if (pointed) addShapeProblems(trace, pointed, kinds.get(trace.value.obstruction), problems);
+  }
+}
+
+/** What the trace says of itself: enough sightings, the width of a line, a circle only of a skyline. */
+function addPartProblems({ value, path }: Row, problems: ProblemList): void {
+  const shape = value.shape as Trace['shape'];
+  if (!Object.hasOwn(FEWEST, shape)) return;
+  const count = Array.isArray(value.sightings) ? value.sightings.length : FEWEST[shape];
+  if (count < FEWEST[shape])
+    problems.add(
+      pathBelow(path, 'sightings'),
+      `The trace has ${count === 1 ? 'one sighting' : `${count} sightings`}; its shape, ${shape}, needs at least ${FEWEST[shape]}. Add sightings, or remove the trace.`,
+    );
+  if (shape === 'outline' && count > LIMITS.outlineSightings)
+    problems.add(
+      pathBelow(path, 'sightings'),
+      `The outline has ${count} sightings; the limit is ${LIMITS.outlineSightings}. Simplify it.`,
+    );
+  if (shape === 'line' && value.angularWidth === undefined)
+    problems.add(
+      pathBelow(path, 'angularWidth'),
+      'A line needs its angular width. Give how wide it looks, in degrees over 0, at most 20.',
+    );
+  if (shape !== 'skyline' && value.fullCircle === true)
+    problems.add(
+      pathBelow(path, 'fullCircle'),
+      `Only a skyline goes around the whole horizon. Take fullCircle out, or make the shape skyline.`,
+    );
+}
+
+/** The trace's sightings in order with their directions; null where some have none yet or are no sightings. */
+function pointedSightings({ value, path }: Row, problems: ProblemList): Pointed[] | null {
+  const rows = rowsOf(value, 'sightings', path);
+  const pointed = ordered(rows.map((row) => ({ row, order: numberOr(row.value.order, undefined) }))).flatMap(
+    ({ row }) => pointedAt(row, problems) ?? [],
+  );
+  const whole = Array.isArray(value.sightings) && pointed.length === value.sightings.length;
+  return whole ? pointed : null;
+}
+
+function pointedAt({ value, path }: Row, problems: ProblemList): Pointed | null {
+  const hasAzimuth = value.azimuth !== undefined;
+  const hasElevation = value.elevation !== undefined;
+  if (hasAzimuth !== hasElevation)
+    problems.add(
+      pathBelow(path, hasAzimuth ? 'elevation' : 'azimuth'),
+      `The sighting has ${hasAzimuth ? 'an azimuth but no elevation' : 'an elevation but no azimuth'}. Give both.`,
+    );
+  else if (!hasAzimuth && value.reading === undefined && !hasAmendment(value))
+    problems.add(
+      path,
+      'The sighting points nowhere. Give azimuth and elevation, or the reading it was taken with.',
+    );
+  const amendments: unknown = value.amendments;
+  if (amendments !== undefined && !(Array.isArray(amendments) && amendments.every(isObject))) return null;
+  const direction = sightingDirection(value as unknown as Sighting);
+  if (!direction || !Number.isFinite(direction.azimuth) || !Number.isFinite(direction.elevation)) return null;
+  return { path, ...direction };
+}
+
+const hasAmendment = ({ amendments }: JsonRecord) => Array.isArray(amendments) && amendments.length > 0;
+const isObject = (value: unknown) => typeof value === 'object' && value !== null;
+const numberOr = <T>(value: unknown, otherwise: T) => (typeof value === 'number' ? value : otherwise);
+
+function addShapeProblems(
+  { value, path }: Row,
+  pointed: Pointed[],
+  kind: unknown,
+  problems: ProblemList,
+): void {
+  const trace = value as unknown as Trace;
+  const closed = trace.shape === 'outline' || (trace.shape === 'skyline' && trace.fullCircle === true);
+  const apart = addNeighbourProblems(pointed, closed, problems);
+  if (apart || pointed.length < 2) return;
+  if (trace.shape === 'skyline' && closed) addCircleProblem(path, pointed, problems);
+  if (trace.shape !== 'outline' || pointed.length < 3 || pointed.length > LIMITS.outlineSightings) return;
+  const edge = traceEdge(trace, { kind } as Obstruction);
+  const crossing = outlineCrossing(pointed, edge);
+  if (!crossing) return;
+  const [from, other] = crossing.map((i) => pointed[i]!.path.slice(path.length + 1));
+  problems.add(
+    pathBelow(path, 'sightings'),
+    `The outline crosses or touches itself: its edge after ${from} meets its edge after ${other}. Put the sightings in order around the edge, or split the outline in two.`,
+  );
+}
+
+function addNeighbourProblems(pointed: Pointed[], closed: boolean, problems: ProblemList): boolean {
+  let found = false;
+  pointed.forEach((sighting, i) => {
+    const before = pointed[i - 1] ?? (closed ? pointed.at(-1) : undefined);
+    if (!before || Math.abs(turnBetween(before.azimuth, sighting.azimuth)) < HALF_CIRCLE) return;
+    found = true;
+    problems.add(
+      sighting.path,
+      `The sighting is 180 degrees from its neighbour ${before.path} (azimuths ${before.azimuth} and ${sighting.azimuth}), so the edge could run either way. Add a sighting between the two.`,
+    );
+  });
+  return found;
+}
+
+/** A full circle must go once around; it does not where a gap of more than half the horizon is left. */
+function addCircleProblem(path: string, pointed: Pointed[], problems: ProblemList): void {
+  const turn = pointed.reduce(
+    (sum, sighting, i) => sum + turnBetween(pointed.at(i - 1)!.azimuth, sighting.azimuth),
+    0,
+  );
+  if (Math.abs(Math.abs(turn) - 360) < 1e-6) return;
+  problems.add(
+    pathBelow(path, 'fullCircle'),
+    'The sightings do not go once around the horizon: somewhere neighbours are 180 degrees or more apart, or the order is mixed up. Add sightings in the gap, or take fullCircle out.',
+  );
+}
