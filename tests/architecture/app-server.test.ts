@@ -6,8 +6,8 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { projectFolder } from './cruise.ts';
 
 interface ServerModule {
-  appServer(folder: string): Server;
-  listenFrom(server: Server, port: number): Promise<number>;
+  appServer: (folder: string) => Server;
+  listenFrom: (server: Server, port: number) => Promise<number>;
 }
 
 const { appServer, listenFrom } = (await import(`${projectFolder}.ci/app-server.mjs`)) as ServerModule;

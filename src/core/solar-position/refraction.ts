@@ -25,3 +25,16 @@ export function refraction(geometricElevation: number, pressure = 1010): number 
   const arcMinutes = 1.02 / Math.tan((h + 10.3 / (h + 5.11)) * RADIANS) + 0.0019279; // zero at 90°
   return ((arcMinutes / 60) * (pressure / 1010) * 283) / (273 + TEMPERATURE);
 }
+
+/**
+ * Geometric elevation [degrees] of a direction seen at an apparent elevation [degrees, -90 to 90] through air of a
+ * pressure [hPa]: the inverse of adding `refraction`, to 1e-10°.
+ */
+export function geometricOf(apparentElevation: number, pressure = 1010): number {
+  if (!(Math.abs(apparentElevation) <= 90))
+    throw new RangeError(`apparentElevation must be -90 to 90, got ${apparentElevation}`);
+  let geometric = apparentElevation - refraction(apparentElevation, pressure);
+  // the refraction changes by at most a quarter of a change of elevation, so this closes in
+  for (let round = 0; round < 40; round++) geometric = apparentElevation - refraction(geometric, pressure);
+  return geometric;
+}

@@ -26,8 +26,14 @@ export const PARALLAX = 8.794 / 3600;
  * Ref: Meeus, Astronomical Algorithms, 2nd ed. (1998), eq. 13.5, 13.6 (azimuth from north here); parallax in altitude
  * chapter 40; refraction eq. 16.4.
  */
-export function solarPosition(timeMs: number, latitude: number, longitude: number, altitude = 0): SolarPosition {
-  if (!(latitude >= -90 && latitude <= 90)) throw new RangeError(`latitude must be -90 to 90, got ${latitude}`);
+export function solarPosition(
+  timeMs: number,
+  latitude: number,
+  longitude: number,
+  altitude = 0,
+): SolarPosition {
+  if (!(latitude >= -90 && latitude <= 90))
+    throw new RangeError(`latitude must be -90 to 90, got ${latitude}`);
   if (!Number.isFinite(longitude)) throw new RangeError(`longitude must be finite, got ${longitude}`);
   const { declination, greenwichHourAngle } = sunEquatorial(timeMs);
   const hourAngle = greenwichHourAngle + longitude * RADIANS;

@@ -19,7 +19,9 @@ function format(timeZone: string): Intl.DateTimeFormat {
         second: 'numeric',
       });
     } catch {
-      throw new RangeError(`unknown time zone ${JSON.stringify(timeZone)}; use an IANA name such as Europe/Lisbon`);
+      throw new RangeError(
+        `unknown time zone ${JSON.stringify(timeZone)}; use an IANA name such as Europe/Lisbon`,
+      );
     }
     formats.set(timeZone, made);
   }
