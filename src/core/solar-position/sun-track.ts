@@ -10,8 +10,6 @@ export const TRACK_DAYS = 365;
 const DAY_MS = 86_400_000;
 /** Declination and hour angle are asked for this often; linear between is within 0.0001°. */
 const ASK_MS = DAY_MS / 4;
-/** Below this geometric elevation nothing is computed but that the sun is down, sine. */
-const WELL_BELOW = Math.sin(-4 * RADIANS);
 
 /**
  * The sun over one site through 365 days of local standard time, in equal steps. Step i runs from boundary i to
@@ -43,7 +41,7 @@ export interface SunTrack {
 }
 
 /** Cosine of the apparent zenith angle in the middle of a step. */
-export const cosZenithOf = (track: SunTrack, step: number): number => (track.up[step]! + track.up[step + 1]!) / 2;
+export const cosZenithOf = (track: SunTrack, step: number): number => (track.up[step] + track.up[step + 1]) / 2;
 
 /** Day of the year of a step, 0 to 364. */
 export const dayOf = (track: SunTrack, step: number): number => (step / track.stepsPerDay) | 0;
@@ -59,13 +57,13 @@ export interface TrackSite {
 }
 
 /**
- * Lays out a year of sun directions. `stepMinutes` must divide a day, 1 to 60.
+ * Lays out a year of sun directions. `stepMinutes` must divide an hour, 1 to 15.
  * Positions are asked of the library every six hours only; between, declination and the departure of the hour angle
  * from mean time are linear. Parallax and refraction as in `solarPosition`, with the refraction held below -1°.
  */
 export function sunTrack(site: TrackSite, stepMinutes = 2): SunTrack {
-  if (!(stepMinutes >= 1 && stepMinutes <= 60 && Number.isInteger(1440 / stepMinutes)))
-    throw new RangeError(`stepMinutes must divide 1440 and be 1 to 60, got ${stepMinutes}`);
+  if (!(stepMinutes >= 1 && stepMinutes <= 15 && Number.isInteger(60 / stepMinutes)))
+    throw new RangeError(`stepMinutes must divide an hour and be 1 to 15, got ${stepMinutes}`);
   if (!(Math.abs(site.latitude) <= 90)) throw new RangeError(`latitude must be -90 to 90, got ${site.latitude}`);
   if (!(Math.abs(site.longitude) <= 360)) throw new RangeError(`longitude must be -360 to 360, got ${site.longitude}`);
   const altitude = site.altitude ?? 0;
@@ -104,6 +102,7 @@ function fillTrack(track: Writable<SunTrack>): void {
   const pressure = standardPressure(track.altitude);
   const longitude = track.longitude * RADIANS;
   const stepMs = stepMinutes * 60_000;
+  const wellBelow = Math.sin((-stepMinutes / 4 - 2) * RADIANS); // a step later the sun is still down
   for (let i = 0; i <= steps; i++) {
     const at = sun(i * stepMs);
     const hourAngle = at.greenwichHourAngle + longitude;
@@ -112,7 +111,7 @@ function fillTrack(track: Writable<SunTrack>): void {
     const cosDeclination = Math.cos(at.declination);
     const equatorial = cosDeclination * Math.cos(hourAngle);
     const sine = Math.sin(at.declination) * sinLatitude + equatorial * cosLatitude;
-    if (sine < WELL_BELOW) {
+    if (sine < wellBelow) {
       track.up[i] = sine;
       track.elevation[i] = Math.asin(sine) * DEGREES;
       continue;
@@ -148,9 +147,9 @@ function interpolatedSun(startMs: number) {
   return (sinceStart: number) => {
     const k = (sinceStart / ASK_MS) | 0;
     const share = sinceStart / ASK_MS - k;
-    at.declination = declination[k]! + share * (declination[k + 1]! - declination[k]!);
+    at.declination = declination[k] + share * (declination[k + 1] - declination[k]);
     at.greenwichHourAngle =
-      meanAngle(startMs + sinceStart) + departure[k]! + share * (departure[k + 1]! - departure[k]!);
+      meanAngle(startMs + sinceStart) + departure[k] + share * (departure[k + 1] - departure[k]);
     return at;
   };
 }

@@ -1,0 +1,78 @@
+import { DEGREES, RADIANS, safeAsin, turnBetween } from '../angles/angles.ts';
+import type { SkyPoint } from './horizon-edge.ts';
+
+/** A long line is laid as strips no longer than this, degrees, so that their straight sides keep its width. */
+const LONGEST_STRIP = 5;
+
+type Vector = readonly [number, number, number];
+
+/**
+ * The strips of sky, each four corners, that a line of angular width [degrees] covers between neighbouring points:
+ * half the width on either side of the path, at right angles to it on the sky.
+ */
+export function lineStrips(points: readonly SkyPoint[], width: number, straight: boolean): SkyPoint[][] {
+  const strips: SkyPoint[][] = [];
+  for (let i = 1; i < points.length; i++) {
+    const path = pathBetween(points[i - 1], points[i], straight);
+    for (let k = 1; k < path.length; k++) {
+      const strip = stripAround(path[k - 1], path[k], width);
+      if (strip) strips.push(strip);
+    }
+  }
+  return strips;
+}
+
+function pathBetween(start: SkyPoint, end: SkyPoint, straight: boolean): Vector[] {
+  const [a, b] = [vector(start), vector(end)];
+  const angle = Math.atan2(length(cross(a, b)), dot(a, b));
+  const turn = turnBetween(start.azimuth, end.azimuth);
+  const reach = straight
+    ? angle * DEGREES
+    : Math.max(Math.abs(turn), Math.abs(end.elevation - start.elevation));
+  const pieces = Math.max(1, Math.ceil(reach / LONGEST_STRIP));
+  return Array.from({ length: pieces + 1 }, (_, k) => {
+    const share = k / pieces;
+    if (!straight)
+      return vector({
+        azimuth: start.azimuth + share * turn,
+        elevation: start.elevation + share * (end.elevation - start.elevation),
+      });
+    const [u, v] = [Math.sin((1 - share) * angle), Math.sin(share * angle)];
+    return unit([a[0] * u + b[0] * v, a[1] * u + b[1] * v, a[2] * u + b[2] * v]);
+  });
+}
+
+/** Null where both ends are the same direction. */
+function stripAround(a: Vector, b: Vector, width: number): SkyPoint[] | null {
+  const normal = cross(a, b);
+  if (length(normal) < 1e-12) return null;
+  const n = unit(normal);
+  const aside = (p: Vector, side: number): SkyPoint => {
+    const s = Math.sin((side * width * RADIANS) / 2);
+    const c = Math.cos((width * RADIANS) / 2);
+    return point([p[0] * c + n[0] * s, p[1] * c + n[1] * s, p[2] * c + n[2] * s]);
+  };
+  return [aside(a, 1), aside(b, 1), aside(b, -1), aside(a, -1)];
+}
+
+function vector({ azimuth, elevation }: SkyPoint): Vector {
+  const [a, e] = [azimuth * RADIANS, elevation * RADIANS];
+  return [Math.sin(a) * Math.cos(e), Math.cos(a) * Math.cos(e), Math.sin(e)];
+}
+
+const point = ([east, north, up]: Vector): SkyPoint => ({
+  azimuth: (Math.atan2(east, north) * DEGREES + 360) % 360,
+  elevation: safeAsin(up) * DEGREES,
+});
+
+const dot = (a: Vector, b: Vector) => a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
+const cross = (a: Vector, b: Vector): Vector => [
+  a[1] * b[2] - a[2] * b[1],
+  a[2] * b[0] - a[0] * b[2],
+  a[0] * b[1] - a[1] * b[0],
+];
+const length = (a: Vector) => Math.sqrt(dot(a, a));
+const unit = (a: Vector): Vector => {
+  const size = length(a);
+  return [a[0] / size, a[1] / size, a[2] / size];
+};

@@ -1,0 +1,64 @@
+import { turnBetween } from '../angles/angles.ts';
+import { monthlyTransmittance, traceEdge } from '../survey/obstruction-kinds.ts';
+import { ordered } from '../survey/order.ts';
+import { sightingDirection } from '../survey/sighting-direction.ts';
+import type { Station, Survey, Trace } from '../survey/survey.ts';
+import type { SkyPoint } from './horizon-edge.ts';
+import type { HorizonProfile } from './horizon-profile.ts';
+import { horizonProfile } from './horizon-profile.ts';
+import type { SettledTrace, TracedObstruction } from './traced-obstruction.ts';
+
+/** What one station saw: the profile around it, and the azimuth ranges that somebody looked at. */
+export interface StationHorizon {
+  profile: HorizonProfile;
+  observed: [number, number][];
+}
+
+/**
+ * The horizon of a station of a survey that the parser has passed. Sightings that have no direction yet (a raw reading
+ * alone) are left out; `undirectedSightings` names them.
+ */
+export function stationHorizon(survey: Survey, station: Station): StationHorizon {
+  const obstructions = tracedObstructions(survey, station);
+  const spans = obstructions.flatMap(({ traces }) => traces.map(traceSpan));
+  return { profile: horizonProfile(obstructions), observed: [...spans, ...(station.observedOpen ?? [])] };
+}
+
+/** What a station traced, by obstruction, in the order of the survey's obstructions. */
+export function tracedObstructions(survey: Survey, station: Station): TracedObstruction[] {
+  return ordered(survey.obstructions).flatMap((obstruction) => {
+    const traces = ordered(station.traces)
+      .filter((trace) => trace.obstruction === obstruction.id)
+      .map((trace) => settledTrace(trace, traceEdge(trace, obstruction) === 'straight'))
+      .filter(({ shape, points }) => points.length >= (shape === 'outline' ? 3 : 2));
+    const transmittance = monthlyTransmittance(obstruction, survey.site.latitude);
+    return traces.length > 0 ? [{ id: obstruction.id, transmittance, traces }] : [];
+  });
+}
+
+function settledTrace(trace: Trace, straight: boolean): SettledTrace {
+  const points: SkyPoint[] = ordered(trace.sightings).flatMap(
+    (sighting) => sightingDirection(sighting) ?? [],
+  );
+  const { shape, fullCircle = false, angularWidth = 0 } = trace;
+  return { shape, straight, fullCircle, angularWidth, points };
+}
+
+/** Indexes of the sightings of a trace that have a raw reading but no direction. */
+export const undirectedSightings = (trace: Trace): number[] =>
+  trace.sightings.flatMap((sighting, index) => (sightingDirection(sighting) ? [] : [index]));
+
+/** The azimuths a trace goes over, clockwise. */
+function traceSpan({ points, fullCircle }: SettledTrace): [number, number] {
+  if (fullCircle) return [0, 360];
+  let [turned, left, right] = [0, 0, 0];
+  for (let i = 1; i < points.length; i++) {
+    turned += turnBetween(points[i - 1].azimuth, points[i].azimuth);
+    left = Math.min(left, turned);
+    right = Math.max(right, turned);
+  }
+  if (right - left >= 360) return [0, 360];
+  const wrap = (azimuth: number) => ((azimuth % 360) + 360) % 360;
+  const start = points[0].azimuth;
+  return [wrap(start + left), wrap(start + right)];
+}

@@ -1,0 +1,44 @@
+import { blockedSpans } from '../horizon/blocked-spans.ts';
+import type { StationHorizon } from '../horizon/station-horizon.ts';
+import type { MonthlyShares, StationAssessment } from './assessment.ts';
+import { blockedLight, shadedMonths } from './blocked-light.ts';
+import { coverage } from './coverage.ts';
+import { hourlyAccess } from './hourly-access.ts';
+import { obstructionCosts } from './obstruction-shading.ts';
+import type { SkyMap } from './sky-map.ts';
+import { unshadedMonths } from './sky-map.ts';
+
+/** Less light in a month than this is a month without sun, kWh/m2. */
+const DARK_MONTH = 1e-4;
+
+/** Shares of two rows of twelve months; null where the month is dark. */
+export const monthlyShares = (light: readonly number[], whole: readonly number[]): MonthlyShares =>
+  whole.map((all, month) => (all > DARK_MONTH ? Math.min(1, light[month] / all) : null));
+
+/** What one station saw costs one plane. */
+export function assessStation(
+  map: SkyMap,
+  { profile, observed }: StationHorizon,
+  station: { id: string; name: string },
+  names: ReadonlyMap<string, string>,
+): StationAssessment {
+  const spans = blockedSpans(profile);
+  const blocked = blockedLight(map, spans);
+  const whole = unshadedMonths(map);
+  const light = shadedMonths(map, blocked);
+  const [annual, annualWhole] = [sum(light), sum(whole)];
+  return {
+    id: station.id,
+    name: station.name,
+    solarAccess: {
+      annual: annualWhole > 0 ? Math.min(1, annual / annualWhole) : 1,
+      monthly: monthlyShares(light, whole),
+      hourly: hourlyAccess(map, spans, blocked),
+    },
+    coverage: coverage(map, observed),
+    irradiation: { annual, monthly: light },
+    ...obstructionCosts(map, profile, names),
+  };
+}
+
+const sum = (values: readonly number[]) => values.reduce((total, value) => total + value, 0);

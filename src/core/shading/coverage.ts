@@ -1,0 +1,64 @@
+import { RADIANS } from '../angles/angles.ts';
+import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
+import { viewBetween } from '../horizon/sky-view.ts';
+import { directFrom } from './blocked-light.ts';
+import type { SkyMap } from './sky-map.ts';
+
+/** A range of azimuth, degrees, clockwise from `from` to `to`, over north where `to` is below `from`. */
+export type AzimuthRange = readonly [from: number, to: number];
+
+/**
+ * Share of a plane's unshaded sky light (direct light and dome) that comes through azimuths somebody observed, 0 to 1.
+ * Sky behind the plane sends it nothing and so is not missed.
+ */
+export function coverage(map: SkyMap, observed: readonly AzimuthRange[]): number {
+  const seen = observedShares(observed);
+  const dome = map.dome.reduce((sum, light) => sum + light, 0);
+  let [whole, covered] = [0, 0];
+  const views = Array.from({ length: COLUMNS }, (_, column) => columnView(map, column));
+  const wholeView = views.reduce((sum, view) => sum + view, 0);
+  for (let column = 0; column < COLUMNS; column++) {
+    let light = (dome * views[column]) / wholeView;
+    for (let month = 0; month < 12; month++) light += directFrom(map, month, column, 0, 91);
+    whole += light;
+    covered += light * seen[column];
+  }
+  return whole > 0 ? covered / whole : 1;
+}
+
+function columnView(map: SkyMap, column: number): number {
+  const azimuth = (column + 0.5) * COLUMN_WIDTH * RADIANS;
+  const toward = map.facing.north * Math.cos(azimuth) + map.facing.east * Math.sin(azimuth);
+  return viewBetween(toward, map.facing.upward, 0, Math.PI / 2);
+}
+
+/** Share of each column that the ranges cover together. */
+export function observedShares(observed: readonly AzimuthRange[]): Float64Array {
+  const shares = new Float64Array(COLUMNS);
+  for (const [from, to] of united(observed))
+    for (let column = Math.floor(from / COLUMN_WIDTH); column * COLUMN_WIDTH < to; column++) {
+      const start = Math.max(from, column * COLUMN_WIDTH);
+      const end = Math.min(to, (column + 1) * COLUMN_WIDTH);
+      shares[column] += (end - start) / COLUMN_WIDTH;
+    }
+  return shares;
+}
+
+/** Ranges cut at north and joined where they touch, in order. */
+function united(observed: readonly AzimuthRange[]): [number, number][] {
+  const cut = observed.flatMap(([from, to]): [number, number][] =>
+    from <= to
+      ? [[from, to]]
+      : [
+          [from, 360],
+          [0, to],
+        ],
+  );
+  const joined: [number, number][] = [];
+  for (const [from, to] of cut.sort((a, b) => a[0] - b[0])) {
+    const last = joined[joined.length - 1];
+    if (last && from <= last[1]) last[1] = Math.max(last[1], to);
+    else joined.push([from, to]);
+  }
+  return joined;
+}

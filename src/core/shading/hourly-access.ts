@@ -1,0 +1,76 @@
+import type { BlockedSpans } from '../horizon/blocked-spans.ts';
+import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
+import { dayOf } from '../solar-position/sun-track.ts';
+import { domeView, groundView } from '../transposition/plane-irradiance.ts';
+import type { BlockedLight } from './blocked-light.ts';
+import type { SkyMap } from './sky-map.ts';
+import { cosIncidenceOf } from './sky-map.ts';
+
+/** An hour of a month with less light than this has no access to speak of, kWh/m2. */
+const DARK = 1e-6;
+
+/**
+ * Solar access by month and hour of local standard time, [month][hour]; null where there is no light in that hour. A map by
+ * month has no hours, so the direct light is taken from the pieces of the sun's path again.
+ */
+export function hourlyAccess(map: SkyMap, spans: BlockedSpans, blocked: BlockedLight): (number | null)[][] {
+  const direct = directByHour(map, spans);
+  const sine = Math.sqrt(1 - map.facing.upward ** 2);
+  const { dome, brightBand, darkBand, ghi, albedo } = map.year;
+  const view = domeView(map.surfaceTilt);
+  const groundShare = albedo * groundView(map.surfaceTilt);
+  return Array.from({ length: 12 }, (_, month) =>
+    Array.from({ length: 24 }, (_, hour) => {
+      const cell = month * 24 + hour;
+      const even = dome[cell] * view + darkBand[cell] * sine;
+      const band = brightBand[cell] * sine;
+      const whole = direct.whole[cell] + even + band + ghi[cell] * groundShare;
+      if (whole < DARK) return null;
+      const lost = direct.lost[cell] + even * blocked.domeShare[month] + band * blocked.bandShare[month];
+      return Math.max(0, 1 - lost / whole);
+    }),
+  );
+}
+
+/** Direct light, and what of it the spans take, [month · 24 + hour], kWh/m2. */
+function directByHour(map: SkyMap, spans: BlockedSpans) {
+  const { year } = map;
+  const { track, step, pieceFirst, pieceStrip, pieceLow, pieceHigh, pieceShare } = year.paths;
+  const whole = new Float64Array(12 * 24);
+  const lost = new Float64Array(12 * 24);
+  const stepsPerHour = 60 / track.stepMinutes;
+  for (let k = 0; k < step.length; k++) {
+    const i = step[k];
+    if (year.direct[i] <= 0) continue;
+    const light = year.direct[i] * cosIncidenceOf(year, map.facing, i);
+    if (light <= 0) continue;
+    const month = track.monthOfDay[dayOf(track, i)];
+    const cell = month * 24 + (((i % track.stepsPerDay) / stepsPerHour) | 0);
+    for (let piece = pieceFirst[k]; piece < pieceFirst[k + 1]; piece++) {
+      const energy = light * pieceShare[piece];
+      whole[cell] += energy;
+      const column = pieceStrip[piece] - month * COLUMNS;
+      const share = lostShare(spans, column, pieceLow[piece], pieceHigh[piece], month);
+      if (share > 0) lost[cell] += energy * share;
+    }
+  }
+  return { whole, lost };
+}
+
+/** Share lost of light spread evenly over a column and between two elevations. */
+function lostShare(spans: BlockedSpans, column: number, bottom: number, top: number, month: number): number {
+  const { columnFirst, sliceFrom, sliceTo } = spans.profile;
+  const height = top - bottom;
+  let sum = 0;
+  for (let slice = columnFirst[column]; slice < columnFirst[column + 1]; slice++) {
+    const width = sliceTo[slice] - sliceFrom[slice];
+    for (let k = spans.first[slice]; k < spans.first[slice + 1]; k++) {
+      const low = Math.max(bottom, spans.low[k]);
+      const high = Math.min(top, spans.high[k]);
+      if (high < low || spans.high[k] === bottom) continue;
+      const share = height > 0 ? (high - low) / height : 1;
+      sum += width * share * spans.lost[spans.row[k] * 12 + month];
+    }
+  }
+  return sum / COLUMN_WIDTH;
+}

@@ -1,0 +1,84 @@
+import { blockedSpans } from '../horizon/blocked-spans.ts';
+import type { HorizonProfile } from '../horizon/horizon-profile.ts';
+import type { ObstructionGroup, ObstructionShading } from './assessment.ts';
+import { blockedLight, shadedMonths } from './blocked-light.ts';
+import type { SkyMap } from './sky-map.ts';
+import { unshadedMonths } from './sky-map.ts';
+
+/** Two obstructions hide each other where removing both gives this much more access than removing each. */
+const LEAST_SHARED_GAIN = 0.001;
+/** Pairs are compared among this many obstructions, those that would cost most alone. */
+const MOST_COMPARED = 40;
+
+/** Light behind the obstructions that stand, kWh/m2 by month; the sum is the year. */
+type LightBehind = (standing: readonly boolean[]) => number[];
+
+export interface ObstructionCosts {
+  obstructions: ObstructionShading[];
+  groups: ObstructionGroup[];
+}
+
+/** What each obstruction of a station costs a plane, most gain first, and which of them hide each other. */
+export function obstructionCosts(
+  map: SkyMap,
+  profile: HorizonProfile,
+  names: ReadonlyMap<string, string>,
+): ObstructionCosts {
+  const count = profile.obstructionIds.length;
+  const whole = unshadedMonths(map);
+  const lightBehind: LightBehind = (standing) =>
+    shadedMonths(map, blockedLight(map, blockedSpans(profile, standing)));
+  const all = lightBehind(Array<boolean>(count).fill(true));
+  const without = (gone: readonly number[]) =>
+    lightBehind(Array.from({ length: count }, (_, i) => !gone.includes(i)));
+  const gain = (light: readonly number[]) => (sum(light) - sum(all)) / sum(whole);
+  const rows = profile.obstructionIds.map((id, i) => {
+    const cleared = without([i]);
+    const alone = lightBehind(Array.from({ length: count }, (_, other) => other === i));
+    return {
+      id,
+      name: names.get(id) ?? id,
+      gainIfRemoved: notBelowZero(gain(cleared)),
+      lossIfAlone: notBelowZero(1 - sum(alone) / sum(whole)),
+      monthly: whole.map((light, m): number | null =>
+        light > 0 ? notBelowZero((cleared[m] - all[m]) / light) : null,
+      ,
+    };
+  });
+  const groups = hiddenBehindEachOther(rows, (gone) => gain(without(gone)));
+  return { obstructions: [...rows].sort((a, b) => b.gainIfRemoved - a.gainIfRemoved), groups };
+}
+
+/** Joins obstructions whose pairs give more together than singly; `gainOf` takes indexes. */
+function hiddenBehindEachOther(
+  rows: readonly ObstructionShading[],
+  gainOf: (gone: readonly number[]) => number,
+): ObstructionGroup[] {
+  const compared = rows
+    .map((_, i) => i)
+    .filter((i) => rows[i].lossIfAlone - rows[i].gainIfRemoved > LEAST_SHARED_GAIN)
+    .sort((a, b) => rows[b].lossIfAlone - rows[a].lossIfAlone)
+    .slice(0, MOST_COMPARED);
+  const groupOf = rows.map((_, i) => i);
+  for (const [place, i] of compared.entries())
+    for (const j of compared.slice(place + 1)) {
+      if (groupOf[i] === groupOf[j]) continue;
+      const shared = gainOf([i, j]) - rows[i].gainIfRemoved - rows[j].gainIfRemoved;
+      if (shared <= LEAST_SHARED_GAIN) continue;
+      const [kept, joined] = [groupOf[i], groupOf[j]];
+      groupOf.forEach((group, k) => group === joined && (groupOf[k] = kept));
+    }
+  return [...new Set(groupOf)]
+    .map((group) => rows.map((_, i) => i).filter((i) => groupOf[i] === group))
+    .filter((members) => members.length > 1)
+    .map((members) => ({
+      obstructions: members.map((i) => rows[i].id),
+      gainIfAllRemoved: notBelowZero(gainOf(members)),
+      sumOfSingleGains: sum(members.map((i) => rows[i].gainIfRemoved)),
+    }))
+    .sort((a, b) => b.gainIfAllRemoved - a.gainIfAllRemoved);
+}
+
+const sum = (values: readonly number[]) => values.reduce((total, value) => total + value, 0);
+/** Rounding may leave -1e-17. */
+const notBelowZero = (share: number) => (share > 0 ? share : 0);
