@@ -42,7 +42,7 @@ export function obstructionCosts(
       lossIfAlone: notBelowZero(1 - sum(alone) / sum(whole)),
       monthly: whole.map((light, m): number | null =>
         light > 0 ? notBelowZero((cleared[m] - all[m]) / light) : null,
-      ,
+      ),
     };
   });
   const groups = hiddenBehindEachOther(rows, (gone) => gain(without(gone)));
