@@ -1,0 +1,29 @@
+import type { Parsed } from '../core/survey/problem.ts';
+import type { Survey } from '../core/survey/survey.ts';
+import type { AppState } from './app-state.ts';
+import type { SurveyStore } from './survey-store.ts';
+import type { WeatherStore } from './weather-store.ts';
+
+/** A sample survey that ships with the app. */
+export interface SampleSurvey {
+  name: string;
+  title: string;
+  /** Text of the survey file. */
+  text: () => Promise<string>;
+}
+
+/** All that actions and screens work with; made once, by main. */
+export interface AppServices {
+  state: AppState;
+  store: SurveyStore;
+  weather: WeatherStore;
+  samples: SampleSurvey[];
+  parse: (text: string) => Promise<Parsed<Survey>>;
+  newId: () => string;
+  /** Milliseconds since 1970. */
+  now: () => number;
+  /** Asks the browser to keep what is stored; a refusal is normal. */
+  keepStorage: () => Promise<void>;
+  /** Takes the waiting version of the app into use and reloads. */
+  useNewVersion: () => void;
+}

@@ -1,0 +1,76 @@
+import { signal, type Signal } from '@preact/signals-core';
+import type { Problem } from '../core/survey/problem.ts';
+import type { Survey } from '../core/survey/survey.ts';
+import type { AppErrorCode } from './app-error.ts';
+import type { StoredSurvey, SurveySummary } from './survey-store.ts';
+
+/** What the last act was, so that it can be told and taken back. */
+export interface Notice {
+  code:
+    | 'survey-deleted'
+    | 'survey-renamed'
+    | 'survey-duplicated'
+    | 'survey-replaced'
+    | 'survey-changed'
+    | 'survey-restored';
+  title: string;
+  undo?: () => Promise<void>;
+}
+
+/** What came of one picked file. */
+export type ImportResult =
+  | { file: string; outcome: 'stored'; id: string; title: string; warnings: Problem[] }
+  | { file: string; outcome: 'refused'; problems: Problem[] }
+  | { file: string; outcome: 'failed'; code: AppErrorCode }
+  | { file: string; outcome: 'left-out'; title: string };
+
+/** A good file whose id is on this device already; a person decides. */
+export interface ImportConflict {
+  file: string;
+  survey: Survey;
+  warnings: Problem[];
+  storedTitle: string;
+  storedIsDeleted: boolean;
+}
+
+/** `elsewhere`: another tab took the new version into use; this one still runs the old one. */
+export type UpdateState = 'none' | 'ready' | 'changing' | 'elsewhere';
+
+export interface Trouble {
+  code: AppErrorCode;
+  /** What the browser said, for a report. */
+  detail?: string;
+}
+
+/** All that screens show. Actions write it, screens read it. */
+export interface AppState {
+  /** Null until first read. */
+  surveys: Signal<SurveySummary[] | null>;
+  /** The survey on screen; null while it is read; `missing` where the id is not on this device. */
+  open: Signal<{ id: string; stored: StoredSurvey | 'missing' | null } | null>;
+  notice: Signal<Notice | null>;
+  imports: Signal<ImportResult[]>;
+  conflicts: Signal<ImportConflict[]>;
+  /** Ids of surveys found unreadable, with why. */
+  unreadable: Signal<ReadonlyMap<string, Problem[]>>;
+  trouble: Signal<Trouble | null>;
+  /** Where the database stands, when it is not simply open. */
+  database: Signal<'storage-waiting' | 'storage-taken-over' | null>;
+  update: Signal<UpdateState>;
+  busy: Signal<boolean>;
+}
+
+export function appState(): AppState {
+  return {
+    surveys: signal(null),
+    open: signal(null),
+    notice: signal(null),
+    imports: signal([]),
+    conflicts: signal([]),
+    unreadable: signal(new Map()),
+    trouble: signal(null),
+    database: signal(null),
+    update: signal('none'),
+    busy: signal(false),
+  };
+}

@@ -1,0 +1,83 @@
+import { render } from 'preact';
+import { appState } from './app/app-state.ts';
+import type { AppServices, SampleSurvey } from './app/app-services.ts';
+import { offerUpdates } from './app/update-flow.ts';
+import { Connection } from './storage/connection.ts';
+import { surveyDatabase } from './storage/survey-database.ts';
+import { weatherDatabase } from './storage/weather-database.ts';
+import { App } from './ui/app.tsx';
+import { startInstallOffer } from './ui/device/install-offer.ts';
+import { startPaper } from './ui/device/paper-choice.ts';
+import { startRouter } from './ui/router.ts';
+
+// WARNING: what is imported here by name is part of the first screen. Parsers, screens and workers are not.
+const parser = () => import('./core/survey/parse-survey.ts');
+const newId = () => crypto.randomUUID();
+const now = () => Date.now();
+
+const titles = import.meta.glob<string>('../survey-samples/*.json', { eager: true, import: 'title' });
+const texts = import.meta.glob<string>('../survey-samples/*.json', { query: '?raw', import: 'default' });
+const samples: SampleSurvey[] = Object.entries(titles).map(([name, title]) => ({
+  name,
+  title,
+  text: texts[name],
+}));
+
+/** Once a survey is stored there is something to lose; the browser answers by its own rules, without asking. */
+async function keepStorage(): Promise<void> {
+  try {
+    await navigator.storage.persist();
+  } catch {
+    // Not offered here; the list says what that means.
+  }
+}
+
+const state = appState();
+const connection = new Connection((report) => (state.database.value = report));
+const services: AppServices = {
+  state,
+  store: surveyDatabase({
+    connection,
+    check: async (document) => (await parser()).surveyFromJson(document),
+    now,
+    newId,
+  }),
+  weather: weatherDatabase(connection, now),
+  samples,
+  parse: async (text) => (await parser()).parseSurvey(text),
+  newId,
+  now,
+  keepStorage,
+  useNewVersion: () => undefined,
+};
+
+async function startServiceWorker(): Promise<void> {
+  if (!import.meta.env.PROD || !('serviceWorker' in navigator)) return;
+  const wasControlled = navigator.serviceWorker.controller !== null;
+  const { Workbox } = await import('workbox-window');
+  const workbox = new Workbox('/service-worker.js', { scope: '/', type: 'classic' });
+  services.useNewVersion = offerUpdates(
+    state,
+    {
+      onWaiting: (listener) => workbox.addEventListener('waiting', listener),
+      onControlling: (listener) => workbox.addEventListener('controlling', listener),
+      takeOver: () => workbox.messageSkipWaiting(),
+    },
+    {
+      wasControlled,
+      reload: () => location.reload(),
+      after: (timeMs, act) => setTimeout(act, timeMs),
+    },
+  );
+  await workbox.register();
+  // A phone keeps an installed app open for days: look again whenever it comes back into view.
+  document.addEventListener('visibilitychange', () => {
+    if (document.visibilityState === 'visible') void workbox.update().catch(() => undefined);
+  });
+}
+
+startPaper();
+startRouter();
+startInstallOffer();
+render(<App services={services} />, document.getElementById('app')!);
+void startServiceWorker().catch(() => undefined);

@@ -1,0 +1,104 @@
+import { AppError } from '../app/app-error.ts';
+import type { StoredSurvey, SurveyStore, SurveySummary } from '../app/survey-store.ts';
+import { fieldsOf, type FieldChange } from '../core/survey/field-changes.ts';
+import type { Parsed } from '../core/survey/problem.ts';
+import type { Survey } from '../core/survey/survey.ts';
+import type { Connection } from './connection.ts';
+import { stampOfAct } from './device-stamps.ts';
+import type { SurveyRow } from './schema.ts';
+import { keysOf, storedDocument, summaryOf } from './survey-rows.ts';
+import { reading, writing, type Writing } from './transaction.ts';
+import { writeChanges } from './write-changes.ts';
+
+export interface SurveyDatabaseNeeds {
+  connection: Connection;
+  /** Reads a stored document as a survey of this version. */
+  check: (document: unknown) => Promise<Parsed<Survey>>;
+  /** Milliseconds since 1970. */
+  now: () => number;
+  newId: () => string;
+}
+
+async function rowOf(transaction: Writing, id: string): Promise<SurveyRow> {
+  const row = await transaction.objectStore('surveys').get(id);
+  if (!row) throw new AppError('survey-missing', id);
+  return row;
+}
+
+/** The line of the list in a row: all but what is kept for merging. */
+function lineOf(row: SurveyRow): SurveySummary {
+  const summary: SurveySummary & Partial<SurveyRow> = { ...row };
+  delete summary.deletionStamp;
+  return summary;
+}
+
+/** Surveys in the database: stamped fields and reading rows, of which the document is the projection. */
+export function surveyDatabase({ connection, check, now, newId }: SurveyDatabaseNeeds): SurveyStore {
+  const act = <T>(work: (transaction: Writing) => Promise<T>) =>
+    connection.run((database) => writing(database, work));
+
+  /** Writes the changes and, from all fields as they then are, the line of the list. */
+  async function change(transaction: Writing, id: string, changes: FieldChange[], row: Partial<SurveyRow>) {
+    const stamp = await stampOfAct(transaction, now(), newId);
+    await writeChanges(transaction, id, changes, stamp);
+    const { deletedAt = null, deletionStamp = null } = row;
+    const summary = summaryOf(id, await storedDocument(transaction, id), { changedAt: now(), deletedAt });
+    await transaction.objectStore('surveys').put({ ...summary, deletionStamp });
+  }
+
+  const markDeleted = (id: string, deletedAt: number | null) =>
+    act(async (transaction) => {
+      const row = await rowOf(transaction, id);
+      const deletionStamp = await stampOfAct(transaction, now(), newId);
+      await transaction.objectStore('surveys').put({ ...row, deletedAt, deletionStamp });
+    });
+
+  return {
+    list: async () => {
+      const rows = await connection.run((database) => database.getAll('surveys'));
+      return rows.map(lineOf).sort((a, b) => b.changedAt - a.changedAt || (a.id < b.id ? -1 : 1));
+    },
+
+    load: async (id): Promise<StoredSurvey | null> => {
+      const found = await connection.run(async (database) => {
+        const transaction = reading(database);
+        const row = await transaction.objectStore('surveys').get(id);
+        return row ? { row, document: await storedDocument(transaction, id) } : null;
+      });
+      if (!found) return null;
+      const { document } = found;
+      const { deletedAt } = found.row;
+      const parsed = await check(document);
+      return parsed.ok
+        ? { id, deletedAt, state: 'readable', survey: parsed.value, warnings: parsed.warnings }
+        : { id, deletedAt, state: 'unreadable', document, problems: parsed.problems };
+    },
+
+    create: (survey) =>
+      act(async (transaction) => {
+        const { id } = survey;
+        if (await transaction.objectStore('surveys').get(id)) throw new AppError('survey-exists', id);
+        await transaction.objectStore('erased').delete(id);
+        await change(transaction, id, fieldsOf(survey), {});
+      }),
+
+    applyChanges: (id, changes) =>
+      act(async (transaction) => change(transaction, id, changes, await rowOf(transaction, id))),
+
+    remove: (id) => markDeleted(id, now()),
+
+    restore: (id) => markDeleted(id, null),
+
+    erase: (id) =>
+      act(async (transaction) => {
+        await rowOf(transaction, id);
+        const stamp = await stampOfAct(transaction, now(), newId);
+        await Promise.all([
+          transaction.objectStore('fields').delete(keysOf(id)),
+          transaction.objectStore('readings').delete(keysOf(id)),
+          transaction.objectStore('surveys').delete(id),
+          transaction.objectStore('erased').put({ id, stamp }),
+        ]);
+      }),
+  };
+}

@@ -1,0 +1,19 @@
+import { useEffect, useRef } from 'preact/hooks';
+import type { ComponentChildren } from 'preact';
+import { takeArrival } from '../router.ts';
+
+/** The heading of a screen; takes the focus when somebody has just come here, so that a screen reader starts here. */
+export function ScreenHeading({ title, children }: { title: string; children?: ComponentChildren }) {
+  const heading = useRef<HTMLHeadingElement>(null);
+  useEffect(() => {
+    document.title = title === 'Noonmark' ? title : `${title} · Noonmark`;
+  }, [title]);
+  useEffect(() => {
+    if (takeArrival()) heading.current?.focus();
+  }, []);
+  return (
+    <h1 ref={heading} tabIndex={-1}>
+      {children ?? title}
+    </h1>
+  );
+}

@@ -1,0 +1,36 @@
+import type { PlainScreen, SurveySection } from './section.ts';
+
+export const SURVEY_SECTIONS: SurveySection[] = [
+  {
+    path: '',
+    label: 'Site and roof',
+    load: async () => (await import('./screens/survey/site-and-roof.tsx')).SiteAndRoof,
+  },
+];
+
+export const PLAIN_SCREENS: PlainScreen[] = [];
+
+export type Place =
+  | { screen: 'list' }
+  | { screen: 'survey'; id: string; section: SurveySection }
+  | { screen: 'plain'; plain: PlainScreen }
+  | { screen: 'nowhere' };
+
+function decoded(part: string): string | null {
+  try {
+    return decodeURIComponent(part);
+  } catch {
+    return null;
+  }
+}
+
+/** The place an address names. */
+export function placeOf(pathname: string): Place {
+  if (pathname === '/' || pathname === '/index.html') return { screen: 'list' };
+  const plain = PLAIN_SCREENS.find(({ path }) => path === pathname);
+  if (plain) return { screen: 'plain', plain };
+  const [, encodedId, sectionPath = ''] = /^\/survey\/([^/]+)(?:\/([^/]*))?$/.exec(pathname) ?? [];
+  const id = encodedId === undefined ? null : decoded(encodedId);
+  const section = SURVEY_SECTIONS.find(({ path }) => path === sectionPath);
+  return id !== null && section ? { screen: 'survey', id, section } : { screen: 'nowhere' };
+}

@@ -1,0 +1,45 @@
+import { useRef } from 'preact/hooks';
+import { attempt } from '../../../app/attempt.ts';
+import { importSurveys, type PickedFile } from '../../../app/actions/import-surveys.ts';
+import { useApp } from '../../app-context.ts';
+import { ConflictDialog } from './conflict-dialog.tsx';
+import { ImportResults } from './import-results.tsx';
+import { useFileDrop } from './use-file-drop.ts';
+
+/** Import by the file picker, or by dropping files anywhere on the page. */
+export function ImportFiles() {
+  const services = useApp();
+  const { state } = services;
+  const input = useRef<HTMLInputElement>(null);
+  const take = (files: readonly PickedFile[]) => {
+    if (files.length > 0) void attempt(state, () => importSurveys(services, files));
+  };
+  const dropping = useFileDrop(take);
+  const conflict = state.conflicts.value[0];
+  const busy = state.busy.value;
+  return (
+    <section class="stack" aria-label="Import">
+      <div>
+        <input
+          ref={input}
+          type="file"
+          id="survey-files"
+          accept=".json,application/json"
+          multiple
+          hidden
+          onChange={({ currentTarget }) => {
+            take([...(currentTarget.files ?? [])]);
+            // So that picking the same file again is a change too.
+            currentTarget.value = '';
+          }}
+        />
+        <button type="button" class="main" disabled={busy} onClick={() => input.current?.click()}>
+          {busy ? 'Reading…' : 'Import survey files'}
+        </button>
+      </div>
+      {dropping && <div class="drop-here">Drop survey files here to import them</div>}
+      <ImportResults />
+      {conflict && <ConflictDialog key={conflict.file} conflict={conflict} />}
+    </section>
+  );
+}

@@ -1,0 +1,51 @@
+import { useEffect, useState } from 'preact/hooks';
+import { useApp } from '../../app-context.ts';
+import { installOffer, isInstalled } from '../../device/install-offer.ts';
+import { storageSpace, type StorageSpace } from '../../device/storage-space.ts';
+import { sizeText } from '../../messages.ts';
+
+function spaceText({ used, most, kept }: StorageSpace): string {
+  const room = most === null ? sizeText(used) : `${sizeText(used)} of ${sizeText(most)}`;
+  return `Space used: ${room}. ${
+    kept
+      ? 'The browser keeps it until you erase it.'
+      : 'The browser may clear it when the device runs short of room: export what matters.'
+  }`;
+}
+
+function InstallAdvice() {
+  if (isInstalled()) return null;
+  const offer = installOffer.value;
+  return (
+    <div class="stack">
+      <p class="small">
+        Install Noonmark on the home screen before you survey: it then opens without a signal and its surveys
+        are kept longer. {offer === null && 'Use “Install” or “Add to Home Screen” in the browser’s menu.'}{' '}
+        Surveys made in a browser tab may not move along; export them first.
+      </p>
+      {offer && (
+        <div>
+          <button type="button" onClick={() => void offer.prompt()}>
+            Install
+          </button>
+        </div>
+      )}
+    </div>
+  );
+}
+
+/** How much room is used, whether the browser keeps it, and how to make it stay. */
+export function StorageLine() {
+  const { state } = useApp();
+  const [space, setSpace] = useState<StorageSpace | null>(null);
+  const surveys = state.surveys.value;
+  useEffect(() => {
+    void storageSpace().then(setSpace);
+  }, [surveys]);
+  return (
+    <section class="stack" aria-label="Storage on this device">
+      {space && <p class="small">{spaceText(space)}</p>}
+      <InstallAdvice />
+    </section>
+  );
+}

@@ -1,0 +1,60 @@
+import { useEffect } from 'preact/hooks';
+import { attempt } from '../../../app/attempt.ts';
+import { findUnreadable } from '../../../app/actions/find-unreadable.ts';
+import { refreshList } from '../../../app/actions/refresh-list.ts';
+import { useApp } from '../../app-context.ts';
+import { ScreenHeading } from '../../components/screen-heading.tsx';
+import { PLAIN_SCREENS } from '../../routes.ts';
+import { DeletedSurveys } from './deleted-surveys.tsx';
+import { ImportFiles } from './import-files.tsx';
+import { SampleList } from './sample-list.tsx';
+import { StorageLine } from './storage-line.tsx';
+import { SurveyRow } from './survey-row.tsx';
+import './survey-list.css';
+
+function OtherScreens() {
+  return (
+    <p class="row">
+      {PLAIN_SCREENS.map(({ path, label }) => (
+        <a key={path} class="button" href={path}>
+          {label}
+        </a>
+      ))}
+    </p>
+  );
+}
+
+/** The surveys on this device, and what can be done with each. */
+export function SurveyListScreen() {
+  const services = useApp();
+  const { state } = services;
+  useEffect(() => {
+    void attempt(state, async () => {
+      await refreshList(services);
+      await findUnreadable(services);
+    });
+  }, [services, state]);
+  const surveys = state.surveys.value;
+  const present = surveys?.filter(({ deletedAt }) => deletedAt === null) ?? [];
+  const deleted = surveys?.filter(({ deletedAt }) => deletedAt !== null) ?? [];
+  return (
+    <div class="stack survey-list">
+      <ScreenHeading title="Surveys" />
+      {surveys !== null && present.length === 0 && (
+        <p>No surveys on this device yet. Open a sample to see what one holds, or import a survey file.</p>
+      )}
+      {present.length > 0 && (
+        <ul class="ledger">
+          {present.map((summary) => (
+            <SurveyRow key={summary.id} summary={summary} />
+          ))}
+        </ul>
+      )}
+      <ImportFiles />
+      <SampleList open={surveys !== null && present.length === 0} />
+      {deleted.length > 0 && <DeletedSurveys surveys={deleted} />}
+      <StorageLine />
+      <OtherScreens />
+    </div>
+  );
+}

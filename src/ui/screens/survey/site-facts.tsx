@@ -1,0 +1,41 @@
+import type { ClimateChoice, Survey } from '../../../core/survey/survey.ts';
+import { placeText } from './number-text.ts';
+
+function climateText(climate: ClimateChoice): string {
+  switch (climate.source) {
+    case 'world':
+      return 'World climate, 2° grid';
+    case 'weather-file':
+      return `Weather file ${climate.name}`;
+    case 'clear-sky':
+      return 'Clear sky';
+  }
+}
+
+function factsOf({ site, climate, surveyedOn, notes }: Survey): [term: string, value: string][] {
+  const facts: [string, string | undefined][] = [
+    ['Address', site.address],
+    ['Position', placeText(site.latitude, site.longitude)],
+    ['Altitude', `${site.altitude ?? 0} m above the sea`],
+    ['Time zone', site.timeZone],
+    ['Ground reflects', `${Math.round((site.albedo ?? 0.2) * 100)} %`],
+    ['Climate', climateText(climate)],
+    ['Day of the visit', surveyedOn],
+    ['Notes', notes],
+  ];
+  return facts.filter((fact): fact is [string, string] => Boolean(fact[1]));
+}
+
+/** Where the site is and what is known of it. */
+export function SiteFacts({ survey }: { survey: Survey }) {
+  return (
+    <dl class="facts">
+      {factsOf(survey).map(([term, value]) => (
+        <div key={term}>
+          <dt>{term}</dt>
+          <dd>{value}</dd>
+        </div>
+      ))}
+    </dl>
+  );
+}

@@ -1,0 +1,25 @@
+import type { ComponentType } from 'preact';
+import type { AppServices } from '../app/app-services.ts';
+import type { Survey } from '../core/survey/survey.ts';
+
+/** What every section of a survey is given: the survey as stored now, and the services to act on it. */
+export interface SectionProps {
+  surveyId: string;
+  survey: Survey;
+  services: AppServices;
+}
+
+/** A section of a survey, a tab on its screen: one row in `routes.ts`, one folder in `screens/`. */
+export interface SurveySection {
+  /** Last part of the address; empty for the first section. */
+  path: string;
+  label: string;
+  load: () => Promise<ComponentType<SectionProps>>;
+}
+
+/** A screen of its own, not part of a survey. */
+export interface PlainScreen {
+  path: string;
+  label: string;
+  load: () => Promise<ComponentType<{ services: AppServices }>>;
+}
