@@ -43,14 +43,16 @@ class SpanList {
   private readonly high: Float64Array;
   private readonly row: Uint16Array;
   private readonly lost: number[];
-  private readonly rowOfSet = new Map<string, number>();
+  private readonly rowOfPair = new Map<number, number>();
+  private readonly ends: number[] = [];
 
   constructor(private readonly profile: HorizonProfile) {
     const room = 2 * profile.low.length; // n intervals have 2n ends, so under 2n spans between them
     this.low = new Float64Array(room);
     this.high = new Float64Array(room);
     this.row = new Uint16Array(room);
-    this.lost = Array.from(profile.transmittance, (passes) => 1 - passes);
+    this.lost = [];
+    for (const passes of profile.transmittance) this.lost.push(1 - passes);
   }
 
   addSingle(interval: number): void {
@@ -58,31 +60,48 @@ class SpanList {
     this.add(low[interval], high[interval], intervalObstruction[interval]);
   }
 
+  /** Cuts the sky at every end of the intervals; each part between is behind those that cover it. */
   addOverlapping(intervals: readonly number[]): void {
     const { low, high, intervalObstruction } = this.profile;
-    const ends = [...new Set(intervals.flatMap((k) => [low[k], high[k]]))].sort((a, b) => a - b);
+    const ends = this.sortedEnds(intervals);
     for (let i = 1; i < ends.length; i++) {
-      const [from, to] = [ends[i - 1], ends[i]];
-      const covering = intervals
-        .filter((k) => low[k] <= from && high[k] >= to)
-        .map((k) => intervalObstruction[k]);
-      if (covering.length > 0) this.add(from, to, this.rowOf([...new Set(covering)]));
+      const from = ends[i - 1];
+      const to = ends[i];
+      if (to <= from) continue;
+      let row = -1;
+      for (const k of intervals)
+        if (low[k] <= from && high[k] >= to)
+          row = row < 0 ? intervalObstruction[k] : this.rowBehind(row, intervalObstruction[k]);
+      if (row >= 0) this.add(from, to, row);
     }
   }
 
-  private rowOf(obstructions: number[]): number {
-    if (obstructions.length === 1) return obstructions[0];
-    const key = obstructions.sort((a, b) => a - b).join();
-    let row = this.rowOfSet.get(key);
-    if (row === undefined) {
-      row = this.lost.length / 12;
-      this.rowOfSet.set(key, row);
-      for (let month = 0; month < 12; month++) {
-        const passes = obstructions.reduce((left, o) => left * this.profile.transmittance[o * 12 + month], 1);
-        this.lost.push(1 - passes);
-      }
+  private sortedEnds(intervals: readonly number[]): number[] {
+    const { ends } = this;
+    ends.length = 0;
+    for (const k of intervals) ends.push(this.profile.low[k], this.profile.high[k]);
+    for (let i = 1; i < ends.length; i++) {
+      const end = ends[i];
+      let j = i - 1;
+      for (; j >= 0 && ends[j] > end; j--) ends[j + 1] = ends[j];
+      ends[j + 1] = end;
     }
-    return row;
+    return ends;
+  }
+
+  /** Row of what is lost where one more obstruction stands in the way of a row. */
+  private rowBehind(row: number, obstruction: number): number {
+    const key = row * 65536 + obstruction;
+    let behind = this.rowOfPair.get(key);
+    if (behind === undefined) {
+      behind = this.lost.length / 12;
+      this.rowOfPair.set(key, behind);
+      for (let month = 0; month < 12; month++)
+        this.lost.push(
+          1 - (1 - this.lost[row * 12 + month]) * this.profile.transmittance[obstruction * 12 + month],
+        );
+    }
+    return behind;
   }
 
   private add(low: number, high: number, row: number): void {
@@ -96,7 +115,7 @@ class SpanList {
       low: this.low.subarray(0, this.count),
       high: this.high.subarray(0, this.count),
       row: this.row.subarray(0, this.count),
-      lost: Float64Array.from(this.lost),
+      lost: new Float64Array(this.lost),
     };
   }
 }

@@ -64,7 +64,7 @@ export function horizonProfile(obstructions: readonly TracedObstruction[]): Hori
   columnFirst[COLUMNS] = slices.count;
   return {
     obstructionIds: obstructions.map(({ id }) => id),
-    transmittance: Float64Array.from(obstructions.flatMap(({ transmittance }) => transmittance)),
+    transmittance: new Float64Array(obstructions.flatMap(({ transmittance }) => transmittance)),
     columnFirst,
     ...slices.arrays(),
   };
@@ -211,17 +211,23 @@ class SliceList {
   }
 
   arrays() {
-    const middle = this.from.map((from, i) => ((from + this.to[i]) / 2) * RADIANS);
+    const sine = new Float64Array(this.count);
+    const cosine = new Float64Array(this.count);
+    for (let i = 0; i < this.count; i++) {
+      const middle = ((this.from[i] + this.to[i]) / 2) * RADIANS;
+      sine[i] = Math.sin(middle);
+      cosine[i] = Math.cos(middle);
+    }
     return {
-      sliceColumn: Uint16Array.from(this.column),
-      sliceFrom: Float64Array.from(this.from),
-      sliceTo: Float64Array.from(this.to),
-      sliceSin: Float64Array.from(middle, Math.sin),
-      sliceCos: Float64Array.from(middle, Math.cos),
-      intervalFirst: Uint32Array.from(this.first),
-      intervalObstruction: Uint16Array.from(this.obstruction),
-      low: Float64Array.from(this.low),
-      high: Float64Array.from(this.high),
+      sliceColumn: new Uint16Array(this.column),
+      sliceFrom: new Float64Array(this.from),
+      sliceTo: new Float64Array(this.to),
+      sliceSin: sine,
+      sliceCos: cosine,
+      intervalFirst: new Uint32Array(this.first),
+      intervalObstruction: new Uint16Array(this.obstruction),
+      low: new Float64Array(this.low),
+      high: new Float64Array(this.high),
     };
   }
 }

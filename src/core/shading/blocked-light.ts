@@ -68,14 +68,13 @@ function addDirect(
   direct: Float64Array,
 ): void {
   const { first, bottom } = grid;
-  for (let month = 0; month < 12; month++) {
-    const strip = month * COLUMNS + column;
+  for (let month = 0, strip = column * 12; month < 12; month++, strip++) {
     const start = first[strip];
     const top = first[strip + 1] - 1;
     if (top <= start) continue;
     const base = bottom[strip];
+    if (high <= base) continue;
     const to = lightBelow(below, start, top, high - base);
-    if (to === 0) continue;
     const from = low > base ? lightBelow(below, start, top, low - base) : 0;
     direct[month] += share * lost[lostRow + month] * (to - from);
   }
@@ -94,7 +93,7 @@ function lightBelow(below: Float32Array, start: number, top: number, height: num
 /** Light of a month and column from between two elevations, degrees, with nothing in the way, kWh/m2. */
 export function directFrom(map: SkyMap, month: number, column: number, low: number, high: number): number {
   const { first, bottom } = map.grid;
-  const strip = month * COLUMNS + column;
+  const strip = column * 12 + month;
   const [start, top] = [first[strip], first[strip + 1] - 1];
   if (top <= start) return 0;
   const at = (elevation: number) => lightBelow(map.below, start, top, elevation / BIN - bottom[strip]);

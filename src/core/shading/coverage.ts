@@ -1,7 +1,6 @@
 import { RADIANS } from '../angles/angles.ts';
 import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
 import { viewBetween } from '../horizon/sky-view.ts';
-import { directFrom } from './blocked-light.ts';
 import type { SkyMap } from './sky-map.ts';
 
 /** A range of azimuth, degrees, clockwise from `from` to `to`, over north where `to` is below `from`. */
@@ -19,11 +18,18 @@ export function coverage(map: SkyMap, observed: readonly AzimuthRange[]): number
   const wholeView = views.reduce((sum, view) => sum + view, 0);
   for (let column = 0; column < COLUMNS; column++) {
     let light = (dome * views[column]) / wholeView;
-    for (let month = 0; month < 12; month++) light += directFrom(map, month, column, 0, 91);
+    for (let month = 0; month < 12; month++) light += columnDirect(map, month, column);
     whole += light;
     covered += light * seen[column];
   }
   return whole > 0 ? covered / whole : 1;
+}
+
+/** All direct light of a month and a column, kWh/m2. */
+function columnDirect({ grid, below }: SkyMap, month: number, column: number): number {
+  const strip = column * 12 + month;
+  const end = grid.first[strip + 1];
+  return end > grid.first[strip] ? below[end - 1] : 0;
 }
 
 function columnView(map: SkyMap, column: number): number {

@@ -4,6 +4,8 @@ import { dayOf } from '../solar-position/sun-track.ts';
 import { domeView, groundView } from '../transposition/plane-irradiance.ts';
 import type { BlockedLight } from './blocked-light.ts';
 import type { SkyMap } from './sky-map.ts';
+import type { MonthHours } from './sky-year.ts';
+import { monthHourOf } from './sky-year.ts';
 import { cosIncidenceOf } from './sky-map.ts';
 
 /** An hour of a month with less light than this has no access to speak of, kWh/m2. */
@@ -14,7 +16,7 @@ const DARK = 1e-6;
  * month has no hours, so the direct light is taken from the pieces of the sun's path again.
  */
 export function hourlyAccess(map: SkyMap, spans: BlockedSpans, blocked: BlockedLight): (number | null)[][] {
-  const direct = directByHour(map, spans);
+  const directLost = directLostByHour(map, spans);
   const sine = Math.sqrt(1 - map.facing.upward ** 2);
   const { dome, brightBand, darkBand, ghi, albedo } = map.year;
   const view = domeView(map.surfaceTilt);
@@ -24,37 +26,43 @@ export function hourlyAccess(map: SkyMap, spans: BlockedSpans, blocked: BlockedL
       const cell = month * 24 + hour;
       const even = dome[cell] * view + darkBand[cell] * sine;
       const band = brightBand[cell] * sine;
-      const whole = direct.whole[cell] + even + band + ghi[cell] * groundShare;
+      const whole = map.directHours[cell] + even + band + ghi[cell] * groundShare;
       if (whole < DARK) return null;
-      const lost = direct.lost[cell] + even * blocked.domeShare[month] + band * blocked.bandShare[month];
+      const lost = directLost[cell] + even * blocked.domeShare[month] + band * blocked.bandShare[month];
       return Math.max(0, 1 - lost / whole);
     }),
   );
 }
 
-/** Direct light, and what of it the spans take, [month · 24 + hour], kWh/m2. */
-function directByHour(map: SkyMap, spans: BlockedSpans) {
+/** Direct light that the spans take, [month · 24 + hour], kWh/m2. */
+function directLostByHour(map: SkyMap, spans: BlockedSpans): MonthHours {
   const { year } = map;
   const { track, step, pieceFirst, pieceStrip, pieceLow, pieceHigh, pieceShare } = year.paths;
-  const whole = new Float64Array(12 * 24);
   const lost = new Float64Array(12 * 24);
-  const stepsPerHour = 60 / track.stepMinutes;
+  const tops = columnTops(spans);
   for (let k = 0; k < step.length; k++) {
     const i = step[k];
     if (year.direct[i] <= 0) continue;
     const light = year.direct[i] * cosIncidenceOf(year, map.facing, i);
     if (light <= 0) continue;
     const month = track.monthOfDay[dayOf(track, i)];
-    const cell = month * 24 + (((i % track.stepsPerDay) / stepsPerHour) | 0);
     for (let piece = pieceFirst[k]; piece < pieceFirst[k + 1]; piece++) {
-      const energy = light * pieceShare[piece];
-      whole[cell] += energy;
-      const column = pieceStrip[piece] - month * COLUMNS;
+      const column = (pieceStrip[piece] / 12) | 0;
+      if (pieceLow[piece] >= tops[column]) continue;
       const share = lostShare(spans, column, pieceLow[piece], pieceHigh[piece], month);
-      if (share > 0) lost[cell] += energy * share;
+      lost[monthHourOf(track, i)] += light * pieceShare[piece] * share;
     }
   }
-  return { whole, lost };
+  return lost;
+}
+
+/** Highest blocked elevation of each column, degrees; 0 where nothing is. */
+function columnTops({ profile, first, high }: BlockedSpans): Float64Array {
+  const tops = new Float64Array(COLUMNS);
+  profile.sliceColumn.forEach((column, slice) => {
+    for (let k = first[slice]; k < first[slice + 1]; k++) tops[column] = Math.max(tops[column], high[k]);
+  });
+  return tops;
 }
 
 /** Share lost of light spread evenly over a column and between two elevations. */

@@ -2,7 +2,7 @@ import { COLUMNS } from '../horizon/horizon-profile.ts';
 import type { SunPaths } from './sun-paths.ts';
 import { BIN } from './sun-paths.ts';
 
-/** A strip is one column of azimuth in one month: month · COLUMNS + column. */
+/** A strip is one column of azimuth in one month: column · 12 + month. */
 export const STRIPS = 12 * COLUMNS;
 
 /**

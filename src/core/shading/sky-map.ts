@@ -4,10 +4,9 @@ import { planeFacing } from '../horizon/sky-view.ts';
 import { domeView, groundView } from '../transposition/plane-irradiance.ts';
 import type { SkyGrid } from './sky-grid.ts';
 import { STRIPS } from './sky-grid.ts';
-import type { SkyYear } from './sky-year.ts';
-import { monthsOf } from './sky-year.ts';
+import type { MonthHours, SkyYear } from './sky-year.ts';
+import { monthHourOf, monthsOf } from './sky-year.ts';
 import { BIN } from './sun-paths.ts';
-import { COLUMNS } from '../horizon/horizon-profile.ts';
 
 /**
  * A year of beam and circumsolar irradiation on one plane by where in the sky it comes from, for each month, summed upward
@@ -21,6 +20,8 @@ export interface SkyMap {
   readonly facing: PlaneFacing;
   /** Irradiation from below each node of the grid, kWh/m2. */
   readonly below: Float32Array;
+  /** Direct irradiation by month and hour with nothing in the way. */
+  readonly directHours: MonthHours;
   /** Monthly irradiation with nothing in the way, kWh/m2, by part. `dome` has the dark band taken off. */
   readonly direct: readonly number[];
   readonly dome: readonly number[];
@@ -43,7 +44,7 @@ export function cosIncidenceOf(year: SkyYear, facing: PlaneFacing, step: number)
 export function skyMap(year: SkyYear, grid: SkyGrid, surfaceTilt: number, surfaceAzimuth: number): SkyMap {
   const facing = planeFacing(surfaceTilt, surfaceAzimuth);
   const below = new Float32Array(grid.first[STRIPS]);
-  deposit(year, grid, facing, below);
+  const directHours = deposit(year, grid, facing, below);
   const direct = sumUpward(grid, below);
   const sine = Math.sin(surfaceTilt * RADIANS);
   const darkBand = monthsOf(year.darkBand);
@@ -54,6 +55,7 @@ export function skyMap(year: SkyYear, grid: SkyGrid, surfaceTilt: number, surfac
     surfaceAzimuth,
     facing,
     below,
+    directHours,
     direct,
     dome: monthsOf(year.dome).map((dome, month) => dome * domeView(surfaceTilt) + darkBand[month] * sine),
     band: monthsOf(year.brightBand).map((band) => band * sine),
@@ -61,15 +63,17 @@ export function skyMap(year: SkyYear, grid: SkyGrid, surfaceTilt: number, surfac
   };
 }
 
-/** Spreads the light of every piece of the sun's path evenly over the elevations it spans. */
-function deposit(year: SkyYear, grid: SkyGrid, facing: PlaneFacing, bins: Float32Array): void {
+/** Spreads the light of every piece of the sun's path evenly over the elevations it spans; sums it by hour. */
+function deposit(year: SkyYear, grid: SkyGrid, facing: PlaneFacing, bins: Float32Array): MonthHours {
   const { step, pieceFirst, pieceStrip, pieceLow, pieceHigh, pieceShare } = year.paths;
   const { first, bottom } = grid;
+  const hours: MonthHours = new Float64Array(12 * 24);
   for (let k = 0; k < step.length; k++) {
     const normal = year.direct[step[k]];
     if (normal <= 0) continue;
     const light = normal * cosIncidenceOf(year, facing, step[k]);
     if (light <= 0) continue;
+    const cell = monthHourOf(year.paths.track, step[k]);
     for (let i = pieceFirst[k]; i < pieceFirst[k + 1]; i++) {
       const strip = pieceStrip[i];
       const base = first[strip] - bottom[strip];
@@ -77,6 +81,7 @@ function deposit(year: SkyYear, grid: SkyGrid, facing: PlaneFacing, bins: Float3
       const high = pieceHigh[i] / BIN;
       const [lowBin, highBin] = [low | 0, high | 0];
       const energy = light * pieceShare[i];
+      hours[cell] += energy;
       if (lowBin === highBin) {
         bins[base + lowBin] += energy;
         continue;
@@ -87,6 +92,7 @@ function deposit(year: SkyYear, grid: SkyGrid, facing: PlaneFacing, bins: Float3
       bins[base + highBin] += perBin * (high - highBin);
     }
   }
+  return hours;
 }
 
 /** Turns bins into sums from below, in place; returns the monthly totals. */
@@ -99,7 +105,7 @@ function sumUpward(grid: SkyGrid, bins: Float32Array): number[] {
       bins[node] = sum;
       sum += here;
     }
-    totals[(strip / COLUMNS) | 0] += sum;
+    totals[strip % 12] += sum;
   }
   return totals;
 }

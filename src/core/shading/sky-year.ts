@@ -2,7 +2,7 @@ import type { Climate } from '../irradiance/climate.ts';
 import { skyStates } from '../irradiance/climate.ts';
 import { extraterrestrialNormal } from '../irradiance/extraterrestrial.ts';
 import type { SunTrack } from '../solar-position/sun-track.ts';
-import { TRACK_DAYS, cosZenithOf } from '../solar-position/sun-track.ts';
+import { TRACK_DAYS, cosZenithOf, dayOf } from '../solar-position/sun-track.ts';
 import type { SkyMoment, SkyParts, Transposition } from '../transposition/transposition.ts';
 import type { SunPaths } from './sun-paths.ts';
 
@@ -85,6 +85,10 @@ export function skyYear(
   }
   return { paths, transposition, ...year, albedo };
 }
+
+/** Cell of a month × hour table that a step falls in. */
+export const monthHourOf = (track: SunTrack, step: number): number =>
+  track.monthOfDay[dayOf(track, step)] * 24 + ((((step % track.stepsPerDay) * track.stepMinutes) / 60) | 0);
 
 /** Sums a month × hour table to twelve months. */
 export function monthsOf(table: MonthHours): number[] {

@@ -18,7 +18,7 @@ export interface SunPaths {
   readonly step: Uint32Array;
   /** First piece of each of those, one more entry. */
   readonly pieceFirst: Uint32Array;
-  /** Strip of each piece: month · COLUMNS + column. */
+  /** Strip of each piece: column · 12 + month. */
   readonly pieceStrip: Uint16Array;
   readonly pieceLow: Float32Array;
   readonly pieceHigh: Float32Array;
@@ -43,7 +43,7 @@ class PieceList {
   private low: Float32Array;
   private high: Float32Array;
   private share: Float32Array;
-  private row = 0;
+  private month = 0;
 
   constructor(private readonly track: SunTrack) {
     const room = track.steps * 2;
@@ -58,7 +58,7 @@ class PieceList {
   follow(step: number): void {
     const { track } = this;
     this.step[this.steps] = step;
-    this.row = track.monthOfDay[dayOf(track, step)] * COLUMNS;
+    this.month = track.monthOfDay[dayOf(track, step)];
     let [a, b] = [track.azimuth[step], track.azimuth[step + 1]];
     let [e, f] = [track.elevation[step], track.elevation[step + 1]];
     let turn = shorter(b - a);
@@ -115,7 +115,7 @@ class PieceList {
   private add(column: number, a: number, b: number, share: number): void {
     if (this.pieces === this.strip.length) this.grow();
     const i = this.pieces++;
-    this.strip[i] = this.row + ((column + COLUMNS) % COLUMNS);
+    this.strip[i] = ((column + COLUMNS) % COLUMNS) * 12 + this.month;
     this.low[i] = a < b ? a : b;
     this.high[i] = a < b ? b : a;
     this.share[i] = share;

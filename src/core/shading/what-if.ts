@@ -18,7 +18,10 @@ export type ObstructionChange = { obstruction: string } & (
  * over the instrument is distance · tan(elevation). Throws RangeError for an obstruction the profile does not have, a
  * distance not above 0 or a growth below 0.
  */
-export function changedProfile(profile: HorizonProfile, changes: readonly ObstructionChange[]): HorizonProfile {
+export function changedProfile(
+  profile: HorizonProfile,
+  changes: readonly ObstructionChange[],
+): HorizonProfile {
   return changes.reduce(changedOnce, profile);
 }
 
