@@ -36,7 +36,7 @@ export function changesBetween(before: Survey, after: Survey): FieldChange[] {
   const changes = new Map<string, JsonValue | undefined>();
   for (const path of old.fields.keys()) if (!now.fields.has(path)) changes.set(path, undefined);
   for (const [path, value] of now.fields)
-    if (!old.fields.has(path) || !sameJson(old.fields.get(path)!, value)) changes.set(path, value);
+    if (!old.fields.has(path) || !sameJson(old.fields.get(path), value)) changes.set(path, value);
   for (const [list, steps] of now.placed) {
     if (sameJson(old.placed.get(list) ?? null, steps)) continue;
     for (const step of steps) {
@@ -76,7 +76,7 @@ function layObject(object: JsonRecord, layout: ObjectLayout, prefix: string, out
 function layList(rows: IdentifiedRow[], layout: ListLayout, path: string, out: LaidOut): void {
   if (rows.length === 0 && !layout.required) out.fields.set(path, []);
   const steps = rows.map(({ id }) => pathStep(id));
-  const needsPlaces = !rows.every((row, i) => i === 0 || isBefore(rows[i - 1]!, row, layout.sortedBy));
+  const needsPlaces = !rows.every((row, i) => i === 0 || isBefore(rows[i - 1], row, layout.sortedBy));
   if (needsPlaces) out.placed.set(path, steps);
   rows.forEach((row, i) => {
     const rowPath = `${path}/${steps[i]}`;

@@ -60,10 +60,10 @@ const ESCAPES: Record<string, string> = { '~': '~0', '/': '~1', '+': '~2', '#': 
 const ESCAPED: Record<string, string> = { '~0': '~', '~1': '/', '~2': '+', '~3': '#' };
 
 /** A key or id as one step of a path, so that any text is safe: `~` `/` `+` `#` become `~0` `~1` `~2` `~3`. */
-export const pathStep = (key: string): string => key.replace(/[~/+#]/g, (sign) => ESCAPES[sign]!);
+export const pathStep = (key: string): string => key.replace(/[~/+#]/g, (sign) => ESCAPES[sign]);
 
 /** The key or id that a step of a path stands for. */
-export const keyOfStep = (step: string): string => step.replace(/~[0-3]/g, (escape) => ESCAPED[escape]!);
+export const keyOfStep = (step: string): string => step.replace(/~[0-3]/g, (escape) => ESCAPED[escape]);
 
 /** The step of fields that change together: their names joined by `+`. */
 export const togetherStep = (keys: readonly string[]): string => keys.map(pathStep).join('+');

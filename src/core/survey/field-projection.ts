@@ -36,7 +36,7 @@ function objectFrom(branch: Branch, layout: ObjectLayout): JsonRecord {
     const key = keyOfStep(step);
     if (step === PLACE || (layout.lists && Object.hasOwn(layout.lists, key))) continue;
     if (layout.objects && Object.hasOwn(layout.objects, key) && inner.below.size > 0)
-      entries.push([key, objectFrom(inner, layout.objects[key]!)]);
+      entries.push([key, objectFrom(inner, layout.objects[key])]);
     else if (step.includes('+') && isRecord(inner.value)) entries.push(...Object.entries(inner.value));
     else if (inner.value !== undefined) entries.push([key, inner.value]);
   }

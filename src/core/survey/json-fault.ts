@@ -4,8 +4,11 @@ export interface JsonFault {
   column: number;
 }
 
-const TOKEN =
-  /[ \t\n\r]*(?:([{}[\],:])|("(?:[^"\\\u0000-\u001f]|\\(?:["\\/bfnrt]|u[0-9a-fA-F]{4}))*")|(-?(?:0|[1-9]\d*)(?:\.\d+)?(?:[eE][+-]?\d+)?|true|false|null)(?![\w.]))/y;
+const SPACE = /[ \t\n\r]*/y;
+const PLAIN = /[^"\\\u0000-\u001f]*/y;
+const ESCAPE = /\\(?:["\\/bfnrt]|u[0-9a-fA-F]{4})/y;
+const SCALAR = /(?:-?(?:0|[1-9]\d*)(?:\.\d+)?(?:[eE][+-]?\d+)?|true|false|null)(?![\w.])/y;
+const MARKS = '{}[],:';
 
 /** What may come next: a value, a key, the colon after a key, or a comma or bracket after a value. */
 type Expected = 'value' | 'value-or-end' | 'key' | 'key-or-end' | 'colon' | 'after';
@@ -20,21 +23,39 @@ export function jsonFault(text: string): JsonFault | null {
   let expected: Expected = 'value';
   let at = 0;
   for (;;) {
+    const start = endOf(SPACE, text, at);
     const done = expected === 'after' && open.length === 0;
-    TOKEN.lastIndex = at;
-    const token = TOKEN.exec(text);
-    if (!token) {
-      const next = at + (/^[ \t\n\r]*/.exec(text.slice(at))?.[0].length ?? 0);
-      return done && next >= text.length ? null : placeOf(text, next);
-    }
-    const [whole, mark, string] = token;
-    const step: Expected | null = mark
-      ? afterMark(mark, expected, open)
-      : afterScalar(string !== undefined, expected);
-    if (done || step === null) return placeOf(text, at + whole.length - whole.trimStart().length);
-    expected = step;
-    at += whole.length;
+    if (start >= text.length) return done ? null : placeOf(text, start);
+    const sign = text[start];
+    const isMark = MARKS.includes(sign);
+    const next: Expected | null = isMark
+      ? afterMark(sign, expected, open)
+      : afterScalar(sign === '"', expected);
+    if (done || next === null) return placeOf(text, start);
+    const end = isMark ? start + 1 : sign === '"' ? endOfString(text, start) : endOf(SCALAR, text, start);
+    if (end <= 0) return placeOf(text, end === NO_MATCH ? start : -end);
+    expected = next;
+    at = end;
   }
+}
+
+const NO_MATCH = -1;
+
+/** Where a pattern that must match at `at` ends; -1 where it does not match. */
+function endOf(pattern: RegExp, text: string, at: number): number {
+  pattern.lastIndex = at;
+  return pattern.test(text) ? pattern.lastIndex : NO_MATCH;
+}
+
+/** Where a string that starts at `start` ends; less than -1 where it breaks off: the negative of that place. */
+function endOfString(text: string, start: number): number {
+  let at = endOf(PLAIN, text, start + 1);
+  while (text[at] !== '"') {
+    const next = endOf(ESCAPE, text, at);
+    if (next === NO_MATCH) return -at;
+    at = endOf(PLAIN, text, next);
+  }
+  return at + 1;
 }
 
 function afterScalar(isString: boolean, expected: Expected): Expected | null {

@@ -19,12 +19,12 @@ export function outlineCrossing(sightings: readonly Direction[], edge: TraceEdge
   const meet = edge === 'drawn' ? drawnEdgesMeet(kept, sightings) : straightEdgesMeet(kept, sightings);
   for (let i = 0; i < count; i++)
     for (let j = i + 2; j < count; j++)
-      if (!(i === 0 && j === count - 1) && meet(i, j)) return [kept[i]!, kept[j]!];
+      if (!(i === 0 && j === count - 1) && meet(i, j)) return [kept[i], kept[j]];
   return null;
 }
 
 function isRepeat(sightings: readonly Direction[], i: number): boolean {
-  const here = sightings[i]!;
+  const here = sightings[i];
   const before = sightings.at(i - 1)!;
   return turnBetween(before.azimuth, here.azimuth) === 0 && before.elevation === here.elevation;
 }
@@ -32,19 +32,19 @@ function isRepeat(sightings: readonly Direction[], i: number): boolean {
 type EdgesMeet = (i: number, j: number) => boolean;
 
 function drawnEdgesMeet(kept: number[], sightings: readonly Direction[]): EdgesMeet {
-  const x = [sightings[kept[0]!]!.azimuth];
-  const y = kept.map((k) => sightings[k]!.elevation);
-  y.push(y[0]!);
+  const x = [sightings[kept[0]].azimuth];
+  const y = kept.map((k) => sightings[k].elevation);
+  y.push(y[0]);
   for (let i = 1; i <= kept.length; i++) {
-    const turn = turnBetween(sightings[kept[i - 1]!]!.azimuth, sightings[kept[i % kept.length]!]!.azimuth);
-    x.push(x[i - 1]! + turn);
+    const turn = turnBetween(sightings[kept[i - 1]].azimuth, sightings[kept[i % kept.length]].azimuth);
+    x.push(x[i - 1] + turn);
   }
   return (i, j) => {
-    if (Math.min(y[i]!, y[i + 1]!) > Math.max(y[j]!, y[j + 1]!)) return false;
-    if (Math.min(y[j]!, y[j + 1]!) > Math.max(y[i]!, y[i + 1]!)) return false;
-    const middle = (x[i]! + x[i + 1]! - x[j]! - x[j + 1]!) / 2;
+    if (Math.min(y[i], y[i + 1]) > Math.max(y[j], y[j + 1])) return false;
+    if (Math.min(y[j], y[j + 1]) > Math.max(y[i], y[i + 1])) return false;
+    const middle = (x[i] + x[i + 1] - x[j] - x[j + 1]) / 2;
     const shift = 360 * Math.round(middle / 360);
-    const at = (k: number, moved: number): Point => ({ x: x[k]! + moved, y: y[k]! });
+    const at = (k: number, moved: number): Point => ({ x: x[k] + moved, y: y[k] });
     return segmentsMeet(at(i, 0), at(i + 1, 0), at(j, shift), at(j + 1, shift));
   };
 }
@@ -80,8 +80,8 @@ function segmentsMeet(a: Point, b: Point, c: Point, d: Point): boolean {
 type Vector = readonly [east: number, north: number, up: number];
 
 function straightEdgesMeet(kept: number[], sightings: readonly Direction[]): EdgesMeet {
-  const corners = kept.map((k) => unitVector(sightings[k]!));
-  const corner = (i: number) => corners[i % corners.length]!;
+  const corners = kept.map((k) => unitVector(sightings[k]));
+  const corner = (i: number) => corners[i % corners.length];
   return (i, j) => arcsMeet(corner(i), corner(i + 1), corner(j), corner(j + 1));
 }
 

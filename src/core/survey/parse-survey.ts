@@ -7,7 +7,6 @@ import { ProblemList } from './problem-list.ts';
 import type { Parsed } from './problem.ts';
 import { addReferenceProblems } from './reference-checks.ts';
 import { addSchemaProblems } from './schema-problems.ts';
-import type { SchemaNode } from './schema-walk.ts';
 import { addStructureProblems } from './structure-checks.ts';
 import { SURVEY_FORMAT, SURVEY_VERSION } from './survey.ts';
 import type { Survey } from './survey.ts';
@@ -54,7 +53,7 @@ export function surveyFromJson(value: unknown): Parsed<Survey> {
   return {
     ok: true,
     value: document as unknown as Survey,
-    warnings: unknownFields(surveySchema as unknown as SchemaNode, document),
+    warnings: unknownFields(surveySchema, document),
   };
 }
 
@@ -70,7 +69,7 @@ function notJson(text: string): Parsed<never> {
   const place = fault ? `line ${fault.line}, column ${fault.column}` : 'file';
   return refused(
     place,
-    'The file is not JSON from here on: it is cut short, damaged or of another kind. Export the survey again, or correct the text here.',
+    'The text is not JSON here: the file is cut short, damaged or of another kind. Export the survey again, or correct this place.',
   );
 }
 

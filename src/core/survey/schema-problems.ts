@@ -11,11 +11,17 @@ export function addSchemaProblems(document: unknown, problems: ProblemList): voi
   const result = v.safeParse(surveySchema, document);
   for (const issue of result.issues ?? []) {
     const keys = (issue.path ?? []).map((step) => step.key as string | number);
+    if (isExcess(issue)) keys.pop(); // what is wrong is the list that has one item too many
     const path = keys.reduce<string>(pathBelow, '') || 'file';
     const phrase = issue.input === undefined ? phraseAt(document, keys) : issue.message;
-    problems.add(path, sentence(lastName(path), issue.input, phrase));
+    problems.add(
+      path,
+      sentence(lastName(path), isExcess(issue) ? issue.path?.at(-1)?.input : issue.input, phrase),
+    );
   }
 }
+
+const isExcess = (issue: v.BaseIssue<unknown>) => issue.type === 'strict_tuple' && issue.expected === 'never';
 
 function sentence(name: string, input: unknown, phrase: string | null): string {
   if (input === undefined) return `${name} is missing. ${phrase ? `Give ${phrase}` : 'Add it'}.`;
@@ -24,7 +30,7 @@ function sentence(name: string, input: unknown, phrase: string | null): string {
 
 /** The phrase of the schema at the end of a path, for fields that are not there at all. */
 function phraseAt(document: unknown, keys: (string | number)[]): string | null {
-  let schema: SchemaNode | null = surveySchema as unknown as SchemaNode;
+  let schema: SchemaNode | null = surveySchema;
   let value = document;
   for (const key of keys) {
     schema = schemaBelow(schemaFor(schema, value), key);

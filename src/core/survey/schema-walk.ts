@@ -17,7 +17,7 @@ export function schemaFor(schema: SchemaNode, value: unknown): SchemaNode {
   if (schema.wrapped) return schemaFor(schema.wrapped, value);
   if (schema.type !== 'union' && schema.type !== 'variant') return schema;
   const options = (schema.options ?? []).filter((option) => typeof option !== 'string');
-  let best = options[0]!;
+  let best = options[0];
   for (const option of options) if (fit(option, value) > fit(best, value)) best = option;
   return best;
 }
@@ -37,5 +37,5 @@ function fit(schema: SchemaNode, value: unknown): number {
 /** The schema of a field or list item; null where the schema does not name it. */
 export function schemaBelow(schema: SchemaNode, key: string | number): SchemaNode | null {
   if (typeof key === 'number') return schema.item ?? schema.items?.[key] ?? null;
-  return schema.entries && Object.hasOwn(schema.entries, key) ? schema.entries[key]! : null;
+  return schema.entries && Object.hasOwn(schema.entries, key) ? schema.entries[key] : null;
 }

@@ -109,7 +109,7 @@ function addShapeProblems(
   const edge = traceEdge(trace, { kind } as Obstruction);
   const crossing = outlineCrossing(pointed, edge);
   if (!crossing) return;
-  const [from, other] = crossing.map((i) => pointed[i]!.path.slice(path.length + 1));
+  const [from, other] = crossing.map((i) => pointed[i].path.slice(path.length + 1));
   problems.add(
     pathBelow(path, 'sightings'),
     `The outline crosses or touches itself: its edge after ${from} meets its edge after ${other}. Put the sightings in order around the edge, or split the outline in two.`,

@@ -37,7 +37,7 @@ export const stampTime = (stamp: Stamp): number => read(stamp).timeMs;
 /** Whether a text from outside is a stamp. */
 export function isStamp(text: string): text is Stamp {
   const match = FORM.exec(text);
-  return match !== null && !Number.isNaN(Date.parse(match[1]!));
+  return match !== null && !Number.isNaN(Date.parse(match[1]));
 }
 
 function read(stamp: Stamp): { timeMs: number; count: number } {
@@ -45,7 +45,7 @@ function read(stamp: Stamp): { timeMs: number; count: number } {
   const timeMs = Date.parse(match?.[1] ?? '');
   if (!match || Number.isNaN(timeMs))
     throw new RangeError(`stamp must be a stamp, got ${JSON.stringify(stamp)}`);
-  return { timeMs, count: Number.parseInt(match[2]!, 36) };
+  return { timeMs, count: Number.parseInt(match[2], 36) };
 }
 
 function written(timeMs: number, count: number, device: string): Stamp {
