@@ -1,7 +1,8 @@
 import { RADIANS } from '../angles/angles.ts';
 import type { BlockedSpans } from '../horizon/blocked-spans.ts';
 import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
-import { BAND_TOP, planeHorizon, viewBelow } from '../horizon/sky-view.ts';
+import { blockedView } from '../horizon/blocked-view.ts';
+import { BAND_TOP, viewBetween } from '../horizon/sky-view.ts';
 import { domeView } from '../transposition/plane-irradiance.ts';
 import type { SkyMap } from './sky-map.ts';
 import { BIN } from './sun-paths.ts';
@@ -18,42 +19,36 @@ export interface BlockedLight {
 
 /** Subtracts blocked spans from a sky map. */
 export function blockedLight(map: SkyMap, spans: BlockedSpans): BlockedLight {
-  const direct = new Float64Array(12);
-  const domeLost = new Float64Array(12);
-  const bandLost = new Float64Array(12);
-  const { profile, first, low, high, row, lost } = spans;
-  const { north, east, upward } = map.facing;
   const hasBand = map.band.some((light) => light > 0);
-  for (let slice = 0; slice < profile.sliceColumn.length; slice++) {
-    const [start, end] = [first[slice], first[slice + 1]];
-    if (start === end) continue;
-    const width = profile.sliceTo[slice] - profile.sliceFrom[slice];
-    const column = profile.sliceColumn[slice];
-    const toward = north * profile.sliceCos[slice] + east * profile.sliceSin[slice];
-    const horizon = planeHorizon(toward, upward);
-    for (let k = start; k < end; k++) {
-      const lowRad = Math.max(horizon, low[k] * RADIANS);
-      const highRad = high[k] * RADIANS;
-      if (highRad <= lowRad) continue; // behind the plane
-      const radians = width * RADIANS;
-      const lostRow = row[k] * 12;
-      const lowView = lowRad === 0 ? 0 : viewBelow(toward, upward, lowRad);
-      const view = (viewBelow(toward, upward, highRad) - lowView) * radians;
-      for (let month = 0; month < 12; month++) domeLost[month] += lost[lostRow + month] * view;
-      if (hasBand && lowRad < BAND_TOP) {
-        const bandView = (viewBelow(toward, upward, Math.min(BAND_TOP, highRad)) - lowView) * radians;
-        for (let month = 0; month < 12; month++) bandLost[month] += lost[lostRow + month] * bandView;
-      }
-      addDirect(map, column, width / COLUMN_WIDTH, low[k] / BIN, high[k] / BIN, lost, lostRow, direct);
-    }
-  }
   const wholeDome = Math.PI * domeView(map.surfaceTilt);
-  const wholeBand = hasBand ? bandView(map) : 1;
+  const shares = (views: Float64Array, whole: number) => views.map((view) => Math.min(1, view / whole));
   return {
-    direct,
-    domeShare: domeLost.map((view) => Math.min(1, view / wholeDome)),
-    bandShare: bandLost.map((view) => Math.min(1, view / wholeBand)),
+    direct: blockedDirect(map, spans),
+    domeShare: shares(blockedView(spans, map.facing), wholeDome),
+    bandShare: hasBand
+      ? shares(blockedView(spans, map.facing, BAND_TOP), wholeView(map, BAND_TOP))
+      : new Float64Array(12),
   };
+}
+
+/** Beam and circumsolar irradiation from behind the spans in each month, kWh/m2. */
+function blockedDirect(map: SkyMap, { profile, first, low, high, row, lost }: BlockedSpans): Float64Array {
+  const direct = new Float64Array(12);
+  for (let slice = 0; slice < profile.sliceColumn.length; slice++) {
+    const share = (profile.sliceTo[slice] - profile.sliceFrom[slice]) / COLUMN_WIDTH;
+    for (let k = first[slice]; k < first[slice + 1]; k++)
+      addDirect(
+        map,
+        profile.sliceColumn[slice],
+        share,
+        low[k] / BIN,
+        high[k] / BIN,
+        lost,
+        row[k] * 12,
+        direct,
+      );
+  }
+  return direct;
 }
 
 /** Adds the direct light from a span of one column, in all months; elevations in bins. */
@@ -100,17 +95,17 @@ export function directFrom(map: SkyMap, month: number, column: number, low: numb
   return at(high) - at(low);
 }
 
-/** The plane's view of the whole horizon band, as `viewBelow` counts. */
-function bandView(map: SkyMap): number {
+/** The plane's view of the whole sky up to an elevation [radians], as `blockedView` counts. */
+function wholeView({ facing }: SkyMap, topRad: number): number {
   let sum = 0;
   for (let column = 0; column < COLUMNS; column++) {
     const azimuth = (column + 0.5) * COLUMN_WIDTH * RADIANS;
-    const toward = map.facing.north * Math.cos(azimuth) + map.facing.east * Math.sin(azimuth);
-    const horizon = planeHorizon(toward, map.facing.upward);
-    if (horizon < BAND_TOP)
-      sum +=
-        viewBelow(toward, map.facing.upward, BAND_TOP) -
-        (horizon > 0 ? viewBelow(toward, map.facing.upward, horizon) : 0);
+    sum += viewBetween(
+      facing.north * Math.cos(azimuth) + facing.east * Math.sin(azimuth),
+      facing.upward,
+      0,
+      topRad,
+    );
   }
   return Math.max(sum * COLUMN_WIDTH * RADIANS, 1e-12);
 }
