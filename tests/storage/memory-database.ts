@@ -1,0 +1,27 @@
+import 'fake-indexeddb/auto';
+import { IDBFactory } from 'fake-indexeddb';
+import { surveyFromJson } from '../../src/core/survey/parse-survey.ts';
+import { Connection, type ConnectionReport } from '../../src/storage/connection.ts';
+import { surveyDatabase } from '../../src/storage/survey-database.ts';
+import { weatherDatabase } from '../../src/storage/weather-database.ts';
+
+/** Starts from a browser that has never stored anything. */
+export function emptyBrowser(): void {
+  globalThis.indexedDB = new IDBFactory();
+}
+
+/** One tab of the app: its connection and its stores, with a clock that moves on by a second an act. */
+export function tab(report: ConnectionReport = () => undefined) {
+  let timeMs = Date.UTC(2026, 4, 14, 9, 30);
+  let made = 0;
+  const now = () => (timeMs += 1000);
+  const newId = () => `device-${++made}`;
+  const connection = new Connection(report);
+  const check = (document: unknown) => Promise.resolve(surveyFromJson(document));
+  return {
+    connection,
+    surveys: surveyDatabase({ connection, check, now, newId }),
+    weather: weatherDatabase(connection, now),
+    setClock: (ms: number) => (timeMs = ms),
+  };
+}
