@@ -33,6 +33,8 @@ export interface AssessOptions {
   transposition?: TranspositionId;
   /** A divisor of 60, 1 to 15. */
   stepMinutes?: number;
+  /** What `siteLight` made for this very site, climate, transposition and step, where the caller has it already. */
+  light?: SiteLight;
   signal?: Cancellation;
   /** Called between parts of the work with the share done; the work waits for what it returns. */
   onProgress?: (share: number, stage: string) => void | Promise<void>;
@@ -79,7 +81,7 @@ export async function assessSurvey(
     options.signal?.throwIfAborted();
   };
   await advance('The sun and the sky of a year');
-  const light = siteLight(survey.site, climate, { ...options, transposition });
+  const light = options.light ?? siteLight(survey.site, climate, { ...options, transposition });
   const assessed: PlaneAssessment[] = [];
   for (const plane of planes) {
     await advance(plane.name);

@@ -1,0 +1,69 @@
+import type { HorizonProfile } from '../horizon/horizon-profile.ts';
+import type { StationHorizon } from '../horizon/station-horizon.ts';
+import { domeView, groundView } from '../transposition/plane-irradiance.ts';
+import { assessStation } from './assess-station.ts';
+import type { StationAssessment } from './assessment.ts';
+import type { AzimuthRange } from './coverage.ts';
+import type { SkyDensity } from './sky-density.ts';
+import type { SkyMap } from './sky-map.ts';
+import { unshadedMonths } from './sky-map.ts';
+import type { ObstructionChange } from './what-if.ts';
+import { changedProfile } from './what-if.ts';
+
+/** What one station saw laid over what one plane gets: figures and all that a picture of them is drawn from. */
+export interface StationShade {
+  readonly surfaceTilt: number;
+  readonly surfaceAzimuth: number;
+  readonly measured: StationAssessment;
+  /** The same with changes imagined; null where none are. */
+  readonly imagined: StationAssessment | null;
+  /** Irradiation with nothing in the way, kWh/m2. */
+  readonly unshaded: { annual: number; monthly: number[]; /** [month][hour]. */ hourly: number[][] };
+  /** As measured. */
+  readonly profile: HorizonProfile;
+  readonly observed: readonly AzimuthRange[];
+  /** Where the plane's direct light comes from, with nothing in the way. */
+  readonly density: SkyDensity;
+}
+
+/** Joins a plane's map, its density and a station's horizon; throws RangeError as `changedProfile` does. */
+export function stationShade(
+  map: SkyMap,
+  density: SkyDensity,
+  horizon: StationHorizon,
+  station: { id: string; name: string },
+  names: ReadonlyMap<string, string>,
+  changes: readonly ObstructionChange[] = [],
+): StationShade {
+  const monthly = unshadedMonths(map);
+  const imagined = () =>
+    assessStation(map, { ...horizon, profile: changedProfile(horizon.profile, changes) }, station, names);
+  return {
+    surfaceTilt: map.surfaceTilt,
+    surfaceAzimuth: map.surfaceAzimuth,
+    measured: assessStation(map, horizon, station, names),
+    imagined: changes.length > 0 ? imagined() : null,
+    unshaded: {
+      annual: monthly.reduce((sum, light) => sum + light, 0),
+      monthly,
+      hourly: unshadedHours(map),
+    },
+    profile: horizon.profile,
+    observed: horizon.observed,
+    density,
+  };
+}
+
+/** Irradiation on a plane with nothing in the way by month and hour of local standard time, kWh/m2. */
+export function unshadedHours(map: SkyMap): number[][] {
+  const { dome, brightBand, darkBand, ghi, albedo } = map.year;
+  const sine = Math.sqrt(1 - map.facing.upward ** 2);
+  const [view, ground] = [domeView(map.surfaceTilt), albedo * groundView(map.surfaceTilt)];
+  return Array.from({ length: 12 }, (_, month) =>
+    Array.from({ length: 24 }, (_, hour) => {
+      const cell = month * 24 + hour;
+      const band = (brightBand[cell] + darkBand[cell]) * sine;
+      return Math.max(0, map.directHours[cell] + dome[cell] * view + band + ghi[cell] * ground);
+    }),
+  );
+}
