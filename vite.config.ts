@@ -1,13 +1,31 @@
 import { defineConfig } from 'vitest/config';
+import type { Plugin } from 'vite';
 import { VitePWA } from 'vite-plugin-pwa';
 
 const jsx = { jsx: { runtime: 'automatic', importSource: 'preact' } } as const;
+
+// The built page loads from its own address alone, whatever server it is put on.
+const CONTENT_POLICY =
+  "default-src 'self'; img-src 'self' blob: data:; worker-src 'self'; object-src 'none'; base-uri 'self'; form-action 'self'";
+
+const contentPolicy: Plugin = {
+  name: 'noonmark-content-policy',
+  apply: 'build',
+  transformIndexHtml: () => [
+    {
+      tag: 'meta',
+      attrs: { 'http-equiv': 'Content-Security-Policy', content: CONTENT_POLICY },
+      injectTo: 'head-prepend',
+    },
+  ],
+};
 
 export default defineConfig({
   oxc: jsx,
   build: { target: 'es2022', sourcemap: false },
   worker: { format: 'es' },
   plugins: [
+    contentPolicy,
     VitePWA({
       strategies: 'injectManifest',
       srcDir: 'src/service-worker',
@@ -21,6 +39,8 @@ export default defineConfig({
         theme_color: '#fbf8f0',
         background_color: '#fbf8f0',
         display: 'standalone',
+        id: '/',
+        lang: 'en',
         start_url: '/',
         icons: [
           { src: '/icon.svg', sizes: 'any', type: 'image/svg+xml' },
@@ -29,17 +49,34 @@ export default defineConfig({
           { src: '/icon-maskable-512.png', sizes: '512x512', type: 'image/png', purpose: 'maskable' },
         ],
       },
-      injectManifest: { globPatterns: ['**/*.{js,css,html,svg,png,json,bin,webmanifest}'], maximumFileSizeToCacheInBytes: 3_000_000 },
+      injectManifest: {
+        globPatterns: ['**/*.{js,css,html,svg,png,json,bin,webmanifest}'],
+        maximumFileSizeToCacheInBytes: 3_000_000,
+      },
     }),
   ],
   test: {
     projects: [
       {
         oxc: jsx,
-        test: { name: 'unit', include: ['tests/**/*.test.{ts,tsx}'], exclude: ['tests/browser/**'], environment: 'node', testTimeout: 60_000 },
+        test: {
+          name: 'unit',
+          include: ['tests/**/*.test.{ts,tsx}'],
+          exclude: ['tests/browser/**'],
+          environment: 'node',
+          testTimeout: 60_000,
+        },
       },
       {
-        test: { name: 'browser', include: ['tests/browser/**/*.test.ts'], environment: 'node', testTimeout: 120_000, hookTimeout: 180_000, fileParallelism: false },
+        test: {
+          name: 'browser',
+          include: ['tests/browser/**/*.test.ts'],
+          globalSetup: ['tests/browser/build-once.ts'],
+          environment: 'node',
+          testTimeout: 120_000,
+          hookTimeout: 180_000,
+          fileParallelism: false,
+        },
       },
     ],
   },

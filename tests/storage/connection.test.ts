@@ -7,15 +7,14 @@ import { emptyBrowser, tab } from './memory-database.ts';
 beforeEach(emptyBrowser);
 afterEach(() => vi.restoreAllMocks());
 
-type Put = IDBObjectStore['put'];
-
 /** Makes the writes to one store fail as the browser would. */
 function failPuts(store: string, error: () => DOMException, times = Infinity): void {
-  const real = IDBObjectStore.prototype.put as Put;
+  const prototype = IDBObjectStore.prototype;
+  const put = Reflect.get(prototype, 'put') as (...given: unknown[]) => IDBRequest<IDBValidKey>;
   let left = times;
-  vi.spyOn(IDBObjectStore.prototype, 'put').mockImplementation(function (this: IDBObjectStore, ...given) {
+  vi.spyOn(prototype, 'put').mockImplementation(function (this: IDBObjectStore, ...given) {
     if (this.name === store && left-- > 0) throw error();
-    return real.apply(this, given);
+    return put.apply(this, given);
   });
 }
 
@@ -58,7 +57,7 @@ describe('a lost connection', () => {
     await surveys.create(inventedSurvey());
     await connection.run((database) => Promise.resolve(database.close()));
     await surveys.remove('invented-1');
-    expect((await surveys.list())[0]!.deletedAt).not.toBeNull();
+    expect((await surveys.list())[0].deletedAt).not.toBeNull();
   });
 
   it('is told when it cannot be had again', async () => {
@@ -67,7 +66,7 @@ describe('a lost connection', () => {
     failPuts('surveys', () => new DOMException('Connection to Indexed Database server lost', 'UnknownError'));
     await expect(surveys.remove('invented-1')).rejects.toMatchObject({ code: 'storage-lost' });
     vi.restoreAllMocks();
-    expect((await surveys.list())[0]!.deletedAt).toBeNull();
+    expect((await surveys.list())[0].deletedAt).toBeNull();
   });
 
   it('in the middle of an act leaves no half of it, and the second try stores all', async () => {

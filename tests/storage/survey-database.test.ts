@@ -85,7 +85,7 @@ describe('changes', () => {
     const after = inventedSurvey('invented-1', {
       title: 'Renamed',
       obstructions: [],
-      stations: [{ ...before.stations[0]!, traces: [] }],
+      stations: [{ ...before.stations[0], traces: [] }],
     });
     await surveys.create(before);
     await surveys.applyChanges(before.id, changesBetween(before, after));
@@ -103,7 +103,7 @@ describe('changes', () => {
     const title = fields.find(({ path }) => path === 'title')!;
     const others = fields.filter(({ path }) => path !== 'title').map(({ stamp }) => stamp);
     expect(new Set(others).size).toBe(1);
-    expect(title.stamp > others[0]!).toBe(true);
+    expect(title.stamp > others[0]).toBe(true);
   });
 
   it('leave a stamped row where a field was cleared', async () => {
@@ -139,7 +139,7 @@ describe('raw readings', () => {
   it('stay in the database when they are taken out of the survey, and can come back', async () => {
     const { surveys } = tab();
     const before = inventedSurvey();
-    const station = before.stations[0]!;
+    const station = before.stations[0];
     const without = inventedSurvey('invented-1', { readings: [], stations: [{ ...station, traces: [] }] });
     await surveys.create(before);
     await surveys.applyChanges('invented-1', changesBetween(before, without));
@@ -155,10 +155,10 @@ describe('deleting', () => {
     const { surveys } = tab();
     await surveys.create(inventedSurvey());
     await surveys.remove('invented-1');
-    expect((await surveys.list())[0]!.deletedAt).toBeTypeOf('number');
+    expect((await surveys.list())[0].deletedAt).toBeTypeOf('number');
     expect(await readable(surveys)).toEqual(inventedSurvey());
     await surveys.restore('invented-1');
-    expect((await surveys.list())[0]!.deletedAt).toBeNull();
+    expect((await surveys.list())[0].deletedAt).toBeNull();
   });
 
   it('stays in force while fields change', async () => {
@@ -168,7 +168,7 @@ describe('deleting', () => {
     await surveys.applyChanges('invented-1', [{ path: 'title', value: 'Changed while deleted' }]);
     expect((await surveys.list())[0]).toMatchObject({
       title: 'Changed while deleted',
-      deletedAt: expect.any(Number),
+      deletedAt: expect.any(Number) as unknown,
     });
   });
 
@@ -181,7 +181,7 @@ describe('deleting', () => {
     expect(rows.surveys).toEqual([]);
     expect(rows.fields).toEqual([]);
     expect(rows.readings).toEqual([]);
-    expect(rows.erased).toEqual([{ id: 'invented-1', stamp: expect.any(String) }]);
+    expect(rows.erased).toEqual([{ id: 'invented-1', stamp: expect.any(String) as unknown }]);
     expect(await surveys.load('invented-1')).toBeNull();
     await surveys.create(inventedSurvey());
     expect((await rawRows()).erased).toEqual([]);
@@ -191,7 +191,7 @@ describe('deleting', () => {
 describe('a survey that this version cannot read', () => {
   async function storeField(row: Pick<FieldRow, 'path' | 'value'>): Promise<void> {
     const database = await openDB<NoonmarkSchema>(DATABASE_NAME);
-    const stamp = (await database.getAll('fields'))[0]!.stamp;
+    const stamp = (await database.getAll('fields'))[0].stamp;
     await database.put('fields', { survey: 'invented-1', stamp, ...row });
     database.close();
   }

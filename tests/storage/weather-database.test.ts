@@ -4,7 +4,7 @@ import { emptyBrowser, tab } from './memory-database.ts';
 
 beforeEach(emptyBrowser);
 
-const bytesOf = (text: string): ArrayBuffer => new TextEncoder().encode(text).buffer as ArrayBuffer;
+const bytesOf = (text: string): ArrayBuffer => new TextEncoder().encode(text).buffer;
 
 describe('kept weather files', () => {
   it('come back byte for byte under the hash of their contents', async () => {
