@@ -1,6 +1,7 @@
 import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
 import { directFrom } from './blocked-light.ts';
 import type { SkyMap } from './sky-map.ts';
+import { BIN } from './sun-paths.ts';
 
 /** Where in the sky a plane's direct light comes from, for drawing. */
 export interface SkyDensity {
@@ -20,8 +21,9 @@ export function skyDensity(map: SkyMap, cell = 1): SkyDensity {
   const [columns, rows] = [COLUMNS / perCell, 90 / cell];
   const irradiation = new Float32Array(columns * rows);
   for (let column = 0; column < COLUMNS; column++)
-    for (let row = 0; row < rows; row++)
-      for (let month = 0; month < 12; month++)
+    for (let month = 0; month < 12; month++) {
+      const [lowest, highest] = rowsOf(map, column * 12 + month, cell, rows);
+      for (let row = lowest; row <= highest; row++)
         irradiation[row * columns + Math.floor(column / perCell)] += directFrom(
           map,
           month,
@@ -29,5 +31,15 @@ export function skyDensity(map: SkyMap, cell = 1): SkyDensity {
           row * cell,
           row === rows - 1 ? 91 : (row + 1) * cell,
         );
+    }
   return { cell, columns, rows, irradiation };
+}
+
+/** First and last row of cells that a strip of the map reaches into. */
+function rowsOf({ grid }: SkyMap, strip: number, cell: number, rows: number): [number, number] {
+  const nodes = grid.first[strip + 1] - grid.first[strip];
+  if (nodes === 0) return [0, -1];
+  const lowest = Math.floor((grid.bottom[strip] * BIN) / cell);
+  const highest = Math.floor(((grid.bottom[strip] + nodes - 1) * BIN) / cell);
+  return [Math.min(lowest, rows - 1), Math.min(highest, rows - 1)];
 }

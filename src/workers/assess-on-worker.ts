@@ -1,0 +1,124 @@
+import type { Remote } from 'comlink';
+import { proxy, wrap } from 'comlink';
+import type { Assessment } from '../core/shading/assessment.ts';
+import type {
+  AssessRequest,
+  CalculationFault,
+  Outcome,
+  ShadeQuestion,
+  WeatherFileFacts,
+} from '../core/shading/calculation.ts';
+import type { StationShade } from '../core/shading/station-shade.ts';
+import type { Progress, ShadeEngine } from './shade-engine.ts';
+
+/** What of an AbortSignal is used here. */
+interface CancelSignal {
+  readonly aborted: boolean;
+  addEventListener(type: 'abort', listener: () => void): void;
+  removeEventListener(type: 'abort', listener: () => void): void;
+}
+
+/** A cancelled call that has not ended after this long is ended with its worker. */
+const PATIENCE_MS = 3000;
+
+interface Running {
+  worker: Worker;
+  engine: Remote<ShadeEngine>;
+  /** The request the worker holds. */
+  held: AssessRequest | null;
+  /** Resolves with the fault when the worker breaks or is ended. */
+  broken: Promise<CalculationFault>;
+  breakOff(fault: CalculationFault): void;
+}
+
+/** The page's side of the worker: started when first needed, started again after it broke or did not stop. */
+export class AssessOnWorker {
+  private running: Running | null = null;
+  private tickets = 0;
+
+  constructor(private readonly start: () => Worker) {}
+
+  assess(request: AssessRequest, onProgress: Progress, signal: CancelSignal): Promise<Outcome<Assessment>> {
+    return this.ask(request, signal, (engine, ticket) => engine.assess(ticket, proxy(onProgress)));
+  }
+
+  shade(
+    request: AssessRequest,
+    question: ShadeQuestion,
+    signal: CancelSignal,
+  ): Promise<Outcome<StationShade>> {
+    return this.ask(request, signal, (engine, ticket) => engine.shade(ticket, question));
+  }
+
+  readWeatherFile(name: string, contents: ArrayBuffer): Promise<Outcome<WeatherFileFacts>> {
+    const { engine, broken } = this.ready();
+    return settled(engine.readWeatherFile(name, contents), broken);
+  }
+
+  private async ask<T>(
+    request: AssessRequest,
+    signal: CancelSignal,
+    call: (engine: Remote<ShadeEngine>, ticket: number) => Promise<Outcome<T>>,
+  ): Promise<Outcome<T>> {
+    if (signal.aborted) return cancelled;
+    const running = this.ready();
+    const ticket = this.tickets++;
+    // messages keep their order, so the survey is there before the question
+    const held = running.held === request ? null : running.engine.hold(request);
+    running.held = request;
+    const answer = settled(
+      Promise.all([call(running.engine, ticket), held]).then(([got]) => got),
+      running.broken,
+    );
+    return new Promise((resolve) => {
+      const stop = () => {
+        this.stop(running, ticket, answer);
+        resolve({ ok: false, fault: { code: 'cancelled' } });
+      };
+      signal.addEventListener('abort', stop);
+      void answer.then((outcome) => {
+        signal.removeEventListener('abort', stop);
+        resolve(outcome);
+      });
+    });
+  }
+
+  private stop(running: Running, ticket: number, answer: Promise<unknown>): void {
+    void running.engine.cancel(ticket);
+    const timer = setTimeout(() => this.end(running, { code: 'cancelled' }), PATIENCE_MS);
+    void answer.then(() => clearTimeout(timer));
+  }
+
+  private ready(): Running {
+    this.running ??= this.started();
+    return this.running;
+  }
+
+  private started(): Running {
+    const worker = this.start();
+    let breakOff: Running['breakOff'] = () => undefined;
+    const broken = new Promise<CalculationFault>((resolve) => (breakOff = resolve));
+    const running: Running = { worker, engine: wrap<ShadeEngine>(worker), held: null, broken, breakOff };
+    const fail = (detail: string) => this.end(running, { code: 'failed', detail });
+    worker.addEventListener('error', ({ message }) => fail(message || 'the worker did not start'));
+    worker.addEventListener('messageerror', () => fail('a message could not be read'));
+    return running;
+  }
+
+  private end(running: Running, fault: CalculationFault): void {
+    running.breakOff(fault);
+    running.worker.terminate();
+    if (this.running === running) this.running = null;
+  }
+}
+
+/** An answer, or the fault of the worker that breaks before it. */
+function settled<T>(answer: Promise<Outcome<T>>, broken: Promise<CalculationFault>): Promise<Outcome<T>> {
+  return Promise.race([
+    answer.catch((error: unknown): Outcome<T> => ({
+      ok: false,
+      fault: { code: 'failed', detail: String(error) },
+    })),
+    broken.then((fault): Outcome<T> => ({ ok: false, fault })),
+  ]);
+}

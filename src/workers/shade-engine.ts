@@ -1,0 +1,139 @@
+import { stationHorizon } from '../core/horizon/station-horizon.ts';
+import type { Climate } from '../core/irradiance/climate.ts';
+import { parseWeatherFile } from '../core/irradiance/weather-file.ts';
+import type { SiteLight } from '../core/shading/assess-survey.ts';
+import { assessSurvey, obstructionNames, siteLight } from '../core/shading/assess-survey.ts';
+import type { Assessment } from '../core/shading/assessment.ts';
+import type { AssessRequest, Outcome, ShadeQuestion, WeatherFileFacts } from '../core/shading/calculation.ts';
+import type { SkyDensity } from '../core/shading/sky-density.ts';
+import { skyDensity } from '../core/shading/sky-density.ts';
+import type { SkyMap } from '../core/shading/sky-map.ts';
+import { skyMap } from '../core/shading/sky-map.ts';
+import type { StationShade } from '../core/shading/station-shade.ts';
+import { stationShade } from '../core/shading/station-shade.ts';
+import type { ClimateSource } from './climate-source.ts';
+import { textOf } from './climate-source.ts';
+import { Cancelled, outcomeOf } from './outcome-of.ts';
+
+interface HeldLight {
+  key: string;
+  climate: Climate;
+  light: SiteLight;
+  planes: Map<string, { map: SkyMap; density: SkyDensity }>;
+}
+
+/** Lights kept: the one at work and the one before it, so that a look at another climate and back is quick. */
+const MOST_LIGHTS = 2;
+
+export type Progress = (share: number, stage: string) => void;
+
+/**
+ * The worker's memory: the survey at work, its site's light and the maps of its planes, so that another station or an
+ * obstruction imagined gone is a subtraction and not a pass over the year.
+ */
+export class ShadeEngine {
+  private request: AssessRequest | null = null;
+  private lights: HeldLight[] = [];
+  private readonly cancelled = new Set<number>();
+
+  /** `breathe` resolves once waiting messages have been let in. */
+  constructor(
+    private readonly climates: ClimateSource,
+    private readonly breathe: () => Promise<void>,
+  ) {}
+
+  /** Takes a survey up; later questions are about it. */
+  hold(request: AssessRequest): void {
+    this.request = request;
+  }
+
+  /** Ends the call that was given this ticket, where it next looks up. */
+  cancel(ticket: number): void {
+    this.cancelled.add(ticket);
+  }
+
+  assess(ticket: number, onProgress: Progress): Promise<Outcome<Assessment>> {
+    return this.answer(ticket, async (request) => {
+      onProgress(0, 'The sun and the sky of a year');
+      await this.lookUp(ticket);
+      const { climate, light } = await this.lightOf(request);
+      return assessSurvey(request.survey, climate, {
+        transposition: request.transposition,
+        stepMinutes: request.stepMinutes,
+        light,
+        onProgress: async (share, stage) => {
+          onProgress(share, stage);
+          await this.lookUp(ticket);
+        },
+      });
+    });
+  }
+
+  shade(ticket: number, { plane, station, changes }: ShadeQuestion): Promise<Outcome<StationShade>> {
+    return this.answer(ticket, async (request) => {
+      const { survey } = request;
+      const roof = survey.planes.find(({ id }) => id === plane);
+      const place = survey.stations.find(({ id }) => id === station);
+      if (!roof || !place) throw new RangeError(`no plane ${plane} or station ${station} in the survey`);
+      const held = await this.lightOf(request);
+      await this.lookUp(ticket);
+      const { map, density } = this.planeOf(held, roof.surfaceTilt, roof.surfaceAzimuth);
+      await this.lookUp(ticket);
+      const horizon = stationHorizon(survey, place);
+      return stationShade(map, density, horizon, place, obstructionNames(survey), changes);
+    });
+  }
+
+  readWeatherFile(name: string, contents: ArrayBuffer): Promise<Outcome<WeatherFileFacts>> {
+    return outcomeOf(() => {
+      const parsed = parseWeatherFile(textOf(contents), name);
+      if (parsed.ok)
+        return Promise.resolve({
+          ok: true,
+          value: { place: parsed.value.place, warnings: parsed.warnings },
+        } as const);
+      return Promise.resolve({
+        ok: false,
+        fault: { code: 'weather-file-refused', problems: parsed.problems },
+      } as const);
+    });
+  }
+
+  private async answer<T>(ticket: number, work: (request: AssessRequest) => Promise<T>): Promise<Outcome<T>> {
+    const { request } = this;
+    if (!request) throw new RangeError('hold a survey before asking about it');
+    const outcome = await outcomeOf(async () => ({ ok: true, value: await work(request) }) as const);
+    this.cancelled.delete(ticket);
+    return outcome;
+  }
+
+  private async lookUp(ticket: number): Promise<void> {
+    await this.breathe();
+    if (this.cancelled.has(ticket)) throw new Cancelled();
+  }
+
+  private async lightOf(request: AssessRequest): Promise<HeldLight> {
+    const { survey, stepMinutes, weatherFile } = request;
+    const transposition = request.transposition ?? survey.transposition ?? 'hay-davies';
+    const file = weatherFile && [weatherFile.name, weatherFile.contents.byteLength];
+    const key = JSON.stringify([survey.site, survey.climate, file, transposition, stepMinutes]);
+    const known = this.lights.find((held) => held.key === key);
+    if (known) return known;
+    const climate = await this.climates.of(request);
+    const light = siteLight(survey.site, climate, { transposition, stepMinutes });
+    const made = { key, climate, light, planes: new Map() };
+    this.lights = [made, ...this.lights].slice(0, MOST_LIGHTS);
+    return made;
+  }
+
+  private planeOf({ light, planes }: HeldLight, surfaceTilt: number, surfaceAzimuth: number) {
+    const key = `${surfaceTilt} ${surfaceAzimuth}`;
+    let plane = planes.get(key);
+    if (!plane) {
+      const map = skyMap(light.year, light.grid, surfaceTilt, surfaceAzimuth);
+      plane = { map, density: skyDensity(map, 1) };
+      planes.set(key, plane);
+    }
+    return plane;
+  }
+}
