@@ -9,6 +9,7 @@ import { App } from './ui/app.tsx';
 import { startInstallOffer } from './ui/device/install-offer.ts';
 import { startPaper } from './ui/device/paper-choice.ts';
 import { startRouter } from './ui/router.ts';
+import { AssessOnWorker } from './workers/assess-on-worker.ts';
 
 // WARNING: what is imported here by name is part of the first screen. Parsers, screens and workers are not.
 const parser = () => import('./core/survey/parse-survey.ts');
@@ -43,6 +44,9 @@ const services: AppServices = {
     newId,
   }),
   weather: weatherDatabase(connection, now),
+  assess: new AssessOnWorker(
+    () => new Worker(new URL('./workers/assess-worker.ts', import.meta.url), { type: 'module' }),
+  ),
   samples,
   parse: async (text) => (await parser()).parseSurvey(text),
   newId,

@@ -1,6 +1,7 @@
 import type { Parsed } from '../core/survey/problem.ts';
 import type { Survey } from '../core/survey/survey.ts';
 import type { AppState } from './app-state.ts';
+import type { AssessClient } from './assess-client.ts';
 import type { SurveyStore } from './survey-store.ts';
 import type { WeatherStore } from './weather-store.ts';
 
@@ -17,6 +18,7 @@ export interface AppServices {
   state: AppState;
   store: SurveyStore;
   weather: WeatherStore;
+  assess: AssessClient;
   samples: SampleSurvey[];
   parse: (text: string) => Promise<Parsed<Survey>>;
   newId: () => string;

@@ -2,6 +2,7 @@ import type { AppServices } from '../app/app-services.ts';
 import { AppContext } from './app-context.ts';
 import { Bars } from './components/bars.tsx';
 import { LazyScreen } from './components/lazy-screen.tsx';
+import { NoonMark } from './components/noon-mark.tsx';
 import { ScreenHeading } from './components/screen-heading.tsx';
 import { choosePaper, paperShown } from './device/paper-choice.ts';
 import { pathname } from './router.ts';
@@ -60,7 +61,7 @@ export function App({ services }: { services: AppServices }) {
       </a>
       <header class="head">
         <a class="home" href="/">
-          <img src="/icon.svg" alt="" width="28" height="28" />
+          <NoonMark />
           Noonmark
         </a>
         <PaperToggle />

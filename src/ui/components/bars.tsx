@@ -59,14 +59,16 @@ function NoticeBar() {
   return (
     <div class="bar">
       <p>{noticeText(notice)}</p>
-      {notice.undo && (
-        <button type="button" onClick={() => void takeBack()}>
-          Undo
+      <div class="row">
+        {notice.undo && (
+          <button type="button" onClick={() => void takeBack()}>
+            Undo
+          </button>
+        )}
+        <button type="button" class="plain" onClick={() => (state.notice.value = null)}>
+          Close
         </button>
-      )}
-      <button type="button" class="plain" onClick={() => (state.notice.value = null)}>
-        Close
-      </button>
+      </div>
     </div>
   );
 }
