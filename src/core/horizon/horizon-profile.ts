@@ -30,7 +30,7 @@ export interface HorizonProfile {
   /** Start and end azimuth of each slice, degrees. */
   readonly sliceFrom: Float64Array;
   readonly sliceTo: Float64Array;
-  /** Sine and cosine of the azimuth in the middle of each slice. */
+  /** Means over each slice of the sine and cosine of azimuth. */
   readonly sliceSin: Float64Array;
   readonly sliceCos: Float64Array;
   /** First interval of each slice, one more entry than slices. */
@@ -109,7 +109,6 @@ function sliceColumn(
   const cuts = columnCuts(column * COLUMN_WIDTH, here, edges);
   for (let k = 1; k < cuts.length; k++) {
     const [from, to] = [cuts[k - 1], cuts[k]];
-    if (to - from < THINNEST) continue;
     const middle = (from + to) / 2;
     slices.open();
     for (let i = 0; i < here.length;) i = blockRegion(i, here, edges, middle, slices);
@@ -130,9 +129,11 @@ function columnCuts(start: number, here: Uint32Array, edges: readonly BoundedEdg
     const pieces = Math.min(MOST_STEEP_CUTS, Math.ceil(climb / STEEP));
     for (let k = 1; k < pieces; k++) cuts.push(from + (k / pieces) * (to - from));
   }
-  if (cuts.length > MOST_CUTS)
-    return Array.from({ length: MOST_CUTS + 1 }, (_, k) => start + (k / MOST_CUTS) * COLUMN_WIDTH);
-  return cuts.length > 2 ? cuts.sort((a, b) => a - b) : cuts;
+  if (cuts.length === 2) return cuts;
+  const apart = cuts.sort((a, b) => a - b).filter((cut, i) => i === 0 || cut - cuts[i - 1] > THINNEST);
+  return apart.length <= MOST_CUTS
+    ? apart
+    : Array.from({ length: MOST_CUTS + 1 }, (_, k) => start + (k / MOST_CUTS) * COLUMN_WIDTH);
 }
 
 const crossings: number[] = [];
@@ -215,8 +216,10 @@ class SliceList {
     const cosine = new Float64Array(this.count);
     for (let i = 0; i < this.count; i++) {
       const middle = ((this.from[i] + this.to[i]) / 2) * RADIANS;
-      sine[i] = Math.sin(middle);
-      cosine[i] = Math.cos(middle);
+      const half = ((this.to[i] - this.from[i]) / 2) * RADIANS;
+      const mean = Math.sin(half) / half;
+      sine[i] = Math.sin(middle) * mean;
+      cosine[i] = Math.cos(middle) * mean;
     }
     return {
       sliceColumn: new Uint16Array(this.column),

@@ -1,5 +1,5 @@
 import { safeAcos } from '../angles/angles.ts';
-import { relativeAirMass } from '../irradiance/air-mass.ts';
+import { airMassAt } from '../irradiance/air-mass.ts';
 import type { Transposition } from './transposition.ts';
 
 /** Upper ends of the sky clearness bins 1 to 7; bin 8 is open. Ref: Perez et al. (1990), table 1. */
@@ -44,7 +44,7 @@ export const perez: Transposition = {
     let bin = 0;
     while (bin < 7 && clearness >= CLEARNESS_ENDS[bin]) bin++;
     const f = COEFFICIENTS[bin];
-    const brightness = (sky.dhi * relativeAirMass(sky.cosZenith)) / sky.dniExtra;
+    const brightness = (sky.dhi * airMassAt(sky.cosZenith)) / sky.dniExtra;
     const circumsolar = Math.max(0, f[0] + f[1] * brightness + f[2] * zenith);
     const band = f[3] + f[4] * brightness + f[5] * zenith;
     parts.circumsolarNormal = (sky.dhi * circumsolar) / Math.max(LEAST_COSINE, sky.cosZenith);
