@@ -70,7 +70,7 @@ module.exports = {
       name: 'no-orphans',
       comment: 'A file nobody imports is dead.',
       severity: 'error',
-      from: { orphan: true, pathNot: ['tsconfig', '^src/(main|service-worker/|cli/main)', '^tests/'] },
+      from: { orphan: true, pathNot: ['tsconfig', '^src/(main|service-worker/|cli/main)', '[.]d[.]ts$', '^tests/'] },
       to: {},
     },
     { name: 'no-unresolvable', comment: 'A misspelt import.', severity: 'error', from: {}, to: { couldNotResolve: true, pathNot: '^virtual:' } },

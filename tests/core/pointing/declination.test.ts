@@ -2,7 +2,7 @@ import { fc, test } from '@fast-check/vitest';
 import { describe, expect, it } from 'vitest';
 import { turnBetween } from '../../../src/core/angles/angles.ts';
 import { magneticDeclination } from '../../../src/core/pointing/declination.ts';
-import { cell, readTable } from '../../reference-values/read-table.ts';
+import { cell, readTable } from '../../reference-values/published-table.ts';
 
 /** Instant of a decimal year. */
 function instantOf(decimalYear: number): number {

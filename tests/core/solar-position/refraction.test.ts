@@ -1,7 +1,7 @@
 import { fc, test } from '@fast-check/vitest';
 import { describe, expect, it } from 'vitest';
 import { geometricOf, refraction, standardPressure } from '../../../src/core/solar-position/refraction.ts';
-import { publishedExample } from '../../reference-values/read-table.ts';
+import { publishedExample } from '../../reference-values/published-table.ts';
 
 describe('refraction', () => {
   it('gives the value of Meeus, example 16.a', () => {

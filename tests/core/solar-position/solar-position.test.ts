@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { DEGREES, RADIANS } from '../../../src/core/angles/angles.ts';
 import { refraction } from '../../../src/core/solar-position/refraction.ts';
 import { solarPosition, sunDirection } from '../../../src/core/solar-position/solar-position.ts';
-import { cell, publishedExample, readTable } from '../../reference-values/read-table.ts';
+import { cell, publishedExample, readTable } from '../../reference-values/published-table.ts';
 
 function skyVector(azimuth: number, elevation: number) {
   const [a, e] = [azimuth * RADIANS, elevation * RADIANS];

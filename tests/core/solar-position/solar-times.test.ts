@@ -5,7 +5,7 @@ import { equationOfTime } from '../../../src/core/solar-position/hour-angle.ts';
 import { RISE_AND_SET_ELEVATION, solarPosition } from '../../../src/core/solar-position/solar-position.ts';
 import { solarTimes } from '../../../src/core/solar-position/solar-times.ts';
 import type { SolarTimes } from '../../../src/core/solar-position/solar-times.ts';
-import { cell, publishedExample, readTable } from '../../reference-values/read-table.ts';
+import { cell, publishedExample, readTable } from '../../reference-values/published-table.ts';
 
 const NAMED: Record<number, string> = {
   5.75: 'Asia/Kathmandu',

@@ -1,0 +1,70 @@
+import type { Assessment, PlaneAssessment, StationAssessment } from '../core/shading/assessment.ts';
+import { TRANSPOSITIONS } from '../core/transposition/transposition-models.ts';
+import { grouped, monthsTable, percent, table } from './table.ts';
+
+/** The result of one survey for a person to read. */
+export function assessmentText(assessed: Assessment & { file: string; title: string }): string {
+  const { climate, transposition, planes } = assessed;
+  const model = TRANSPOSITIONS.find(({ id }) => id === transposition)?.name ?? transposition;
+  const lines = [
+    `${assessed.title} (${assessed.file})`,
+    `Climate: ${climate.name}. ${climate.reference}.`,
+    ...climate.warnings.map((warning) => `Note: ${warning}`),
+    `Sky light on the tilted plane: ${model}. Steps of ${assessed.stepMinutes} minutes.`,
+    'Solar access is the light that obstructions leave, in percent of the light without them.',
+    '',
+  ];
+  return `${lines.join('\n')}\n${planes.map(planeText).join('\n')}\n`;
+}
+
+function planeText(plane: PlaneAssessment): string {
+  const { bestPlane, solarAccess, unshaded } = plane;
+  const monthly = unshaded.monthly.map((light) => grouped(light, 1));
+  const rows = [{ label: 'unshaded, kWh/m2', cells: [...monthly, grouped(unshaded.annual, 1)] }];
+  for (const { name, solarAccess: access } of plane.stations)
+    rows.push({
+      label: `access at ${name}, %`,
+      cells: [...access.monthly.map(percent), percent(access.annual)],
+    });
+  if (solarAccess && plane.stations.length > 1)
+    rows.push({
+      label: 'mean access, %',
+      cells: [...solarAccess.monthly.map(percent), percent(solarAccess.annual)],
+    });
+  return [
+    `${plane.name}: tilt ${plane.surfaceTilt}°, facing ${plane.surfaceAzimuth}°`,
+    verdict(plane),
+    `Orientation factor ${percent(plane.orientationFactor)} %: a plane lying best here, tilt ${Math.round(bestPlane.surfaceTilt)}°, facing ${Math.round(bestPlane.surfaceAzimuth)}°, is 100 %.`,
+    '',
+    monthsTable(rows),
+    ...plane.stations.map(stationText),
+  ].join('\n');
+}
+
+function verdict({ solarAccess }: PlaneAssessment): string {
+  if (!solarAccess) return 'No station serves this plane, so its solar access is not known.';
+  const { annual, count, lowest } = solarAccess;
+  const of = count === 1 ? 'one station' : `${count} stations, lowest ${percent(lowest)} %`;
+  return `Solar access ${percent(annual)} %, shading loss ${percent(1 - annual)} % a year (${of}).`;
+}
+
+function stationText(station: StationAssessment): string {
+  const heading = `At ${station.name}: observed ${percent(station.coverage)} % of the light's directions.`;
+  if (station.obstructions.length === 0) return `${heading} Nothing was traced.\n`;
+  const names = new Map(station.obstructions.map(({ id, name }) => [id, name]));
+  const rows = station.obstructions.map(({ name, gainIfRemoved, lossIfAlone }) => [
+    name,
+    percent(gainIfRemoved),
+    percent(lossIfAlone),
+  ]);
+  const groups = station.groups.map(
+    ({ obstructions, gainIfAllRemoved, sumOfSingleGains }) =>
+      `${obstructions.map((id) => names.get(id) ?? id).join(' and ')} hide each other: removing all gives ${percent(gainIfAllRemoved)}, one at a time ${percent(sumOfSingleGains)} in sum.\n`,
+  );
+  const columns = [
+    { head: 'obstruction' },
+    { head: 'gain if removed, points', number: true },
+    { head: 'loss if alone, points', number: true },
+  ];
+  return `${heading}\n${table(columns, rows)}${groups.join('')}`;
+}

@@ -1,0 +1,47 @@
+import { parseSurvey } from '../../core/survey/parse-survey.ts';
+import type { Problem } from '../../core/survey/problem.ts';
+import type { Command } from '../command.ts';
+import { problemLines } from '../problem-lines.ts';
+import { readText } from '../read-file.ts';
+
+interface CheckedFile {
+  file: string;
+  ok: boolean;
+  title?: string;
+  problems: Problem[];
+  warnings: Problem[];
+}
+
+export const check: Command = {
+  name: 'check',
+  usage: 'FILE... [--json]',
+  summary: 'Whether survey files can be read, and what is wrong with them where.',
+  help: `
+  --json   { files: [ { file, ok, title, problems: [ { path, message } ], warnings } ] }
+
+Exit code 1 where any file has a problem. Warnings alone leave it at 0.`,
+  options: { json: { type: 'boolean' } },
+  run({ files, values, terminal }) {
+    const checked = files.map(checkFile);
+    if (values.json) terminal.out(`${JSON.stringify({ files: checked }, null, 1)}\n`);
+    for (const { file, ok, title, problems, warnings } of checked) {
+      terminal.err(problemLines(file, problems));
+      terminal.err(
+        problemLines(
+          file,
+          warnings.map(({ path, message }) => ({ path, message: `Warning. ${message}` })),
+        ),
+      );
+      if (!values.json)
+        terminal.out(ok ? `${file}: a good survey, "${title}"\n` : `${file}: cannot be used as it is\n`);
+    }
+    return checked.every(({ ok }) => ok) ? 0 : 1;
+  },
+};
+
+function checkFile(file: string): CheckedFile {
+  const read = readText(file);
+  const parsed = read.ok ? parseSurvey(read.value.text) : read;
+  if (!parsed.ok) return { file, ok: false, problems: parsed.problems, warnings: [] };
+  return { file, ok: true, title: parsed.value.title, problems: [], warnings: parsed.warnings };
+}

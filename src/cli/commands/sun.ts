@@ -1,0 +1,95 @@
+import { solarPosition } from '../../core/solar-position/solar-position.ts';
+import type { Parsed } from '../../core/survey/problem.ts';
+import type { Command, CommandCall } from '../command.ts';
+import { numberOption, textOption, UsageError } from '../command.ts';
+import { readCsv } from '../csv-rows.ts';
+import { INSTANT_FORM, instantOf } from '../instants.ts';
+import { problemLines } from '../problem-lines.ts';
+import { table } from '../table.ts';
+
+interface SunRow {
+  utc: string;
+  latitude: number;
+  longitude: number;
+  solarAzimuth: number;
+  apparentElevation: number;
+  geometricElevation: number;
+}
+
+export const sun: Command = {
+  name: 'sun',
+  usage: '[--at UTC --latitude DEGREES --longitude DEGREES] [--json] [< rows.csv]',
+  summary: 'Where the sun stands at an instant and place, or at many.',
+  help: `
+Without options, reads rows from standard input: a CSV table whose first line is
+    utc,latitude,longitude
+(a column altitude, metres, may be there too). Instants are UTC unless they carry an offset.
+
+  --at UTC              instant such as 2026-06-21T12:00:00Z; now where it is left out
+  --latitude DEGREES    -90 to 90, north positive
+  --longitude DEGREES   -180 to 180, east positive
+  --altitude METRES     above sea level, for the pressure that bends the light; 0 where it is left out
+  --json                a list of { utc, latitude, longitude, solarAzimuth, apparentElevation, geometricElevation }
+
+Azimuth is in degrees clockwise from true north. Apparent elevation is what is seen, with refraction.
+Never look at the sun, nor point a lens at it.`,
+  options: {
+    at: { type: 'string' },
+    latitude: { type: 'string' },
+    longitude: { type: 'string' },
+    altitude: { type: 'string' },
+    json: { type: 'boolean' },
+  },
+  async run(call) {
+    const rows = await rowsOf(call);
+    if (!rows.ok) {
+      call.terminal.err(problemLines('standard input', rows.problems));
+      return 1;
+    }
+    call.terminal.out(call.values.json ? `${JSON.stringify(rows.value)}\n` : sunTable(rows.value));
+    return 0;
+  },
+};
+
+async function rowsOf(call: CommandCall): Promise<Parsed<SunRow[]>> {
+  const latitude = numberOption(call, 'latitude', -90, 90);
+  const longitude = numberOption(call, 'longitude', -180, 180);
+  const altitude = numberOption(call, 'altitude', -430, 9000);
+  if (latitude !== undefined && longitude !== undefined) {
+    const utc = textOption(call, 'at') ?? new Date().toISOString();
+    const timeMs = instantOf(utc);
+    if (timeMs === null) throw new UsageError(`--at ${INSTANT_FORM}, got "${utc}"`);
+    return { ok: true, value: [sunRow(utc, timeMs, latitude, longitude, altitude)], warnings: [] };
+  }
+  if (latitude !== undefined || longitude !== undefined || call.values.at !== undefined)
+    throw new UsageError('Give both --latitude and --longitude, or rows on standard input.');
+  const csv = await call.terminal.input();
+  if (csv === null) throw new UsageError('Give --latitude and --longitude, or rows on standard input.');
+  return readCsv(csv, ['utc', 'latitude', 'longitude'], (row) => {
+    const timeMs = instantOf(row.text('utc'));
+    if (timeMs === null) row.problem('utc', INSTANT_FORM);
+    const [lat, lon] = [row.number('latitude', -90, 90), row.number('longitude', -180, 180)];
+    const height = row.text('altitude') === '' ? 0 : row.number('altitude', -430, 9000);
+    if (timeMs === null || Number.isNaN(lat + lon + height)) return null;
+    return sunRow(row.text('utc'), timeMs, lat, lon, height);
+  });
+}
+
+function sunRow(utc: string, timeMs: number, latitude: number, longitude: number, altitude = 0): SunRow {
+  return { utc, latitude, longitude, ...solarPosition(timeMs, latitude, longitude, altitude) };
+}
+
+function sunTable(rows: readonly SunRow[]): string {
+  const columns = ['latitude', 'longitude', 'azimuth', 'apparent elevation', 'geometric elevation'];
+  return table(
+    [{ head: 'utc' }, ...columns.map((head) => ({ head, number: true }))],
+    rows.map((row) => [
+      row.utc,
+      row.latitude.toFixed(4),
+      row.longitude.toFixed(4),
+      row.solarAzimuth.toFixed(3),
+      row.apparentElevation.toFixed(3),
+      row.geometricElevation.toFixed(3),
+    ]),
+  );
+}
