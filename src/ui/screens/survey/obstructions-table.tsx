@@ -1,19 +1,27 @@
-import { obstructionKinds } from '../../../core/survey/obstruction-kinds.ts';
+import { obstructionKinds, type ObstructionKindRow } from '../../../core/survey/obstruction-kinds.ts';
 import { ordered } from '../../../core/survey/order.ts';
-import type { Months, Obstruction } from '../../../core/survey/survey.ts';
+import type { Obstruction } from '../../../core/survey/survey.ts';
+import { percentText } from '../../value-text.ts';
 import { WideTable } from './wide-table.tsx';
 
-const percent = (share: number): string => `${Math.round(share * 100)} %`;
-
-function transmittanceText(transmittance: number | Months | undefined): string {
-  if (transmittance === undefined) return 'the kind’s own';
-  if (typeof transmittance === 'number') return percent(transmittance);
+function transmittanceText({ transmittance }: Obstruction, kind: ObstructionKindRow | undefined): string {
+  if (transmittance === undefined) return kind?.leaves ? 'usual for its kind' : 'none';
+  if (typeof transmittance === 'number') return percentText(transmittance);
   const [least, most] = [Math.min(...transmittance), Math.max(...transmittance)];
-  return least === most ? percent(least) : `${percent(least)} to ${percent(most)} by month`;
+  return least === most ? percentText(least) : `${percentText(least)} to ${percentText(most)} by month`;
 }
 
-function kindName(obstruction: Obstruction): string {
-  return obstructionKinds.find(({ kind }) => kind === obstruction.kind)?.name ?? obstruction.kind;
+function ObstructionRow({ obstruction }: { obstruction: Obstruction }) {
+  const kind = obstructionKinds.find((row) => row.kind === obstruction.kind);
+  return (
+    <tr>
+      <th scope="row">
+        {obstruction.name} <span class="faint small under">{kind?.name ?? obstruction.kind}</span>
+      </th>
+      <td class="number">{obstruction.distance === undefined ? 'unknown' : `${obstruction.distance} m`}</td>
+      <td>{transmittanceText(obstruction, kind)}</td>
+    </tr>
+  );
 }
 
 /** What stands around the site. */
@@ -23,7 +31,6 @@ export function ObstructionsTable({ obstructions }: { obstructions: Obstruction[
       <thead>
         <tr>
           <th scope="col">Obstruction</th>
-          <th scope="col">Kind</th>
           <th scope="col" class="number">
             Distance
           </th>
@@ -32,14 +39,7 @@ export function ObstructionsTable({ obstructions }: { obstructions: Obstruction[
       </thead>
       <tbody>
         {ordered(obstructions).map((obstruction) => (
-          <tr key={obstruction.id}>
-            <th scope="row">{obstruction.name}</th>
-            <td>{kindName(obstruction)}</td>
-            <td class="number">
-              {obstruction.distance === undefined ? 'unknown' : `${obstruction.distance} m`}
-            </td>
-            <td>{transmittanceText(obstruction.transmittance)}</td>
-          </tr>
+          <ObstructionRow key={obstruction.id} obstruction={obstruction} />
         ))}
       </tbody>
     </WideTable>

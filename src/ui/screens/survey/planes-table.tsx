@@ -1,6 +1,6 @@
 import { ordered } from '../../../core/survey/order.ts';
 import type { RoofPlane } from '../../../core/survey/survey.ts';
-import { degreesText } from './number-text.ts';
+import { degreesText } from '../../value-text.ts';
 import { WideTable } from './wide-table.tsx';
 
 function sizeOf({ width, slopeLength, outline }: RoofPlane): string {

@@ -1,5 +1,5 @@
 import type { ClimateChoice, Survey } from '../../../core/survey/survey.ts';
-import { placeText } from './number-text.ts';
+import { dayText, percentText, placeText } from '../../value-text.ts';
 
 function climateText(climate: ClimateChoice): string {
   switch (climate.source) {
@@ -18,9 +18,9 @@ function factsOf({ site, climate, surveyedOn, notes }: Survey): [term: string, v
     ['Position', placeText(site.latitude, site.longitude)],
     ['Altitude', `${site.altitude ?? 0} m above the sea`],
     ['Time zone', site.timeZone],
-    ['Ground reflects', `${Math.round((site.albedo ?? 0.2) * 100)} %`],
+    ['Ground reflects', percentText(site.albedo ?? 0.2)],
     ['Climate', climateText(climate)],
-    ['Day of the visit', surveyedOn],
+    ['Day of visit', surveyedOn && dayText(surveyedOn)],
     ['Notes', notes],
   ];
   return facts.filter((fact): fact is [string, string] => Boolean(fact[1]));
