@@ -1,5 +1,6 @@
 import type { SelfCheckGroup } from '../../core/self-check/check-row.ts';
 import { runSelfCheck } from '../../core/self-check/run-self-check.ts';
+import { shownRow } from '../../core/self-check/shown-row.ts';
 import type { Command } from '../command.ts';
 import { table } from '../table.ts';
 
@@ -33,20 +34,13 @@ const COLUMNS = [
   { head: 'what' },
   { head: 'quantity' },
   ...['published', 'computed', 'difference', 'allowed'].map((head) => ({ head, number: true })),
-  { head: 'unit' },
   { head: '' },
 ];
 
 function groupText({ title, source, allowance, rows }: SelfCheckGroup): string {
-  const cells = rows.map((row) => [
-    row.name,
-    row.quantity,
-    row.published.toFixed(row.decimals),
-    row.computed.toFixed(row.decimals),
-    row.difference.toFixed(row.decimals),
-    row.allowed.toFixed(row.decimals),
-    row.unit,
-    row.ok ? 'met' : 'NOT MET',
-  ]);
+  const cells = rows.map((row) => {
+    const { published, computed, difference, allowed } = shownRow(row);
+    return [row.name, row.quantity, published, computed, difference, allowed, row.ok ? 'met' : 'NOT MET'];
+  });
   return `${title}\nSource: ${source}\n${allowance}\n\n${table(COLUMNS, cells)}`;
 }

@@ -1,6 +1,7 @@
 import { solarTimes } from '../solar-position/solar-times.ts';
 import type { CheckRow, SelfCheckGroup } from './check-row.ts';
 import { checkValue } from './check-row.ts';
+import { CLOCK_UNIT } from './shown-row.ts';
 
 interface PublishedDay {
   place: string;
@@ -82,7 +83,7 @@ function dayRows(day: PublishedDay, allowed: number): CheckRow[] {
           checkValue({
             name,
             quantity,
-            unit: 'min after midnight',
+            unit: CLOCK_UNIT,
             decimals: 2,
             published: minutesOf(clock),
             computed,
