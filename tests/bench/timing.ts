@@ -3,7 +3,6 @@ export function medians(work: Record<string, () => unknown>, rounds: number): Re
   const times: Record<string, number[]> = Object.fromEntries(Object.keys(work).map((name) => [name, []]));
   for (let round = 0; round < rounds; round++)
     for (const [name, run] of Object.entries(work)) {
-      globalThis.gc?.();
       const start = performance.now();
       run();
       times[name].push(performance.now() - start);
