@@ -11,13 +11,17 @@ export function addReferenceProblems(document: JsonRecord, problems: ProblemList
   const traces = tracesOf(document);
   const sightings = traces.flatMap(({ value, path }) => rowsOf(value, 'sightings', path));
   const ids = (rows: Row[], what: string) => uniqueIds(rows, what, problems);
-  const planes = ids(rowsOf(document, 'planes'), 'plane');
-  const obstructions = ids(rowsOf(document, 'obstructions'), 'obstruction');
-  const runs = ids(rowsOf(document, 'runs'), 'run');
-  const readings = ids(rowsOf(document, 'readings'), 'reading');
+  const named = (key: string, what: string) => {
+    const known = ids(rowsOf(document, key), what);
+    return Array.isArray(document[key]) ? known : null; // a list that is missing is a problem of its own
+  };
+  const planes = named('planes', 'plane');
+  const obstructions = named('obstructions', 'obstruction');
+  const runs = named('runs', 'run');
+  const readings = named('readings', 'reading');
   ids(stations, 'station');
   ids(sightings, 'sighting');
-  const refer = (rows: Row[], key: string, known: Set<unknown>, what: string) => {
+  const refer = (rows: Row[], key: string, known: Set<unknown> | null, what: string) => {
     for (const { value, path } of rows) addDangling(value[key], pathBelow(path, key), known, what, problems);
   };
   refer(rowsOf(document, 'readings'), 'run', runs, 'run');
@@ -31,8 +35,7 @@ export function addReferenceProblems(document: JsonRecord, problems: ProblemList
     for (const plane of textsOf(value, 'serves', path))
       addDangling(plane.text, plane.path, planes, 'plane', problems);
     const position = value.position;
-    if (isRecord(position))
-      addDangling(position.on, pathBelow(path, 'position.on'), planes, 'plane', problems);
+    if (isRecord(position)) addDangling(position.on, `${path}.position.on`, planes, 'plane', problems);
   }
 }
 
@@ -54,10 +57,10 @@ function uniqueIds(rows: Row[], what: string, problems: ProblemList): Set<unknow
 function addDangling(
   id: unknown,
   path: string,
-  known: Set<unknown>,
+  known: Set<unknown> | null,
   what: string,
   problems: ProblemList,
 ): void {
-  if (typeof id !== 'string' || known.has(id)) return;
+  if (typeof id !== 'string' || !known || known.has(id)) return;
   problems.add(path, `No ${what} has the id ${shown(id)}. Add that ${what}, or name one that is there.`);
 }

@@ -8,24 +8,41 @@ import { surveySchema } from './survey-schema.ts';
 
 /** Adds a problem for each place where a document differs from the record's shape. */
 export function addSchemaProblems(document: unknown, problems: ProblemList): void {
-  const result = v.safeParse(surveySchema, document);
-  for (const issue of result.issues ?? []) {
-    const keys = (issue.path ?? []).map((step) => step.key as string | number);
-    if (isExcess(issue)) keys.pop(); // what is wrong is the list that has one item too many
-    const path = keys.reduce<string>(pathBelow, '') || 'file';
-    const phrase = issue.input === undefined ? phraseAt(document, keys) : issue.message;
-    problems.add(
-      path,
-      sentence(lastName(path), isExcess(issue) ? issue.path?.at(-1)?.input : issue.input, phrase),
-    );
+  const listsForObjects = new Set<string>();
+  for (const issue of v.safeParse(surveySchema, document).issues ?? []) {
+    const steps = issue.path ?? [];
+    const keys = steps.map(({ key }) => key as string | number);
+    const wrongList = steps.findIndex(({ key, input }) => Array.isArray(input) && typeof key === 'string');
+    if (wrongList < 0 && !isExcess(issue)) {
+      addProblem(document, keys, issue.input, issue.message, problems);
+      continue;
+    }
+    // What is wrong is the list itself: it stands for an object, or has one item too many.
+    const depth = wrongList < 0 ? keys.length - 1 : wrongList;
+    const above = keys.slice(0, depth);
+    const path = pathOf(above);
+    if (listsForObjects.has(path)) continue;
+    listsForObjects.add(path);
+    addProblem(document, above, steps[depth].input, phraseAt(document, above), problems);
   }
 }
 
 const isExcess = (issue: v.BaseIssue<unknown>) => issue.type === 'strict_tuple' && issue.expected === 'never';
 
-function sentence(name: string, input: unknown, phrase: string | null): string {
-  if (input === undefined) return `${name} is missing. ${phrase ? `Give ${phrase}` : 'Add it'}.`;
-  return `${name} must be ${phrase}; it is ${shown(input)}. Correct it.`;
+const pathOf = (keys: (string | number)[]) => keys.reduce<string>(pathBelow, '') || 'file';
+
+function addProblem(
+  document: unknown,
+  keys: (string | number)[],
+  input: unknown,
+  phrase: string | null,
+  problems: ProblemList,
+): void {
+  const path = pathOf(keys);
+  if (input === undefined) {
+    const wanted = phraseAt(document, keys);
+    problems.add(path, `${lastName(path)} is missing. ${wanted ? `Give ${wanted}` : 'Add it'}.`);
+  } else problems.add(path, `${lastName(path)} must be ${phrase}; it is ${shown(input)}. Correct it.`);
 }
 
 /** The phrase of the schema at the end of a path, for fields that are not there at all. */

@@ -1,6 +1,7 @@
 import * as v from 'valibot';
 import * as f from './field-schemas.ts';
 import { LIMITS } from './limits.ts';
+import { obstructionKinds } from './obstruction-kinds.ts';
 import { SURVEY_FORMAT, SURVEY_VERSION } from './survey.ts';
 
 /**
@@ -66,17 +67,7 @@ const obstructionSchema = v.looseObject(
     id: f.identifier,
     name: f.name,
     order: f.orderKey,
-    kind: f.oneOf([
-      'deciduous-tree',
-      'evergreen-tree',
-      'building',
-      'roof-part',
-      'chimney',
-      'mast',
-      'wire',
-      'terrain',
-      'other',
-    ]),
+    kind: f.oneOf(obstructionKinds.map(({ kind }) => kind)),
     distance: v.optional(f.numberOver(0, 1_000_000, 'metres')),
     transmittance: v.optional(
       v.union([f.share, f.monthsOf(f.share)], 'a number from 0 to 1, or a list of twelve'),
