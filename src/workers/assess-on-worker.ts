@@ -60,7 +60,7 @@ export class AssessOnWorker {
     signal: CancelSignal,
     call: (engine: Remote<ShadeEngine>, ticket: number) => Promise<Outcome<T>>,
   ): Promise<Outcome<T>> {
-    if (signal.aborted) return cancelled;
+    if (signal.aborted) return { ok: false, fault: { code: 'cancelled' } };
     const running = this.ready();
     const ticket = this.tickets++;
     // messages keep their order, so the survey is there before the question

@@ -1,0 +1,22 @@
+const NAMES = ['N', 'NE', 'E', 'SE', 'S', 'SW', 'W', 'NW'] as const;
+
+/** The eight compass points with their azimuths. */
+export const COMPASS_POINTS: readonly { name: string; azimuth: number }[] = NAMES.map((name, i) => ({
+  name,
+  azimuth: i * 45,
+}));
+
+const WORDS = [
+  'north',
+  'north-east',
+  'east',
+  'south-east',
+  'south',
+  'south-west',
+  'west',
+  'north-west',
+] as const;
+
+/** The nearest of the eight compass points, in words. */
+export const compassWord = (azimuth: number): string =>
+  WORDS[Math.round((((azimuth % 360) + 360) % 360) / 45) % 8];

@@ -1,0 +1,121 @@
+import { fullCircle, turnBetween } from '../../core/angles/angles.ts';
+import type { AzimuthRange } from '../../core/shading/coverage.ts';
+import type { Mark } from '../marks.ts';
+import { textWidth } from '../marks.ts';
+import type { LabelPlaces } from './label-places.ts';
+import { boxAround } from './label-places.ts';
+import type { SkyFrame } from './sky-frame.ts';
+import { xOfTurn } from './sky-frame.ts';
+
+/** What is left of the circle between ranges somebody looked at: [from, to], `to` may run past 360. */
+export function unseenRanges(observed: readonly AzimuthRange[]): [number, number][] {
+  if (observed.length === 0) return [[0, 360]];
+  const ranges = observed
+    .map(([from, to]): [number, number] => {
+      const width = to - from >= 360 ? 360 : fullCircle(to - from);
+      return [fullCircle(from), fullCircle(from) + width];
+    })
+    .sort((a, b) => a[0] - b[0]);
+  const gaps: [number, number][] = [];
+  let reached = ranges[0][1];
+  for (const [from, to] of ranges.slice(1)) {
+    if (from > reached) gaps.push([reached, from]);
+    reached = Math.max(reached, to);
+  }
+  // what the last ranges cover past north has been covered at the start as well
+  const covered = reached - 360;
+  const cut = gaps
+    .map(([from, to]): [number, number] => [Math.max(from, covered), to])
+    .filter(([from, to]) => to > from);
+  const end = ranges[0][0] + 360;
+  return end > reached ? [...cut, [reached, end]] : cut;
+}
+
+/** A light dotted pattern over the azimuths nobody looked at, and words where there is room. */
+export function unseenMarks(
+  frame: SkyFrame,
+  observed: readonly AzimuthRange[],
+  places: LabelPlaces,
+  size: number,
+): { under: Mark[]; words: Mark[] } {
+  const under: Mark[] = [];
+  const words: Mark[] = [];
+  for (const [from, to] of unseenRanges(observed)) {
+    const first = to - from >= 360 ? -180 : turnBetween(frame.centre, from);
+    for (const shift of [0, -360, 360]) {
+      const left = Math.max(frame.left, xOfTurn(frame, first + shift));
+      const right = Math.min(frame.right, xOfTurn(frame, first + (to - from) + shift));
+      if (right - left < 0.5) continue;
+      const { above, below } = frame;
+      const edge: Mark = {
+        kind: 'path',
+        lines: [
+          [left, above, left, below],
+          [right, above, right, below],
+        ],
+        pen: { tone: 'faint', width: 0.7, dash: [2, 3] },
+      };
+      const hatch = { angle: 45, spacing: 11, width: 3.4, ringed: true, tone: 'rule' } as const;
+      under.push(
+        {
+          kind: 'path',
+          lines: [[left, above, right, above, right, below, left, below]],
+          closed: true,
+          fill: { hatch },
+        },
+        edge,
+      );
+      words.push(...wordsIn(left, right, frame, places, size));
+    }
+  }
+  return { under, words };
+}
+
+function wordsIn(left: number, right: number, frame: SkyFrame, places: LabelPlaces, size: number): Mark[] {
+  const text = 'nobody looked here';
+  const width = textWidth(text, size);
+  if (right - left >= width + 4) {
+    const middle = (left + right) / 2;
+    const spots = [0.3, 0.5, 0.7, 0.1].map((share) =>
+      boxAround(middle, frame.above + size + share * (frame.below - frame.above - 2 * size), width, size),
+    );
+    const place = places.take(spots);
+    return place
+      ? [
+          {
+            kind: 'text',
+            x: place.x,
+            y: place.y,
+            text,
+            size,
+            anchor: 'middle',
+            italic: true,
+            rim: true,
+            tone: 'faint',
+          },
+        ]
+      : [];
+  }
+  if (right - left < size * 1.3 || frame.below - frame.above < width) return [];
+  const x = (left + right) / 2 + size * 0.35;
+  const y = (frame.above + frame.below) / 2;
+  const place = places.take([
+    { left: x - size, right: x + size * 0.3, top: y - width / 2, bottom: y + width / 2 },
+  ]);
+  return place
+    ? [
+        {
+          kind: 'text',
+          x,
+          y,
+          text,
+          size,
+          anchor: 'middle',
+          italic: true,
+          rim: true,
+          tone: 'faint',
+          turn: -90,
+        },
+      ]
+    : [];
+}
