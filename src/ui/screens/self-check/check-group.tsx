@@ -7,7 +7,7 @@ export function CheckGroup({ group }: { group: SelfCheckGroup }) {
   const headingId = useId();
   const wrong = group.rows.filter(({ ok }) => !ok).length;
   return (
-    <section class="check-group stack" aria-labelledby={headingId}>
+    <section class="check-group stack">
       <h2 id={headingId}>{group.title}</h2>
       <p class="small">
         {wrong === 0 ? `All ${group.rows.length} met.` : `${wrong} of ${group.rows.length} not met.`}{' '}
