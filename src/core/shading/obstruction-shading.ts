@@ -5,8 +5,12 @@ import { blockedLight, shadedMonths } from './blocked-light.ts';
 import type { SkyMap } from './sky-map.ts';
 import { unshadedMonths } from './sky-map.ts';
 
-/** Two obstructions hide each other where removing both gives this much more access than removing each. */
-const LEAST_SHARED_GAIN = 0.001;
+/**
+ * Two obstructions hide each other where removing both gives this much more access than removing each, and this share of
+ * what both give: less is not worth a sentence.
+ */
+const LEAST_SHARED_GAIN = 0.002;
+const LEAST_SHARED_PART = 0.1;
 /** Pairs are compared among this many obstructions, those that would cost most alone. */
 const MOST_COMPARED = 40;
 
@@ -63,8 +67,9 @@ function hiddenBehindEachOther(
   for (const [place, i] of compared.entries())
     for (const j of compared.slice(place + 1)) {
       if (groupOf[i] === groupOf[j]) continue;
-      const shared = gainOf([i, j]) - rows[i].gainIfRemoved - rows[j].gainIfRemoved;
-      if (shared <= LEAST_SHARED_GAIN) continue;
+      const both = gainOf([i, j]);
+      const shared = both - rows[i].gainIfRemoved - rows[j].gainIfRemoved;
+      if (shared <= LEAST_SHARED_GAIN || shared < LEAST_SHARED_PART * both) continue;
       const [kept, joined] = [groupOf[i], groupOf[j]];
       groupOf.forEach((group, k) => group === joined && (groupOf[k] = kept));
     }
