@@ -50,7 +50,7 @@ function ineichenOver(track: SunTrack, linkeTurbidity: Months): SkyReader {
     const cosZenith = cosZenithOf(track, step);
     if (cosZenith <= 0) return false;
     const day = dayOf(track, step);
-    months[track.monthOfDay[day]!]!(cosZenith, airMassAt(cosZenith) * pressureRatio, normal[day]!, light);
+    months[track.monthOfDay[day]](cosZenith, airMassAt(cosZenith) * pressureRatio, normal[day], light);
     sky.weight[0] = 1;
     sky.ghi[0] = light.ghi;
     sky.dni[0] = light.dni;
@@ -65,7 +65,7 @@ function haurwitzErbsOver(track: SunTrack): SkyReader {
     const cosZenith = cosZenithOf(track, step);
     if (cosZenith <= 0) return false;
     const ghi = haurwitz(cosZenith);
-    const dhi = erbsDiffuse(ghi, cosZenith, normal[dayOf(track, step)]!);
+    const dhi = erbsDiffuse(ghi, cosZenith, normal[dayOf(track, step)]);
     sky.weight[0] = 1;
     sky.ghi[0] = ghi;
     sky.dhi[0] = dhi;

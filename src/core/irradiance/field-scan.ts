@@ -51,13 +51,13 @@ export class FieldScan {
   /** Text of a column, without blanks around it. */
   textAt(column: number): string {
     return column < this.columns
-      ? this.text.slice(this.starts[column], this.starts[column + 1]! - 1).trim()
+      ? this.text.slice(this.starts[column], this.starts[column + 1] - 1).trim()
       : '';
   }
 
   /** The whole line. */
   wholeLine(): string {
-    const from = this.starts[0]!;
+    const from = this.starts[0];
     const to = this.text.slice(from).search(/[\r\n]|$/);
     return this.text.slice(from, from + to);
   }
@@ -65,8 +65,8 @@ export class FieldScan {
   /** Number in a column; NaN where there is none. */
   numberAt(column: number): number {
     if (column >= this.columns) return NaN;
-    const to = this.starts[column + 1]! - 1;
-    let at = this.starts[column]!;
+    const to = this.starts[column + 1] - 1;
+    let at = this.starts[column];
     const negative = this.text.charCodeAt(at) === 45;
     if (negative) at++;
     let value = 0;

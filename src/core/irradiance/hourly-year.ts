@@ -60,7 +60,7 @@ export class HourlyYear {
    */
   place(line: number, month: number, day: number, hour: number): number | null {
     const start = monthStarts[month - 1];
-    const lastDay = month === 2 ? 29 : DAYS_IN_MONTH[month - 1]!;
+    const lastDay = month === 2 ? 29 : DAYS_IN_MONTH[month - 1];
     if (start === undefined || !(day >= 1 && day <= lastDay && hour >= 1 && hour <= 24)) {
       this.problem(
         `line ${line}`,
@@ -131,7 +131,7 @@ function impossible({ label, unit, lowest, highest }: HourlyColumn, value: numbe
 
 function nameOf(hour: number): string {
   let month = 11;
-  while (monthStarts[month]! > hour) month--;
-  const inMonth = hour - monthStarts[month]!;
+  while (monthStarts[month] > hour) month--;
+  const inMonth = hour - monthStarts[month];
   return `${Math.floor(inMonth / 24) + 1} ${MONTH_NAMES[month]}, hour ${(inMonth % 24) + 1}`;
 }

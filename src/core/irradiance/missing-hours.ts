@@ -35,7 +35,7 @@ function fromDaysAround(values: Float32Array, missing: Set<number>, hour: number
   const before = nearest(missing, hour, -24);
   const after = nearest(missing, hour, 24);
   const share = before.days / (before.days + after.days);
-  return values[before.hour]! * (1 - share) + values[after.hour]! * share;
+  return values[before.hour] * (1 - share) + values[after.hour] * share;
 }
 
 function nearest(missing: Set<number>, hour: number, step: number): { hour: number; days: number } {

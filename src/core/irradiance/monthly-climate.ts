@@ -21,12 +21,12 @@ export function monthlyOf(climate: Climate, track: SunTrack): MonthlyIrradiation
   const perStep = track.stepMinutes / 60_000; // W/m2 to kWh/m2
   for (let step = 0; step < track.steps; step++) {
     if (!read(step, sky)) continue;
-    const month = track.monthOfDay[dayOf(track, step)]!;
+    const month = track.monthOfDay[dayOf(track, step)];
     for (let k = 0; k < climate.stateCount; k++) {
-      const weight = sky.weight[k]! * perStep;
-      months.ghi[month]! += sky.ghi[k]! * weight;
-      months.dni[month]! += sky.dni[k]! * weight;
-      months.dhi[month]! += sky.dhi[k]! * weight;
+      const weight = sky.weight[k] * perStep;
+      months.ghi[month] += sky.ghi[k] * weight;
+      months.dni[month] += sky.dni[k] * weight;
+      months.dhi[month] += sky.dhi[k] * weight;
     }
   }
   return months;

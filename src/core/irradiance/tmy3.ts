@@ -80,7 +80,7 @@ function placeOf(scan: FieldScan, year: HourlyYear): number | null {
   const [date, time] = starts as unknown as [number, number];
   const whole = text.charCodeAt(date + 2) === 47 && text.charCodeAt(date + 5) === 47 && time - date === 11;
   const fullHour =
-    text.charCodeAt(time + 2) === 58 && twoDigits(text, time + 3) === 0 && starts[2]! - time === 6;
+    text.charCodeAt(time + 2) === 58 && twoDigits(text, time + 3) === 0 && starts[2] - time === 6;
   if (whole && fullHour)
     return year.place(scan.line, twoDigits(text, date), twoDigits(text, date + 3), twoDigits(text, time));
   year.problem(

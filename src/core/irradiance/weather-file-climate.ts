@@ -33,9 +33,9 @@ function reader(file: WeatherFile, track: SunTrack): SkyReader {
   const ahead = file.utcOffset - track.utcOffset + stepMinutes / 2 + HOURS * 60; // a year on, to stay positive
   return (step, sky) => {
     const hour = (((step * stepMinutes + ahead) / 60) | 0) % HOURS;
-    const global = ghi[hour]!;
-    const beam = dni[hour]!;
-    const diffuse = dhi[hour]!;
+    const global = ghi[hour];
+    const beam = dni[hour];
+    const diffuse = dhi[hour];
     if (global === 0 && beam === 0 && diffuse === 0) return false;
     sky.weight[0] = 1;
     sky.ghi[0] = global;

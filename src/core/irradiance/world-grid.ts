@@ -83,14 +83,14 @@ function gridPlane(bytes: ArrayBuffer, dataStart: number, header: Record<string,
   const months: Uint8Array[] = [];
   const month = (m: number) =>
     (months[m] ??= summed(new Uint8Array(bytes, from + m * size, size), shape.cols));
-  const at = (m: number, row: number, col: number) => month(m)[row * shape.cols + col]! * scale + offset;
+  const at = (m: number, row: number, col: number) => month(m)[row * shape.cols + col] * scale + offset;
   return { ...shape, ...corner, at };
 }
 
 /** Undoes the differences along each row. */
 function summed(differences: Uint8Array, cols: number): Uint8Array {
   const values = new Uint8Array(differences);
-  for (let i = 0; i < values.length; i++) if (i % cols !== 0) values[i]! += values[i - 1]!;
+  for (let i = 0; i < values.length; i++) if (i % cols !== 0) values[i] += values[i - 1];
   return values;
 }
 
