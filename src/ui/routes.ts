@@ -6,9 +6,20 @@ export const SURVEY_SECTIONS: SurveySection[] = [
     label: 'Site and roof',
     load: async () => (await import('./screens/survey/site-and-roof.tsx')).SiteAndRoof,
   },
+  {
+    path: 'shade',
+    label: 'Shade',
+    load: async () => (await import('./screens/shade/shade-section.tsx')).ShadeSection,
+  },
 ];
 
-export const PLAIN_SCREENS: PlainScreen[] = [];
+export const PLAIN_SCREENS: PlainScreen[] = [
+  {
+    path: '/self-check',
+    label: 'Self-check',
+    load: async () => (await import('./screens/self-check/self-check-screen.tsx')).SelfCheckScreen,
+  },
+];
 
 export type Place =
   | { screen: 'list' }

@@ -1,0 +1,26 @@
+import type { MonthlyShares } from '../../core/shading/assessment.ts';
+import type { Line, Picture } from '../marks.ts';
+
+const [PITCH, HEIGHT] = [7, 24];
+/** A month that loses this share fills the height. */
+const FULL = 0.25;
+
+/** Twelve small ink bars on a line: the share of each month's light an obstruction takes. */
+export function monthTicks(monthly: MonthlyShares): Picture {
+  const size = 9;
+  const bars = monthly.map((share, month): Line => {
+    const [x, high] = [month * PITCH + 1, Math.min(1, (share ?? 0) / FULL) * HEIGHT];
+    return [x, HEIGHT, x, HEIGHT - high, x + PITCH - 2, HEIGHT - high, x + PITCH - 2, HEIGHT];
+  });
+  const width = 12 * PITCH;
+  return {
+    width,
+    height: HEIGHT + size + 4,
+    marks: [
+      { kind: 'path', lines: bars, closed: true, fill: { tone: 'ink' } },
+      { kind: 'path', lines: [[0, HEIGHT, width, HEIGHT]], pen: { tone: 'ink', width: 1 } },
+      { kind: 'text', x: 0, y: HEIGHT + size + 2, text: 'Jan', size, tone: 'faint' },
+      { kind: 'text', x: width, y: HEIGHT + size + 2, text: 'Dec', size, anchor: 'end', tone: 'faint' },
+    ],
+  };
+}

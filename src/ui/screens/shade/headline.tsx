@@ -1,0 +1,64 @@
+import type { PlaneAssessment } from '../../../core/shading/assessment.ts';
+import type { StationShade } from '../../../core/shading/station-shade.ts';
+import { energy, listed, percent } from './figures.ts';
+
+interface Props {
+  plane: PlaneAssessment;
+  shade: StationShade;
+  goneNames: readonly string[];
+  onPutBack: () => void;
+}
+
+/** The year's figure, large, and what stands behind it. */
+export function Headline({ plane, shade, goneNames, onPutBack }: Props) {
+  const { measured, imagined } = shade;
+  return (
+    <div class="shade-headline">
+      <p class="shade-figure">
+        <strong>{percent(measured.solarAccess.annual)}</strong>
+        <span>of the year’s sunlight reaches {measured.name}</span>
+      </p>
+      {imagined && (
+        <div class="imagined" role="status">
+          <p>
+            <strong>{percent(imagined.solarAccess.annual)}</strong> if {listed(goneNames)}{' '}
+            {goneNames.length > 1 ? 'were' : 'was'} gone. Imagined, not measured.
+          </p>
+          <button type="button" onClick={onPutBack}>
+            Put {goneNames.length > 1 ? 'them' : 'it'} back
+          </button>
+        </div>
+      )}
+      <dl class="facts shade-facts">
+        {factsOf(plane, shade).map(([term, value]) => (
+          <div key={term}>
+            <dt>{term}</dt>
+            <dd>{value}</dd>
+          </div>
+        ))}
+      </dl>
+    </div>
+  );
+}
+
+function factsOf(plane: PlaneAssessment, { measured, unshaded }: StationShade): [string, string][] {
+  const { solarAccess, orientationFactor, bestPlane } = plane;
+  const facts: [string, string][] = [
+    ['Light a year', `${energy(measured.irradiation.annual)} of ${energy(unshaded.annual)} kWh/m²`],
+    [
+      'Seen',
+      `${percent(measured.coverage, 0)} of the light comes through parts of the sky that somebody looked at`,
+    ],
+  ];
+  if (solarAccess && solarAccess.count > 1)
+    facts.push([
+      plane.name,
+      `${percent(solarAccess.annual)} on average over ${solarAccess.count} stations, ${percent(solarAccess.lowest)} at the lowest`,
+    ]);
+  facts.push([
+    'How it lies',
+    `${plane.surfaceTilt.toFixed(0)}° towards ${plane.surfaceAzimuth.toFixed(0)}°: ${percent(orientationFactor, 0)} of the best here ` +
+      `(${bestPlane.surfaceTilt.toFixed(0)}° towards ${bestPlane.surfaceAzimuth.toFixed(0)}°)`,
+  ]);
+  return facts;
+}

@@ -1,0 +1,84 @@
+import { useEffect, useMemo, useState } from 'preact/hooks';
+import type { AppServices } from '../../../app/app-services.ts';
+import type { Assessment } from '../../../core/shading/assessment.ts';
+import type { AssessRequest, CalculationFault } from '../../../core/shading/calculation.ts';
+import type { StationShade } from '../../../core/shading/station-shade.ts';
+import type { Survey } from '../../../core/survey/survey.ts';
+import { weatherBytes } from './weather-choice.ts';
+
+/** What the calculation has come to. The last good results stay while new ones are made. */
+export interface ShadeState {
+  working: { share: number; stage: string } | null;
+  fault: CalculationFault | null;
+  assessment: Assessment | null;
+  shade: StationShade | null;
+  cancel: () => void;
+  retry: () => void;
+}
+
+export interface ShadeWish {
+  survey: Survey;
+  plane: string | null;
+  station: string | null;
+  /** Obstructions imagined gone; the same set until another is wished for. */
+  gone: ReadonlySet<string>;
+}
+
+/** Runs the assessment of a survey and the shade of one of its stations on the worker. */
+export function useShade(services: AppServices, { survey, plane, station, gone }: ShadeWish): ShadeState {
+  const [attemptNumber, setAttempt] = useState(0);
+  const [working, setWorking] = useState<ShadeState['working']>(null);
+  const [fault, setFault] = useState<CalculationFault | null>(null);
+  const [assessed, setAssessed] = useState<{ request: AssessRequest; assessment: Assessment } | null>(null);
+  const [shade, setShade] = useState<{ shade: StationShade; of: string } | null>(null);
+  const abort = useMemo(() => new AbortController(), [survey, attemptNumber]);
+
+  useEffect(() => {
+    const { signal } = abort;
+    const work = async () => {
+      setFault(null);
+      setWorking({ share: 0, stage: 'Reading the climate' });
+      const weatherFile = await weatherBytes(services.weather, survey.climate);
+      const request = { survey, weatherFile: weatherFile ?? undefined };
+      const outcome = await services.assess.assess(
+        request,
+        (share, stage) => !signal.aborted && setWorking({ share, stage }),
+        signal,
+      );
+      if (signal.aborted && signal.reason === LEFT) return;
+      setWorking(null);
+      if (outcome.ok) setAssessed({ request, assessment: outcome.value });
+      else setFault(outcome.fault);
+    };
+    void work().catch((error: unknown) => {
+      setWorking(null);
+      setFault({ code: 'failed', detail: String(error) });
+    });
+    return () => abort.abort(LEFT);
+  }, [services, survey, abort]);
+
+  const request = assessed?.request ?? null;
+  useEffect(() => {
+    if (!request || request.survey !== survey || plane === null || station === null) return undefined;
+    const leaving = new AbortController();
+    const changes = [...gone].map((obstruction) => ({ obstruction, kind: 'gone' }) as const);
+    void services.assess.shade(request, { plane, station, changes }, leaving.signal).then((outcome) => {
+      if (leaving.signal.aborted) return;
+      if (outcome.ok) setShade({ shade: outcome.value, of: `${plane} ${station}` });
+      else setFault(outcome.fault);
+    });
+    return () => leaving.abort();
+  }, [services, request, survey, plane, station, gone]);
+
+  return {
+    working,
+    fault,
+    assessment: assessed?.assessment ?? null,
+    shade: shade?.of === `${plane} ${station}` ? shade.shade : null,
+    cancel: () => abort.abort(),
+    retry: () => setAttempt((n) => n + 1),
+  };
+}
+
+/** Why a calculation was ended: nobody looks at it any more. */
+const LEFT = 'left';
