@@ -12,7 +12,10 @@ const pure = {
     ],
     'no-restricted-syntax': [
       'error',
-      { selector: "NewExpression[callee.name='Date'][arguments.length=0]", message: 'core and report do not read the clock.' },
+      {
+        selector: "NewExpression[callee.name='Date'][arguments.length=0]",
+        message: 'core and report do not read the clock.',
+      },
     ],
   },
 };
@@ -30,7 +33,11 @@ export default tseslint.config(
       eqeqeq: 'error',
     },
   },
-  { files: ['src/ui/**', 'src/main.tsx'], plugins: { 'react-hooks': hooks }, rules: { 'react-hooks/rules-of-hooks': 'error' } },
+  {
+    files: ['src/ui/**', 'src/main.tsx'],
+    plugins: { 'react-hooks': hooks },
+    rules: { 'react-hooks/rules-of-hooks': 'error' },
+  },
   { files: ['src/cli/**', 'tests/bench/**'], rules: { 'no-console': 'off' } },
   pure,
 );
