@@ -14,7 +14,11 @@ export function assessmentText(assessed: Assessment & { file: string; title: str
     'Solar access is the light that obstructions leave, in percent of the light without them.',
     '',
   ];
-  return `${lines.join('\n')}\n${planes.map(planeText).join('\n')}\n`;
+  const results =
+    planes.length > 0
+      ? planes.map(planeText).join('\n')
+      : 'The survey has no roof planes, so there is nothing to assess.\n';
+  return `${lines.join('\n')}\n${results}\n`;
 }
 
 function planeText(plane: PlaneAssessment): string {

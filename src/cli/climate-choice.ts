@@ -11,7 +11,7 @@ import type { WorldGrid } from '../core/irradiance/world-grid.ts';
 import { decodeWorldGrid } from '../core/irradiance/world-grid.ts';
 import type { Parsed, Problem } from '../core/survey/problem.ts';
 import type { ClimateChoice, Site } from '../core/survey/survey.ts';
-import { readText } from './read-file.ts';
+import { readWeatherText } from './read-file.ts';
 
 const GRID = new URL('../../public/world-climate.bin', import.meta.url);
 
@@ -43,7 +43,7 @@ function weatherFile(path: string): Parsed<WeatherFile & { sha256: string }> {
 }
 
 function readWeatherFile(path: string): Parsed<WeatherFile & { sha256: string }> {
-  const file = readText(path);
+  const file = readWeatherText(path);
   if (!file.ok) return file;
   const parsed = parseWeatherFile(file.value.text, basename(path));
   if (!parsed.ok) return parsed;

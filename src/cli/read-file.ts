@@ -9,27 +9,39 @@ export interface FileText {
   text: string;
 }
 
-/** Text of a file; a problem where it cannot be had. `path` is where the problem is said to be. */
-export function readText(file: string, path = 'file'): Parsed<FileText> {
-  const refused = (message: string): Parsed<FileText> => ({ ok: false, problems: [{ path, message }] });
+const refused = (message: string): Parsed<FileText> => ({ ok: false, problems: [{ path: 'file', message }] });
+
+/** Text of a survey file, which is UTF-8; a problem where it cannot be had. */
+export function readSurveyText(file: string): Parsed<FileText> {
+  return readFile(file, (bytes) => utf8(bytes));
+}
+
+/** Text of a weather file: UTF-8 where it is, else byte by byte (ISO 8859-1), as old ones are written. */
+export function readWeatherText(file: string): Parsed<FileText> {
+  return readFile(file, (bytes) => utf8(bytes) ?? new TextDecoder('latin1').decode(bytes));
+}
+
+function readFile(file: string, decoded: (bytes: Uint8Array) => string | null): Parsed<FileText> {
   try {
     const found = statSync(file);
     if (!found.isFile()) return refused(`${file} is not a file.`);
     if (found.size > LARGEST)
       return refused(`${file} has ${Math.round(found.size / 1e6)} MB; the limit is ${LARGEST / 1e6} MB.`);
     const bytes = readFileSync(file);
-    return { ok: true, value: { bytes, text: decoded(bytes) }, warnings: [] };
+    const text = decoded(bytes);
+    if (text === null)
+      return refused(`${file} is not UTF-8 text: it is damaged or of another kind. Export it again.`);
+    return { ok: true, value: { bytes, text }, warnings: [] };
   } catch (error) {
     return refused(reasonOf(error as NodeJS.ErrnoException, file));
   }
 }
 
-/** UTF-8 where it is; else byte by byte (ISO 8859-1), as old weather files are written. */
-function decoded(bytes: Uint8Array): string {
+function utf8(bytes: Uint8Array): string | null {
   try {
     return new TextDecoder('utf-8', { fatal: true }).decode(bytes);
   } catch {
-    return new TextDecoder('latin1').decode(bytes);
+    return null;
   }
 }
 

@@ -10,7 +10,7 @@ import type { Command, CommandCall, Terminal } from '../command.ts';
 import { numberOption, textOption, UsageError, wordOption } from '../command.ts';
 import { problemLines } from '../problem-lines.ts';
 import { progressTeller } from '../progress.ts';
-import { readText } from '../read-file.ts';
+import { readSurveyText } from '../read-file.ts';
 
 const MODELS = TRANSPOSITIONS.map(({ id }) => id);
 /** Whole minutes that divide an hour. */
@@ -84,7 +84,7 @@ function choiceOf(call: CommandCall): AssessChoice {
 
 async function assessFile(file: string, choice: AssessChoice, terminal: Terminal): Promise<Assessed> {
   const tell = progressTeller(terminal, file);
-  const read = readText(file);
+  const read = readSurveyText(file);
   const parsed = read.ok ? parseSurvey(read.value.text) : read;
   if (!parsed.ok) return { file, problems: parsed.problems, planes: [] };
   const survey: Survey = parsed.value;

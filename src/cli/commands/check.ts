@@ -2,7 +2,7 @@ import { parseSurvey } from '../../core/survey/parse-survey.ts';
 import type { Problem } from '../../core/survey/problem.ts';
 import type { Command } from '../command.ts';
 import { problemLines } from '../problem-lines.ts';
-import { readText } from '../read-file.ts';
+import { readSurveyText } from '../read-file.ts';
 
 interface CheckedFile {
   file: string;
@@ -40,7 +40,7 @@ Exit code 1 where any file has a problem. Warnings alone leave it at 0.`,
 };
 
 function checkFile(file: string): CheckedFile {
-  const read = readText(file);
+  const read = readSurveyText(file);
   const parsed = read.ok ? parseSurvey(read.value.text) : read;
   if (!parsed.ok) return { file, ok: false, problems: parsed.problems, warnings: [] };
   return { file, ok: true, title: parsed.value.title, problems: [], warnings: parsed.warnings };

@@ -4,7 +4,7 @@ import { parseWeatherFile } from '../../core/irradiance/weather-file.ts';
 import { DAYS_IN_MONTH } from '../../core/solar-position/sun-track.ts';
 import type { Command } from '../command.ts';
 import { problemLines } from '../problem-lines.ts';
-import { readText } from '../read-file.ts';
+import { readWeatherText } from '../read-file.ts';
 import { grouped, monthsTable } from '../table.ts';
 
 export const weather: Command = {
@@ -17,7 +17,7 @@ export const weather: Command = {
              utcOffset in minutes`,
   options: { json: { type: 'boolean' } },
   run({ files: [file], values, terminal }) {
-    const read = readText(file);
+    const read = readWeatherText(file);
     const parsed = read.ok ? parseWeatherFile(read.value.text, basename(file)) : read;
     if (!parsed.ok) {
       if (values.json) terminal.out(`${JSON.stringify({ file, problems: parsed.problems }, null, 1)}\n`);
