@@ -6,7 +6,9 @@ export interface Column {
 
 /** Rows as ruled text, a column as wide as its widest cell. */
 export function table(columns: readonly Column[], rows: readonly (readonly string[])[]): string {
-  const widths = columns.map(({ head }, i) => Math.max(head.length, ...rows.map((row) => row[i].length)));
+  const widths = columns.map(({ head }, i) =>
+    rows.reduce((widest, row) => (row[i].length > widest ? row[i].length : widest), head.length),
+  );
   const line = (cells: readonly string[]) =>
     cells
       .map((cell, i) => (columns[i].number ? cell.padStart(widths[i]) : cell.padEnd(widths[i])))
