@@ -2,7 +2,7 @@
 import { spawnSync } from 'node:child_process';
 import { existsSync } from 'node:fs';
 
-const BROWSER = '/usr/bin/chromium';
+const BROWSER = process.env.CHROMIUM ?? '/usr/bin/chromium';
 const PACKAGES = ['chromium', 'fonts-dejavu-core'];
 const INSTALL = `apt-get update && apt-get install -y --no-install-recommends ${PACKAGES.join(' ')}`;
 
