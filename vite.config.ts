@@ -50,7 +50,7 @@ export default defineConfig({
         ],
       },
       injectManifest: {
-        globPatterns: ['**/*.{js,css,html,svg,png,json,bin,webmanifest}'],
+        globPatterns: ['**/*.{js,css,html,svg,png,json,bin}'],
         maximumFileSizeToCacheInBytes: 3_000_000,
       },
     }),

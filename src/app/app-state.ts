@@ -53,6 +53,8 @@ export interface AppState {
   conflicts: Signal<ImportConflict[]>;
   /** Ids of surveys found unreadable, with why. */
   unreadable: Signal<ReadonlyMap<string, Problem[]>>;
+  /** When each survey had last been changed when it was looked at for that; for actions only. */
+  lookedAt: Map<string, number>;
   trouble: Signal<Trouble | null>;
   /** Where the database stands, when it is not simply open. */
   database: Signal<'storage-waiting' | 'storage-taken-over' | null>;
@@ -68,6 +70,7 @@ export function appState(): AppState {
     imports: signal([]),
     conflicts: signal([]),
     unreadable: signal(new Map()),
+    lookedAt: new Map(),
     trouble: signal(null),
     database: signal(null),
     update: signal('none'),

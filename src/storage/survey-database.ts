@@ -37,12 +37,18 @@ export function surveyDatabase({ connection, check, now, newId }: SurveyDatabase
   const act = <T>(work: (transaction: Writing) => Promise<T>) =>
     connection.run((database) => writing(database, work));
 
-  /** Writes the changes and, from all fields as they then are, the line of the list. */
-  async function change(transaction: Writing, id: string, changes: FieldChange[], row: Partial<SurveyRow>) {
-    const stamp = await stampOfAct(transaction, now(), newId);
-    await writeChanges(transaction, id, changes, stamp);
-    const { deletedAt = null, deletionStamp = null } = row;
-    const summary = summaryOf(id, await storedDocument(transaction, id), { changedAt: now(), deletedAt });
+  async function change(transaction: Writing, id: string, changes: FieldChange[]) {
+    await writeChanges(transaction, id, changes, await stampOfAct(transaction, now(), newId));
+  }
+
+  /** Writes the line of the list that a document gives. */
+  async function putLine(
+    transaction: Writing,
+    id: string,
+    document: unknown,
+    { deletedAt, deletionStamp }: Pick<SurveyRow, 'deletedAt' | 'deletionStamp'>,
+  ) {
+    const summary = summaryOf(id, document, { changedAt: now(), deletedAt });
     await transaction.objectStore('surveys').put({ ...summary, deletionStamp });
   }
 
@@ -79,11 +85,16 @@ export function surveyDatabase({ connection, check, now, newId }: SurveyDatabase
         const { id } = survey;
         if (await transaction.objectStore('surveys').get(id)) throw new AppError('survey-exists', id);
         await transaction.objectStore('erased').delete(id);
-        await change(transaction, id, fieldsOf(survey), {});
+        await change(transaction, id, fieldsOf(survey));
+        await putLine(transaction, id, survey, { deletedAt: null, deletionStamp: null });
       }),
 
     applyChanges: (id, changes) =>
-      act(async (transaction) => change(transaction, id, changes, await rowOf(transaction, id))),
+      act(async (transaction) => {
+        const row = await rowOf(transaction, id);
+        await change(transaction, id, changes);
+        await putLine(transaction, id, await storedDocument(transaction, id), row);
+      }),
 
     remove: (id) => markDeleted(id, now()),
 

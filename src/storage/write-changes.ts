@@ -1,3 +1,4 @@
+import { unwrap } from 'idb';
 import { AppError } from '../app/app-error.ts';
 import type { FieldChange } from '../core/survey/field-changes.ts';
 import type { JsonValue } from '../core/survey/json-value.ts';
@@ -33,14 +34,16 @@ export async function writeChanges(
   changes: readonly FieldChange[],
   stamp: Stamp,
 ): Promise<void> {
-  const fields = transaction.objectStore('fields');
-  const write = ({ path, value }: FieldChange): Promise<unknown> => {
-    if (isReadingPath(path))
-      return value === undefined
-        ? takeOutReading(transaction, survey, path, stamp)
-        : addReading(transaction, survey, path, value);
-    const row: FieldRow = { survey, path, stamp, ...(value !== undefined && { value }) };
-    return fields.put(row);
-  };
-  await Promise.all(changes.map(write));
+  // Past the wrapper: a promise for each of ten thousands of fields costs more than storing them, and a failing
+  // request ends the transaction anyhow, which is waited for.
+  const fields = unwrap(transaction.objectStore('fields'));
+  const readings: Promise<void>[] = [];
+  for (const { path, value } of changes) {
+    if (!isReadingPath(path)) {
+      const row: FieldRow = { survey, path, stamp, ...(value !== undefined && { value }) };
+      fields.put(row);
+    } else if (value === undefined) readings.push(takeOutReading(transaction, survey, path, stamp));
+    else readings.push(addReading(transaction, survey, path, value));
+  }
+  await Promise.all(readings);
 }

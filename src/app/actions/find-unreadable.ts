@@ -1,12 +1,19 @@
 import type { AppServices } from '../app-services.ts';
 import type { Problem } from '../../core/survey/problem.ts';
 
-/** Reads every stored survey once and marks in the list those that this version cannot read. */
+/**
+ * Marks in the list the surveys that this version cannot read. Each is read once, and again only after it was changed:
+ * a long survey takes a while.
+ */
 export async function findUnreadable({ state, store }: Pick<AppServices, 'state' | 'store'>): Promise<void> {
-  const found = new Map<string, Problem[]>();
-  for (const { id } of await store.list()) {
+  const { lookedAt, unreadable } = state;
+  const found = new Map<string, Problem[]>(unreadable.value);
+  for (const { id, changedAt } of await store.list()) {
+    if (lookedAt.get(id) === changedAt) continue;
     const stored = await store.load(id);
     if (stored?.state === 'unreadable') found.set(id, stored.problems);
+    else found.delete(id);
+    lookedAt.set(id, changedAt);
   }
-  state.unreadable.value = found;
+  unreadable.value = found;
 }

@@ -46,7 +46,7 @@ export function ImportResults() {
           <ul class="ledger">
             {results.map((result) => (
               <li key={result.file} class="stack">
-                <h3>{result.file}</h3>
+                <h2 class="file-name">{result.file}</h2>
                 <Outcome result={result} />
               </li>
             ))}

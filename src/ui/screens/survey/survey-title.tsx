@@ -55,13 +55,16 @@ export function SurveyTitle({ survey }: { survey: Survey }) {
     if (wasEditing.current && !editing) edit.current?.focus();
     wasEditing.current = editing;
   }, [editing]);
-  if (editing) return <TitleForm survey={survey} onDone={() => setEditing(false)} />;
   return (
     <div class="row survey-title">
       <ScreenHeading title={survey.title} />
-      <button ref={edit} type="button" class="plain" onClick={() => setEditing(true)}>
-        Rename
-      </button>
+      {editing ? (
+        <TitleForm survey={survey} onDone={() => setEditing(false)} />
+      ) : (
+        <button ref={edit} type="button" class="plain" onClick={() => setEditing(true)}>
+          Rename
+        </button>
+      )}
     </div>
   );
 }
