@@ -2,6 +2,7 @@ import { PLACE, keyOfStep, surveyLayout } from './field-layout.ts';
 import type { FieldChange, ListLayout, ObjectLayout } from './field-layout.ts';
 import { isRecord } from './json-value.ts';
 import type { JsonRecord } from './json-value.ts';
+import { inRecordOrder } from './record-order.ts';
 
 /** Fields under one step of their paths. */
 interface Branch {
@@ -12,7 +13,8 @@ interface Branch {
 /**
  * The survey that fields make, for `surveyFromJson` to check: the inverse of `fieldsOf`. The fields come in any order;
  * of two on one path the later counts, and an undefined value takes the field away. A row without its `id` field is
- * left out (it is deleted; what else was written in it stays in the fields), and so are paths that lead nowhere.
+ * left out (it is deleted; what else was written in it stays in the fields), and so are paths that lead nowhere. The
+ * document's fields are in the order of the record.
  */
 export function surveyOf(fields: Iterable<FieldChange>): unknown {
   const root: Branch = { value: undefined, below: new Map() };
@@ -21,7 +23,7 @@ export function surveyOf(fields: Iterable<FieldChange>): unknown {
     for (const step of path.split('/')) branch = branchAt(branch, step);
     branch.value = value;
   }
-  return objectFrom(root, surveyLayout);
+  return inRecordOrder(objectFrom(root, surveyLayout));
 }
 
 function branchAt(branch: Branch, step: string): Branch {

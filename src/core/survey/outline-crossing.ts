@@ -17,9 +17,30 @@ export function outlineCrossing(sightings: readonly Direction[], edge: TraceEdge
   const count = kept.length;
   if (count < 3) return null;
   const meet = edge === 'drawn' ? drawnEdgesMeet(kept, sightings) : straightEdgesMeet(kept, sightings);
+  const meeting = firstMeeting(count, meet);
+  return meeting && [kept[meeting[0]], kept[meeting[1]]];
+}
+
+/**
+ * Whether a polygon in a plane meets itself: the places in the list (from 0) at which two such edges start, or null.
+ * Corners that repeat the one before are passed over.
+ */
+export function polygonCrossing(corners: readonly Point[]): [number, number] | null {
+  const kept = corners.flatMap(({ x, y }, i) => {
+    const before = corners.at(i - 1)!;
+    return x === before.x && y === before.y ? [] : [i];
+  });
+  const corner = (k: number) => corners[kept[k % kept.length]];
+  const meeting = firstMeeting(kept.length, (i, j) =>
+    segmentsMeet(corner(i), corner(i + 1), corner(j), corner(j + 1)),
+  );
+  return meeting && [kept[meeting[0]], kept[meeting[1]]];
+}
+
+/** The first two edges of a closed chain that meet without being neighbours. */
+function firstMeeting(count: number, meet: EdgesMeet): [number, number] | null {
   for (let i = 0; i < count; i++)
-    for (let j = i + 2; j < count; j++)
-      if (!(i === 0 && j === count - 1) && meet(i, j)) return [kept[i], kept[j]];
+    for (let j = i + 2; j < count; j++) if (!(i === 0 && j === count - 1) && meet(i, j)) return [i, j];
   return null;
 }
 

@@ -3,6 +3,7 @@ import { isRecord, shown } from './json-value.ts';
 import type { JsonRecord } from './json-value.ts';
 import { LIMITS } from './limits.ts';
 import { migrated } from './migrations.ts';
+import { addPlaneProblems } from './plane-checks.ts';
 import { ProblemList } from './problem-list.ts';
 import type { Parsed } from './problem.ts';
 import { addReferenceProblems } from './reference-checks.ts';
@@ -48,6 +49,7 @@ export function surveyFromJson(value: unknown): Parsed<Survey> {
   const { document } = migrated(value, version);
   addSchemaProblems(document, problems);
   addReferenceProblems(document, problems);
+  addPlaneProblems(document, problems);
   addTraceProblems(document, problems);
   if (!problems.isEmpty) return { ok: false, problems: problems.list() };
   return {

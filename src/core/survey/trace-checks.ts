@@ -1,27 +1,17 @@
-import { turnBetween } from '../angles/angles.ts';
 import type { JsonRecord } from './json-value.ts';
-import { traceEdge } from './obstruction-kinds.ts';
 import { ordered } from './order.ts';
 import { LIMITS } from './limits.ts';
-import { outlineCrossing } from './outline-crossing.ts';
 import type { ProblemList } from './problem-list.ts';
 import { rowsOf, tracesOf } from './record-rows.ts';
 import type { Row } from './record-rows.ts';
 import { pathBelow } from './record-path.ts';
 import { sightingDirection } from './sighting-direction.ts';
-import type { Obstruction, Sighting, Trace } from './survey.ts';
+import type { Sighting, Trace } from './survey.ts';
+import { addShapeProblems } from './trace-shape-checks.ts';
+import type { Pointed } from './trace-shape-checks.ts';
 
 /** Fewest sightings that make each shape. */
 const FEWEST = { skyline: 2, outline: 3, line: 2 } as const;
-/** A turn this close to half a circle could go either way. */
-const HALF_CIRCLE = 180 - 1e-9;
-
-/** One sighting of a trace, where it stands in the file and where it points. */
-interface Pointed {
-  path: string;
-  azimuth: number;
-  elevation: number;
-}
 
 /** Adds a problem for each trace that cannot be drawn, and each sighting that points nowhere. */
 export function addTraceProblems(document: JsonRecord, problems: ProblemList): void {
@@ -93,52 +83,3 @@ function pointedAt({ value, path }: Row, problems: ProblemList): Pointed | null 
 const hasAmendment = ({ amendments }: JsonRecord) => Array.isArray(amendments) && amendments.length > 0;
 const isObject = (value: unknown) => typeof value === 'object' && value !== null;
 const numberOr = <T>(value: unknown, otherwise: T) => (typeof value === 'number' ? value : otherwise);
-
-function addShapeProblems(
-  { value, path }: Row,
-  pointed: Pointed[],
-  kind: unknown,
-  problems: ProblemList,
-): void {
-  const trace = value as unknown as Trace;
-  const closed = trace.shape === 'outline' || (trace.shape === 'skyline' && trace.fullCircle === true);
-  const apart = addNeighbourProblems(pointed, closed, problems);
-  if (apart || pointed.length < 2) return;
-  if (trace.shape === 'skyline' && closed) addCircleProblem(path, pointed, problems);
-  if (trace.shape !== 'outline' || pointed.length < 3 || pointed.length > LIMITS.outlineSightings) return;
-  const edge = traceEdge(trace, { kind } as Obstruction);
-  const crossing = outlineCrossing(pointed, edge);
-  if (!crossing) return;
-  const [from, other] = crossing.map((i) => pointed[i].path.slice(path.length + 1));
-  problems.add(
-    pathBelow(path, 'sightings'),
-    `The outline crosses or touches itself: its edge after ${from} meets its edge after ${other}. Put the sightings in order around the edge, or split the outline in two.`,
-  );
-}
-
-function addNeighbourProblems(pointed: Pointed[], closed: boolean, problems: ProblemList): boolean {
-  let found = false;
-  pointed.forEach((sighting, i) => {
-    const before = pointed[i - 1] ?? (closed ? pointed.at(-1) : undefined);
-    if (!before || Math.abs(turnBetween(before.azimuth, sighting.azimuth)) < HALF_CIRCLE) return;
-    found = true;
-    problems.add(
-      sighting.path,
-      `The sighting is 180 degrees from its neighbour ${before.path} (azimuths ${before.azimuth} and ${sighting.azimuth}), so the edge could run either way. Add a sighting between the two.`,
-    );
-  });
-  return found;
-}
-
-/** A full circle must go once around; it does not where a gap of more than half the horizon is left. */
-function addCircleProblem(path: string, pointed: Pointed[], problems: ProblemList): void {
-  const turn = pointed.reduce(
-    (sum, sighting, i) => sum + turnBetween(pointed.at(i - 1)!.azimuth, sighting.azimuth),
-    0,
-  );
-  if (Math.abs(Math.abs(turn) - 360) < 1e-6) return;
-  problems.add(
-    pathBelow(path, 'fullCircle'),
-    'The sightings do not go once around the horizon: somewhere neighbours are 180 degrees or more apart, or the order is mixed up. Add sightings in the gap, or take fullCircle out.',
-  );
-}

@@ -31,6 +31,11 @@ describe('a survey comes back from its fields', () => {
     expect(surveyOf(stored(fieldsOf(survey)))).toEqual(survey);
   });
 
+  test.each(sampleTexts)('$file, as the very same text', ({ file, text }) => {
+    const document = surveyOf(stored(fieldsOf(sampleSurvey(file))));
+    expect(JSON.stringify(document)).toBe(JSON.stringify(JSON.parse(text)));
+  });
+
   test.prop([arbitrarySurvey])('and each path is there once', (survey) => {
     const paths = fieldsOf(survey).map(({ path }) => path);
     expect(new Set(paths).size).toBe(paths.length);

@@ -263,6 +263,35 @@ describe('a trace cannot be drawn', () => {
   ])('%s', expectOneProblem);
 });
 
+describe('a gap of more than half the horizon', () => {
+  const along = (...azimuths: number[]) =>
+    azimuths.map((azimuth, i) => ({ id: `s${i}`, azimuth, elevation: 9 }));
+
+  test.each([
+    ['clockwise', along(60, 100, 290)],
+    ['counter-clockwise', along(300, 260, 70)],
+  ])('is refused: %s', (_, gap) => {
+    expectOneProblem('', { [`${THERE}.sightings`]: gap }, `${THERE}.sightings[2]`, /190 degrees away/);
+  });
+
+  test('is not seen in a small step back, as under an overhang', () => {
+    expect(problemsAfter({ [`${THERE}.sightings`]: along(60, 100, 95, 130) })).toEqual([]);
+  });
+});
+
+test('a plane’s outline may not cross itself', () => {
+  const corner = (x: number, y: number) => ({ x, y });
+  const square = [corner(0, 0), corner(4, 0), corner(4, 3), corner(0, 3)];
+  expect(problemsAfter({ 'planes[0].outline': square })).toEqual([]);
+  const [a, b, c, d] = square;
+  expectOneProblem(
+    '',
+    { 'planes[0].outline': [a, c, b, d] },
+    'planes[0].outline',
+    /edge after corner 1 meets its edge after corner 3/,
+  );
+});
+
 test('an amendment counts in the checks of the trace', () => {
   const amendment = { azimuth: 300, elevation: 9, reason: 'typed', madeAt: '2026-05-14T10:00:00Z' };
   const problems = problemsAfter({ [`${THERE}.sightings[1].amendments`]: [amendment] });
