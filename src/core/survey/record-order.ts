@@ -7,8 +7,7 @@ import { surveySchema } from './survey-schema.ts';
  * A document with its fields in the order of the record (format, version, id, title, …) and unknown ones after, by
  * name: so that a file reads the same way round, and two exports of one survey are the same text.
  */
-export const inRecordOrder = (document: unknown): unknown =>
-  ordered(document, surveySchema);
+export const inRecordOrder = (document: unknown): unknown => ordered(document, surveySchema);
 
 function ordered(value: unknown, schema: SchemaNode | null): unknown {
   const own = schema && schemaFor(schema, value);
