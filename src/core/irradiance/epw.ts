@@ -81,7 +81,7 @@ function readHours(scan: FieldScan, year: HourlyYear): void {
     if (scan.columns !== columns) {
       year.problem(
         `line ${scan.line}`,
-        `has ${scan.columns} columns where the lines before have ${columns}. Get the file again.`,
+        `has ${scan.columns} columns where the lines before have ${columns}: it is damaged or cut short. Get the file again.`,
       );
       return;
     }

@@ -64,7 +64,7 @@ export class HourlyYear {
     if (start === undefined || !(day >= 1 && day <= lastDay && hour >= 1 && hour <= 24)) {
       this.problem(
         `line ${line}`,
-        `has no date and hour that exist (month ${month}, day ${day}, hour ${hour}).`,
+        `has no date and hour that exist (month ${month}, day ${day}, hour ${hour}; hours run from 1 to 24). Correct the line or get the file again.`,
       );
       return null;
     }

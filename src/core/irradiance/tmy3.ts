@@ -60,7 +60,7 @@ function readHours(scan: FieldScan, year: HourlyYear, columns: Columns): void {
     if (scan.columns !== count) {
       year.problem(
         `line ${line}`,
-        `has ${scan.columns} columns where line 2 names ${count}. Get the file again.`,
+        `has ${scan.columns} columns where line 2 names ${count}: it is damaged or cut short. Get the file again.`,
       );
       return;
     }
