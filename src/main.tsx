@@ -7,6 +7,7 @@ import { surveyDatabase } from './storage/survey-database.ts';
 import { weatherDatabase } from './storage/weather-database.ts';
 import { App } from './ui/app.tsx';
 import { startInstallOffer } from './ui/device/install-offer.ts';
+import { watchOfflineReadiness } from './ui/device/offline-readiness.ts';
 import { startPaper } from './ui/device/paper-choice.ts';
 import { startRouter } from './ui/router.ts';
 import { AssessOnWorker } from './workers/assess-on-worker.ts';
@@ -58,6 +59,7 @@ const services: AppServices = {
 async function startServiceWorker(): Promise<void> {
   if (!import.meta.env.PROD || !('serviceWorker' in navigator)) return;
   const wasControlled = navigator.serviceWorker.controller !== null;
+  watchOfflineReadiness();
   const { Workbox } = await import('workbox-window');
   const workbox = new Workbox('/service-worker.js', { scope: '/', type: 'classic' });
   services.useNewVersion = offerUpdates(

@@ -22,6 +22,8 @@ export const APP_ERROR_CODES = [
   'survey-unreadable',
   /** The picked file could not be read from the device. */
   'file-unreadable',
+  /** Files are being imported already. */
+  'import-running',
   /** A part of the app did not load. */
   'part-missing',
   /** None of the above; the cause says what. */

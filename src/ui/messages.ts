@@ -56,6 +56,10 @@ export const ERROR_MESSAGES: Record<AppErrorCode, Message> = {
     remedy:
       'It may have been moved, or it lies in a cloud that is out of reach now. Copy it to this device first.',
   },
+  'import-running': {
+    what: 'Other files are being imported just now.',
+    remedy: 'Wait until their report is shown, then give these again.',
+  },
   'part-missing': {
     what: 'A part of Noonmark could not be loaded.',
     remedy: 'Reload the page. If a new version came in meanwhile, that brings it up.',

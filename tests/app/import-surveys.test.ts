@@ -46,6 +46,14 @@ describe('importing files', () => {
     expect(JSON.stringify(services.state.imports.value)).toContain('100 MB');
   });
 
+  it('takes no further files while it is at work', async () => {
+    const services = plainServices();
+    const first = importSurveys(services, [pickedFile('a.json', inventedSurvey('a'))]);
+    await expect(importSurveys(services, [])).rejects.toMatchObject({ code: 'import-running' });
+    await first;
+    expect(services.state.imports.value).toMatchObject([{ outcome: 'stored', id: 'a' }]);
+  });
+
   it('tells of a file that cannot be read, and of a full device, and goes on', async () => {
     const services = plainServices();
     const create = services.store.create.bind(services.store);

@@ -84,9 +84,7 @@ export async function startApp(): Promise<AppUnderTest> {
 
 /** Waits until everything the app has is on the device. */
 export async function precached(page: Page): Promise<void> {
-  await page.evaluate(async () => {
-    await navigator.serviceWorker.ready;
-  });
+  await page.evaluate(async () => void (await navigator.serviceWorker.ready));
 }
 
 /** A sample survey opened from the list, by touch where the page has it; waits for its heading. */

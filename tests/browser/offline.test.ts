@@ -8,7 +8,7 @@ afterEach(() => app.close());
 describe('without a network', () => {
   it('starts cold after the first visit, at the list and at a deep link, and opens every sample', async () => {
     const first = await app.openPage();
-    await precached(first);
+    await first.getByText('All of Noonmark is on this device').waitFor();
     await app.server.kill();
     const context = first.context();
     await first.close();

@@ -1,4 +1,4 @@
-import { asAppError } from '../app-error.ts';
+import { AppError, asAppError } from '../app-error.ts';
 import type { AppServices } from '../app-services.ts';
 import type { ImportConflict, ImportResult } from '../app-state.ts';
 import { refreshList } from './refresh-list.ts';
@@ -52,6 +52,7 @@ async function importFile({ store, parse }: Needs, file: PickedFile): Promise<Im
  */
 export async function importSurveys(services: Needs, files: readonly PickedFile[]): Promise<void> {
   const { state, keepStorage } = services;
+  if (state.busy.value) throw new AppError('import-running');
   state.busy.value = true;
   state.imports.value = [];
   state.conflicts.value = [];

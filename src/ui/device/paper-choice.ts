@@ -17,8 +17,14 @@ const dark = matchMedia('(prefers-color-scheme: dark)');
 const systemDark = signal(dark.matches);
 const choice = signal<Paper | null>(stored());
 
+/** Marks the page for the style sheet, and tints the frame of the phone's screen alike. */
 function mark(paper: Paper | null): void {
-  if (paper) document.documentElement.dataset.paper = paper;
+  if (!paper) return;
+  document.documentElement.dataset.paper = paper;
+  const colour = getComputedStyle(document.documentElement).getPropertyValue('--paper');
+  document
+    .querySelectorAll<HTMLMetaElement>('meta[name="theme-color"]')
+    .forEach((tint) => (tint.content = colour));
 }
 
 /** Follows the system until somebody chooses. Called once, by main, before the first screen. */

@@ -4,12 +4,14 @@ import { eraseSurvey, restoreSurvey } from '../../../app/actions/delete-survey.t
 import type { SurveySummary } from '../../../app/survey-store.ts';
 import { useApp } from '../../app-context.ts';
 import { Dialog } from '../../components/dialog.tsx';
+import { focusHeading } from '../../components/screen-heading.tsx';
 
 function EraseQuestion({ summary, onDone }: { summary: SurveySummary; onDone: () => void }) {
   const services = useApp();
   const erase = async () => {
     await attempt(services.state, () => eraseSurvey(services, summary.id));
     onDone();
+    focusHeading();
   };
   return (
     <Dialog title="Erase for good?" onCancel={onDone}>
@@ -33,6 +35,10 @@ function EraseQuestion({ summary, onDone }: { summary: SurveySummary; onDone: ()
 export function DeletedSurveys({ surveys }: { surveys: SurveySummary[] }) {
   const services = useApp();
   const [asked, setAsked] = useState<SurveySummary | null>(null);
+  const bringBack = async (summary: SurveySummary) => {
+    await restoreSurvey(services, summary);
+    focusHeading();
+  };
   return (
     <details class="fold">
       <summary>Deleted surveys ({surveys.length})</summary>
@@ -43,7 +49,7 @@ export function DeletedSurveys({ surveys }: { surveys: SurveySummary[] }) {
             <button
               type="button"
               aria-label={`Restore ${summary.title}`}
-              onClick={() => void attempt(services.state, () => restoreSurvey(services, summary))}
+              onClick={() => void attempt(services.state, () => bringBack(summary))}
             >
               Restore
             </button>

@@ -44,8 +44,8 @@ export function ImportResults() {
       {results.length > 0 && (
         <div class="import-results stack">
           <ul class="ledger">
-            {results.map((result) => (
-              <li key={result.file} class="stack">
+            {results.map((result, place) => (
+              <li key={place} class="stack">
                 <h2 class="file-name">{result.file}</h2>
                 <Outcome result={result} />
               </li>

@@ -1,6 +1,7 @@
 import { useEffect, useState } from 'preact/hooks';
 import { useApp } from '../../app-context.ts';
 import { installOffer, isInstalled } from '../../device/install-offer.ts';
+import { offlineReadiness } from '../../device/offline-readiness.ts';
 import { storageSpace, type StorageSpace } from '../../device/storage-space.ts';
 import { sizeText } from '../../messages.ts';
 
@@ -12,6 +13,12 @@ function spaceText({ used, most, kept }: StorageSpace): string {
       : 'The browser may clear it when the device runs short of room: export what matters.'
   }`;
 }
+
+const READINESS = {
+  unknown: '',
+  fetching: 'Fetching what is needed without a signal; keep the connection a moment longer.',
+  ready: 'All of Noonmark is on this device: it opens without a signal.',
+};
 
 function InstallAdvice() {
   if (isInstalled()) return null;
@@ -44,6 +51,9 @@ export function StorageLine() {
   }, [surveys]);
   return (
     <section class="stack" aria-label="Storage on this device">
+      <p class="small" role="status">
+        {READINESS[offlineReadiness.value]}
+      </p>
       {space && <p class="small">{spaceText(space)}</p>}
       <InstallAdvice />
     </section>

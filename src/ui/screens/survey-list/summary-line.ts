@@ -2,7 +2,7 @@ import type { SurveySummary } from '../../../app/survey-store.ts';
 import { dayText } from '../../value-text.ts';
 
 function counted(count: number, one: string, many: string): string {
-  return `${count} ${count === 1 ? one : many}`;
+  return `${count}\u00a0${count === 1 ? one : many}`;
 }
 
 /** Place, day and what was measured, in one line. */

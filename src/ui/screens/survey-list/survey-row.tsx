@@ -6,6 +6,7 @@ import { exportSurvey } from '../../../app/actions/export-survey.ts';
 import type { SurveySummary } from '../../../app/survey-store.ts';
 import { useApp } from '../../app-context.ts';
 import { ProblemList } from '../../components/problem-list.tsx';
+import { focusHeading } from '../../components/screen-heading.tsx';
 import { saveFile } from '../../device/save-file.ts';
 import { surveyPath } from '../../survey-path.ts';
 import { summaryLine } from './summary-line.ts';
@@ -17,6 +18,10 @@ function RowActions({ summary, unreadable }: { summary: SurveySummary; unreadabl
     const { fileName, text } = await exportSurvey(services, summary.id);
     saveFile(fileName, text);
   };
+  const discard = async () => {
+    await deleteSurvey(services, summary);
+    focusHeading();
+  };
   return (
     <>
       <button type="button" onClick={run(save)}>
@@ -27,7 +32,7 @@ function RowActions({ summary, unreadable }: { summary: SurveySummary; unreadabl
           Duplicate
         </button>
       )}
-      <button type="button" onClick={run(() => deleteSurvey(services, summary))}>
+      <button type="button" onClick={run(discard)}>
         Delete
       </button>
     </>
