@@ -87,6 +87,6 @@ export interface ClipMark {
 export function textWidth(text: string, size: number, bold = false): number {
   let ems = 0;
   for (const letter of text)
-    ems += /[iljtf.,:;'|! ]/.test(letter) ? 0.32 : /[mwMW@%]/.test(letter) ? 0.92 : 0.58;
-  return ems * size * (bold ? 1.06 : 1);
+    ems += /[iljtf.,:;'|! ]/.test(letter) ? 0.36 : /[mwMW@%]/.test(letter) ? 0.98 : 0.63;
+  return ems * size * (bold ? 1.12 : 1);
 }

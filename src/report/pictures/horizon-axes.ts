@@ -3,6 +3,10 @@ import { COMPASS_POINTS } from './compass-names.ts';
 import type { SkyFrame } from './sky-frame.ts';
 import { xOf, yOf } from './sky-frame.ts';
 
+/** Whether the degrees stand below the compass names, for which a narrow drawing has no room. */
+export const hasDegrees = ({ left, right, span }: Pick<SkyFrame, 'left' | 'right' | 'span'>): boolean =>
+  (right - left) / span > 2.6;
+
 /** Ruled elevations under the drawing. */
 export function elevationRules(frame: SkyFrame): Mark[] {
   const lines = elevations(frame).map((elevation) => [
@@ -39,7 +43,7 @@ export function horizonAxes(frame: SkyFrame, textSize: number): Mark[] {
     ticks.push([x, below, x, below + (azimuth % 45 === 0 ? 6 : 3)]);
   }
   marks.push({ kind: 'path', lines: ticks, pen: { tone: 'ink', width: 1 } });
-  const wide = (right - left) / frame.span > 2.6;
+  const wide = hasDegrees(frame);
   for (const { name, azimuth } of COMPASS_POINTS) {
     const x = xOf(frame, azimuth);
     if (x < left || x > right) continue;

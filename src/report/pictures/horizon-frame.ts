@@ -1,5 +1,6 @@
 import { turnBetween } from '../../core/angles/angles.ts';
 import type { HorizonProfile } from '../../core/horizon/horizon-profile.ts';
+import { hasDegrees } from './horizon-axes.ts';
 import type { SkyFrame, SkyPlace } from './sky-frame.ts';
 
 export interface FrameWish {
@@ -36,13 +37,14 @@ export function horizonFrame({
   const window = all
     ? { centre: equatorward, span: 360 }
     : { centre: (equatorward + (west + east) / 2 + 360) % 360, span: east - west };
+  const sides = { left: textSize * 2.4, right: width - 4 };
+  const lines = hasDegrees({ ...sides, span: window.span }) ? 3 : 2;
   return {
     ...window,
+    ...sides,
     top: topOf(profile, paths, window),
-    left: textSize * 2.4,
-    right: width - 4,
     above: textSize * 0.6,
-    below: height - textSize * 3,
+    below: height - textSize * lines,
   };
 }
 

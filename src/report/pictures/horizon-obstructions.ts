@@ -44,24 +44,50 @@ function areaOf(parts: readonly SilhouettePart[]): number {
   return area;
 }
 
-/** Outlines of a shape on the sheet; a part that runs over the far side of the circle is drawn at both ends. */
+/** Shapes on the sheet; a part that runs over the far side of the circle is drawn at both ends. */
 export function outlinesOf(frame: SkyFrame, parts: readonly SilhouettePart[]): Line[] {
+  return placed(frame, parts, ({ low, high }, xs) => {
+    const upper = xs.flatMap((x, i) => [x, yOf(frame, high[i])]);
+    const lower = xs.map((x, i) => [x, yOf(frame, low[i])]).reverse();
+    return [[...upper, ...lower.flat()]];
+  });
+}
+
+/** The edges of a shape to be inked: upper edge, lower edge off the ground, upright ends. */
+function edgesOf(frame: SkyFrame, parts: readonly SilhouettePart[]): Line[] {
+  return placed(frame, parts, ({ azimuth, low, high, walls }, xs) => {
+    const lines: Line[] = [xs.flatMap((x, i) => [x, yOf(frame, high[i])])];
+    let lower: Line = [];
+    xs.forEach((x, i) => {
+      if (low[i] > 0) lower.push(x, yOf(frame, low[i]));
+      else {
+        if (lower.length > 0) lines.push([...lower, x, yOf(frame, 0)]);
+        lower = i + 1 < xs.length && low[i + 1] > 0 ? [x, yOf(frame, 0)] : [];
+      }
+    });
+    const scale = (frame.right - frame.left) / frame.span;
+    const upright = walls.map((wall) => {
+      const x = xs[0] + (wall.azimuth - azimuth[0]) * scale;
+      return [x, yOf(frame, wall.low), x, yOf(frame, wall.high)];
+    });
+    return [...lines, lower, ...upright];
+  });
+}
+
+type Draw = (part: SilhouettePart, xs: readonly number[]) => Line[];
+
+function placed(frame: SkyFrame, parts: readonly SilhouettePart[], draw: Draw): Line[] {
   return parts.flatMap((part) => {
     const turns = turnsFrom(frame.centre, part);
-    const outline = (shift: number): Line => {
-      const upper: Line = [];
-      const lower: Line = [];
-      turns.forEach((turn, i) => {
-        upper.push(xOfTurn(frame, turn + shift), yOf(frame, part.high[i]));
-        lower.unshift(xOfTurn(frame, turn + shift), yOf(frame, part.low[i]));
-      });
-      return [...upper, ...lower];
-    };
     const [first, last] = [turns[0], turns[turns.length - 1]];
-    const shifts = [0, 360, -360].filter(
-      (shift) => last + shift > -frame.span / 2 && first + shift < frame.span / 2,
-    );
-    return shifts.map(outline);
+    return [0, 360, -360]
+      .filter((shift) => last + shift > -frame.span / 2 && first + shift < frame.span / 2)
+      .flatMap((shift) =>
+        draw(
+          part,
+          turns.map((turn) => xOfTurn(frame, turn + shift)),
+        ),
+      );
   });
 }
 
@@ -69,16 +95,12 @@ export function outlinesOf(frame: SkyFrame, parts: readonly SilhouettePart[]): L
 export function obstructionMarks(frame: SkyFrame, shapes: readonly ObstructionShape[]): Mark[] {
   return shapes.flatMap(({ parts, place, lost, gone }): Mark[] => {
     const lines = outlinesOf(frame, parts);
-    if (gone) return [{ kind: 'path', lines, closed: true, pen: { tone: 'ink', width: 1.2, dash: [5, 4] } }];
+    const edges = edgesOf(frame, parts);
+    if (gone) return [{ kind: 'path', lines: edges, pen: { tone: 'ink', width: 1.2, dash: [5, 4] } }];
     return [
       { kind: 'path', lines, closed: true, fill: { tone: 'paper', opacity: 0.25 + 0.75 * lost } },
-      {
-        kind: 'path',
-        lines,
-        closed: true,
-        fill: { hatch: hatchFor(place) },
-        pen: { tone: 'ink', width: 1.5 },
-      },
+      { kind: 'path', lines, closed: true, fill: { hatch: hatchFor(place) } },
+      { kind: 'path', lines: edges, pen: { tone: 'ink', width: 1.5 } },
     ];
   });
 }
@@ -91,24 +113,38 @@ export function obstructionNames(
   size: number,
 ): Mark[] {
   return shapes.flatMap(({ name, parts, gone }): Mark[] => {
-    const text = gone ? `${name} (imagined gone)` : name;
-    const width = textWidth(text, size, true);
-    const place = places.take(nameBoxes(frame, parts, width, size));
+    const widest = (frame.right - frame.left) * WIDEST_NAME;
+    const lines = twoLines(gone ? `${name}, gone` : name, size, widest);
+    const width = Math.max(...lines.map((line) => textWidth(line, size, true)));
+    const place = places.take(nameBoxes(frame, parts, width, size, lines.length));
     if (!place) return [];
-    return [
-      {
+    return lines.map((text, i): Mark => {
+      const y = place.y - (lines.length - 1 - i) * size * LINE;
+      return {
         kind: 'text',
         x: place.x,
-        y: place.y,
+        y,
         text,
         size,
         anchor: 'middle',
         bold: true,
         italic: gone,
         rim: true,
-      },
-    ];
+      };
+    });
   });
+}
+
+/** A name wider than this share of the drawing is set in two lines. */
+const WIDEST_NAME = 0.36;
+/** Distance of baselines in sizes. */
+const LINE = 1.12;
+
+function twoLines(text: string, size: number, widest: number): string[] {
+  if (textWidth(text, size, true) <= widest) return [text];
+  const spaces = [...text.matchAll(/ /g)].map(({ index }) => index);
+  const [cut] = spaces.sort((a, b) => Math.abs(a - text.length / 2) - Math.abs(b - text.length / 2));
+  return cut === undefined ? [text] : [text.slice(0, cut), text.slice(cut + 1)];
 }
 
 function nameBoxes(
@@ -116,21 +152,25 @@ function nameBoxes(
   parts: readonly SilhouettePart[],
   width: number,
   size: number,
+  lines: number,
 ): (Box & { x: number; y: number })[] {
   const outlines = outlinesOf(frame, parts).map((line) => ({ line, box: boundsOf(line) }));
-  const seen = outlines.filter(({ box }) => box.right > frame.left && box.left < frame.right);
-  seen.sort((a, b) => b.box.right - b.box.left - (a.box.right - a.box.left));
+  const shown = ({ box }: { box: Box }) => Math.min(box.right, frame.right) - Math.max(box.left, frame.left);
+  const seen = outlines.filter((outline) => shown(outline) > 0).sort((a, b) => shown(b) - shown(a));
   const half = width / 2 + 2;
+  const spot = (x: number, y: number) => {
+    const box = boxAround(x, y, width, size);
+    return { ...box, top: box.top - (lines - 1) * size * LINE };
+  };
   return seen.flatMap(({ box }) => {
     const middle = (Math.max(box.left, frame.left) + Math.min(box.right, frame.right)) / 2;
     const x = Math.min(frame.right - half, Math.max(frame.left + half, middle));
-    const roomy = box.bottom - box.top > size * 2 && box.right - box.left > width;
-    const inside = [0.55, 0.75, 0.35].map((share) =>
-      boxAround(x, box.top + (box.bottom - box.top) * share + size * 0.35, width, size),
-    );
-    const above = [4, 4 + size * 1.2, 4 + size * 2.4].map((gap) => boxAround(x, box.top - gap, width, size));
+    const height = box.bottom - box.top;
+    const roomy = height > size * (lines + 1) && box.right - box.left > width;
+    const inside = [0.55, 0.75, 0.35].map((share) => spot(x, box.top + height * share + size * 0.35 * lines));
+    const above = [0, 1.2, 2.4].map((gap) => spot(x, box.top - 4 - gap * size));
     const beside = [box.right + half, box.left - half].flatMap((at) =>
-      [0.3, 0.6, 0.9].map((share) => boxAround(at, box.top + (box.bottom - box.top) * share, width, size)),
+      [0.3, 0.6, 0.9].map((share) => spot(at, box.top + height * share)),
     );
     return roomy ? [...inside, ...above] : [...above, ...beside];
   });

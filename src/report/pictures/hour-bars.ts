@@ -23,7 +23,7 @@ export function hoursWithLight(access: HourBarsInput['access']): [first: number,
  */
 export function hourBars({ unshaded, access, width }: HourBarsInput): Picture {
   const size = 11;
-  const [left, right, above, row] = [30, width - 4, size + 8, 24];
+  const [left, right, above, row] = [30, width - 9, size + 8, 24];
   const height = above + 12 * row + 4;
   const hours = hoursWithLight(access);
   if (!hours) return { width, height, marks: [] };

@@ -2,14 +2,12 @@ import type { MonthlyShares } from '../../core/shading/assessment.ts';
 import type { Line, Picture } from '../marks.ts';
 
 const [PITCH, HEIGHT] = [7, 24];
-/** A month that loses this share fills the height. */
-const FULL = 0.25;
 
-/** Twelve small ink bars on a line: the share of each month's light an obstruction takes. */
-export function monthTicks(monthly: MonthlyShares): Picture {
+/** Twelve small ink bars on a line: the share of each month's light an obstruction takes; `full` fills the height. */
+export function monthTicks(monthly: MonthlyShares, full: number): Picture {
   const size = 9;
   const bars = monthly.map((share, month): Line => {
-    const [x, high] = [month * PITCH + 1, Math.min(1, (share ?? 0) / FULL) * HEIGHT];
+    const [x, high] = [month * PITCH + 1, Math.min(1, (share ?? 0) / full) * HEIGHT];
     return [x, HEIGHT, x, HEIGHT - high, x + PITCH - 2, HEIGHT - high, x + PITCH - 2, HEIGHT];
   });
   const width = 12 * PITCH;

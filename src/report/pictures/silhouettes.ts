@@ -1,16 +1,34 @@
 import { turnBetween } from '../../core/angles/angles.ts';
 import type { HorizonProfile } from '../../core/horizon/horizon-profile.ts';
 
-/** A piece of an obstruction's outline: upper and lower edge from left to right, clockwise without a break. */
+/** A piece of an obstruction's shape without a break: its lower and upper edge from left to right. */
 export interface SilhouettePart {
   /** Azimuths, degrees; they may run past 360. */
   azimuth: number[];
   low: number[];
   high: number[];
+  /** Upright ends that nothing of the same obstruction touches. */
+  walls: Wall[];
 }
 
-/** Neighbouring slices whose edges differ by more are joined by an upright wall, degrees. */
-const WALL = 2;
+export interface Wall {
+  azimuth: number;
+  low: number;
+  high: number;
+}
+
+interface Interval {
+  low: number;
+  high: number;
+}
+
+interface Run extends Interval {
+  part: SilhouettePart;
+  to: number;
+}
+
+/** Neighbouring slices whose edges differ by more meet at an upright wall, degrees. */
+const STEP = 2;
 
 /**
  * The shape of one obstruction of a profile, from the very intervals that are computed with: an edge goes through the
@@ -18,49 +36,73 @@ const WALL = 2;
  */
 export function silhouette(profile: HorizonProfile, obstruction: number): SilhouettePart[] {
   const done: SilhouettePart[] = [];
-  let open: { part: SilhouettePart; to: number; low: number; high: number }[] = [];
+  let open: Run[] = [];
   for (let slice = 0; slice < profile.sliceColumn.length; slice++) {
     const [from, to] = [profile.sliceFrom[slice], profile.sliceTo[slice]];
-    const next: typeof open = [];
-    for (const { low, high } of intervalsOf(profile, slice, obstruction)) {
-      const before = open.find((run) => Math.abs(run.to - from) < 1e-6 && run.low < high && run.high > low);
-      const part = before?.part ?? { azimuth: [], low: [], high: [] };
-      if (before) {
-        open = open.filter((run) => run !== before);
-        if (Math.abs(before.high - high) > WALL || Math.abs(before.low - low) > WALL) {
-          add(part, from, before.low, before.high);
-          add(part, from, low, high);
-        }
-      } else {
+    const here = intervalsOf(profile, slice, obstruction);
+    const before = open.filter((run) => Math.abs(run.to - from) < 1e-6);
+    const next = here.map((interval): Run => {
+      const run = before.find((other) => open.includes(other) && goesOn(other, interval));
+      open = open.filter((other) => other !== run);
+      const part = run?.part ?? { azimuth: [], low: [], high: [], walls: [] };
+      if (!run) {
         done.push(part);
-        add(part, from, low, high);
+        begin(part, from, interval, before);
       }
-      add(part, (from + to) / 2, low, high);
-      next.push({ part, to, low, high });
-    }
-    open.forEach(close);
+      add(part, (from + to) / 2, interval);
+      return { part, to, ...interval };
+    });
+    open.forEach((run) => end(run, before.includes(run) ? here : []));
     open = next;
   }
-  open.forEach(close);
+  open.forEach((run) => end(run, []));
   return joinedOverNorth(done);
 }
 
-function intervalsOf(profile: HorizonProfile, slice: number, obstruction: number) {
-  const found: { low: number; high: number }[] = [];
+const goesOn = (run: Interval, { low, high }: Interval): boolean =>
+  Math.abs(run.high - high) <= STEP && Math.abs(run.low - low) <= STEP && run.low < high && run.high > low;
+
+function intervalsOf(profile: HorizonProfile, slice: number, obstruction: number): Interval[] {
+  const found: Interval[] = [];
   for (let k = profile.intervalFirst[slice]; k < profile.intervalFirst[slice + 1]; k++)
     if (profile.intervalObstruction[k] === obstruction && profile.high[k] > profile.low[k])
       found.push({ low: profile.low[k], high: profile.high[k] });
   return found.sort((a, b) => a.low - b.low);
 }
 
-function add(part: SilhouettePart, azimuth: number, low: number, high: number): void {
+function add(part: SilhouettePart, azimuth: number, { low, high }: Interval): void {
   part.azimuth.push(azimuth);
   part.low.push(low);
   part.high.push(high);
 }
 
-const close = ({ part, to, low, high }: { part: SilhouettePart; to: number; low: number; high: number }) =>
-  add(part, to, low, high);
+function begin(
+  part: SilhouettePart,
+  azimuth: number,
+  interval: Interval,
+  touching: readonly Interval[],
+): void {
+  add(part, azimuth, interval);
+  part.walls.push(...without(interval, touching).map((wall) => ({ azimuth, ...wall })));
+}
+
+function end({ part, to, low, high }: Run, touching: readonly Interval[]): void {
+  add(part, to, { low, high });
+  part.walls.push(...without({ low, high }, touching).map((wall) => ({ azimuth: to, ...wall })));
+}
+
+/** What of an interval some others leave free. */
+function without(whole: Interval, others: readonly Interval[]): Interval[] {
+  let free = [whole];
+  for (const other of others)
+    free = free.flatMap(({ low, high }) =>
+      [
+        { low, high: Math.min(high, other.low) },
+        { low: Math.max(low, other.high), high },
+      ].filter((piece) => piece.high > piece.low),
+    );
+  return free;
+}
 
 /** A part that ends at 360 goes on in the one that begins at 0. */
 function joinedOverNorth(parts: SilhouettePart[]): SilhouettePart[] {
@@ -71,6 +113,12 @@ function joinedOverNorth(parts: SilhouettePart[]): SilhouettePart[] {
     azimuth: [...ending.azimuth, ...starting.azimuth.map((azimuth) => azimuth + 360)],
     low: [...ending.low, ...starting.low],
     high: [...ending.high, ...starting.high],
+    walls: [
+      ...ending.walls.filter(({ azimuth }) => azimuth < 360 - 1e-6),
+      ...starting.walls
+        .filter(({ azimuth }) => azimuth > 1e-6)
+        .map((wall) => ({ ...wall, azimuth: wall.azimuth + 360 })),
+    ],
   };
   return [...parts.filter((part) => part !== ending && part !== starting), joined];
 }

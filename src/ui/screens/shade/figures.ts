@@ -1,5 +1,5 @@
-/** A share as percent with one decimal, such as `82.4 %`. */
-export const percent = (share: number, decimals = 1): string => `${(share * 100).toFixed(decimals)} %`;
+/** A share as percent with one decimal, such as `82.4 %`; the space does not break. */
+export const percent = (share: number, decimals = 1): string => `${(share * 100).toFixed(decimals)}\u00a0%`;
 
 /** kWh/m2 with three digits or so. */
 export const energy = (kwh: number): string => kwh.toFixed(kwh < 10 ? 1 : 0);

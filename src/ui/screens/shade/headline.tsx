@@ -3,14 +3,13 @@ import type { StationShade } from '../../../core/shading/station-shade.ts';
 import { energy, listed, percent } from './figures.ts';
 
 interface Props {
-  plane: PlaneAssessment;
   shade: StationShade;
   goneNames: readonly string[];
   onPutBack: () => void;
 }
 
-/** The year's figure, large, and what stands behind it. */
-export function Headline({ plane, shade, goneNames, onPutBack }: Props) {
+/** The year's figure, large; beside it what it would be with a change imagined. */
+export function Headline({ shade, goneNames, onPutBack }: Props) {
   const { measured, imagined } = shade;
   return (
     <div class="shade-headline">
@@ -18,26 +17,34 @@ export function Headline({ plane, shade, goneNames, onPutBack }: Props) {
         <strong>{percent(measured.solarAccess.annual)}</strong>
         <span>of the year’s sunlight reaches {measured.name}</span>
       </p>
-      {imagined && (
-        <div class="imagined" role="status">
-          <p>
-            <strong>{percent(imagined.solarAccess.annual)}</strong> if {listed(goneNames)}{' '}
-            {goneNames.length > 1 ? 'were' : 'was'} gone. Imagined, not measured.
-          </p>
-          <button type="button" onClick={onPutBack}>
-            Put {goneNames.length > 1 ? 'them' : 'it'} back
-          </button>
-        </div>
-      )}
-      <dl class="facts shade-facts">
-        {factsOf(plane, shade).map(([term, value]) => (
-          <div key={term}>
-            <dt>{term}</dt>
-            <dd>{value}</dd>
+      <div role="status">
+        {imagined && (
+          <div class="imagined">
+            <p>
+              <strong>{percent(imagined.solarAccess.annual)}</strong> if {listed(goneNames)}{' '}
+              {goneNames.length > 1 ? 'were' : 'was'} gone. Imagined, not measured.
+            </p>
+            <button type="button" onClick={onPutBack}>
+              Put {goneNames.length > 1 ? 'them' : 'it'} back
+            </button>
           </div>
-        ))}
-      </dl>
+        )}
+      </div>
     </div>
+  );
+}
+
+/** What stands behind the figure. */
+export function HeadlineFacts({ plane, shade }: { plane: PlaneAssessment; shade: StationShade }) {
+  return (
+    <dl class="facts shade-facts">
+      {factsOf(plane, shade).map(([term, value]) => (
+        <div key={term}>
+          <dt>{term}</dt>
+          <dd>{value}</dd>
+        </div>
+      ))}
+    </dl>
   );
 }
 

@@ -44,20 +44,28 @@ export function HorizonView({ site, shade, names, gone, year }: Props) {
         )}
       </div>
       <ReadoutLines at={at} context={{ site, shade, names, gone, year }} />
+      {picture && (whole || picture.frame.span < 360) && (
+        <label class="check">
+          <input
+            type="checkbox"
+            checked={whole}
+            onChange={({ currentTarget }) => setWhole(currentTarget.checked)}
+          />
+          Show the whole circle
+        </label>
+      )}
       <figcaption class="small">
-        The more ink, the more direct light comes from there in a year; the bold numbers on the thick lines
-        are kWh/m² from 10° by 10°. Thin lines: the sun on the 21st of each month. Broken lines: hours of
-        standard time ({standard}
-        ). Below the line of dashes and dots the sky lies behind the roof.
+        <details>
+          <summary>How to read this picture</summary>
+          <p>
+            The more ink, the more direct light comes from there in a year. Bold numbers on the thick lines
+            are kWh/m² a year from 10° by 10°. Thin lines are the sun’s way on the 21st of each month, broken
+            lines the hours of standard time ({standard}). Shapes are what was traced: their hatch is that of
+            the list below. Rings mean that nobody looked there. Below the line of dashes and dots the sky
+            lies behind the roof.
+          </p>
+        </details>
       </figcaption>
-      <label class="check">
-        <input
-          type="checkbox"
-          checked={whole}
-          onChange={({ currentTarget }) => setWhole(currentTarget.checked)}
-        />
-        Show the whole circle
-      </label>
     </figure>
   );
 }

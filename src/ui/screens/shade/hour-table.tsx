@@ -1,11 +1,10 @@
 import { useMemo } from 'preact/hooks';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
-import { standardOffsetMinutes } from '../../../core/solar-position/time-zone.ts';
 import { hourBars, hoursWithLight } from '../../../report/pictures/hour-bars.ts';
 import { MONTH_NAMES } from '../../../report/pictures/month-columns.ts';
 import { WideTable } from '../survey/wide-table.tsx';
 import { Drawing } from './drawing.tsx';
-import { utcOffset } from './figures.ts';
+import { standardTimeText } from './standard-time-text.ts';
 import { useWidth } from './use-width.ts';
 
 /** The hours of each month as ink bars, and the same in figures. */
@@ -31,8 +30,8 @@ export function HourTable({
     <section class="shade-hours">
       <h2>Hour by hour</h2>
       <p class="small">
-        Hours of standard time, {utcOffset(standardOffsetMinutes(timeZone))} all year: in summer time the
-        clock is an hour ahead. A bar is as high as the hour’s light in a month; the ink in it is what arrives
+        Hours of standard time, {standardTimeText(timeZone)}. A bar is as high as the hour’s light in a month;
+        the ink in it is what arrives
         {imagined ? ', with the imagined change' : ''}.
       </p>
       <div ref={box}>{picture && <Drawing picture={picture} id="hours" />}</div>

@@ -29,10 +29,14 @@ export function ObstructionList({ survey, shade, gone, onToggle }: Props) {
         <p>Nothing is traced from here, so nothing is in the way. Azimuths nobody looked at count as open.</p>
       </section>
     );
+  const most = Math.max(0.01, ...obstructions.flatMap(({ monthly }) => monthly.map((share) => share ?? 0)));
   return (
     <section class="shade-obstructions">
       <h2>What stands in the way</h2>
-      <p class="small">In the order of what taking it away would give back, the others left standing.</p>
+      <p class="small">
+        In the order of what taking it away would give back, the others left standing. The small bars are the
+        months it matters in.
+      </p>
       <ol class="obstructions">
         {obstructions.map((row) => (
           <Row
@@ -40,6 +44,7 @@ export function ObstructionList({ survey, shade, gone, onToggle }: Props) {
             row={row}
             survey={survey}
             shade={shade}
+            most={most}
             gone={gone.has(row.id)}
             onToggle={onToggle}
           />
@@ -56,15 +61,17 @@ interface RowProps {
   row: ObstructionShading;
   survey: Survey;
   shade: StationShade;
+  /** The largest share of a month any of them takes, for one scale of all bars. */
+  most: number;
   gone: boolean;
   onToggle: (id: string) => void;
 }
 
-function Row({ row, survey, shade, gone, onToggle }: RowProps) {
+function Row({ row, survey, shade, most, gone, onToggle }: RowProps) {
   const obstruction = survey.obstructions.find(({ id }) => id === row.id)!;
   const place = shade.profile.obstructionIds.indexOf(row.id);
   const swatch = useMemo(() => swatchOf(place), [place]);
-  const ticks = useMemo(() => monthTicks(row.monthly), [row]);
+  const ticks = useMemo(() => monthTicks(row.monthly, most), [row, most]);
   return (
     <li class="obstruction">
       <Drawing picture={swatch} id={`swatch-${place}`} />
@@ -101,15 +108,15 @@ function gainText({ id, gainIfRemoved }: ObstructionShading, { measured, unshade
   if (gainIfRemoved >= NOTHING)
     return (
       <>
-        <strong>+{percent(gainIfRemoved)}</strong> if removed, {energy(gainIfRemoved * unshaded.annual)}{' '}
-        kWh/m² a year.
+        <strong>{percent(gainIfRemoved)}</strong> of the year’s light comes back if it goes,{' '}
+        {energy(gainIfRemoved * unshaded.annual)} kWh/m².
       </>
     );
   const partners = measured.groups.find(({ obstructions }) => obstructions.includes(id))?.obstructions ?? [];
   const others = partners.filter((other) => other !== id).map((other) => nameOf(other, measured));
   return others.length > 0
-    ? `No gain unless ${listed(others)} ${others.length > 1 ? 'go' : 'goes'} too.`
-    : 'No gain if removed.';
+    ? `Nothing comes back unless ${listed(others)} ${others.length > 1 ? 'go' : 'goes'} too.`
+    : 'Nothing comes back if it goes.';
 }
 
 const nameOf = (id: string, { obstructions }: StationShade['measured']): string =>

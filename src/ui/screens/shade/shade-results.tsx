@@ -2,7 +2,7 @@ import { useMemo } from 'preact/hooks';
 import type { PlaneAssessment } from '../../../core/shading/assessment.ts';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
 import type { Survey } from '../../../core/survey/survey.ts';
-import { Headline } from './headline.tsx';
+import { Headline, HeadlineFacts } from './headline.tsx';
 import { HorizonView } from './horizon-view.tsx';
 import { HourTable } from './hour-table.tsx';
 import { MonthView } from './month-view.tsx';
@@ -25,11 +25,14 @@ export function ShadeResults({ survey, year, plane, shade, gone, onToggle, onPut
   const goneNames = [...gone].map((id) => names.get(id) ?? id);
   return (
     <>
-      <Headline plane={plane} shade={shade} goneNames={goneNames} onPutBack={onPutBack} />
+      <Headline shade={shade} goneNames={goneNames} onPutBack={onPutBack} />
       <HorizonView site={survey.site} shade={shade} names={names} gone={gone} year={year} />
+      <HeadlineFacts plane={plane} shade={shade} />
       <ObstructionList survey={survey} shade={shade} gone={gone} onToggle={onToggle} />
-      <MonthView shade={shade} />
-      <HourTable shade={shade} timeZone={survey.site.timeZone} imagined={gone.size > 0} />
+      <div class="shade-side">
+        <MonthView shade={shade} />
+        <HourTable shade={shade} timeZone={survey.site.timeZone} imagined={gone.size > 0} />
+      </div>
       <PlanInset site={survey.site} shade={shade} names={names} gone={gone} />
     </>
   );

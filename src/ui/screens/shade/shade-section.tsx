@@ -39,16 +39,18 @@ export function ShadeSection({ survey, services }: SectionProps) {
   return (
     <div class="shade">
       <h2 class="visually-hidden">Shade</h2>
-      <Choices
-        planes={planes}
-        stations={stations}
-        plane={plane.id}
-        station={station?.id ?? null}
-        onPlane={(id) => setWish({ plane: id, station: wish.station })}
-        onStation={(id) => setWish({ plane: plane.id, station: id })}
-      />
-      <Working working={state.working} onCancel={state.cancel} />
-      {state.fault && <Fault fault={state.fault} onRetry={state.retry} />}
+      <div class="shade-top">
+        <Choices
+          planes={planes}
+          stations={stations}
+          plane={plane.id}
+          station={station?.id ?? null}
+          onPlane={(id) => setWish({ plane: id, station: wish.station })}
+          onStation={(id) => setWish({ plane: plane.id, station: id })}
+        />
+        <Working working={state.working} onCancel={state.cancel} />
+        {state.fault && <Fault fault={state.fault} onRetry={state.retry} />}
+      </div>
       {!station && <EmptyShade reason="no-station" planeName={plane.name} />}
       {station && assessed && state.shade && (
         <ShadeResults
