@@ -7,6 +7,8 @@ export const LIMITS = {
   /** Lists and objects inside each other. */
   depth: 64,
   planes: 2_000,
+  /** In all plane outlines together. */
+  corners: 20_000,
   stations: 2_000,
   obstructions: 2_000,
   runs: 20_000,

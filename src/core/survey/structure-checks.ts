@@ -6,45 +6,49 @@ import { rowsOf } from './record-rows.ts';
 
 /**
  * Checks that a document is neither too large nor too deep to be looked at closely, and that no field bears a name
- * that would change how objects work. Reads any depth without recursion; stops at the first excess.
+ * that would change how objects work. Stops at the first excess.
  */
 export function addStructureProblems(document: unknown, problems: ProblemList): void {
   addTooMany(document, problems);
   if (!problems.isEmpty) return;
-  const waiting: { value: object; path: string; depth: number }[] = [];
-  const enter = (value: unknown, path: string, depth: number) => {
-    if (typeof value === 'object' && value !== null) waiting.push({ value, path, depth });
-  };
-  enter(document, '', 1);
-  let values = 0;
-  for (let at = waiting.pop(); at; at = waiting.pop()) {
-    const { value, path, depth } = at;
-    if (depth > LIMITS.depth)
-      return problems.add(
-        shortened(path),
-        `Lists and objects stand more than ${LIMITS.depth} deep in each other. Remove them.`,
-      );
-    const keys = Object.keys(value);
-    values += keys.length;
-    if (values > LIMITS.values)
-      return problems.add(
-        'file',
-        `The file holds more than ${LIMITS.values} values, the limit. Split the survey.`,
-      );
-    if (Object.hasOwn(value, '__proto__'))
-      problems.add(
-        pathBelow(path, '__proto__'),
-        'A field may not be named __proto__. Remove it or give it another name.',
-      );
-    for (const key of keys) {
-      const below = (value as Record<string, unknown>)[key];
-      if (typeof below === 'object' && below !== null)
-        enter(below, pathBelow(path, Array.isArray(value) ? Number(key) : key), depth + 1);
-    }
-  }
+  const excess = firstExcess(document, 1, { values: 0 });
+  if (excess) problems.add(excess.keys.reduceRight<string>(pathBelow, '') || 'file', excess.message);
 }
 
-const shortened = (path: string) => (path.length > 120 ? `${path.slice(0, 117)}…` : path);
+/** What is too much, and where: the keys from the place up to the top. */
+interface Excess {
+  keys: (string | number)[];
+  message: string;
+}
+
+/** Goes down at most as deep as the limit, so that no document can exhaust the stack. */
+function firstExcess(value: unknown, depth: number, counted: { values: number }): Excess | null {
+  if (typeof value !== 'object' || value === null) return null;
+  if (depth > LIMITS.depth)
+    return {
+      keys: [],
+      message: `Lists and objects stand more than ${LIMITS.depth} deep in each other here. Remove them.`,
+    };
+  const keys = Array.isArray(value) ? null : Object.keys(value);
+  const size = keys ? keys.length : (value as unknown[]).length;
+  counted.values += size;
+  if (counted.values > LIMITS.values)
+    return { keys: [], message: `The survey holds more than ${LIMITS.values} values, the limit. Split it.` };
+  if (Object.hasOwn(value, '__proto__'))
+    return {
+      keys: ['__proto__'],
+      message: 'A field may not be named __proto__. Remove it or give it another name.',
+    };
+  for (let i = 0; i < size; i++) {
+    const key = keys ? keys[i] : i;
+    const below = firstExcess((value as Record<string | number, unknown>)[key], depth + 1, counted);
+    if (below) {
+      below.keys.push(key);
+      return below;
+    }
+  }
+  return null;
+}
 
 /** Adds a problem for each list that is longer than its limit. */
 function addTooMany(document: unknown, problems: ProblemList): void {
@@ -53,6 +57,7 @@ function addTooMany(document: unknown, problems: ProblemList): void {
   const traces = stations.flatMap(({ value, path }) => rowsOf(value, 'traces', path));
   const counts = {
     planes: length(document.planes),
+    corners: sum(rowsOf(document, 'planes').map(({ value }) => length(value.outline))),
     stations: length(document.stations),
     obstructions: length(document.obstructions),
     runs: length(document.runs),
@@ -70,10 +75,12 @@ function addTooMany(document: unknown, problems: ProblemList): void {
 }
 
 const WORDS: Partial<Record<string, string>> = {
+  corners: 'corners in its plane outlines',
   headingChecks: 'heading checks',
   sightings: 'sightings in its traces',
 };
 const PLACES: Partial<Record<string, string>> = {
+  corners: 'planes',
   headingChecks: 'stations',
   traces: 'stations',
   sightings: 'stations',

@@ -15,6 +15,11 @@ test.each<[string, Changes, RegExp]>([
   ],
   ['200,001 readings', { readings: many(200_001, () => 0) }, /200001 readings; the limit is 200000/],
   ['2,001 planes', { planes: many(2_001, () => 0) }, /2001 planes; the limit is 2000/],
+  [
+    '20,001 corners',
+    { 'planes[0].outline': many(20_001, () => 0) },
+    /20001 corners in its plane outlines; the limit is 20000/,
+  ],
   ['2,001 obstructions', { obstructions: many(2_001, () => 0) }, /2001 obstructions; the limit is 2000/],
   ['2,001 stations', { stations: many(2_001, () => 0) }, /2001 stations; the limit is 2000/],
   ['2,001 traces', { 'stations[0].traces': many(2_001, () => 0) }, /2001 traces; the limit is 2000/],
