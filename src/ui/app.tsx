@@ -56,7 +56,7 @@ export function App({ services }: { services: AppServices }) {
   const place = placeOf(pathname.value);
   return (
     <AppContext.Provider value={services}>
-      <a class="skip visually-hidden" href="#screen">
+      <a class="jump visually-hidden" href="#screen">
         Skip to the screen
       </a>
       <header class="head">

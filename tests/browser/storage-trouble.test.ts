@@ -91,6 +91,22 @@ describe('killed in the middle of an import', () => {
 });
 
 describe('a full device', () => {
+  it('by the browser’s own count is told, and what was stored stays', async () => {
+    const page = await app.openPage(DESK, 'light', { path: '/self-check' });
+    const session = await page.context().newCDPSession(page);
+    const origin = app.server.address;
+    // Room for the app and a survey, not for a long sweep.
+    await session.send('Storage.overrideQuotaForOrigin', { origin, quotaSize: 3_000_000 });
+    await page.goto(origin);
+    await imported(page);
+    await importFiles(page, surveyFile('long.json', longSurvey(8_000)));
+    await page.locator('.import-results', { hasText: 'There is no room left on this device' }).waitFor();
+    expect(await titles(page)).toEqual([TITLE]);
+    await page.reload();
+    expect((await exported(page, TITLE)).survey).toEqual(inventedSurvey());
+    expect(await titles(page)).toEqual([TITLE]);
+  });
+
   it('is told, and what was stored stays', async () => {
     const page = await app.openPage(PHONE, 'light', {
       before: () => {

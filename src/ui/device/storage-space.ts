@@ -1,8 +1,6 @@
 export interface StorageSpace {
-  /** Bytes. */
+  /** Bytes. How much there is room for is not told: browsers give a made-up figure for that. */
   used: number;
-  /** Bytes the browser would give at most; null where it does not say. */
-  most: number | null;
   /** Whether the browser has promised not to clear it away by itself. */
   kept: boolean;
 }
@@ -10,10 +8,8 @@ export interface StorageSpace {
 /** How much room the surveys take; null where the browser does not say. */
 export async function storageSpace(): Promise<StorageSpace | null> {
   try {
-    const { usage, quota } = await navigator.storage.estimate();
-    return usage === undefined
-      ? null
-      : { used: usage, most: quota ?? null, kept: await navigator.storage.persisted() };
+    const { usage } = await navigator.storage.estimate();
+    return usage === undefined ? null : { used: usage, kept: await navigator.storage.persisted() };
   } catch {
     return null;
   }

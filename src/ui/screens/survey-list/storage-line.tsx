@@ -5,9 +5,8 @@ import { offlineReadiness } from '../../device/offline-readiness.ts';
 import { storageSpace, type StorageSpace } from '../../device/storage-space.ts';
 import { sizeText } from '../../messages.ts';
 
-function spaceText({ used, most, kept }: StorageSpace): string {
-  const room = most === null ? sizeText(used) : `${sizeText(used)} of ${sizeText(most)}`;
-  return `Space used: ${room}. ${
+function spaceText({ used, kept }: StorageSpace): string {
+  return `Space used: ${sizeText(used)}. ${
     kept
       ? 'The browser keeps it until you erase it.'
       : 'The browser may clear it when the device runs short of room: export what matters.'
