@@ -4,6 +4,11 @@ import type { SkyPoint } from './horizon-edge.ts';
 /** A long line is laid as strips no longer than this, degrees, so that their straight sides keep its width. */
 const LONGEST_STRIP = 5;
 
+/** Degrees. */
+const HAIR = 1e-5;
+/** A path that reaches the zenith stops this far short of it, so that it has an azimuth, degrees. */
+const SHORT_OF_ZENITH = 0.001;
+
 type Vector = readonly [number, number, number];
 
 /**
@@ -16,14 +21,26 @@ export function lineStrips(points: readonly SkyPoint[], width: number, straight:
     const path = pathBetween(points[i - 1], points[i], straight);
     for (let k = 1; k < path.length; k++) {
       const strip = stripAround(path[k - 1], path[k], width);
-      if (strip) strips.push(strip);
+      if (strip?.some(({ elevation }) => elevation > 0)) strips.push(offTheZenith(strip));
     }
   }
   return strips;
 }
 
+/**
+ * A side that goes right over the zenith joins azimuths 180° apart, which no edge does in one way only: its second corner
+ * is moved aside by a hair.
+ */
+function offTheZenith(corners: SkyPoint[]): SkyPoint[] {
+  return corners.map((corner, i) => {
+    const before = corners[(i + corners.length - 1) % corners.length];
+    const turn = Math.abs(turnBetween(before.azimuth, corner.azimuth));
+    return turn < 180 - HAIR ? corner : { ...corner, azimuth: (corner.azimuth + 2 * HAIR) % 360 };
+  });
+}
+
 function pathBetween(start: SkyPoint, end: SkyPoint, straight: boolean): Vector[] {
-  const [a, b] = [vector(start), vector(end)];
+  const [a, b] = [vector(belowZenith(start)), vector(belowZenith(end))];
   const angle = Math.atan2(length(cross(a, b)), dot(a, b));
   const turn = turnBetween(start.azimuth, end.azimuth);
   const reach = straight
@@ -54,6 +71,11 @@ function stripAround(a: Vector, b: Vector, width: number): SkyPoint[] | null {
   };
   return [aside(a, 1), aside(b, 1), aside(b, -1), aside(a, -1)];
 }
+
+const belowZenith = ({ azimuth, elevation }: SkyPoint): SkyPoint => ({
+  azimuth,
+  elevation: Math.min(elevation, 90 - SHORT_OF_ZENITH),
+});
 
 function vector({ azimuth, elevation }: SkyPoint): Vector {
   const [a, e] = [azimuth * RADIANS, elevation * RADIANS];

@@ -16,7 +16,7 @@ export interface StationHorizon {
 
 /**
  * The horizon of a station of a survey that the parser has passed. Sightings that have no direction yet (a raw reading
- * alone) are left out; `undirectedSightings` names them.
+ * alone) are left out, and with them a trace that does not hold together without them; `undirectedSightings` names them.
  */
 export function stationHorizon(survey: Survey, station: Station): StationHorizon {
   const obstructions = tracedObstructions(survey, station);
@@ -30,10 +30,19 @@ export function tracedObstructions(survey: Survey, station: Station): TracedObst
     const traces = ordered(station.traces)
       .filter((trace) => trace.obstruction === obstruction.id)
       .map((trace) => settledTrace(trace, traceEdge(trace, obstruction) === 'straight'))
-      .filter(({ shape, points }) => points.length >= (shape === 'outline' ? 3 : 2));
+      .filter(joinsUp);
     const transmittance = monthlyTransmittance(obstruction, survey.site.latitude);
     return traces.length > 0 ? [{ id: obstruction.id, transmittance, traces }] : [];
   });
+}
+
+/** Whether a trace still has enough sightings, and none of its neighbours 180° apart, once those without direction are out. */
+function joinsUp({ shape, fullCircle, points }: SettledTrace): boolean {
+  const closed = shape === 'outline' || fullCircle;
+  const neighbours = closed ? points.map((_, i) => i) : points.map((_, i) => i).slice(1);
+  const turn = (i: number) =>
+    Math.abs(turnBetween(points[(i + points.length - 1) % points.length].azimuth, points[i].azimuth));
+  return points.length >= (shape === 'outline' ? 3 : 2) && neighbours.every((i) => turn(i) < 180);
 }
 
 function settledTrace(trace: Trace, straight: boolean): SettledTrace {
