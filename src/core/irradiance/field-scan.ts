@@ -1,3 +1,7 @@
+/** Columns that can be read; more are only counted. */
+export const MOST_COLUMNS = 80;
+const LONGEST_HEADER_LINE = 5000;
+
 /**
  * Reads comma-separated lines in place: one pass over the characters, no copies but of odd numbers. Weather files have
  * 8,760 lines of up to 71 columns, of which seven are wanted.
@@ -5,7 +9,7 @@
 export class FieldScan {
   readonly text: string;
   /** Where each of the first columns begins, and one past the comma of the last of them. */
-  readonly starts = new Int32Array(80);
+  readonly starts = new Int32Array(MOST_COLUMNS);
   /** Columns of the line read last. */
   columns = 0;
   /** Number of the line read last, counted from 1. */
@@ -30,7 +34,7 @@ export class FieldScan {
       for (; at < end; at++) {
         code = text.charCodeAt(at);
         if (code === 44) {
-          if (columns < 80) starts[columns] = at + 1;
+          if (columns < MOST_COLUMNS) starts[columns] = at + 1;
           columns++;
         } else if (code === 10 || code === 13) break;
       }
@@ -39,7 +43,7 @@ export class FieldScan {
       if (code === 13 && text.charCodeAt(at + 1) === 10) at++;
       at++;
       if (lineEnd === from) continue;
-      if (columns < 80) starts[columns] = lineEnd + 1;
+      if (columns < MOST_COLUMNS) starts[columns] = lineEnd + 1;
       this.columns = columns;
       this.next = at;
       return true;
@@ -55,16 +59,16 @@ export class FieldScan {
       : '';
   }
 
-  /** The whole line. */
+  /** The line, or its first 5,000 characters. */
   wholeLine(): string {
-    const from = this.starts[0];
-    const to = this.text.slice(from).search(/[\r\n]|$/);
-    return this.text.slice(from, from + to);
+    const [from] = this.starts;
+    const start = this.text.slice(from, from + LONGEST_HEADER_LINE);
+    return start.slice(0, start.search(/[\r\n]|$/));
   }
 
   /** Number in a column; NaN where there is none. */
   numberAt(column: number): number {
-    if (column >= this.columns) return NaN;
+    if (column >= this.columns || column >= MOST_COLUMNS - 1) return NaN;
     const to = this.starts[column + 1] - 1;
     let at = this.starts[column];
     const negative = this.text.charCodeAt(at) === 45;

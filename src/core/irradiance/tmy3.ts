@@ -1,5 +1,5 @@
 import type { Parsed } from '../survey/problem.ts';
-import { FieldScan, splitQuoted } from './field-scan.ts';
+import { FieldScan, MOST_COLUMNS, splitQuoted } from './field-scan.ts';
 import { HourlyYear } from './hourly-year.ts';
 import type { WeatherFile } from './weather-year.ts';
 import { weatherFileFrom } from './weather-file-from.ts';
@@ -46,7 +46,7 @@ function columnsOf(header: string, year: HourlyYear): Columns | null {
   const columns: Columns = { ghi: 0, dni: 0, dhi: 0, temperature: 0 };
   for (const key of Object.keys(WANTED) as (keyof Columns)[]) {
     columns[key] = names.indexOf(WANTED[key].toLowerCase());
-    if (columns[key] < 2)
+    if (columns[key] < 2 || columns[key] >= MOST_COLUMNS - 1)
       year.problem('line 2', `has no column "${WANTED[key]}". Choose a TMY3 CSV file with it.`);
   }
   return year.problems.length === 0 ? columns : null;
