@@ -29,6 +29,8 @@ interface Run extends Interval {
 
 /** Neighbouring slices whose edges differ by more meet at an upright wall, degrees. */
 const STEP = 2;
+/** Nearer to north than this is at north, degrees. */
+const NORTH = 1e-6;
 
 /**
  * The shape of one obstruction of a profile, from the very intervals that are computed with: an edge goes through the
@@ -37,6 +39,7 @@ const STEP = 2;
 export function silhouette(profile: HorizonProfile, obstruction: number): SilhouettePart[] {
   const done: SilhouettePart[] = [];
   let open: Run[] = [];
+  const overNorth = intervalsByNorth(profile, obstruction);
   for (let slice = 0; slice < profile.sliceColumn.length; slice++) {
     const [from, to] = [profile.sliceFrom[slice], profile.sliceTo[slice]];
     const here = intervalsOf(profile, slice, obstruction);
@@ -47,7 +50,7 @@ export function silhouette(profile: HorizonProfile, obstruction: number): Silhou
       const part = run?.part ?? { azimuth: [], low: [], high: [], walls: [] };
       if (!run) {
         done.push(part);
-        begin(part, from, interval, before);
+        begin(part, from, interval, from < NORTH ? overNorth.before : before);
       }
       add(part, (from + to) / 2, interval);
       return { part, to, ...interval };
@@ -55,8 +58,21 @@ export function silhouette(profile: HorizonProfile, obstruction: number): Silhou
     open.forEach((run) => end(run, before.includes(run) ? here : []));
     open = next;
   }
-  open.forEach((run) => end(run, []));
+  open.forEach((run) => end(run, run.to > 360 - NORTH ? overNorth.after : []));
   return joinedOverNorth(done);
+}
+
+/** What stands on either side of north, where the list of slices ends and begins. */
+function intervalsByNorth(
+  profile: HorizonProfile,
+  obstruction: number,
+): { before: Interval[]; after: Interval[] } {
+  const last = profile.sliceColumn.length - 1;
+  if (last < 0) return { before: [], after: [] };
+  return {
+    before: profile.sliceTo[last] > 360 - NORTH ? intervalsOf(profile, last, obstruction) : [],
+    after: profile.sliceFrom[0] < NORTH ? intervalsOf(profile, 0, obstruction) : [],
+  };
 }
 
 const goesOn = (run: Interval, { low, high }: Interval): boolean =>
@@ -91,8 +107,9 @@ function end({ part, to, low, high }: Run, touching: readonly Interval[]): void 
   part.walls.push(...without({ low, high }, touching).map((wall) => ({ azimuth: to, ...wall })));
 }
 
-/** What of an interval some others leave free. */
+/** What of an interval those beside it leave free; nothing where it goes on in one of them. */
 function without(whole: Interval, others: readonly Interval[]): Interval[] {
+  if (others.some((other) => goesOn(other, whole))) return [];
   let free = [whole];
   for (const other of others)
     free = free.flatMap(({ low, high }) =>
@@ -106,19 +123,14 @@ function without(whole: Interval, others: readonly Interval[]): Interval[] {
 
 /** A part that ends at 360 goes on in the one that begins at 0. */
 function joinedOverNorth(parts: SilhouettePart[]): SilhouettePart[] {
-  const ending = parts.find(({ azimuth }) => azimuth[azimuth.length - 1] > 360 - 1e-6 && azimuth[0] > 1e-6);
-  const starting = parts.find(({ azimuth }) => azimuth[0] < 1e-6);
+  const ending = parts.find(({ azimuth }) => azimuth[azimuth.length - 1] > 360 - NORTH && azimuth[0] > NORTH);
+  const starting = parts.find(({ azimuth }) => azimuth[0] < NORTH);
   if (!ending || !starting || ending === starting) return parts;
   const joined = {
     azimuth: [...ending.azimuth, ...starting.azimuth.map((azimuth) => azimuth + 360)],
     low: [...ending.low, ...starting.low],
     high: [...ending.high, ...starting.high],
-    walls: [
-      ...ending.walls.filter(({ azimuth }) => azimuth < 360 - 1e-6),
-      ...starting.walls
-        .filter(({ azimuth }) => azimuth > 1e-6)
-        .map((wall) => ({ ...wall, azimuth: wall.azimuth + 360 })),
-    ],
+    walls: [...ending.walls, ...starting.walls.map((wall) => ({ ...wall, azimuth: wall.azimuth + 360 }))],
   };
   return [...parts.filter((part) => part !== ending && part !== starting), joined];
 }
