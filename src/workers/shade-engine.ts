@@ -2,7 +2,7 @@ import { stationHorizon } from '../core/horizon/station-horizon.ts';
 import type { Climate } from '../core/irradiance/climate.ts';
 import { parseWeatherFile } from '../core/irradiance/weather-file.ts';
 import type { SiteLight } from '../core/shading/assess-survey.ts';
-import { assessSurvey, obstructionNames, siteLight } from '../core/shading/assess-survey.ts';
+import { assessSurvey, obstructionsById, siteLight } from '../core/shading/assess-survey.ts';
 import type { Assessment } from '../core/shading/assessment.ts';
 import type { AssessRequest, Outcome, ShadeQuestion, WeatherFileFacts } from '../core/shading/calculation.ts';
 import type { SkyDensity } from '../core/shading/sky-density.ts';
@@ -80,7 +80,7 @@ export class ShadeEngine {
       const { map, density } = this.planeOf(held, roof.surfaceTilt, roof.surfaceAzimuth);
       await this.lookUp(ticket);
       const horizon = stationHorizon(survey, place);
-      return stationShade(map, density, horizon, place, obstructionNames(survey), changes);
+      return stationShade(map, density, horizon, place, obstructionsById(survey), changes);
     });
   }
 

@@ -9,7 +9,7 @@ import { parseWeatherFile } from '../../src/core/irradiance/weather-file.ts';
 import { worldClimate } from '../../src/core/irradiance/world-climate.ts';
 import { decodeWorldGrid } from '../../src/core/irradiance/world-grid.ts';
 import { assessStation } from '../../src/core/shading/assess-station.ts';
-import { DEFAULT_STEP_MINUTES, obstructionNames, siteLight } from '../../src/core/shading/assess-survey.ts';
+import { DEFAULT_STEP_MINUTES, obstructionsById, siteLight } from '../../src/core/shading/assess-survey.ts';
 import { blockedLight, shadedMonths } from '../../src/core/shading/blocked-light.ts';
 import { skyMap } from '../../src/core/shading/sky-map.ts';
 import { standardOffsetMinutes } from '../../src/core/solar-position/time-zone.ts';
@@ -40,7 +40,7 @@ const epw = weatherText('USA_IL_Chicago-OHare.Intl.AP.725300_TMY3.epw');
 function assess(climate: Climate) {
   const light = siteLight(survey.site, climate);
   const map = skyMap(light.year, light.grid, plane.surfaceTilt, plane.surfaceAzimuth);
-  assessStation(map, stationHorizon(survey, station), station, obstructionNames(survey));
+  assessStation(map, stationHorizon(survey, station), station, obstructionsById(survey));
   return map;
 }
 

@@ -4,6 +4,7 @@ import type { MonthlyShares, StationAssessment } from './assessment.ts';
 import { blockedLight, shadedMonths } from './blocked-light.ts';
 import { coverage } from './coverage.ts';
 import { hourlyAccess } from './hourly-access.ts';
+import type { KnownObstructions } from './obstruction-shading.ts';
 import { obstructionCosts } from './obstruction-shading.ts';
 import type { SkyMap } from './sky-map.ts';
 import { unshadedMonths } from './sky-map.ts';
@@ -20,7 +21,7 @@ export function assessStation(
   map: SkyMap,
   { profile, observed }: StationHorizon,
   station: { id: string; name: string },
-  names: ReadonlyMap<string, string>,
+  obstructions: KnownObstructions,
 ): StationAssessment {
   const spans = blockedSpans(profile);
   const blocked = blockedLight(map, spans);
@@ -37,7 +38,7 @@ export function assessStation(
     },
     coverage: coverage(map, observed),
     irradiation: { annual, monthly: light },
-    ...obstructionCosts(map, profile, names),
+    ...obstructionCosts(map, profile, obstructions),
   };
 }
 

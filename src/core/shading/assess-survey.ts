@@ -4,7 +4,7 @@ import { sunTrack } from '../solar-position/sun-track.ts';
 import { standardOffsetMinutes } from '../solar-position/time-zone.ts';
 import { ordered } from '../survey/order.ts';
 import type { Problem } from '../survey/problem.ts';
-import type { RoofPlane, Site, Station, Survey, TranspositionId } from '../survey/survey.ts';
+import type { Obstruction, RoofPlane, Site, Station, Survey, TranspositionId } from '../survey/survey.ts';
 import { transpositionOf } from '../transposition/transposition-models.ts';
 import type { Assessment, PlaneAccess, PlaneAssessment, StationAssessment } from './assessment.ts';
 import { assessStation } from './assess-station.ts';
@@ -89,7 +89,7 @@ export async function assessSurvey(
     const stations: StationAssessment[] = [];
     for (const station of stationsOf(survey, plane)) {
       await advance(`${plane.name}, ${station.name}`);
-      stations.push(assessStation(map, stationHorizon(survey, station), station, obstructionNames(survey)));
+      stations.push(assessStation(map, stationHorizon(survey, station), station, obstructionsById(survey)));
     }
     assessed.push(planeAssessment(plane, map, light.orientation, stations));
   }
@@ -107,8 +107,8 @@ export async function assessSurvey(
 export const stationsOf = (survey: Survey, plane: RoofPlane): Station[] =>
   ordered(survey.stations).filter(({ serves }) => serves.includes(plane.id));
 
-export const obstructionNames = (survey: Survey): Map<string, string> =>
-  new Map(survey.obstructions.map(({ id, name }) => [id, name]));
+export const obstructionsById = (survey: Survey): Map<string, Obstruction> =>
+  new Map(survey.obstructions.map((obstruction) => [obstruction.id, obstruction]));
 
 function planeAssessment(
   plane: RoofPlane,

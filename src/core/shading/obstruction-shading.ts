@@ -1,5 +1,7 @@
 import { blockedSpans } from '../horizon/blocked-spans.ts';
 import type { HorizonProfile } from '../horizon/horizon-profile.ts';
+import { obstructionKind } from '../survey/obstruction-kinds.ts';
+import type { Obstruction } from '../survey/survey.ts';
 import type { ObstructionGroup, ObstructionShading } from './assessment.ts';
 import { blockedLight, shadedMonths } from './blocked-light.ts';
 import type { SkyMap } from './sky-map.ts';
@@ -17,6 +19,9 @@ const MOST_COMPARED = 40;
 /** Light behind the obstructions that stand, kWh/m2 by month; the sum is the year. */
 type LightBehind = (standing: readonly boolean[]) => number[];
 
+/** What is known of each obstruction, by id. */
+export type KnownObstructions = ReadonlyMap<string, Pick<Obstruction, 'name' | 'kind'>>;
+
 export interface ObstructionCosts {
   obstructions: ObstructionShading[];
   groups: ObstructionGroup[];
@@ -26,7 +31,7 @@ export interface ObstructionCosts {
 export function obstructionCosts(
   map: SkyMap,
   profile: HorizonProfile,
-  names: ReadonlyMap<string, string>,
+  obstructions: KnownObstructions,
 ): ObstructionCosts {
   const count = profile.obstructionIds.length;
   const whole = unshadedMonths(map);
@@ -41,7 +46,7 @@ export function obstructionCosts(
     const alone = lightBehind(Array.from({ length: count }, (_, other) => other === i));
     return {
       id,
-      name: names.get(id) ?? id,
+      name: obstructions.get(id)?.name ?? id,
       gainIfRemoved: notBelowZero(gain(cleared)),
       lossIfAlone: notBelowZero(1 - sum(alone) / sum(whole)),
       monthly: whole.map((light, m): number | null =>
@@ -49,18 +54,20 @@ export function obstructionCosts(
       ),
     };
   });
-  const groups = hiddenBehindEachOther(rows, (gone) => gain(without(gone)));
+  const removable = rows.map(({ id }) => obstructionKind(obstructions.get(id)?.kind ?? 'other').removable);
+  const groups = hiddenBehindEachOther(rows, removable, (gone) => gain(without(gone)));
   return { obstructions: [...rows].sort((a, b) => b.gainIfRemoved - a.gainIfRemoved), groups };
 }
 
 /** Joins obstructions whose pairs give more together than singly; `gainOf` takes indexes. */
 function hiddenBehindEachOther(
   rows: readonly ObstructionShading[],
+  removable: readonly boolean[],
   gainOf: (gone: readonly number[]) => number,
 ): ObstructionGroup[] {
   const compared = rows
     .map((_, i) => i)
-    .filter((i) => rows[i].lossIfAlone - rows[i].gainIfRemoved > LEAST_SHARED_GAIN)
+    .filter((i) => removable[i] && rows[i].lossIfAlone - rows[i].gainIfRemoved > LEAST_SHARED_GAIN)
     .sort((a, b) => rows[b].lossIfAlone - rows[a].lossIfAlone)
     .slice(0, MOST_COMPARED);
   const groupOf = rows.map((_, i) => i);

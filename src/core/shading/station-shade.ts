@@ -5,6 +5,7 @@ import { assessStation } from './assess-station.ts';
 import type { StationAssessment } from './assessment.ts';
 import type { AzimuthRange } from './coverage.ts';
 import type { SkyDensity } from './sky-density.ts';
+import type { KnownObstructions } from './obstruction-shading.ts';
 import type { SkyMap } from './sky-map.ts';
 import { unshadedMonths } from './sky-map.ts';
 import type { ObstructionChange } from './what-if.ts';
@@ -32,16 +33,21 @@ export function stationShade(
   density: SkyDensity,
   horizon: StationHorizon,
   station: { id: string; name: string },
-  names: ReadonlyMap<string, string>,
+  obstructions: KnownObstructions,
   changes: readonly ObstructionChange[] = [],
 ): StationShade {
   const monthly = unshadedMonths(map);
   const imagined = () =>
-    assessStation(map, { ...horizon, profile: changedProfile(horizon.profile, changes) }, station, names);
+    assessStation(
+      map,
+      { ...horizon, profile: changedProfile(horizon.profile, changes) },
+      station,
+      obstructions,
+    );
   return {
     surfaceTilt: map.surfaceTilt,
     surfaceAzimuth: map.surfaceAzimuth,
-    measured: assessStation(map, horizon, station, names),
+    measured: assessStation(map, horizon, station, obstructions),
     imagined: changes.length > 0 ? imagined() : null,
     unshaded: {
       annual: monthly.reduce((sum, light) => sum + light, 0),

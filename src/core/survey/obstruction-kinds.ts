@@ -18,6 +18,8 @@ export interface ObstructionKindRow {
   name: string;
   /** How neighbouring sightings are joined where the trace does not say. */
   defaultEdge: TraceEdge;
+  /** False for what no one can take away. */
+  removable: boolean;
   leaves?: Leaves;
 }
 
@@ -29,6 +31,7 @@ export const obstructionKinds: readonly ObstructionKindRow[] = [
     kind: 'deciduous-tree',
     name: 'Deciduous tree',
     defaultEdge: 'drawn',
+    removable: true,
     leaves: {
       on: 0.15,
       off: 0.55,
@@ -42,6 +45,7 @@ export const obstructionKinds: readonly ObstructionKindRow[] = [
     kind: 'evergreen-tree',
     name: 'Evergreen tree',
     defaultEdge: 'drawn',
+    removable: true,
     leaves: {
       on: 0.1,
       off: 0.1,
@@ -50,13 +54,13 @@ export const obstructionKinds: readonly ObstructionKindRow[] = [
       source: 'Common practice, no source',
     },
   },
-  { kind: 'building', name: 'Building', defaultEdge: 'straight' },
-  { kind: 'roof-part', name: 'Part of a roof', defaultEdge: 'straight' },
-  { kind: 'chimney', name: 'Chimney', defaultEdge: 'straight' },
-  { kind: 'mast', name: 'Mast or pole', defaultEdge: 'straight' },
-  { kind: 'wire', name: 'Wire', defaultEdge: 'straight' },
-  { kind: 'terrain', name: 'Hill or terrain', defaultEdge: 'drawn' },
-  { kind: 'other', name: 'Something else', defaultEdge: 'straight' },
+  { kind: 'building', name: 'Building', defaultEdge: 'straight', removable: true },
+  { kind: 'roof-part', name: 'Part of a roof', defaultEdge: 'straight', removable: true },
+  { kind: 'chimney', name: 'Chimney', defaultEdge: 'straight', removable: true },
+  { kind: 'mast', name: 'Mast or pole', defaultEdge: 'straight', removable: true },
+  { kind: 'wire', name: 'Wire', defaultEdge: 'straight', removable: true },
+  { kind: 'terrain', name: 'Hill or terrain', defaultEdge: 'drawn', removable: false },
+  { kind: 'other', name: 'Something else', defaultEdge: 'straight', removable: true },
 ];
 
 const rows = new Map(obstructionKinds.map((row) => [row.kind, row]));
