@@ -25,7 +25,7 @@ const samples: SampleSurvey[] = Object.entries(titles).map(([name, title]) => ({
   text: texts[name],
 }));
 
-/** Once a survey is stored there is something to lose; the browser answers by its own rules, without asking. */
+/** Once a survey is stored there is something to lose; most browsers answer by their own rules, some ask. */
 async function keepStorage(): Promise<void> {
   try {
     await navigator.storage.persist();

@@ -3,6 +3,7 @@ import type { Problem } from '../core/survey/problem.ts';
 import type { Survey } from '../core/survey/survey.ts';
 import type { AppErrorCode } from './app-error.ts';
 import type { StoredSurvey, SurveySummary } from './survey-store.ts';
+import type { WeatherFileSummary } from './weather-store.ts';
 
 /** What the last act was, so that it can be told and taken back. */
 export interface Notice {
@@ -12,7 +13,8 @@ export interface Notice {
     | 'survey-duplicated'
     | 'survey-replaced'
     | 'survey-changed'
-    | 'survey-restored';
+    | 'survey-restored'
+    | 'weather-file-forgotten';
   title: string;
   undo?: () => Promise<void>;
 }
@@ -46,6 +48,8 @@ export interface Trouble {
 export interface AppState {
   /** Null until first read. */
   surveys: Signal<SurveySummary[] | null>;
+  /** Weather files kept on this device, as far as read. */
+  weatherFiles: Signal<WeatherFileSummary[]>;
   /** The survey on screen; null while it is read; `missing` where the id is not on this device. */
   open: Signal<{ id: string; stored: StoredSurvey | 'missing' | null } | null>;
   notice: Signal<Notice | null>;
@@ -65,6 +69,7 @@ export interface AppState {
 export function appState(): AppState {
   return {
     surveys: signal(null),
+    weatherFiles: signal([]),
     open: signal(null),
     notice: signal(null),
     imports: signal([]),

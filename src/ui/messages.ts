@@ -78,6 +78,7 @@ const NOTICES: Record<Notice['code'], (title: string) => string> = {
   'survey-replaced': (title) => `“${title}” is replaced by the file.`,
   'survey-changed': (title) => `“${title}” is changed.`,
   'survey-restored': (title) => `“${title}” is back in the list.`,
+  'weather-file-forgotten': (name) => `The weather file ${name} is no longer on this device.`,
 };
 
 export function noticeText({ code, title }: Notice): string {

@@ -14,7 +14,8 @@ export function ScreenHeading({ title, children }: { title: string; children?: C
     document.title = title === 'Noonmark' ? title : `${title} · Noonmark`;
   }, [title]);
   useEffect(() => {
-    if (takeArrival()) heading.current?.focus();
+    // Going back keeps the place on the page; going on has scrolled to the top already.
+    if (takeArrival()) heading.current?.focus({ preventScroll: true });
   }, []);
   return (
     <h1 ref={heading} tabIndex={-1}>

@@ -12,7 +12,12 @@ function Outcome({ result }: { result: ImportResult }) {
           <p>
             Imported: <a href={surveyPath(result.id)}>{result.title}</a>
           </p>
-          {result.warnings.length > 0 && <ProblemList problems={result.warnings} />}
+          {result.warnings.length > 0 && (
+            <>
+              <p>Worth knowing:</p>
+              <ProblemList problems={result.warnings} />
+            </>
+          )}
         </>
       );
     case 'refused':

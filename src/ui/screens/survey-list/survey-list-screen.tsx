@@ -10,6 +10,7 @@ import { ImportFiles } from './import-files.tsx';
 import { SampleList } from './sample-list.tsx';
 import { StorageLine } from './storage-line.tsx';
 import { SurveyRow } from './survey-row.tsx';
+import { WeatherFiles } from './weather-files.tsx';
 import './survey-list.css';
 
 function OtherScreens() {
@@ -29,10 +30,16 @@ export function SurveyListScreen() {
   const services = useApp();
   const { state } = services;
   useEffect(() => {
-    void attempt(state, async () => {
-      await refreshList(services);
-      await findUnreadable(services);
-    });
+    const read = () =>
+      attempt(state, async () => {
+        await refreshList(services);
+        await findUnreadable(services);
+      });
+    // Another tab may have changed the list meanwhile.
+    const readAgain = () => void (document.visibilityState === 'visible' && read());
+    void read();
+    document.addEventListener('visibilitychange', readAgain);
+    return () => document.removeEventListener('visibilitychange', readAgain);
   }, [services, state]);
   const surveys = state.surveys.value;
   const present = surveys?.filter(({ deletedAt }) => deletedAt === null) ?? [];
@@ -53,6 +60,7 @@ export function SurveyListScreen() {
       <ImportFiles />
       <SampleList open={surveys !== null && present.length === 0} />
       {deleted.length > 0 && <DeletedSurveys surveys={deleted} />}
+      <WeatherFiles />
       <StorageLine />
       <OtherScreens />
     </div>

@@ -1,3 +1,4 @@
+import { useState } from 'preact/hooks';
 import { ordered } from '../../../core/survey/order.ts';
 import { sightingDirection } from '../../../core/survey/sighting-direction.ts';
 import type { Sighting, Station, Survey, Trace } from '../../../core/survey/survey.ts';
@@ -35,7 +36,13 @@ function SightingRow({ sighting, number }: { sighting: Sighting; number: number 
   );
 }
 
+/** A sweep has thousands of sightings; at first so many of each trace are shown. */
+const SHOWN_AT_FIRST = 100;
+
 function TraceRows({ trace, name }: { trace: Trace; name: string }) {
+  const [shown, setShown] = useState(SHOWN_AT_FIRST);
+  const sightings = ordered(trace.sightings);
+  const hidden = sightings.length - Math.min(shown, sightings.length);
   const about = [
     SHAPES[trace.shape],
     trace.fullCircle && 'full circle',
@@ -48,9 +55,18 @@ function TraceRows({ trace, name }: { trace: Trace; name: string }) {
           {name} <span class="faint small">{about.filter(Boolean).join(', ')}</span>
         </th>
       </tr>
-      {ordered(trace.sightings).map((sighting, place) => (
+      {sightings.slice(0, shown).map((sighting, place) => (
         <SightingRow key={sighting.id} sighting={sighting} number={place + 1} />
       ))}
+      {hidden > 0 && (
+        <tr>
+          <td colSpan={4}>
+            <button type="button" onClick={() => setShown(Infinity)}>
+              Show {hidden} more sightings
+            </button>
+          </td>
+        </tr>
+      )}
     </tbody>
   );
 }
@@ -63,12 +79,14 @@ function placeOf({ position }: Station, survey: Survey): string {
 }
 
 /** What one station saw: a ruled table of sightings, one block a trace. */
-export function FieldBook({ station, survey }: { station: Station; survey: Survey }) {
+export function FieldBook({ station, survey, open }: { station: Station; survey: Survey; open: boolean }) {
   const nameOf = (id: string) => survey.obstructions.find((obstruction) => obstruction.id === id)?.name ?? id;
   const serves = survey.planes.filter(({ id }) => station.serves.includes(id)).map(({ name }) => name);
   return (
-    <section class="stack">
-      <h3>{station.name}</h3>
+    <details class="fold station" open={open}>
+      <summary>
+        <h3>{station.name}</h3>
+      </summary>
       <p class="small">
         {placeOf(station, survey)}.{' '}
         {serves.length > 0 ? `Speaks for ${serves.join(', ')}.` : 'Speaks for no plane.'}
@@ -96,6 +114,6 @@ export function FieldBook({ station, survey }: { station: Station; survey: Surve
           ))}
         </WideTable>
       )}
-    </section>
+    </details>
   );
 }

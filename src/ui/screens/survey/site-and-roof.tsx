@@ -21,8 +21,8 @@ export function SiteAndRoof({ survey }: SectionProps) {
       )}
       <h2>Field book</h2>
       {survey.stations.length > 0 ? (
-        ordered(survey.stations).map((station) => (
-          <FieldBook key={station.id} station={station} survey={survey} />
+        ordered(survey.stations).map((station, place) => (
+          <FieldBook key={station.id} station={station} survey={survey} open={place === 0} />
         ))
       ) : (
         <p>No station yet.</p>
