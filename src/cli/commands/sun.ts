@@ -5,6 +5,8 @@ import { numberOption, textOption, UsageError } from '../command.ts';
 import { readCsv } from '../csv-rows.ts';
 import { INSTANT_FORM, instantOf } from '../instants.ts';
 import { problemLines } from '../problem-lines.ts';
+import type { SunDay } from '../sun-day.ts';
+import { sunDay, sunDayText } from '../sun-day.ts';
 import { table } from '../table.ts';
 
 interface SunRow {
@@ -18,29 +20,40 @@ interface SunRow {
 
 export const sun: Command = {
   name: 'sun',
-  usage: '[--at UTC --latitude DEGREES --longitude DEGREES] [--json] [< rows.csv]',
-  summary: 'Where the sun stands at an instant and place, or at many.',
+  usage: '[--latitude DEGREES --longitude DEGREES [--at UTC | --day DAY]] [--json] [< rows.csv]',
+  summary: 'Where the sun stands at an instant and place, or at many; sunrise and sunset of a day.',
   help: `
 Without options, reads rows from standard input: a CSV table whose first line is
     utc,latitude,longitude
 (a column altitude, metres, may be there too). Instants are UTC unless they carry an offset.
 
   --at UTC              instant such as 2026-06-21T12:00:00Z; now where it is left out
+  --day DAY             instead: sunrise, solar noon and sunset of a calendar day such as 2026-06-21
+  --time-zone ZONE      of that day, an IANA name such as Europe/Lisbon; UTC where it is left out
   --latitude DEGREES    -90 to 90, north positive
   --longitude DEGREES   -180 to 180, east positive
   --altitude METRES     above sea level, for the pressure that bends the light; 0 where it is left out
-  --json                a list of { utc, latitude, longitude, solarAzimuth, apparentElevation, geometricElevation }
+  --json                a list of { utc, latitude, longitude, solarAzimuth, apparentElevation, geometricElevation };
+                        with --day { day, timeZone, kind, sunrise, solarNoon, sunset, daylight, equationOfTime },
+                        instants in UTC or null, minutes
 
 Azimuth is in degrees clockwise from true north. Apparent elevation is what is seen, with refraction.
 Never look at the sun, nor point a lens at it.`,
   options: {
     at: { type: 'string' },
+    day: { type: 'string' },
+    'time-zone': { type: 'string' },
     latitude: { type: 'string' },
     longitude: { type: 'string' },
     altitude: { type: 'string' },
     json: { type: 'boolean' },
   },
   async run(call) {
+    const day = dayOf(call);
+    if (day) {
+      call.terminal.out(call.values.json ? `${JSON.stringify(day)}\n` : sunDayText(day));
+      return 0;
+    }
     const rows = await rowsOf(call);
     if (!rows.ok) {
       call.terminal.err(problemLines('standard input', rows.problems));
@@ -50,6 +63,19 @@ Never look at the sun, nor point a lens at it.`,
     return 0;
   },
 };
+
+function dayOf(call: CommandCall): SunDay | null {
+  const day = textOption(call, 'day');
+  if (day === undefined) {
+    if (call.values['time-zone'] !== undefined) throw new UsageError('--time-zone goes with --day.');
+    return null;
+  }
+  const latitude = numberOption(call, 'latitude', -90, 90);
+  const longitude = numberOption(call, 'longitude', -180, 180);
+  if (latitude === undefined || longitude === undefined || call.values.at !== undefined)
+    throw new UsageError('With --day give --latitude and --longitude, and no --at.');
+  return sunDay(day, textOption(call, 'time-zone') ?? 'UTC', latitude, longitude);
+}
 
 async function rowsOf(call: CommandCall): Promise<Parsed<SunRow[]>> {
   const latitude = numberOption(call, 'latitude', -90, 90);
