@@ -45,14 +45,11 @@ export function HorizonView({ site, shade, names, gone, year }: Props) {
       </div>
       <ReadoutLines at={at} context={{ site, shade, names, gone, year }} />
       {picture && (whole || picture.frame.span < 360) && (
-        <label class="check">
-          <input
-            type="checkbox"
-            checked={whole}
-            onChange={({ currentTarget }) => setWhole(currentTarget.checked)}
-          />
-          Show the whole circle
-        </label>
+        <div>
+          <button type="button" class="switch" aria-pressed={whole} onClick={() => setWhole(!whole)}>
+            Whole circle
+          </button>
+        </div>
       )}
       <figcaption class="small">
         <details>

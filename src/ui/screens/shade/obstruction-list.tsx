@@ -83,8 +83,14 @@ function Row({ row, survey, shade, most, gone, onToggle }: RowProps) {
         </p>
       </div>
       <Drawing picture={ticks} id={`ticks-${place}`} label={ticksText(row)} />
-      <button type="button" aria-pressed={gone} onClick={() => onToggle(row.id)}>
-        Imagine it gone<span class="visually-hidden">: {row.name}</span>
+      <button
+        type="button"
+        class="switch"
+        aria-pressed={gone}
+        aria-label={`Imagine it gone: ${row.name}`}
+        onClick={() => onToggle(row.id)}
+      >
+        Imagine it gone
       </button>
     </li>
   );
