@@ -1,12 +1,14 @@
 import type { WeatherFileSummary, WeatherStore } from '../app/weather-store.ts';
 import type { Connection } from './connection.ts';
+import type { Database } from './open-database.ts';
+import { writingTo } from './transaction.ts';
 
 async function sha256Of(contents: ArrayBuffer): Promise<string> {
   const digest = new Uint8Array(await crypto.subtle.digest('SHA-256', contents));
   return Array.from(digest, (byte) => byte.toString(16).padStart(2, '0')).join('');
 }
 
-const STRICT = { durability: 'strict' } as const;
+const STORES: ('weather-files' | 'weather-bytes')[] = ['weather-files', 'weather-bytes'];
 
 /** Weather files in the database, under the hash of their contents. */
 export function weatherDatabase(connection: Connection, now: () => number): WeatherStore {
@@ -21,25 +23,21 @@ export function weatherDatabase(connection: Connection, now: () => number): Weat
     keep: async (name, contents) => {
       const sha256 = await sha256Of(contents);
       const summary: WeatherFileSummary = { sha256, name, bytes: contents.byteLength, keptAt: now() };
-      await connection.run(async (database) => {
-        const transaction = database.transaction(['weather-files', 'weather-bytes'], 'readwrite', STRICT);
-        await Promise.all([
-          transaction.objectStore('weather-files').put(summary),
-          transaction.objectStore('weather-bytes').put({ sha256, contents }),
-          transaction.done,
-        ]);
-      });
+      const keep = (database: Database) =>
+        writingTo(database, STORES, async (transaction) => {
+          await transaction.objectStore('weather-bytes').put({ sha256, contents });
+          await transaction.objectStore('weather-files').put(summary);
+        });
+      await connection.run(keep);
       return summary;
     },
 
     forget: (sha256) =>
-      connection.run(async (database) => {
-        const transaction = database.transaction(['weather-files', 'weather-bytes'], 'readwrite', STRICT);
-        await Promise.all([
-          transaction.objectStore('weather-files').delete(sha256),
-          transaction.objectStore('weather-bytes').delete(sha256),
-          transaction.done,
-        ]);
-      }),
+      connection.run((database) =>
+        writingTo(database, STORES, async (transaction) => {
+          await transaction.objectStore('weather-bytes').delete(sha256);
+          await transaction.objectStore('weather-files').delete(sha256);
+        }),
+      ),
   };
 }

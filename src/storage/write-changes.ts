@@ -37,13 +37,14 @@ export async function writeChanges(
   // Past the wrapper: a promise for each of ten thousands of fields costs more than storing them, and a failing
   // request ends the transaction anyhow, which is waited for.
   const fields = unwrap(transaction.objectStore('fields'));
-  const readings: Promise<void>[] = [];
   for (const { path, value } of changes) {
-    if (!isReadingPath(path)) {
-      const row: FieldRow = { survey, path, stamp, ...(value !== undefined && { value }) };
-      fields.put(row);
-    } else if (value === undefined) readings.push(takeOutReading(transaction, survey, path, stamp));
-    else readings.push(addReading(transaction, survey, path, value));
+    if (isReadingPath(path)) continue;
+    const row: FieldRow = { survey, path, stamp, ...(value !== undefined && { value }) };
+    fields.put(row);
   }
-  await Promise.all(readings);
+  const write = ({ path, value }: FieldChange): Promise<void> =>
+    value === undefined
+      ? takeOutReading(transaction, survey, path, stamp)
+      : addReading(transaction, survey, path, value);
+  await Promise.all(changes.filter(({ path }) => isReadingPath(path)).map(write));
 }

@@ -1,4 +1,5 @@
-import { openDB } from 'idb';
+import { forceCloseDatabase } from 'fake-indexeddb';
+import { openDB, unwrap } from 'idb';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { DATABASE_NAME, DATABASE_VERSION } from '../../src/storage/schema.ts';
 import { inventedSurvey } from '../app/invented-survey.ts';
@@ -58,6 +59,16 @@ describe('a lost connection', () => {
     await connection.run((database) => Promise.resolve(database.close()));
     await surveys.remove('invented-1');
     expect((await surveys.list())[0].deletedAt).not.toBeNull();
+  });
+
+  it('that the browser ended is opened again at the next act', async () => {
+    const { surveys, connection } = tab();
+    await surveys.create(inventedSurvey());
+    await connection.run((database) => {
+      forceCloseDatabase(unwrap(database) as unknown as Parameters<typeof forceCloseDatabase>[0]);
+      return Promise.resolve();
+    });
+    expect((await surveys.list()).map(({ id }) => id)).toEqual(['invented-1']);
   });
 
   it('is told when it cannot be had again', async () => {

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { beforeEach, describe, expect, it } from 'vitest';
+import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { emptyBrowser, tab } from './memory-database.ts';
 
 beforeEach(emptyBrowser);
@@ -29,5 +29,16 @@ describe('kept weather files', () => {
     await weather.forget(sha256);
     expect(await weather.list()).toEqual([]);
     expect(await weather.bytes(sha256)).toBeNull();
+  });
+
+  it('that find no room leave nothing behind', async () => {
+    const { weather } = tab();
+    const kept = await weather.keep('fits.epw', bytesOf('fits'));
+    const put = vi.spyOn(IDBObjectStore.prototype, 'put').mockImplementation(() => {
+      throw new DOMException('no room', 'QuotaExceededError');
+    });
+    await expect(weather.keep('large.epw', bytesOf('large'))).rejects.toMatchObject({ code: 'storage-full' });
+    put.mockRestore();
+    expect(await weather.list()).toEqual([kept]);
   });
 });
