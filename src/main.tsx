@@ -1,4 +1,5 @@
 import { render } from 'preact';
+import { AppError } from './app/app-error.ts';
 import { appState } from './app/app-state.ts';
 import type { AppServices, SampleSurvey } from './app/app-services.ts';
 import { offerUpdates } from './app/update-flow.ts';
@@ -13,7 +14,10 @@ import { startRouter } from './ui/router.ts';
 import { AssessOnWorker } from './workers/assess-on-worker.ts';
 
 // WARNING: what is imported here by name is part of the first screen. Parsers, screens and workers are not.
-const parser = () => import('./core/survey/parse-survey.ts');
+const parser = () =>
+  import('./core/survey/parse-survey.ts').catch((cause: unknown) => {
+    throw new AppError('part-missing', cause);
+  });
 const newId = () => crypto.randomUUID();
 const now = () => Date.now();
 

@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { inventedSurvey } from '../app/invented-survey.ts';
 import { DESK, openFirstSample, PHONE, startApp, type AppUnderTest } from './harness.ts';
-import { act, exported, imported, importFiles, surveyFile, titles } from './survey-files.ts';
+import { act, exported, imported, importFiles, longSurvey, surveyFile, titles } from './survey-files.ts';
 
 let app: AppUnderTest;
 beforeAll(async () => void (app = await startApp()));
@@ -127,6 +127,40 @@ describe('the list of surveys', () => {
   });
 });
 
+describe('kept weather files', () => {
+  /** Keeps a file as the app does when one is chosen, past its screens. */
+  const keep = () =>
+    new Promise<void>((resolve) => {
+      const opening = indexedDB.open('noonmark');
+      opening.onsuccess = () => {
+        const transaction = opening.result.transaction(['weather-files', 'weather-bytes'], 'readwrite');
+        const sha256 = 'invented';
+        transaction
+          .objectStore('weather-files')
+          .put({ sha256, name: 'nowhere.epw', bytes: 1_500_000, keptAt: 0 });
+        transaction.objectStore('weather-bytes').put({ sha256, contents: new ArrayBuffer(8) });
+        transaction.oncomplete = () => {
+          opening.result.close();
+          resolve();
+        };
+      };
+    });
+
+  it('are listed with their size, and removed with a way back', async () => {
+    const page = await app.openPage(PHONE);
+    await imported(page);
+    await page.evaluate(keep);
+    await page.reload();
+    await page.getByText('Kept weather files (1)').click();
+    await page.getByText('1.5 MB').waitFor();
+    await page.getByRole('button', { name: 'Remove nowhere.epw' }).click();
+    await page.getByText('The weather file nowhere.epw is no longer on this device.').waitFor();
+    expect(await page.getByText('Kept weather files').count()).toBe(0);
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await page.getByText('Kept weather files (1)').waitFor();
+  });
+});
+
 describe('a survey', () => {
   it('shows its site, planes, obstructions and the field book', async () => {
     const page = await app.openPage(PHONE);
@@ -146,6 +180,20 @@ describe('a survey', () => {
       '2 140.0° 31.0° mark: top',
       '3 151.5° 22.0°',
     ]);
+  });
+
+  it('with a long sweep shows the first sightings, and all on demand', async () => {
+    const page = await app.openPage(DESK);
+    await imported(page, longSurvey(450));
+    await page.locator('.ledger-title').click();
+    const rows = page.getByRole('region', { name: 'Sightings from Eave, left' }).getByRole('row');
+    const more = page.getByRole('button', { name: 'Show 350 more sightings' });
+    await more.waitFor();
+    // The head, the trace, the first hundred, and the row of the button.
+    expect(await rows.count()).toBe(103);
+    await more.click();
+    await more.waitFor({ state: 'detached' });
+    expect(await rows.count()).toBe(452);
   });
 
   it('is renamed, with a way back', async () => {

@@ -53,7 +53,7 @@ export function StorageLine() {
       <p class="small" role="status">
         {READINESS[offlineReadiness.value]}
       </p>
-      {space && <p class="small">{spaceText(space)}</p>}
+      {space && surveys && <p class="small">{spaceText(space)}</p>}
       <InstallAdvice />
     </section>
   );
