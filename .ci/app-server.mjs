@@ -34,7 +34,8 @@ function fileFor(folder, path) {
   const inside = file === normalize(folder) || file.startsWith(normalize(folder + sep));
   const found = inside ? statSync(file, { throwIfNoEntry: false }) : undefined;
   if (found?.isFile()) return { file, size: found.size, path };
-  if (extname(path) !== '') return null; // a missing picture or script is not a page
+  const isPage = extname(path) === '' || path.startsWith('/survey/'); // ids of surveys may have dots
+  if (!isPage) return null; // a missing picture or script is not a page
   const page = join(folder, 'index.html');
   const size = statSync(page, { throwIfNoEntry: false })?.size;
   return size === undefined ? null : { file: page, size, path: '/index.html' };
