@@ -129,7 +129,7 @@ describe('the Shade screen', () => {
     expect(await imagined.innerText()).toContain(percent(station.solarAccess.annual + first.gainIfRemoved));
     expect(await imagined.innerText()).toContain('Imagined, not measured');
     expect(await figure(page).textContent()).toBe(measured);
-    await page.getByRole('button', { name: 'Put it back' }).tap();
+    await page.getByRole('button', { name: 'Back to what was measured' }).tap();
     await imagined.waitFor({ state: 'detached' });
     expect(
       await page
@@ -137,6 +137,21 @@ describe('the Shade screen', () => {
         .first()
         .getAttribute('aria-pressed'),
     ).toBe('false');
+  });
+
+  it('imagines a tree lower where its distance is known: less than gone gives back, and more than nothing', async () => {
+    const page = await app.openPage(DESK);
+    const survey = await openMaple(page);
+    const [{ stations }] = (await computed(survey)).planes;
+    const { name, gainIfRemoved } = stations[0].obstructions[0];
+    const { annual } = stations[0].solarAccess;
+    await page.getByRole('combobox', { name: `Imagine it lower: ${name}` }).selectOption('3');
+    await page.locator('.imagined', { hasText: `${name} 3 m lower` }).waitFor();
+    const imagined = parseFloat(await page.locator('.imagined strong').innerText()) / 100;
+    expect(imagined).toBeGreaterThan(annual + 0.002);
+    expect(imagined).toBeLessThan(annual + gainIfRemoved - 0.002);
+    await page.getByRole('combobox', { name: 'Station' }).selectOption(stations[1].id);
+    await page.locator('.imagined').waitFor({ state: 'detached' });
   });
 
   it('can be stopped while it calculates, and started again', async () => {

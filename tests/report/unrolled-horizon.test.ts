@@ -1,5 +1,7 @@
 import { beforeAll, describe, expect, it } from 'vitest';
+import type { HorizonProfile } from '../../src/core/horizon/horizon-profile.ts';
 import type { StationShade } from '../../src/core/shading/station-shade.ts';
+import { changedProfile } from '../../src/core/shading/what-if.ts';
 import type { Survey } from '../../src/core/survey/survey.ts';
 import type { Mark, TextMark } from '../../src/report/marks.ts';
 import { textWidth } from '../../src/report/marks.ts';
@@ -9,6 +11,7 @@ import { obstructionShapes } from '../../src/report/pictures/horizon-obstruction
 import { monthColumns } from '../../src/report/pictures/month-columns.ts';
 import { hourBars } from '../../src/report/pictures/hour-bars.ts';
 import { planView } from '../../src/report/pictures/plan-view.ts';
+import { xOf } from '../../src/report/pictures/sky-frame.ts';
 import { smoothDensity } from '../../src/report/pictures/smooth-density.ts';
 import { dayLines, hourLines } from '../../src/report/pictures/sun-lines.ts';
 import { unrolledHorizon } from '../../src/report/pictures/unrolled-horizon.ts';
@@ -35,15 +38,14 @@ describe.each(SAMPLE_FILES)('the unrolled horizon of %s', (file) => {
   let shade: StationShade;
   beforeAll(async () => void ({ survey, shade } = await sampleShade(file)));
 
-  const picture = (sheet: (typeof SHEETS)[number], gone: string[] = []) =>
+  const picture = (sheet: (typeof SHEETS)[number], imaginedProfile: HorizonProfile | null = null) =>
     unrolledHorizon({
       site: survey.site,
-      shade,
+      shade: { ...shade, imaginedProfile },
       density: smoothDensity(shade.density),
       days: dayLines(survey.site),
       hours: hourLines(survey.site),
       names: new Map(survey.obstructions.map(({ id, name }) => [id, name])),
-      gone: new Set(gone),
       ...sheet,
     });
 
@@ -71,7 +73,7 @@ describe.each(SAMPLE_FILES)('the unrolled horizon of %s', (file) => {
       }),
       hourBars({ unshaded: shade.unshaded.hourly, access: shade.measured.solarAccess.hourly, width: 358 }),
       planView({
-        shapes: obstructionShapes(shade.profile, new Map(), new Set()),
+        shapes: obstructionShapes(shade.profile, new Map(), null),
         days: dayLines(survey.site).slice(0, 2),
         surfaceAzimuth: shade.surfaceAzimuth,
         size: 220,
@@ -81,6 +83,22 @@ describe.each(SAMPLE_FILES)('the unrolled horizon of %s', (file) => {
       const svg = svgText(made, { idPrefix: 'p' });
       expect(svg).not.toMatch(/NaN|undefined|Infinity/);
       expect(svg).toBe(svgText(made, { idPrefix: 'p' }));
+    }
+  });
+
+  it('names what stands outside a cut view, and has it all in the whole circle', () => {
+    expect(picture(SHEETS[1]).outside).toEqual([]);
+    const { outside, frame } = picture(SHEETS[0]);
+    const all = obstructionShapes(
+      shade.profile,
+      new Map(survey.obstructions.map(({ id, name }) => [id, name])),
+      null,
+    );
+    for (const { name, parts } of all) {
+      const seen = parts.some(({ azimuth }) =>
+        azimuth.some((a) => xOf(frame, a) > frame.left && xOf(frame, a) < frame.right),
+      );
+      expect(outside.includes(name), name).toBe(!seen);
     }
   });
 
@@ -94,7 +112,8 @@ describe.each(SAMPLE_FILES)('the unrolled horizon of %s', (file) => {
           (mark.kind === 'path' && mark.fill && 'hatch' in mark.fill && !mark.fill.hatch.ringed ? 1 : 0)
         );
       }, 0);
-    expect(hatches(picture(SHEETS[0]).marks)).toBe(shade.profile.obstructionIds.length);
-    expect(hatches(picture(SHEETS[0], [id]).marks)).toBe(shade.profile.obstructionIds.length - 1);
+    expect(hatches(picture(SHEETS[1]).marks)).toBe(shade.profile.obstructionIds.length);
+    const without = changedProfile(shade.profile, [{ obstruction: id, kind: 'gone' }]);
+    expect(hatches(picture(SHEETS[1], without).marks)).toBe(shade.profile.obstructionIds.length - 1);
   });
 });

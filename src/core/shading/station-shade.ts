@@ -18,6 +18,8 @@ export interface StationShade {
   readonly measured: StationAssessment;
   /** The same with changes imagined; null where none are. */
   readonly imagined: StationAssessment | null;
+  /** What would stand around then. */
+  readonly imaginedProfile: HorizonProfile | null;
   /** Irradiation with nothing in the way, kWh/m2. */
   readonly unshaded: { annual: number; monthly: number[]; /** [month][hour]. */ hourly: number[][] };
   /** As measured. */
@@ -37,18 +39,15 @@ export function stationShade(
   changes: readonly ObstructionChange[] = [],
 ): StationShade {
   const monthly = unshadedMonths(map);
-  const imagined = () =>
-    assessStation(
-      map,
-      { ...horizon, profile: changedProfile(horizon.profile, changes) },
-      station,
-      obstructions,
-    );
+  const assess = (profile: HorizonProfile) =>
+    assessStation(map, { ...horizon, profile }, station, obstructions);
+  const imaginedProfile = changes.length > 0 ? changedProfile(horizon.profile, changes) : null;
   return {
     surfaceTilt: map.surfaceTilt,
     surfaceAzimuth: map.surfaceAzimuth,
-    measured: assessStation(map, horizon, station, obstructions),
-    imagined: changes.length > 0 ? imagined() : null,
+    measured: assess(horizon.profile),
+    imagined: imaginedProfile && assess(imaginedProfile),
+    imaginedProfile,
     unshaded: {
       annual: monthly.reduce((sum, light) => sum + light, 0),
       monthly,

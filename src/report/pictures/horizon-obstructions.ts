@@ -14,27 +14,43 @@ export interface ObstructionShape {
   name: string;
   /** Place in the profile's list, which settles its hatch. */
   place: number;
+  /** As it stands, or would stand with a change imagined; empty where it is imagined gone. */
   parts: SilhouettePart[];
+  /** As measured, where a change to its shape is imagined. */
+  before: SilhouettePart[] | null;
   /** Share of light lost, mean of the year. */
   lost: number;
-  /** Imagined gone. */
-  gone: boolean;
 }
 
 /** The shapes of a profile's obstructions, larger ones first so that they do not cover smaller ones. */
 export function obstructionShapes(
   profile: HorizonProfile,
   names: ReadonlyMap<string, string>,
-  gone: ReadonlySet<string>,
+  imagined: HorizonProfile | null,
 ): ObstructionShape[] {
-  const shapes = profile.obstructionIds.map((id, place) => {
+  const standing = imagined ?? profile;
+  const shapes = profile.obstructionIds.map((id, place): ObstructionShape => {
     const passes =
-      profile.transmittance.subarray(place * 12, place * 12 + 12).reduce((sum, t) => sum + t, 0) / 12;
-    const parts = silhouette(profile, place);
-    return { id, name: names.get(id) ?? id, place, parts, lost: 1 - passes, gone: gone.has(id) };
+      standing.transmittance.subarray(place * 12, place * 12 + 12).reduce((sum, t) => sum + t, 0) / 12;
+    const before = imagined && hasChanged(profile, imagined, place) ? silhouette(profile, place) : null;
+    return {
+      id,
+      name: names.get(id) ?? id,
+      place,
+      parts: silhouette(standing, place),
+      before,
+      lost: 1 - passes,
+    };
   });
-  return shapes.sort((a, b) => areaOf(b.parts) - areaOf(a.parts));
+  const area = ({ parts, before }: ObstructionShape) => areaOf(before ?? parts);
+  return shapes.sort((a, b) => area(b) - area(a));
 }
+
+const hasChanged = (profile: HorizonProfile, imagined: HorizonProfile, place: number): boolean =>
+  profile.intervalObstruction.some(
+    (obstruction, k) =>
+      obstruction === place && (profile.low[k] !== imagined.low[k] || profile.high[k] !== imagined.high[k]),
+  );
 
 function areaOf(parts: readonly SilhouettePart[]): number {
   let area = 0;
@@ -91,17 +107,21 @@ function placed(frame: SkyFrame, parts: readonly SilhouettePart[], draw: Draw): 
   });
 }
 
-/** Hatched shapes; what passes light lets the drawing under it through, what is imagined gone is a broken line. */
+/** Whether nothing of a shape stands in the window. */
+export const isOutside = (frame: SkyFrame, { parts, before }: ObstructionShape): boolean =>
+  outlinesOf(frame, before ?? parts).length === 0;
+
+/** Hatched shapes; what passes light lets the drawing under it through, what is imagined away is a broken line. */
 export function obstructionMarks(frame: SkyFrame, shapes: readonly ObstructionShape[]): Mark[] {
-  return shapes.flatMap(({ parts, place, lost, gone }): Mark[] => {
+  return shapes.flatMap(({ parts, before, place, lost }): Mark[] => {
     const lines = outlinesOf(frame, parts);
-    const edges = edgesOf(frame, parts);
-    if (gone) return [{ kind: 'path', lines: edges, pen: { tone: 'ink', width: 1.2, dash: [5, 4] } }];
+    const broken = before ? edgesOf(frame, before) : [];
     return [
       { kind: 'path', lines, closed: true, fill: { tone: 'paper', opacity: 0.25 + 0.75 * lost } },
       { kind: 'path', lines, closed: true, fill: { hatch: hatchFor(place) } },
-      { kind: 'path', lines: edges, pen: { tone: 'ink', width: 1.5 } },
-    ];
+      { kind: 'path', lines: edgesOf(frame, parts), pen: { tone: 'ink', width: 1.5 } },
+      { kind: 'path', lines: broken, pen: { tone: 'ink', width: 1.2, dash: [5, 4] } },
+    ].filter((mark) => mark.lines.length > 0) as Mark[];
   });
 }
 
@@ -112,11 +132,11 @@ export function obstructionNames(
   places: LabelPlaces,
   size: number,
 ): Mark[] {
-  return shapes.flatMap(({ name, parts, gone }): Mark[] => {
+  return shapes.flatMap(({ name, parts, before }): Mark[] => {
     const widest = (frame.right - frame.left) * WIDEST_NAME;
-    const lines = twoLines(gone ? `${name}, gone` : name, size, widest);
+    const lines = twoLines(before ? `${name}, ${parts.length > 0 ? 'lower' : 'gone'}` : name, size, widest);
     const width = Math.max(...lines.map((line) => textWidth(line, size, true)));
-    const place = places.take(nameBoxes(frame, parts, width, size, lines.length));
+    const place = places.take(nameBoxes(frame, before ?? parts, width, size, lines.length));
     if (!place) return [];
     return lines.map((text, i): Mark => {
       const y = place.y - (lines.length - 1 - i) * size * LINE;
@@ -128,7 +148,7 @@ export function obstructionNames(
         size,
         anchor: 'middle',
         bold: true,
-        italic: gone,
+        italic: before !== null,
         rim: true,
       };
     });

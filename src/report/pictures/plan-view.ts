@@ -32,24 +32,20 @@ export function planView({ shapes, days, surfaceAzimuth, size }: PlanInput): Pic
       pen: { tone: 'ink', width: 0.9 },
     },
   ];
-  for (const { parts, place, gone } of shapes) {
-    const lines = parts.map(({ azimuth, low, high }) => [
+  const outlines = (parts: ObstructionShape['parts']): Line[] =>
+    parts.map(({ azimuth, low, high }) => [
       ...azimuth.flatMap((a, i) => at({ azimuth: a, elevation: high[i] })),
       ...azimuth
         .map((a, i) => at({ azimuth: a, elevation: low[i] }))
         .reverse()
         .flat(),
     ]);
-    if (gone)
-      marks.push({ kind: 'path', lines, closed: true, pen: { tone: 'ink', width: 0.8, dash: [3, 2] } });
-    else
-      marks.push({
-        kind: 'path',
-        lines,
-        closed: true,
-        fill: { hatch: { ...hatchFor(place), width: 0.8 } },
-        pen: { tone: 'ink', width: 0.9 },
-      });
+  for (const { parts, place, before } of shapes) {
+    const hatch = { ...hatchFor(place), width: 0.8 };
+    const pen = { tone: 'ink', width: 0.9 } as const;
+    marks.push({ kind: 'path', lines: outlines(parts), closed: true, fill: { hatch }, pen });
+    if (before)
+      marks.push({ kind: 'path', lines: outlines(before), closed: true, pen: { ...pen, dash: [3, 2] } });
   }
   marks.push({ kind: 'path', lines: [ring(0)], closed: true, pen: { tone: 'ink', width: 1.6 } });
   for (const [name, azimuth] of [

@@ -1,4 +1,5 @@
 import { RADIANS, DEGREES } from '../../core/angles/angles.ts';
+import type { HorizonProfile } from '../../core/horizon/horizon-profile.ts';
 import { planeFacing, planeHorizon } from '../../core/horizon/sky-view.ts';
 import type { StationShade } from '../../core/shading/station-shade.ts';
 import type { Site } from '../../core/survey/survey.ts';
@@ -6,7 +7,7 @@ import type { Mark, Picture } from '../marks.ts';
 import { halftone } from './halftone.ts';
 import { elevationRules, horizonAxes } from './horizon-axes.ts';
 import { horizonFrame } from './horizon-frame.ts';
-import { obstructionMarks, obstructionNames, obstructionShapes } from './horizon-obstructions.ts';
+import { isOutside, obstructionMarks, obstructionNames, obstructionShapes } from './horizon-obstructions.ts';
 import type { Spot } from './horizon-sun.ts';
 import { contourMarks, dayLabels, hourLabels, sunLineMarks } from './horizon-sun.ts';
 import { LabelPlaces } from './label-places.ts';
@@ -24,8 +25,6 @@ export interface HorizonInput {
   days: readonly DayLine[];
   hours: readonly HourLine[];
   names: ReadonlyMap<string, string>;
-  /** Ids of obstructions imagined gone. */
-  gone: ReadonlySet<string>;
   width: number;
   height: number;
   whole: boolean;
@@ -33,6 +32,8 @@ export interface HorizonInput {
 
 export interface HorizonPicture extends Picture {
   frame: SkyFrame;
+  /** Names of obstructions that stand in none of the azimuths shown. */
+  outside: string[];
 }
 
 /**
@@ -54,9 +55,9 @@ export function unrolledHorizon(input: HorizonInput): HorizonPicture {
   });
   const shownHours = hours.filter(({ hour }) => width >= 560 || hour % 2 === 0);
   const places = new LabelPlaces({ left: frame.left, top: 0, right: width, bottom: frame.below });
-  const shapes = obstructionShapes(shade.profile, input.names, input.gone);
+  const shapes = obstructionShapes(shade.profile, input.names, shade.imaginedProfile);
   const names = obstructionNames(frame, shapes, places, size);
-  const hidden = hiddenSpots(frame, shade, input.gone);
+  const hidden = hiddenSpots(frame, shade.imaginedProfile ?? shade.profile);
   const contours = contourMarks(frame, density, places, size, hidden);
   const months = dayLabels(frame, days, places, size, hidden);
   const clock = hourLabels(frame, shownHours, places, size, hidden);
@@ -76,21 +77,17 @@ export function unrolledHorizon(input: HorizonInput): HorizonPicture {
     width,
     height,
     frame,
+    outside: shapes.filter((shape) => isOutside(frame, shape)).map(({ name }) => name),
     marks: [{ kind: 'clip', ...box, marks: sky }, ...horizonAxes(frame, size), ...labels],
   };
 }
 
 /** Whether a place on the sheet lies behind something that takes most of its light. */
-function hiddenSpots(
-  frame: SkyFrame,
-  { profile }: StationShade,
-  gone: ReadonlySet<string>,
-): (spot: Spot) => boolean {
-  const passes = (place: number) => profile.transmittance[place * 12 + 5];
+function hiddenSpots(frame: SkyFrame, profile: HorizonProfile): (spot: Spot) => boolean {
   return ({ x, y }) => {
     const { azimuth, elevation } = directionAt(frame, x, y);
     return obstructionsAt(profile, azimuth, elevation).some(
-      (place) => passes(place) < 0.5 && !gone.has(profile.obstructionIds[place]),
+      (place) => profile.transmittance[place * 12 + 5] < 0.5,
     );
   };
 }

@@ -1,11 +1,12 @@
 import { describe, expect, it } from 'vitest';
+import { changedProfile } from '../../../src/core/shading/what-if.ts';
 import { solarPosition } from '../../../src/core/solar-position/solar-position.ts';
 import { readoutAt } from '../../../src/ui/screens/shade/readout.ts';
 import { sampleShade } from '../../report/sample-shades.ts';
 
 const { survey, shade } = await sampleShade('suburban-maple-and-gable.json');
 const names = new Map(survey.obstructions.map(({ id, name }) => [id, name]));
-const context = { site: survey.site, shade, names, gone: new Set<string>(), year: 2026 };
+const context = { site: survey.site, shade, names, year: 2026 };
 const { latitude, longitude, altitude } = survey.site;
 
 describe('the read-out of a direction', () => {
@@ -38,8 +39,10 @@ describe('the read-out of a direction', () => {
     const { inTheWay } = readoutAt({ azimuth, elevation: 15 }, context);
     expect(inTheWay).toContain(names.get('maple'));
     expect(inTheWay).toMatch(/lets (through )?\d+\s%/);
-    const gone = { ...context, gone: new Set(['maple']) };
-    expect(readoutAt({ azimuth, elevation: 15 }, gone).inTheWay).toContain('imagined gone');
+    const imaginedProfile = changedProfile(shade.profile, [{ obstruction: 'maple', kind: 'gone' }]);
+    const imagined = { ...context, shade: { ...shade, imaginedProfile } };
+    expect(inTheWay).not.toContain('imagined');
+    expect(readoutAt({ azimuth, elevation: 15 }, imagined).inTheWay).toContain('imagined away');
   });
 
   it('tells open sky from sky that nobody looked at', () => {

@@ -1,16 +1,17 @@
 import type { PlaneAssessment } from '../../../core/shading/assessment.ts';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
 import { energy, listed, percent } from './figures.ts';
+import type { Imagined } from './imagined.ts';
 
 interface Props {
   shade: StationShade;
-  goneNames: readonly string[];
+  imagined: readonly Imagined[];
   onPutBack: () => void;
 }
 
 /** The year's figure, large; beside it what it would be with a change imagined. */
-export function Headline({ shade, goneNames, onPutBack }: Props) {
-  const { measured, imagined } = shade;
+export function Headline({ shade, imagined, onPutBack }: Props) {
+  const { measured } = shade;
   return (
     <div class="shade-headline">
       <p class="shade-figure">
@@ -18,14 +19,14 @@ export function Headline({ shade, goneNames, onPutBack }: Props) {
         <span>of the year’s sunlight reaches {measured.name}</span>
       </p>
       <div role="status">
-        {imagined && (
+        {shade.imagined && imagined.length > 0 && (
           <div class="imagined">
             <p>
-              <strong>{percent(imagined.solarAccess.annual)}</strong> if {listed(goneNames)}{' '}
-              {goneNames.length > 1 ? 'were' : 'was'} gone. Imagined, not measured.
+              <strong>{percent(shade.imagined.solarAccess.annual)}</strong> with{' '}
+              {listed(imagined.map(({ words }) => words))}. Imagined, not measured.
             </p>
             <button type="button" onClick={onPutBack}>
-              Put {goneNames.length > 1 ? 'them' : 'it'} back
+              Back to what was measured
             </button>
           </div>
         )}

@@ -8,7 +8,7 @@ import { dayLines, hourLines } from '../../../report/pictures/sun-lines.ts';
 import type { HorizonPicture } from '../../../report/pictures/unrolled-horizon.ts';
 import { unrolledHorizon } from '../../../report/pictures/unrolled-horizon.ts';
 import { Drawing } from './drawing.tsx';
-import { utcOffset } from './figures.ts';
+import { listed, utcOffset } from './figures.ts';
 import type { Direction } from './readout.ts';
 import { readoutAt } from './readout.ts';
 import { useWidth } from './use-width.ts';
@@ -17,12 +17,11 @@ interface Props {
   site: Site;
   shade: StationShade;
   names: ReadonlyMap<string, string>;
-  gone: ReadonlySet<string>;
   year: number;
 }
 
 /** The unrolled horizon, and what a finger, a pointer or the arrow keys read off it. */
-export function HorizonView({ site, shade, names, gone, year }: Props) {
+export function HorizonView({ site, shade, names, year }: Props) {
   const [box, width] = useWidth<HTMLDivElement>();
   const [whole, setWhole] = useState(false);
   const [at, setAt] = useState<Direction | null>(null);
@@ -30,8 +29,8 @@ export function HorizonView({ site, shade, names, gone, year }: Props) {
   const density = useMemo(() => smoothDensity(shade.density), [shade.density]);
   const height = Math.round(clamp(width * 0.56, 300, 480));
   const picture = useMemo(
-    () => width > 0 && unrolledHorizon({ site, shade, density, ...lines, names, gone, width, height, whole }),
-    [site, shade, density, lines, names, gone, width, height, whole],
+    () => width > 0 && unrolledHorizon({ site, shade, density, ...lines, names, width, height, whole }),
+    [site, shade, density, lines, names, width, height, whole],
   );
   const standard = utcOffset(standardOffsetMinutes(site.timeZone));
   return (
@@ -43,23 +42,24 @@ export function HorizonView({ site, shade, names, gone, year }: Props) {
           </Readable>
         )}
       </div>
-      <ReadoutLines at={at} context={{ site, shade, names, gone, year }} />
+      <ReadoutLines at={at} context={{ site, shade, names, year }} />
       {picture && (whole || picture.frame.span < 360) && (
-        <div>
+        <div class="row">
           <button type="button" class="switch" aria-pressed={whole} onClick={() => setWhole(!whole)}>
             Whole circle
           </button>
+          {picture.outside.length > 0 && <p class="small">Outside this view: {listed(picture.outside)}.</p>}
         </div>
       )}
       <figcaption class="small">
+        The more ink, the more direct light comes from there; bold numbers are kWh/m² a year from 10° by 10°.
         <details>
-          <summary>How to read this picture</summary>
+          <summary>More on this picture</summary>
           <p>
-            The more ink, the more direct light comes from there in a year. Bold numbers on the thick lines
-            are kWh/m² a year from 10° by 10°. Thin lines are the sun’s way on the 21st of each month, broken
-            lines the hours of standard time ({standard}). Shapes are what was traced: their hatch is that of
-            the list below. Rings mean that nobody looked there. Below the line of dashes and dots the sky
-            lies behind the roof.
+            Thin lines are the sun’s way on the 21st of each month, broken lines the hours of standard time (
+            {standard}). Shapes are what was traced, with the hatch of the list below; what lets light through
+            lets the ink under it show. Rings mean that nobody looked there. Below the line of dashes and dots
+            the sky lies behind the roof.
           </p>
         </details>
       </figcaption>
@@ -141,11 +141,8 @@ function ReadoutLines({ at, context }: { at: Direction | null; context: Paramete
     const frame = requestAnimationFrame(() => setSettled(at));
     return () => cancelAnimationFrame(frame);
   }, [at]);
-  const { site, shade, names, gone, year } = context;
-  const readout = useMemo(
-    () => settled && readoutAt(settled, context),
-    [settled, site, shade, names, gone, year],
-  );
+  const { site, shade, names, year } = context;
+  const readout = useMemo(() => settled && readoutAt(settled, context), [settled, site, shade, names, year]);
   return (
     <div class="readout" id="readout" aria-live="polite">
       {readout ? (

@@ -8,15 +8,7 @@ import { standardTimeText } from './standard-time-text.ts';
 import { useWidth } from './use-width.ts';
 
 /** The hours of each month as ink bars, and the same in figures. */
-export function HourTable({
-  shade,
-  timeZone,
-  imagined,
-}: {
-  shade: StationShade;
-  timeZone: string;
-  imagined: boolean;
-}) {
+export function HourTable({ shade, timeZone }: { shade: StationShade; timeZone: string }) {
   const [box, width] = useWidth<HTMLDivElement>();
   const access = (shade.imagined ?? shade.measured).solarAccess.hourly;
   const picture = useMemo(
@@ -32,7 +24,7 @@ export function HourTable({
       <p class="small">
         Hours of standard time, {standardTimeText(timeZone)}. A bar is as high as the hour’s light in a month;
         the ink in it is what arrives
-        {imagined ? ', with the imagined change' : ''}.
+        {shade.imagined ? ', with the change imagined' : ''}.
       </p>
       <div ref={box}>{picture && <Drawing picture={picture} id="hours" />}</div>
       <details>

@@ -10,20 +10,19 @@ interface Props {
   site: Site;
   shade: StationShade;
   names: ReadonlyMap<string, string>;
-  gone: ReadonlySet<string>;
 }
 
 /** The same sky as a small round plan, north up. */
-export function PlanInset({ site, shade, names, gone }: Props) {
+export function PlanInset({ site, shade, names }: Props) {
   const picture = useMemo(
     () =>
       planView({
-        shapes: obstructionShapes(shade.profile, names, gone),
+        shapes: obstructionShapes(shade.profile, names, shade.imaginedProfile),
         days: dayLines(site).slice(0, 2),
         surfaceAzimuth: shade.surfaceTilt < 1 ? null : shade.surfaceAzimuth,
         size: 220,
       }),
-    [site, shade, names, gone],
+    [site, shade, names],
   );
   return (
     <figure class="plan-inset">

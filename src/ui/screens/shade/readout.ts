@@ -25,7 +25,6 @@ interface Context {
   site: Site;
   shade: StationShade;
   names: ReadonlyMap<string, string>;
-  gone: ReadonlySet<string>;
   year: number;
 }
 
@@ -70,15 +69,16 @@ function lightText(at: Direction, { density, unshaded }: StationShade): string {
   return `From 10° around it come ${energy(sum)} kWh/m² a year, ${percent(sum / unshaded.annual)} of the whole.`;
 }
 
-function wayText(at: Direction, visits: readonly SunVisit[], { shade, names, gone }: Context): string {
+function wayText(at: Direction, visits: readonly SunVisit[], { shade, names }: Context): string {
   const { profile } = shade;
   const places = obstructionsAt(profile, fullCircle(at.azimuth), at.elevation);
   if (places.length === 0)
     return isUnseen(at.azimuth, shade) ? 'Nobody looked there; it counts as open.' : 'Nothing is in the way.';
+  const left = obstructionsAt(shade.imaginedProfile ?? profile, fullCircle(at.azimuth), at.elevation);
   const months = [...new Set(visits.map(({ clock: c }) => c.month - 1))];
   const texts = places.map((place) => {
     const id = profile.obstructionIds[place];
-    const name = `${names.get(id) ?? id}${gone.has(id) ? ' (imagined gone)' : ''}`;
+    const name = `${names.get(id) ?? id}${left.includes(place) ? '' : ' (imagined away)'}`;
     return `${name}${passesText(profile.transmittance.subarray(place * 12, place * 12 + 12), months)}`;
   });
   return `In the way: ${texts.join('; ')}.`;

@@ -5,6 +5,7 @@ import type { Survey } from '../../../core/survey/survey.ts';
 import { Headline, HeadlineFacts } from './headline.tsx';
 import { HorizonView } from './horizon-view.tsx';
 import { HourTable } from './hour-table.tsx';
+import type { Imagined } from './imagined.ts';
 import { MonthView } from './month-view.tsx';
 import { ObstructionList } from './obstruction-list.tsx';
 import { PlanInset } from './plan-inset.tsx';
@@ -14,26 +15,27 @@ interface Props {
   year: number;
   plane: PlaneAssessment;
   shade: StationShade;
-  gone: ReadonlySet<string>;
-  onToggle: (id: string) => void;
+  imagined: ReadonlyMap<string, Imagined>;
+  /** Null: as measured again. */
+  onImagine: (id: string, imagined: Imagined | null) => void;
   onPutBack: () => void;
 }
 
 /** Everything there is to see of one station and plane. */
-export function ShadeResults({ survey, year, plane, shade, gone, onToggle, onPutBack }: Props) {
+export function ShadeResults({ survey, year, plane, shade, imagined, onImagine, onPutBack }: Props) {
   const names = useMemo(() => new Map(survey.obstructions.map(({ id, name }) => [id, name])), [survey]);
-  const goneNames = [...gone].map((id) => names.get(id) ?? id);
+  const list = useMemo(() => [...imagined.values()], [imagined]);
   return (
     <>
-      <Headline shade={shade} goneNames={goneNames} onPutBack={onPutBack} />
-      <HorizonView site={survey.site} shade={shade} names={names} gone={gone} year={year} />
+      <Headline shade={shade} imagined={list} onPutBack={onPutBack} />
+      <HorizonView site={survey.site} shade={shade} names={names} year={year} />
       <HeadlineFacts plane={plane} shade={shade} />
-      <ObstructionList survey={survey} shade={shade} gone={gone} onToggle={onToggle} />
+      <ObstructionList survey={survey} shade={shade} imagined={imagined} onImagine={onImagine} />
       <div class="shade-side">
         <MonthView shade={shade} />
-        <HourTable shade={shade} timeZone={survey.site.timeZone} imagined={gone.size > 0} />
+        <HourTable shade={shade} timeZone={survey.site.timeZone} />
       </div>
-      <PlanInset site={survey.site} shade={shade} names={names} gone={gone} />
+      <PlanInset site={survey.site} shade={shade} names={names} />
     </>
   );
 }

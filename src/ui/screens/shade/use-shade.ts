@@ -3,6 +3,7 @@ import type { AppServices } from '../../../app/app-services.ts';
 import type { Assessment } from '../../../core/shading/assessment.ts';
 import type { AssessRequest, CalculationFault } from '../../../core/shading/calculation.ts';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
+import type { ObstructionChange } from '../../../core/shading/what-if.ts';
 import type { Survey } from '../../../core/survey/survey.ts';
 import { weatherBytes } from './weather-choice.ts';
 
@@ -20,12 +21,12 @@ export interface ShadeWish {
   survey: Survey;
   plane: string | null;
   station: string | null;
-  /** Obstructions imagined gone; the same set until another is wished for. */
-  gone: ReadonlySet<string>;
+  /** What is imagined changed; the same list until another is wished for. */
+  changes: readonly ObstructionChange[];
 }
 
 /** Runs the assessment of a survey and the shade of one of its stations on the worker. */
-export function useShade(services: AppServices, { survey, plane, station, gone }: ShadeWish): ShadeState {
+export function useShade(services: AppServices, { survey, plane, station, changes }: ShadeWish): ShadeState {
   const [attemptNumber, setAttempt] = useState(0);
   const [working, setWorking] = useState<ShadeState['working']>(null);
   const [fault, setFault] = useState<CalculationFault | null>(null);
@@ -47,8 +48,9 @@ export function useShade(services: AppServices, { survey, plane, station, gone }
       );
       if (signal.aborted && signal.reason === LEFT) return;
       setWorking(null);
-      if (outcome.ok) setAssessed({ request, assessment: outcome.value });
-      else setFault(outcome.fault);
+      // figures of another climate must not stand beside a fault of this one
+      setAssessed(outcome.ok ? { request, assessment: outcome.value } : null);
+      if (!outcome.ok) setFault(outcome.fault);
     };
     void work().catch((error: unknown) => {
       setWorking(null);
@@ -61,14 +63,13 @@ export function useShade(services: AppServices, { survey, plane, station, gone }
   useEffect(() => {
     if (!request || request.survey !== survey || plane === null || station === null) return undefined;
     const leaving = new AbortController();
-    const changes = [...gone].map((obstruction) => ({ obstruction, kind: 'gone' }) as const);
     void services.assess.shade(request, { plane, station, changes }, leaving.signal).then((outcome) => {
       if (leaving.signal.aborted) return;
       if (outcome.ok) setShade({ shade: outcome.value, of: `${plane} ${station}` });
       else setFault(outcome.fault);
     });
     return () => leaving.abort();
-  }, [services, request, survey, plane, station, gone]);
+  }, [services, request, survey, plane, station, changes]);
 
   return {
     working,
