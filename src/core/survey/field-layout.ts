@@ -26,7 +26,16 @@ export interface ObjectLayout {
 export const surveyLayout: ObjectLayout = {
   objects: { site: { together: ['latitude', 'longitude'] } },
   lists: {
-    planes: { sortedBy: 'order', required: true, row: {} },
+    planes: {
+      sortedBy: 'order',
+      required: true,
+      row: {
+        lists: {
+          tiltPlacings: { sortedBy: 'order', row: {} },
+          azimuthSightings: { sortedBy: 'order', row: {} },
+        },
+      },
+    },
     obstructions: { sortedBy: 'order', required: true, row: {} },
     runs: { sortedBy: 'startedAt', required: true, row: {} },
     readings: { sortedBy: 'takenAt', required: true, whole: true, row: {} },
@@ -36,6 +45,8 @@ export const surveyLayout: ObjectLayout = {
       row: {
         lists: {
           headingChecks: { sortedBy: 'order', row: {} },
+          markSightings: { sortedBy: 'order', row: {} },
+          indexChecks: { sortedBy: 'order', row: {} },
           traces: {
             sortedBy: 'order',
             required: true,

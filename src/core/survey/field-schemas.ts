@@ -40,6 +40,12 @@ export function textUpTo(length: number) {
 
 export const name = textUpTo(LIMITS.nameLength);
 
+export const yesOrNo = v.boolean('true or false');
+
+const zonePhrase = 'a UTM zone with its hemisphere, such as "33N" or "56S"';
+/** Zone 1 to 60 with N or S. */
+export const utmZone = v.pipe(v.string(zonePhrase), v.regex(/^(?:0?[1-9]|[1-5]\d|60)[NS]$/, zonePhrase));
+
 /** A list of one sort of thing. */
 export const listOf = <const Item extends v.GenericSchema>(item: Item) => v.array(item, 'a list');
 

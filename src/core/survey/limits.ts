@@ -14,12 +14,19 @@ export const LIMITS = {
   runs: 20_000,
   /** In all stations together. */
   traces: 2_000,
-  /** In all traces together. */
+  /** In all traces and of marks together. */
   sightings: 20_000,
   /** In one outline, where every edge is held against every other. */
   outlineSightings: 2_000,
   readings: 200_000,
+  /** Rows of one reading, and the time of the last after its start [ms]. */
+  samples: 1_000,
+  sampleMs: 60_000,
   headingChecks: 2_000,
+  /** Two-face checks in all stations together. */
+  indexChecks: 2_000,
+  /** Placings and sightings along edges of all planes together. */
+  placings: 20_000,
   /** Characters of an id, a name, and a longer text. */
   idLength: 200,
   nameLength: 10_000,

@@ -32,3 +32,9 @@ export function textsOf(owner: JsonRecord, key: string, ownerPath: string): { te
 /** Every trace of every station. */
 export const tracesOf = (document: JsonRecord): Row[] =>
   rowsOf(document, 'stations').flatMap((station) => rowsOf(station.value, 'traces', station.path));
+
+/** Every sighting of every station: those of its traces, then those of marks alone. */
+export const sightingsOf = (document: JsonRecord): Row[] => [
+  ...tracesOf(document).flatMap(({ value, path }) => rowsOf(value, 'sightings', path)),
+  ...rowsOf(document, 'stations').flatMap(({ value, path }) => rowsOf(value, 'markSightings', path)),
+];

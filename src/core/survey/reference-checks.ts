@@ -2,14 +2,14 @@ import { isRecord, shown } from './json-value.ts';
 import type { JsonRecord } from './json-value.ts';
 import type { ProblemList } from './problem-list.ts';
 import { pathBelow } from './record-path.ts';
-import { rowsOf, textsOf, tracesOf } from './record-rows.ts';
+import { rowsOf, sightingsOf, textsOf, tracesOf } from './record-rows.ts';
 import type { Row } from './record-rows.ts';
 
 /** Adds a problem for each id given twice in its list (sightings: in the whole survey) and each reference to nothing. */
 export function addReferenceProblems(document: JsonRecord, problems: ProblemList): void {
   const stations = rowsOf(document, 'stations');
   const traces = tracesOf(document);
-  const sightings = traces.flatMap(({ value, path }) => rowsOf(value, 'sightings', path));
+  const sightings = sightingsOf(document);
   const ids = (rows: Row[], what: string) => uniqueIds(rows, what, problems);
   const named = (key: string, what: string) => {
     const known = ids(rowsOf(document, key), what);
@@ -27,11 +27,25 @@ export function addReferenceProblems(document: JsonRecord, problems: ProblemList
   refer(rowsOf(document, 'readings'), 'run', runs, 'run');
   refer(traces, 'obstruction', obstructions, 'obstruction');
   refer(sightings, 'reading', readings, 'reading');
+  for (const { value, path } of sightings)
+    for (const named of textsOf(value, 'readings', path))
+      addDangling(named.text, named.path, readings, 'reading', problems);
+  for (const { value, path } of rowsOf(document, 'planes')) {
+    const placings = rowsOf(value, 'tiltPlacings', path);
+    const edges = rowsOf(value, 'azimuthSightings', path);
+    ids(placings, 'placing on this plane');
+    ids(edges, 'sighting along an edge of this plane');
+    refer([...placings, ...edges], 'reading', readings, 'reading');
+  }
   for (const { value, path } of stations) {
     ids(rowsOf(value, 'traces', path), 'trace of this station');
     const checks = rowsOf(value, 'headingChecks', path);
     ids(checks, 'heading check of this station');
     refer(checks, 'reading', readings, 'reading');
+    const indexChecks = rowsOf(value, 'indexChecks', path);
+    ids(indexChecks, 'two-face check of this station');
+    refer(indexChecks, 'upright', readings, 'reading');
+    refer(indexChecks, 'turned', readings, 'reading');
     for (const plane of textsOf(value, 'serves', path))
       addDangling(plane.text, plane.path, planes, 'plane', problems);
     const position = value.position;

@@ -64,7 +64,15 @@ function addTooMany(document: unknown, problems: ProblemList): void {
     readings: length(document.readings),
     headingChecks: sum(stations.map(({ value }) => length(value.headingChecks))),
     traces: sum(stations.map(({ value }) => length(value.traces))),
-    sightings: sum(traces.map(({ value }) => length(value.sightings))),
+    indexChecks: sum(stations.map(({ value }) => length(value.indexChecks))),
+    placings: sum(
+      rowsOf(document, 'planes').map(
+        ({ value }) => length(value.tiltPlacings) + length(value.azimuthSightings),
+      ),
+    ),
+    sightings:
+      sum(traces.map(({ value }) => length(value.sightings))) +
+      sum(stations.map(({ value }) => length(value.markSightings))),
   };
   for (const [what, count] of Object.entries(counts) as [keyof typeof counts, number][])
     if (count > LIMITS[what])
@@ -77,10 +85,14 @@ function addTooMany(document: unknown, problems: ProblemList): void {
 const WORDS: Partial<Record<string, string>> = {
   corners: 'corners in its plane outlines',
   headingChecks: 'heading checks',
+  indexChecks: 'two-face checks',
+  placings: 'placings and sightings along edges of its planes',
   sightings: 'sightings in its traces',
 };
 const PLACES: Partial<Record<string, string>> = {
   corners: 'planes',
+  placings: 'planes',
+  indexChecks: 'stations',
   headingChecks: 'stations',
   traces: 'stations',
   sightings: 'stations',

@@ -45,6 +45,16 @@ const planePointSchema = v.looseObject(
   'an object with x and y, in metres',
 );
 
+const tiltPlacingSchema = v.looseObject(
+  { id: f.identifier, order: f.orderKey, reading: f.identifier, held: v.optional(f.oneOf(['flat', 'edge'])) },
+  'an object: one placing of the phone',
+);
+
+const azimuthSightingSchema = v.looseObject(
+  { id: f.identifier, order: f.orderKey, reading: f.identifier, along: f.oneOf(['eave', 'fall']) },
+  'an object: one sighting along an edge',
+);
+
 const planeSchema = v.looseObject(
   {
     id: f.identifier,
@@ -58,6 +68,8 @@ const planeSchema = v.looseObject(
     outline: v.optional(
       v.pipe(f.listOf(planePointSchema), v.minLength(3, 'a list of at least three corners')),
     ),
+    tiltPlacings: v.optional(f.listOf(tiltPlacingSchema)),
+    azimuthSightings: v.optional(f.listOf(azimuthSightingSchema)),
   },
   'an object: one roof plane',
 );
@@ -86,7 +98,18 @@ const runSchema = v.looseObject(
   'an object: one run of the sensor',
 );
 
-const angleAsRead = v.optional(f.numberBetween(-360, 360, 'degrees'));
+const angle = f.numberBetween(-360, 360, 'degrees');
+const angleAsRead = v.optional(angle);
+const sampleTime = f.numberBetween(0, LIMITS.sampleMs, 'milliseconds');
+
+const samplesPhrase = `a list of at most ${LIMITS.samples} rows [ms, alpha, beta, gamma]`;
+const samplesSchema = v.pipe(
+  v.array(
+    v.strictTuple([sampleTime, angle, angle, angle], 'a row of four numbers: ms, alpha, beta, gamma'),
+    samplesPhrase,
+  ),
+  v.maxLength(LIMITS.samples, samplesPhrase),
+);
 
 const readingSchema = v.looseObject(
   {
@@ -96,6 +119,12 @@ const readingSchema = v.looseObject(
     alpha: angleAsRead,
     beta: angleAsRead,
     gamma: angleAsRead,
+    axis: v.optional(f.oneOf(['camera', 'top-edge'])),
+    samples: v.optional(samplesSchema),
+    compassHeading: v.optional(f.azimuth),
+    compassAccuracy: v.optional(f.numberBetween(-1, 360, 'degrees')),
+    absolute: v.optional(f.yesOrNo),
+    screenAngle: v.optional(angle),
   },
   'an object: one raw reading',
 );
@@ -112,6 +141,8 @@ const sightingSchema = v.looseObject(
     azimuth: v.optional(f.azimuth),
     elevation: v.optional(f.elevation),
     reading: v.optional(f.identifier),
+    readings: v.optional(f.listOf(f.identifier)),
+    sampleAt: v.optional(sampleTime),
     mark: v.optional(f.name),
     amendments: v.optional(f.listOf(amendmentSchema)),
   },
@@ -125,7 +156,7 @@ const traceSchema = v.looseObject(
     obstruction: f.identifier,
     shape: f.oneOf(['skyline', 'outline', 'line']),
     edge: v.optional(f.oneOf(['straight', 'drawn'])),
-    fullCircle: v.optional(v.boolean('true or false')),
+    fullCircle: v.optional(f.yesOrNo),
     angularWidth: v.optional(f.numberOver(0, 20, 'degrees')),
     sightings: f.listOf(sightingSchema),
   },
@@ -135,12 +166,24 @@ const traceSchema = v.looseObject(
 const headingCheckSchema = v.looseObject(
   {
     id: f.identifier,
+    order: f.orderKey,
     method: f.oneOf(['sun-shadow', 'known-mark', 'plan-bearing']),
     reading: v.optional(f.identifier),
+    mark: v.optional(f.name),
     bearing: v.optional(f.azimuth),
     frame: v.optional(f.oneOf(['true', 'magnetic', 'grid'])),
+    bearingDeviation: v.optional(f.numberOver(0, 90, 'degrees')),
+    convergence: v.optional(f.numberBetween(-180, 180, 'degrees')),
+    gridZone: v.optional(f.utmZone),
+    shadowHeight: v.optional(f.numberOver(0, 1000, 'metres')),
+    shadowLength: v.optional(f.numberOver(0, 10_000, 'metres')),
   },
   'an object: one heading check',
+);
+
+const indexCheckSchema = v.looseObject(
+  { id: f.identifier, order: f.orderKey, upright: f.identifier, turned: f.identifier },
+  'an object: one two-face check',
 );
 
 const positionSchema = v.union(
@@ -160,6 +203,8 @@ const stationSchema = v.looseObject(
       f.listOf(v.strictTuple([f.azimuth, f.azimuth], 'a pair of azimuths, from and to')),
     ),
     headingChecks: v.optional(f.listOf(headingCheckSchema)),
+    markSightings: v.optional(f.listOf(sightingSchema)),
+    indexChecks: v.optional(f.listOf(indexCheckSchema)),
     traces: f.listOf(traceSchema),
   },
   'an object: one station',

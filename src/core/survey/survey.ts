@@ -83,6 +83,31 @@ export interface RoofPlane {
   corner?: LocalPoint;
   /** Corners in the plane instead of width by slope length, metres. */
   outline?: PlanePoint[];
+  /** Readings that tell the tilt; `surfaceTilt` stays what the surveyor settled on. */
+  tiltPlacings?: TiltPlacing[];
+  /** Sightings along an edge that tell the azimuth; `surfaceAzimuth` stays what the surveyor settled on. */
+  azimuthSightings?: AzimuthSighting[];
+}
+
+/** The phone put to a plane once. Turned end for end and put again, the sensor's own tilt cancels. */
+export interface TiltPlacing {
+  id: string;
+  order?: number;
+  reading: string;
+  /**
+   * `flat`: the phone's back on the surface, or on a straight board laid on it, screen up; `edge`: the phone's long
+   * edge along a gable verge or a rafter. Absent means flat.
+   */
+  held?: 'flat' | 'edge';
+}
+
+/** The phone's sighting axis along a line of a plane once. */
+export interface AzimuthSighting {
+  id: string;
+  order?: number;
+  reading: string;
+  /** `eave`: along an eave or a ridge, either way, square to which the plane faces; `fall`: down the slope. */
+  along: 'eave' | 'fall';
 }
 
 /** Metres in the site's local frame. */
@@ -128,15 +153,37 @@ export interface Run {
   startedAt: string;
 }
 
-/** A raw reading, as the device gave it; never changed after it is stored. */
+/**
+ * A raw reading, as the device gave it; never changed after it is stored. Angles are those of the W3C Device
+ * Orientation events (intrinsic Z-X'-Y''), in the frame of the run.
+ */
 export interface Reading {
   id: string;
   run: string;
+  /** Instant of `alpha`, `beta` and `gamma`, and zero of the times of `samples`. */
   takenAt: string;
   alpha?: number;
   beta?: number;
   gamma?: number;
+  /** What was pointed: the rear camera, or the phone's top edge. Absent means the camera. */
+  axis?: SightingAxis;
+  /** Rows of a hold, or of a chunk of a sweep of at most half a second; in order of time. */
+  samples?: ReadingSample[];
+  /** Heading of the phone's top edge by the device's compass, clockwise from magnetic north, where it gives one. */
+  compassHeading?: number;
+  /** Greatest deviation of that heading by the device's own account; negative where it has none. */
+  compassAccuracy?: number;
+  /** Whether the event said that its angles are tied to the earth. */
+  absolute?: boolean;
+  /** Turn of the screen against its natural orientation when read; the angles do not depend on it. */
+  screenAngle?: number;
 }
+
+/** The rear camera (device -z) or the phone's top edge (device +y). */
+export type SightingAxis = 'camera' | 'top-edge';
+
+/** Milliseconds after the reading's `takenAt`, then alpha, beta and gamma. */
+export type ReadingSample = [ms: number, alpha: number, beta: number, gamma: number];
 
 export interface Station {
   id: string;
@@ -151,18 +198,59 @@ export interface Station {
   /** Azimuth ranges [from, to], clockwise, looked at and found open. */
   observedOpen?: [number, number][];
   headingChecks?: HeadingCheck[];
+  /**
+   * Sightings of marks that belong to no trace. A mark sighted twice in one run closes the horizon; a mark sighted in
+   * two runs ties them.
+   */
+  markSightings?: Sighting[];
+  /** Two-face checks of the inclination. */
+  indexChecks?: IndexCheck[];
   traces: Trace[];
 }
 
 export type StationPosition = ({ on: string } & PlanePoint) | LocalPoint;
 
+/**
+ * One comparison of a run's azimuths with a direction known otherwise. What was read stands in the reading, the
+ * instant too; the offset is computed.
+ */
 export interface HeadingCheck {
   id: string;
-  method: 'sun-shadow' | 'known-mark' | 'plan-bearing';
+  order?: number;
+  /**
+   * `sun-shadow`: the axis pointed along a shadow, away from the sun; `known-mark`: at a mark whose bearing is known;
+   * `plan-bearing`: at a mark or along an eave whose bearing was read from a plan.
+   */
+  method: HeadingMethodId;
+  /** Absent: every sighting of `mark` at this station. */
   reading?: string;
-  /** Bearing of the reference, for the methods that have one. */
+  /** Name of the mark that was sighted. */
+  mark?: string;
+  /** Bearing of the reference, clockwise from the north of `frame`, for the methods that have one. */
   bearing?: number;
+  /** North of the bearing; absent means true. */
   frame?: 'true' | 'magnetic' | 'grid';
+  /** Standard deviation of the bearing; absent means the method's planning value. */
+  bearingDeviation?: number;
+  /** Grid convergence: true bearing = grid bearing + convergence. */
+  convergence?: number;
+  /** UTM zone of the grid, such as `33N`, from which the convergence is computed where it is not given. */
+  gridZone?: string;
+  /** Height of an upright object over level ground, metres, and the length of its shadow: they test the clock. */
+  shadowHeight?: number;
+  shadowLength?: number;
+}
+
+export type HeadingMethodId = 'sun-shadow' | 'known-mark' | 'plan-bearing';
+
+/** Two readings of one mark, the phone turned 180° about the viewing axis between them. */
+export interface IndexCheck {
+  id: string;
+  order?: number;
+  /** Reading with the phone as it is held for sighting. */
+  upright: string;
+  /** Reading with the phone upside down. */
+  turned: string;
 }
 
 export type TraceShape = 'skyline' | 'outline' | 'line';
@@ -190,6 +278,13 @@ export interface Sighting {
   azimuth?: number;
   elevation?: number;
   reading?: string;
+  /** Readings that one pointing took: all are averaged, together with `reading`. */
+  readings?: string[];
+  /**
+   * For a point of a sweep: when the phone pointed there, milliseconds after `takenAt` of `reading`. Absent means the
+   * mean of the samples.
+   */
+  sampleAt?: number;
   /** Name of a recognisable point, sighted from other stations too. */
   mark?: string;
   amendments?: Amendment[];

@@ -68,7 +68,7 @@ function pointedAt({ value, path }: Row, problems: ProblemList): Pointed | null 
       pathBelow(path, hasAzimuth ? 'elevation' : 'azimuth'),
       `The sighting has ${hasAzimuth ? 'an azimuth but no elevation' : 'an elevation but no azimuth'}. Give both.`,
     );
-  else if (!hasAzimuth && value.reading === undefined && !hasAmendment(value))
+  else if (!hasAzimuth && !hasReading(value) && !hasAmendment(value))
     problems.add(
       path,
       'The sighting points nowhere. Give azimuth and elevation, or the reading it was taken with.',
@@ -80,6 +80,8 @@ function pointedAt({ value, path }: Row, problems: ProblemList): Pointed | null 
   return { path, ...direction };
 }
 
+const hasReading = ({ reading, readings }: JsonRecord) =>
+  reading !== undefined || (Array.isArray(readings) && readings.length > 0);
 const hasAmendment = ({ amendments }: JsonRecord) => Array.isArray(amendments) && amendments.length > 0;
 const isObject = (value: unknown) => typeof value === 'object' && value !== null;
 const numberOr = <T>(value: unknown, otherwise: T) => (typeof value === 'number' ? value : otherwise);
