@@ -36,7 +36,10 @@ export class AssessOnWorker {
   private running: Running | null = null;
   private tickets = 0;
 
-  constructor(private readonly start: () => Worker) {}
+  constructor(
+    private readonly start: () => Worker,
+    private readonly patienceMs = PATIENCE_MS,
+  ) {}
 
   assess(request: AssessRequest, onProgress: Progress, signal: CancelSignal): Promise<Outcome<Assessment>> {
     return this.ask(request, signal, (engine, ticket) => engine.assess(ticket, proxy(onProgress)));
@@ -51,8 +54,9 @@ export class AssessOnWorker {
   }
 
   readWeatherFile(name: string, contents: ArrayBuffer): Promise<Outcome<WeatherFileFacts>> {
-    const { engine, broken } = this.ready();
-    return settled(engine.readWeatherFile(name, contents), broken);
+    const running = this.ready();
+    if (!running) return Promise.resolve(notStarted);
+    return settled(running.engine.readWeatherFile(name, contents), running.broken);
   }
 
   private async ask<T>(
@@ -62,6 +66,7 @@ export class AssessOnWorker {
   ): Promise<Outcome<T>> {
     if (signal.aborted) return { ok: false, fault: { code: 'cancelled' } };
     const running = this.ready();
+    if (!running) return notStarted;
     const ticket = this.tickets++;
     // messages keep their order, so the survey is there before the question
     const held = running.held === request ? null : running.engine.hold(request);
@@ -85,12 +90,16 @@ export class AssessOnWorker {
 
   private stop(running: Running, ticket: number, answer: Promise<unknown>): void {
     void running.engine.cancel(ticket);
-    const timer = setTimeout(() => this.end(running, { code: 'cancelled' }), PATIENCE_MS);
+    const timer = setTimeout(() => this.end(running, { code: 'cancelled' }), this.patienceMs);
     void answer.then(() => clearTimeout(timer));
   }
 
-  private ready(): Running {
-    this.running ??= this.started();
+  private ready(): Running | null {
+    try {
+      this.running ??= this.started();
+    } catch {
+      return null; // the browser allows no worker here
+    }
     return this.running;
   }
 
@@ -111,6 +120,11 @@ export class AssessOnWorker {
     if (this.running === running) this.running = null;
   }
 }
+
+const notStarted: { ok: false; fault: CalculationFault } = {
+  ok: false,
+  fault: { code: 'failed', detail: 'the worker did not start' },
+};
 
 /** An answer, or the fault of the worker that breaks before it. */
 function settled<T>(answer: Promise<Outcome<T>>, broken: Promise<CalculationFault>): Promise<Outcome<T>> {

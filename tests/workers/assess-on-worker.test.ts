@@ -91,6 +91,32 @@ describe('the page’s side of the worker', () => {
     });
   });
 
+  it('ends a worker that does not stop when asked, and starts another', async () => {
+    const never = () => new Promise<void>(() => undefined);
+    let first = true;
+    const client = new AssessOnWorker(() => {
+      const worker = first ? new ChannelWorker(never) : new ChannelWorker();
+      first = false;
+      return worker as unknown as Worker;
+    }, 0);
+    const cancel = new AbortController();
+    const outcome = client.assess(request, () => undefined, cancel.signal);
+    cancel.abort();
+    expect(await outcome).toMatchObject({ fault: { code: 'cancelled' } });
+    await expect.poll(() => ChannelWorker.all[0].terminated).toBe(true);
+    expect((await client.shade(request, question, quiet())).ok).toBe(true);
+    expect(ChannelWorker.all).toHaveLength(2);
+  });
+
+  it('tells where no worker can be started', async () => {
+    const client = new AssessOnWorker(() => {
+      throw new Error('not allowed');
+    });
+    const fault = { code: 'failed', detail: 'the worker did not start' };
+    expect(await client.shade(request, question, quiet())).toEqual({ ok: false, fault });
+    expect(await client.readWeatherFile('a', new ArrayBuffer(1))).toEqual({ ok: false, fault });
+  });
+
   it('tells that a worker broke, and starts another for the next call', async () => {
     const never = () => new Promise<void>(() => undefined);
     let first = true;

@@ -90,10 +90,29 @@ function edgesOf(frame: SkyFrame, parts: readonly SilhouettePart[]): Line[] {
   });
 }
 
+/** Nobody sees a corner smaller than this, points of the sheet; a dense sweep has thousands. */
+const FINEST = 0.3;
+
+function thinned(frame: SkyFrame, { azimuth, low, high, walls }: SilhouettePart): SilhouettePart {
+  const across = (frame.right - frame.left) / frame.span;
+  const up = (frame.below - frame.above) / frame.top;
+  let last = 0;
+  const kept = azimuth.flatMap((_, i) => {
+    const moved = (values: number[], scale: number) => Math.abs(values[i] - values[last]) * scale > FINEST;
+    const keep =
+      i === 0 || i === azimuth.length - 1 || moved(azimuth, across) || moved(low, up) || moved(high, up);
+    if (keep) last = i;
+    return keep ? [i] : [];
+  });
+  const pick = (values: number[]) => kept.map((i) => values[i]);
+  return { azimuth: pick(azimuth), low: pick(low), high: pick(high), walls };
+}
+
 type Draw = (part: SilhouettePart, xs: readonly number[]) => Line[];
 
 function placed(frame: SkyFrame, parts: readonly SilhouettePart[], draw: Draw): Line[] {
-  return parts.flatMap((part) => {
+  return parts.flatMap((whole) => {
+    const part = thinned(frame, whole);
     const turns = turnsFrom(frame.centre, part);
     const [first, last] = [turns[0], turns[turns.length - 1]];
     return [0, 360, -360]

@@ -1,5 +1,6 @@
 import { turnBetween } from '../../core/angles/angles.ts';
 import type { HorizonProfile } from '../../core/horizon/horizon-profile.ts';
+import { COLUMNS, COLUMN_WIDTH } from '../../core/horizon/horizon-profile.ts';
 
 /** A piece of an obstruction's shape without a break: its lower and upper edge from left to right. */
 export interface SilhouettePart {
@@ -141,10 +142,11 @@ export function turnsFrom(centre: number, { azimuth }: SilhouettePart): number[]
   return azimuth.map((value) => first + (value - azimuth[0]));
 }
 
-/** Which obstruction of a profile is in the way of a direction: their places in its list. */
+/** Which obstructions of a profile are in the way of a direction, azimuth 0 to 360: their places in its list. */
 export function obstructionsAt(profile: HorizonProfile, azimuth: number, elevation: number): number[] {
   const found = new Set<number>();
-  for (let slice = 0; slice < profile.sliceColumn.length; slice++) {
+  const column = Math.min(COLUMNS - 1, Math.floor(azimuth / COLUMN_WIDTH));
+  for (let slice = profile.columnFirst[column]; slice < profile.columnFirst[column + 1]; slice++) {
     if (azimuth < profile.sliceFrom[slice] || azimuth >= profile.sliceTo[slice]) continue;
     for (let k = profile.intervalFirst[slice]; k < profile.intervalFirst[slice + 1]; k++)
       if (elevation >= profile.low[k] && elevation < profile.high[k])

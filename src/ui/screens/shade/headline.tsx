@@ -63,10 +63,13 @@ function factsOf(plane: PlaneAssessment, { measured, unshaded }: StationShade): 
       plane.name,
       `${percent(solarAccess.annual)} on average over ${solarAccess.count} stations, ${percent(solarAccess.lowest)} at the lowest`,
     ]);
+  const lies = plane.surfaceTilt < 1 ? 'Flat' : lying(plane);
   facts.push([
     'How it lies',
-    `${plane.surfaceTilt.toFixed(0)}° towards ${plane.surfaceAzimuth.toFixed(0)}°: ${percent(orientationFactor, 0)} of the best here ` +
-      `(${bestPlane.surfaceTilt.toFixed(0)}° towards ${bestPlane.surfaceAzimuth.toFixed(0)}°)`,
+    `${lies}: ${percent(orientationFactor, 0)} of the best here (${lying(bestPlane)})`,
   ]);
   return facts;
 }
+
+const lying = ({ surfaceTilt, surfaceAzimuth }: { surfaceTilt: number; surfaceAzimuth: number }): string =>
+  `${surfaceTilt.toFixed(0)}° towards ${surfaceAzimuth.toFixed(0)}°`;
