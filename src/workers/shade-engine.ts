@@ -80,7 +80,9 @@ export class ShadeEngine {
       const { map, density } = this.planeOf(held, roof.surfaceTilt, roof.surfaceAzimuth);
       await this.lookUp(ticket);
       const horizon = stationHorizon(survey, place);
-      return stationShade(map, density, horizon, place, obstructionsById(survey), changes);
+      // what was imagined at another station may not be in the sky of this one
+      const here = changes.filter(({ obstruction }) => horizon.profile.obstructionIds.includes(obstruction));
+      return stationShade(map, density, horizon, place, obstructionsById(survey), here);
     });
   }
 

@@ -87,6 +87,13 @@ describe('the worker’s engine', () => {
     );
   });
 
+  it('leaves alone what this station did not trace', async () => {
+    const engine = engineFor();
+    engine.hold({ survey, ...STEP });
+    const shade = valueOf(await engine.shade(0, question([{ obstruction: 'elsewhere', kind: 'gone' }])));
+    expect(shade.imagined).toBeNull();
+  });
+
   it('asks for the world’s grid once, and again only after it failed', async () => {
     let asked = 0;
     const engine = engineFor(() => {

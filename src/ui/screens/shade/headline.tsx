@@ -1,4 +1,4 @@
-import type { PlaneAssessment } from '../../../core/shading/assessment.ts';
+import type { Assessment, PlaneAssessment } from '../../../core/shading/assessment.ts';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
 import { energy, listed, percent } from './figures.ts';
 import type { Imagined } from './imagined.ts';
@@ -35,11 +35,17 @@ export function Headline({ shade, imagined, onPutBack }: Props) {
   );
 }
 
+interface FactsProps {
+  assessment: Assessment;
+  plane: PlaneAssessment;
+  shade: StationShade;
+}
+
 /** What stands behind the figure. */
-export function HeadlineFacts({ plane, shade }: { plane: PlaneAssessment; shade: StationShade }) {
+export function HeadlineFacts({ assessment, plane, shade }: FactsProps) {
   return (
     <dl class="facts shade-facts">
-      {factsOf(plane, shade).map(([term, value]) => (
+      {factsOf({ assessment, plane, shade }).map(([term, value]) => (
         <div key={term}>
           <dt>{term}</dt>
           <dd>{value}</dd>
@@ -49,7 +55,7 @@ export function HeadlineFacts({ plane, shade }: { plane: PlaneAssessment; shade:
   );
 }
 
-function factsOf(plane: PlaneAssessment, { measured, unshaded }: StationShade): [string, string][] {
+function factsOf({ assessment, plane, shade: { measured, unshaded } }: FactsProps): [string, string][] {
   const { solarAccess, orientationFactor, bestPlane } = plane;
   const facts: [string, string][] = [
     ['Light a year', `${energy(measured.irradiation.annual)} of ${energy(unshaded.annual)} kWh/m²`],
@@ -67,6 +73,12 @@ function factsOf(plane: PlaneAssessment, { measured, unshaded }: StationShade): 
   facts.push([
     'How it lies',
     `${lies}: ${percent(orientationFactor, 0)} of the best here (${lying(bestPlane)})`,
+  ]);
+  const { climate, warnings } = assessment;
+  const notes = climate.warnings.length + warnings.length;
+  facts.push([
+    'Climate',
+    notes > 0 ? `${climate.name}. Read the ${notes > 1 ? `${notes} notes` : 'note'} below.` : climate.name,
   ]);
   return facts;
 }

@@ -1,5 +1,5 @@
 import { useMemo } from 'preact/hooks';
-import type { PlaneAssessment } from '../../../core/shading/assessment.ts';
+import type { Assessment, PlaneAssessment } from '../../../core/shading/assessment.ts';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
 import type { Survey } from '../../../core/survey/survey.ts';
 import { Headline, HeadlineFacts } from './headline.tsx';
@@ -13,6 +13,7 @@ import { PlanInset } from './plan-inset.tsx';
 interface Props {
   survey: Survey;
   year: number;
+  assessment: Assessment;
   plane: PlaneAssessment;
   shade: StationShade;
   imagined: ReadonlyMap<string, Imagined>;
@@ -22,14 +23,23 @@ interface Props {
 }
 
 /** Everything there is to see of one station and plane. */
-export function ShadeResults({ survey, year, plane, shade, imagined, onImagine, onPutBack }: Props) {
+export function ShadeResults({
+  survey,
+  year,
+  assessment,
+  plane,
+  shade,
+  imagined,
+  onImagine,
+  onPutBack,
+}: Props) {
   const names = useMemo(() => new Map(survey.obstructions.map(({ id, name }) => [id, name])), [survey]);
   const list = useMemo(() => [...imagined.values()], [imagined]);
   return (
     <>
       <Headline shade={shade} imagined={list} onPutBack={onPutBack} />
       <HorizonView site={survey.site} shade={shade} names={names} year={year} />
-      <HeadlineFacts plane={plane} shade={shade} />
+      <HeadlineFacts assessment={assessment} plane={plane} shade={shade} />
       <ObstructionList survey={survey} shade={shade} imagined={imagined} onImagine={onImagine} />
       <div class="shade-side">
         <MonthView shade={shade} />

@@ -71,6 +71,7 @@ export function ShadeSection({ survey, services }: SectionProps) {
         <ShadeResults
           survey={survey}
           year={new Date(services.now()).getUTCFullYear()}
+          assessment={state.assessment!}
           plane={assessed}
           shade={state.shade}
           imagined={imagined}
