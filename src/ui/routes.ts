@@ -3,8 +3,18 @@ import type { PlainScreen, SurveySection } from './section.ts';
 export const SURVEY_SECTIONS: SurveySection[] = [
   {
     path: '',
-    label: 'Site and roof',
-    load: async () => (await import('./screens/survey/site-and-roof.tsx')).SiteAndRoof,
+    label: 'Site',
+    load: async () => (await import('./screens/site/site-section.tsx')).SiteSection,
+  },
+  {
+    path: 'roof',
+    label: 'Roof',
+    load: async () => (await import('./screens/roof/roof-section.tsx')).RoofSection,
+  },
+  {
+    path: 'stations',
+    label: 'Stations',
+    load: async () => (await import('./components/field-book/all-stations.tsx')).AllStations,
   },
   {
     path: 'shade',

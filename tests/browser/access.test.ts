@@ -58,9 +58,15 @@ describe.each(LOOKS)('every screen at $name', ({ viewport, scheme }) => {
     await expectAccessible(page);
     expect(await smallTargets(page)).toEqual([]);
     await page.locator('.ledger-title', { hasText: TITLE }).click();
-    await page.getByRole('heading', { name: 'Field book' }).waitFor();
-    await expectAccessible(page);
-    expect(await smallTargets(page)).toEqual([]);
+    for (const [section, heading] of [
+      ['Site', 'Obstructions'],
+      ['Roof', 'Roof planes'],
+    ]) {
+      await page.getByRole('link', { name: section, exact: true }).click();
+      await page.getByRole('heading', { name: heading }).waitFor();
+      await expectAccessible(page);
+      expect(await smallTargets(page)).toEqual([]);
+    }
     await page.getByRole('button', { name: 'Rename' }).click();
     await expectAccessible(page);
     expect(await smallTargets(page)).toEqual([]);

@@ -33,7 +33,7 @@ describe('without a network', () => {
       const samples = linked.locator('details', { hasText: 'Sample surveys' });
       if ((await samples.getAttribute('open')) === null) await samples.locator('summary').click();
       await samples.getByRole('button').nth(place).click();
-      await linked.getByRole('heading', { name: 'Field book' }).waitFor();
+      await linked.getByRole('heading', { name: 'Obstructions' }).waitFor();
       await linked.getByRole('link', { name: 'Noonmark' }).click();
       await linked.getByRole('heading', { name: 'Surveys' }).waitFor();
     }

@@ -2,7 +2,7 @@ import { useMemo } from 'preact/hooks';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
 import { hourBars, hoursWithLight } from '../../../report/pictures/hour-bars.ts';
 import { MONTH_NAMES } from '../../../report/pictures/month-columns.ts';
-import { WideTable } from '../survey/wide-table.tsx';
+import { WideTable } from '../../components/wide-table.tsx';
 import { Drawing } from './drawing.tsx';
 import { standardTimeText } from './standard-time-text.ts';
 import { useWidth } from './use-width.ts';

@@ -3,7 +3,7 @@ import { ordered } from '../../../core/survey/order.ts';
 import { sightingDirection } from '../../../core/survey/sighting-direction.ts';
 import type { Sighting, Station, Survey, Trace } from '../../../core/survey/survey.ts';
 import { degreesText } from '../../value-text.ts';
-import { WideTable } from './wide-table.tsx';
+import { WideTable } from '../wide-table.tsx';
 
 const SHAPES: Record<Trace['shape'], string> = {
   skyline: 'skyline',

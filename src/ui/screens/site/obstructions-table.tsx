@@ -2,7 +2,7 @@ import { obstructionKinds, type ObstructionKindRow } from '../../../core/survey/
 import { ordered } from '../../../core/survey/order.ts';
 import type { Obstruction } from '../../../core/survey/survey.ts';
 import { percentText } from '../../value-text.ts';
-import { WideTable } from './wide-table.tsx';
+import { WideTable } from '../../components/wide-table.tsx';
 
 function transmittanceText({ transmittance }: Obstruction, kind: ObstructionKindRow | undefined): string {
   if (transmittance === undefined) return kind?.leaves ? 'usual for its kind' : 'none';

@@ -1,7 +1,7 @@
 import { ordered } from '../../../core/survey/order.ts';
 import type { RoofPlane } from '../../../core/survey/survey.ts';
 import { degreesText } from '../../value-text.ts';
-import { WideTable } from './wide-table.tsx';
+import { WideTable } from '../../components/wide-table.tsx';
 
 function sizeOf({ width, slopeLength, outline }: RoofPlane): string {
   if (outline) return `outline of ${outline.length} corners`;

@@ -27,7 +27,7 @@ function factsOf({ site, climate, surveyedOn, notes }: Survey): [term: string, v
 }
 
 /** Where the site is and what is known of it. */
-export function SiteFacts({ survey }: { survey: Survey }) {
+export function SiteSummary({ survey }: { survey: Survey }) {
   return (
     <dl class="facts">
       {factsOf(survey).map(([term, value]) => (
