@@ -11,7 +11,7 @@ import type { Assessment } from '../../src/core/shading/assessment.ts';
 import type { Survey } from '../../src/core/survey/survey.ts';
 import { inventedSurvey } from '../app/invented-survey.ts';
 import { SAMPLE_FILES, sampleSurvey, worldGridBytes } from '../report/sample-shades.ts';
-import { DESK, NARROW_PHONE, PHONE, startApp, type AppUnderTest } from './harness.ts';
+import { DESK, NARROW_PHONE, PHONE, precached, startApp, type AppUnderTest } from './harness.ts';
 import { imported } from './survey-files.ts';
 
 let app: AppUnderTest;
@@ -63,6 +63,19 @@ async function expectAccessible(page: Page): Promise<void> {
   );
   expect(await page.evaluate(() => document.documentElement.scrollWidth - innerWidth)).toBeLessThanOrEqual(0);
 }
+
+/** What is to be touched and smaller than a fingertip. */
+const smallTargets = (page: Page): Promise<string[]> =>
+  page
+    .locator('.shade button, .shade summary, .shade select, .shade label.button')
+    .evaluateAll((elements) =>
+      elements
+        .filter(
+          (element) =>
+            element.getBoundingClientRect().height < 44 || element.getBoundingClientRect().width < 44,
+        )
+        .map((element) => element.outerHTML),
+    );
 
 describe('the Shade screen', () => {
   it('shows the figures that the core computes, for every sample, plane and station', async () => {
@@ -210,6 +223,33 @@ describe('the Shade screen', () => {
     await expect.poll(() => figure(page).textContent()).toBe(withFile);
   });
 
+  it('takes another way of laying sky light on the plane, and a clear sky, to the figure', async () => {
+    const page = await app.openPage(DESK);
+    const survey = await openMaple(page);
+    const grid = decodeWorldGrid(worldGridBytes());
+    if (!grid.ok) throw new Error('the grid does not decode');
+    const perez = await assessSurvey(survey, worldClimate(grid.value, survey.site), {
+      transposition: 'perez',
+    });
+    await page.getByRole('combobox', { name: 'Sky light on the plane' }).selectOption('perez');
+    const first = ({ planes: [{ stations }] }: Assessment) => percent(stations[0].solarAccess.annual);
+    await expect.poll(() => figure(page).textContent()).toBe(first(perez));
+    const clear = await assessSurvey(survey, clearSkyClimate('ineichen'), { transposition: 'perez' });
+    await page.getByRole('combobox', { name: 'Climate' }).selectOption('clear-sky:ineichen');
+    await expect.poll(() => figure(page).textContent()).toBe(first(clear));
+    await page.locator('.shade-light li', { hasText: 'upper bound' }).waitFor();
+  });
+
+  it('computes without a network once the app is on the device', async () => {
+    const page = await app.openPage(PHONE);
+    await precached(page);
+    await page.context().setOffline(true);
+    await page.reload();
+    const survey = await openMaple(page);
+    const [{ stations }] = (await computed(survey)).planes;
+    expect(await figure(page).textContent()).toBe(percent(stations[0].solarAccess.annual));
+  });
+
   it('says what is missing where nothing can be shown', async () => {
     const page = await app.openPage(PHONE);
     await imported(page, inventedSurvey('no-plane', { title: 'No plane', planes: [], stations: [] }));
@@ -246,5 +286,6 @@ describe('the Shade screen', () => {
     for (const summary of await page.locator('.shade summary').all()) await summary.click();
     await page.getByRole('application').click({ position: { x: 150, y: 120 } });
     await expectAccessible(page);
+    expect(await smallTargets(page)).toEqual([]);
   });
 });
