@@ -23,6 +23,8 @@ export const PLANNING = {
   pointing: 0.3,
   /** One point of a moving sweep. */
   sweepPointing: 0.6,
+  /** One placing of the phone on a surface: boards, grit, tiles. */
+  placing: 0.5,
   /** Laying an axis along the edge of a shadow. */
   shadowAlignment: 0.7,
   /** Lean of the edge that throws the shadow; it counts by the tangent of the sun's elevation. */

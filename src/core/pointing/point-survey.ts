@@ -3,6 +3,8 @@ import { RADIANS, fullCircle } from '../angles/angles.ts';
 import type { Problem } from '../survey/problem.ts';
 import { sightingDirection } from '../survey/sighting-direction.ts';
 import type { Sighting, Survey } from '../survey/survey.ts';
+import { pointPlanes } from './point-planes.ts';
+import { offsetAt } from './run-ties.ts';
 import { solveRuns } from './solve-runs.ts';
 import type { SolvedRuns } from './solve-runs.ts';
 import { PLANNING } from './planning-values.ts';
@@ -13,8 +15,9 @@ import { pointingOfSighting } from './reading-direction.ts';
 /** The direction of every sighting of a survey that the parser has passed, and what it may err by. */
 export function pointSurvey(survey: Survey): PointedSurvey {
   const solved = solveRuns(survey);
+  const { planes, warnings: ofPlanes } = pointPlanes(survey, solved);
   const sightings = new Map<string, PointedSighting>();
-  const warnings: Problem[] = [...solved.warnings];
+  const warnings: Problem[] = [...solved.warnings, ...ofPlanes];
   for (const placed of placedSightings(survey)) {
     const pointed = pointSighting(placed, solved);
     sightings.set(pointed.id, pointed);
@@ -23,7 +26,7 @@ export function pointSurvey(survey: Survey): PointedSurvey {
   return {
     runs: [...solved.runs.values()],
     sightings,
-    planes: [],
+    planes,
     typed: { heading: PLANNING.typedHeading, index: PLANNING.typedIndex },
     warnings,
   };
@@ -87,10 +90,6 @@ function pointSighting(
     random: randomOf(spread, spread, pointing?.elevation ?? 0),
   };
 }
-
-/** Offset of a run's frame at an instant, degrees. */
-export const offsetAt = ({ offset, ratePerMinute, atMs }: RunHeading, timeMs: number): number =>
-  offset + (ratePerMinute * (timeMs - atMs)) / 60_000;
 
 function trueDirection({ azimuth, elevation, takenAtMs }: FramePointing, heading: RunHeading) {
   return {
