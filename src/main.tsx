@@ -44,7 +44,7 @@ const services: AppServices = {
   state,
   store: surveyDatabase({
     connection,
-    check: async (document) => (await parser()).surveyFromJson(document),
+    checker: async () => (await parser()).surveyFromJson,
     now,
     newId,
   }),

@@ -20,6 +20,8 @@ export const APP_ERROR_CODES = [
   'reading-conflict',
   /** The stored survey cannot be read by this version, so it cannot be changed either. */
   'survey-unreadable',
+  /** The survey could not be read after the change, so it was not made; the cause says why. */
+  'change-refused',
   /** The picked file could not be read from the device. */
   'file-unreadable',
   /** Files are being imported already. */

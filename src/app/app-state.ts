@@ -2,18 +2,18 @@ import { signal, type Signal } from '@preact/signals-core';
 import type { Problem } from '../core/survey/problem.ts';
 import type { Survey } from '../core/survey/survey.ts';
 import type { AppErrorCode } from './app-error.ts';
-import type { StoredSurvey, SurveySummary } from './survey-store.ts';
+import type { StepCode, Steps, StoredSurvey, SurveySummary } from './survey-store.ts';
 import type { WeatherFileSummary } from './weather-store.ts';
 
 /** What the last act was, so that it can be told and taken back. */
 export interface Notice {
   code:
+    | StepCode
     | 'survey-deleted'
-    | 'survey-renamed'
     | 'survey-duplicated'
-    | 'survey-replaced'
-    | 'survey-changed'
     | 'survey-restored'
+    | 'step-undone'
+    | 'step-redone'
     | 'weather-file-forgotten';
   title: string;
   undo?: () => Promise<void>;
@@ -52,6 +52,8 @@ export interface AppState {
   weatherFiles: Signal<WeatherFileSummary[]>;
   /** The survey on screen; null while it is read; `missing` where the id is not on this device. */
   open: Signal<{ id: string; stored: StoredSurvey | 'missing' | null } | null>;
+  /** What can be taken back and done again in the survey on screen. */
+  steps: Signal<Steps>;
   notice: Signal<Notice | null>;
   imports: Signal<ImportResult[]>;
   conflicts: Signal<ImportConflict[]>;
@@ -71,6 +73,7 @@ export function appState(): AppState {
     surveys: signal(null),
     weatherFiles: signal([]),
     open: signal(null),
+    steps: signal({ undo: null, redo: null }),
     notice: signal(null),
     imports: signal([]),
     conflicts: signal([]),

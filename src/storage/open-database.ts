@@ -25,6 +25,10 @@ const UPGRADES: ((database: Database) => void)[] = [
     database.createObjectStore('weather-bytes', { keyPath: 'sha256' });
     database.createObjectStore('device', { keyPath: 'name' });
   },
+  (database) => {
+    database.createObjectStore('history', { keyPath: ['survey', 'number'] });
+    database.createObjectStore('photos', { keyPath: 'sha256' });
+  },
 ];
 
 /** Opens the database, bringing its stores up to this version. */

@@ -1,11 +1,12 @@
 import type { DBSchema } from 'idb';
 import type { JsonValue } from '../core/survey/json-value.ts';
 import type { Stamp } from '../core/sync-protocol/stamp.ts';
-import type { SurveySummary } from '../app/survey-store.ts';
+import type { FieldChange } from '../core/survey/field-changes.ts';
+import type { Step, SurveySummary } from '../app/survey-store.ts';
 import type { WeatherFileSummary } from '../app/weather-store.ts';
 
 export const DATABASE_NAME = 'noonmark';
-export const DATABASE_VERSION = 1;
+export const DATABASE_VERSION = 2;
 
 /** One line of the list, kept beside the fields it is drawn from, in the same transaction. */
 export interface SurveyRow extends SurveySummary {
@@ -29,6 +30,25 @@ export interface ReadingRow {
   removed: Stamp | null;
 }
 
+/**
+ * An act on a survey that can be taken back and done again. Raw readings stay in their rows, so a step only says
+ * whether they stand after it.
+ */
+export interface HistoryRow extends Step {
+  survey: string;
+  back: FieldChange[];
+  forth: FieldChange[];
+  readings: { id: string; standing: boolean }[];
+  undone: boolean;
+}
+
+/** A picture, by the hash of its bytes; a plain buffer, since some phones spoil stored Blobs. */
+export interface PhotoRow {
+  sha256: string;
+  type: string;
+  contents: ArrayBuffer;
+}
+
 /** What this device remembers of itself. */
 export type DeviceRow = { name: 'device'; id: string } | { name: 'last-stamp'; stamp: Stamp };
 
@@ -37,6 +57,8 @@ export interface NoonmarkSchema extends DBSchema {
   surveys: { key: string; value: SurveyRow };
   fields: { key: [survey: string, path: string]; value: FieldRow };
   readings: { key: [survey: string, id: string]; value: ReadingRow };
+  history: { key: [survey: string, number: number]; value: HistoryRow };
+  photos: { key: string; value: PhotoRow };
   /** Ids of surveys erased for good. */
   erased: { key: string; value: { id: string; stamp: Stamp } };
   'weather-files': { key: string; value: WeatherFileSummary };

@@ -1,10 +1,11 @@
 import { AppError } from '../app/app-error.ts';
-import type { StoredSurvey, SurveyStore, SurveySummary } from '../app/survey-store.ts';
+import type { Step, StoredSurvey, SurveyStore, SurveySummary } from '../app/survey-store.ts';
 import { fieldsOf, type FieldChange } from '../core/survey/field-changes.ts';
-import type { Parsed } from '../core/survey/problem.ts';
+import type { Parsed, Problem } from '../core/survey/problem.ts';
 import type { Survey } from '../core/survey/survey.ts';
 import type { Connection } from './connection.ts';
 import { stampOfAct } from './device-stamps.ts';
+import { addStep, changesOfMove, rowsToMove, stepOf, stepsOf } from './history-rows.ts';
 import type { SurveyRow } from './schema.ts';
 import { keysOf, storedDocument, summaryOf } from './survey-rows.ts';
 import { reading, writing, type Writing } from './transaction.ts';
@@ -12,8 +13,8 @@ import { writeChanges } from './write-changes.ts';
 
 export interface SurveyDatabaseNeeds {
   connection: Connection;
-  /** Reads a stored document as a survey of this version. */
-  check: (document: unknown) => Promise<Parsed<Survey>>;
+  /** Loads what reads a stored document as a survey of this version. */
+  checker: () => Promise<(document: unknown) => Parsed<Survey>>;
   /** Milliseconds since 1970. */
   now: () => number;
   newId: () => string;
@@ -25,6 +26,8 @@ async function rowOf(transaction: Writing, id: string): Promise<SurveyRow> {
   return row;
 }
 
+const problemText = ({ path, message }: Problem): string => `${path}: ${message}`;
+
 /** The line of the list in a row: all but what is kept for merging. */
 function lineOf(row: SurveyRow): SurveySummary {
   const summary: SurveySummary & Partial<SurveyRow> = { ...row };
@@ -33,7 +36,7 @@ function lineOf(row: SurveyRow): SurveySummary {
 }
 
 /** Surveys in the database: stamped fields and reading rows, of which the document is the projection. */
-export function surveyDatabase({ connection, check, now, newId }: SurveyDatabaseNeeds): SurveyStore {
+export function surveyDatabase({ connection, checker, now, newId }: SurveyDatabaseNeeds): SurveyStore {
   const act = <T>(work: (transaction: Writing) => Promise<T>) =>
     connection.run((database) => writing(database, work));
 
@@ -59,6 +62,32 @@ export function surveyDatabase({ connection, check, now, newId }: SurveyDatabase
       await transaction.objectStore('surveys').put({ ...row, deletedAt, deletionStamp });
     });
 
+  /** After a change: refuses it where the survey cannot be read any more, and writes the line of the list. */
+  async function changed(
+    transaction: Writing,
+    id: string,
+    row: SurveyRow,
+    check?: (document: unknown) => Parsed<Survey>,
+  ) {
+    const document = await storedDocument(transaction, id);
+    const parsed = check?.(document);
+    if (parsed && !parsed.ok) throw new AppError('change-refused', problemText(parsed.problems[0]));
+    await putLine(transaction, id, document, row);
+  }
+
+  async function move(id: string, way: 'undo' | 'redo', number?: number): Promise<Step | null> {
+    const check = await checker();
+    return act(async (transaction) => {
+      const row = await rowOf(transaction, id);
+      const found = (await rowsToMove(transaction, id))[way];
+      if (!found || (number !== undefined && found.number !== number)) return null;
+      await change(transaction, id, await changesOfMove(transaction, found, way));
+      await changed(transaction, id, row, check);
+      await transaction.objectStore('history').put({ ...found, undone: way === 'undo' });
+      return stepOf(found);
+    });
+  }
+
   return {
     list: async () => {
       const rows = await connection.run((database) => database.getAll('surveys'));
@@ -74,7 +103,7 @@ export function surveyDatabase({ connection, check, now, newId }: SurveyDatabase
       if (!found) return null;
       const { document } = found;
       const { deletedAt } = found.row;
-      const parsed = await check(document);
+      const parsed = (await checker())(document);
       return parsed.ok
         ? { id, deletedAt, state: 'readable', survey: parsed.value, warnings: parsed.warnings }
         : { id, deletedAt, state: 'unreadable', document, problems: parsed.problems };
@@ -89,12 +118,21 @@ export function surveyDatabase({ connection, check, now, newId }: SurveyDatabase
         await putLine(transaction, id, survey, { deletedAt: null, deletionStamp: null });
       }),
 
-    applyChanges: (id, changes) =>
-      act(async (transaction) => {
+    applyChanges: async (id, changes, step) => {
+      const check = step && (await checker());
+      return act(async (transaction) => {
         const row = await rowOf(transaction, id);
         await change(transaction, id, changes);
-        await putLine(transaction, id, await storedDocument(transaction, id), row);
-      }),
+        await changed(transaction, id, row, check);
+        return step ? addStep(transaction, id, changes, step) : null;
+      });
+    },
+
+    steps: (id) => connection.run((database) => stepsOf(reading(database), id)),
+
+    undo: (id, number) => move(id, 'undo', number),
+
+    redo: (id) => move(id, 'redo'),
 
     remove: (id) => markDeleted(id, now()),
 
@@ -107,6 +145,7 @@ export function surveyDatabase({ connection, check, now, newId }: SurveyDatabase
         await Promise.all([
           transaction.objectStore('fields').delete(keysOf(id)),
           transaction.objectStore('readings').delete(keysOf(id)),
+          transaction.objectStore('history').delete(keysOf(id)),
           transaction.objectStore('surveys').delete(id),
           transaction.objectStore('erased').put({ id, stamp }),
         ]);

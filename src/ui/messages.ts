@@ -51,6 +51,11 @@ export const ERROR_MESSAGES: Record<AppErrorCode, Message> = {
     what: 'This version of Noonmark cannot read that survey, so it was left as it is.',
     remedy: 'Export it as it is stored, and open it with the version that wrote it.',
   },
+  'change-refused': {
+    what: 'That would leave the survey in a state that cannot be read, so nothing was changed.',
+    remedy:
+      'Later changes may stand on what it touches. Take those back first, or make the change by hand. The reason is below.',
+  },
   'file-unreadable': {
     what: 'The file could not be read.',
     remedy:
@@ -78,10 +83,15 @@ const NOTICES: Record<Notice['code'], (title: string) => string> = {
   'survey-replaced': (title) => `“${title}” is replaced by the file.`,
   'survey-changed': (title) => `“${title}” is changed.`,
   'survey-restored': (title) => `“${title}” is back in the list.`,
+  'entry-added': (title) => `“${title}” is added.`,
+  'entry-changed': (title) => `“${title}” is changed.`,
+  'entry-deleted': (title) => `“${title}” is deleted.`,
+  'step-undone': (title) => `Taken back: “${title}”.`,
+  'step-redone': (title) => `Done again: “${title}”.`,
   'weather-file-forgotten': (name) => `The weather file ${name} is no longer on this device.`,
 };
 
-export function noticeText({ code, title }: Notice): string {
+export function noticeText({ code, title }: Pick<Notice, 'code' | 'title'>): string {
   return NOTICES[code](title);
 }
 

@@ -1,12 +1,19 @@
 import { AppError } from '../../src/app/app-error.ts';
 import { appState } from '../../src/app/app-state.ts';
 import type { PickedFile } from '../../src/app/actions/import-surveys.ts';
-import type { StoredSurvey, SurveyStore } from '../../src/app/survey-store.ts';
+import type { Step, StoredSurvey, SurveyStore } from '../../src/app/survey-store.ts';
 import { fieldsOf, surveyOf, type FieldChange } from '../../src/core/survey/field-changes.ts';
 import { parseSurvey, surveyFromJson } from '../../src/core/survey/parse-survey.ts';
 
+interface Done extends Step {
+  back: FieldChange[];
+  forth: FieldChange[];
+  undone: boolean;
+}
+
 interface Kept {
   fields: FieldChange[];
+  done: Done[];
   deletedAt: number | null;
 }
 
@@ -45,10 +52,41 @@ export function plainStore(): SurveyStore {
       ),
     create: (survey) => {
       if (kept.has(survey.id)) return Promise.reject(new AppError('survey-exists'));
-      kept.set(survey.id, { fields: fieldsOf(survey), deletedAt: null });
+      kept.set(survey.id, { fields: fieldsOf(survey), done: [], deletedAt: null });
       return Promise.resolve();
     },
-    applyChanges: (id, changes) => found(id).then((survey) => void survey.fields.push(...changes)),
+    applyChanges: (id, changes, step) =>
+      found(id).then(({ fields, done }) => {
+        fields.push(...changes);
+        if (!step) return null;
+        done.splice(0, done.length, ...done.filter(({ undone }) => !undone));
+        const number = done.length + 1;
+        done.push({ ...step, number, forth: changes, undone: false });
+        return number;
+      }),
+    steps: (id) => {
+      const done = kept.get(id)?.done ?? [];
+      return Promise.resolve({
+        undo: done.findLast(({ undone }) => !undone) ?? null,
+        redo: done.find(({ undone }) => undone) ?? null,
+      });
+    },
+    undo: (id, number) =>
+      found(id).then(({ fields, done }) => {
+        const last = done.findLast(({ undone }) => !undone);
+        if (!last || (number !== undefined && last.number !== number)) return null;
+        fields.push(...last.back);
+        last.undone = true;
+        return last;
+      }),
+    redo: (id) =>
+      found(id).then(({ fields, done }) => {
+        const next = done.find(({ undone }) => undone);
+        if (!next) return null;
+        fields.push(...next.forth);
+        next.undone = false;
+        return next;
+      }),
     remove: (id) => found(id).then((survey) => void (survey.deletedAt = 1)),
     restore: (id) => found(id).then((survey) => void (survey.deletedAt = null)),
     erase: (id) => Promise.resolve(void kept.delete(id)),

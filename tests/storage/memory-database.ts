@@ -17,10 +17,10 @@ export function tab(report: ConnectionReport = () => undefined) {
   const now = () => (timeMs += 1000);
   const newId = () => `device-${++made}`;
   const connection = new Connection(report);
-  const check = (document: unknown) => Promise.resolve(surveyFromJson(document));
+  const checker = () => Promise.resolve(surveyFromJson);
   return {
     connection,
-    surveys: surveyDatabase({ connection, check, now, newId }),
+    surveys: surveyDatabase({ connection, checker, now, newId }),
     weather: weatherDatabase(connection, now),
     setClock: (ms: number) => (timeMs = ms),
   };

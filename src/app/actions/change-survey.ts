@@ -1,25 +1,32 @@
 import { changesBetween } from '../../core/survey/field-changes.ts';
 import type { Survey } from '../../core/survey/survey.ts';
 import type { AppServices } from '../app-services.ts';
-import type { Notice } from '../app-state.ts';
+import type { StepCode } from '../survey-store.ts';
 import { openSurvey } from './open-survey.ts';
 import { refreshList } from './refresh-list.ts';
+import { undoStep } from './undo-step.ts';
 
-type Needs = Pick<AppServices, 'state' | 'store'>;
-
-async function step(services: Needs, from: Survey, to: Survey): Promise<void> {
-  await services.store.applyChanges(to.id, changesBetween(from, to));
-  await refreshList(services);
-  if (services.state.open.value?.id === to.id) await openSurvey(services, to.id);
-}
-
-/** Stores the difference of two states of a survey as field changes, and offers to take it back. */
+/**
+ * Stores the difference of two states of a survey as field changes, as one step of its history: it can be taken back
+ * at once or later, after a restart too. `subject` names what was acted on.
+ */
 export async function changeSurvey(
-  services: Needs,
+  services: Pick<AppServices, 'state' | 'store'>,
   before: Survey,
   after: Survey,
-  code: Notice['code'] = 'survey-changed',
+  code: StepCode = 'survey-changed',
+  subject = after.title,
 ): Promise<void> {
-  await step(services, before, after);
-  services.state.notice.value = { code, title: after.title, undo: () => step(services, after, before) };
+  const { state, store } = services;
+  const changes = changesBetween(before, after);
+  if (changes.length === 0) return;
+  const back = changesBetween(after, before);
+  const number = await store.applyChanges(after.id, changes, { back, code, title: subject });
+  await refreshList(services);
+  if (state.open.value?.id === after.id) await openSurvey(services, after.id);
+  state.notice.value = {
+    code,
+    title: subject,
+    undo: () => undoStep(services, after.id, number ?? undefined),
+  };
 }

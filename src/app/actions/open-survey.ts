@@ -6,6 +6,8 @@ export async function openSurvey(
   id: string,
 ): Promise<void> {
   if (state.open.value?.id !== id) state.open.value = { id, stored: null };
-  const stored = (await store.load(id)) ?? 'missing';
-  if (state.open.value?.id === id) state.open.value = { id, stored };
+  const [stored, steps] = await Promise.all([store.load(id), store.steps(id)]);
+  if (state.open.value?.id !== id) return;
+  state.open.value = { id, stored: stored ?? 'missing' };
+  state.steps.value = steps;
 }

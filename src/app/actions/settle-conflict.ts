@@ -23,13 +23,17 @@ async function replace(services: Needs, survey: Survey): Promise<Survey> {
   if (stored === null) throw new AppError('survey-missing');
   if (stored.state === 'unreadable') throw new AppError('survey-unreadable');
   const before = stored.survey;
-  await store.applyChanges(survey.id, changesBetween(before, survey));
+  const number = await store.applyChanges(survey.id, changesBetween(before, survey), {
+    back: changesBetween(survey, before),
+    code: 'survey-replaced',
+    title: survey.title,
+  });
   if (stored.deletedAt !== null) await store.restore(survey.id);
   state.notice.value = {
     code: 'survey-replaced',
     title: survey.title,
     undo: async () => {
-      await store.applyChanges(survey.id, changesBetween(survey, before));
+      await store.undo(survey.id, number ?? undefined);
       if (stored.deletedAt !== null) await store.remove(survey.id);
       await refreshList(services);
     },

@@ -39,6 +39,8 @@ export const surveyLayout: ObjectLayout = {
     obstructions: { sortedBy: 'order', required: true, row: {} },
     runs: { sortedBy: 'startedAt', required: true, row: {} },
     readings: { sortedBy: 'takenAt', required: true, whole: true, row: {} },
+    facts: { sortedBy: 'order', row: {} },
+    photos: { sortedBy: 'order', row: {} },
     stations: {
       sortedBy: 'order',
       required: true,

@@ -46,6 +46,13 @@ const zonePhrase = 'a UTM zone with its hemisphere, such as "33N" or "56S"';
 /** Zone 1 to 60 with N or S. */
 export const utmZone = v.pipe(v.string(zonePhrase), v.regex(/^(?:0?[1-9]|[1-5]\d|60)[NS]$/, zonePhrase));
 
+const countryPhrase = 'a country by two capital letters, such as "PT"';
+/** ISO 3166-1 alpha-2. */
+export const countryCode = v.pipe(v.string(countryPhrase), v.regex(/^[A-Z]{2}$/, countryPhrase));
+
+const sha256Phrase = 'a SHA-256 in 64 hexadecimal digits';
+export const sha256 = v.pipe(v.string(sha256Phrase), v.regex(/^[0-9a-f]{64}$/, sha256Phrase));
+
 /** A list of one sort of thing. */
 export const listOf = <const Item extends v.GenericSchema>(item: Item) => v.array(item, 'a list');
 

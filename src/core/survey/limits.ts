@@ -23,6 +23,8 @@ export const LIMITS = {
   samples: 1_000,
   sampleMs: 60_000,
   headingChecks: 2_000,
+  facts: 2_000,
+  photos: 5_000,
   /** Two-face checks in all stations together. */
   indexChecks: 2_000,
   /** Placings and sightings along edges of all planes together. */

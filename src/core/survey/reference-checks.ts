@@ -21,6 +21,8 @@ export function addReferenceProblems(document: JsonRecord, problems: ProblemList
   const readings = named('readings', 'reading');
   ids(stations, 'station');
   ids(sightings, 'sighting');
+  ids(rowsOf(document, 'facts'), 'fact');
+  ids(rowsOf(document, 'photos'), 'photo');
   const refer = (rows: Row[], key: string, known: Set<unknown> | null, what: string) => {
     for (const { value, path } of rows) addDangling(value[key], pathBelow(path, key), known, what, problems);
   };

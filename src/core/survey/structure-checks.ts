@@ -62,6 +62,8 @@ function addTooMany(document: unknown, problems: ProblemList): void {
     obstructions: length(document.obstructions),
     runs: length(document.runs),
     readings: length(document.readings),
+    facts: length(document.facts),
+    photos: length(document.photos),
     headingChecks: sum(stations.map(({ value }) => length(value.headingChecks))),
     traces: sum(stations.map(({ value }) => length(value.traces))),
     indexChecks: sum(stations.map(({ value }) => length(value.indexChecks))),

@@ -16,6 +16,7 @@ const siteSchema = v.looseObject(
     altitude: v.optional(f.numberBetween(-430, 9000, 'metres above sea level')),
     timeZone: f.timeZone,
     address: v.optional(f.name),
+    country: v.optional(f.countryCode),
     albedo: v.optional(f.share),
   },
   'an object with latitude, longitude and timeZone',
@@ -210,6 +211,39 @@ const stationSchema = v.looseObject(
   'an object: one station',
 );
 
+const factSchema = v.looseObject(
+  {
+    id: f.identifier,
+    order: f.orderKey,
+    label: v.optional(f.name),
+    value: v.union([f.name, f.listOf(f.name)], 'a text, or a list of texts'),
+  },
+  'an object: one fact of the site',
+);
+
+const photoSubjectSchema = v.looseObject(
+  {
+    kind: f.oneOf(['site', 'station', 'plane', 'obstruction', 'fact']),
+    id: v.optional(f.identifier),
+  },
+  'an object with kind and id: what the photo shows',
+);
+
+const photoSchema = v.looseObject(
+  {
+    id: f.identifier,
+    order: f.orderKey,
+    of: photoSubjectSchema,
+    takenAt: f.instant,
+    azimuth: v.optional(f.azimuth),
+    width: f.numberOver(0, 100_000, 'dots'),
+    height: f.numberOver(0, 100_000, 'dots'),
+    bytes: f.numberOver(0, 1e9, 'bytes'),
+    sha256: f.sha256,
+  },
+  'an object: one photo',
+);
+
 export const surveySchema = v.looseObject(
   {
     format: v.literal(SURVEY_FORMAT, `"${SURVEY_FORMAT}"`),
@@ -226,6 +260,8 @@ export const surveySchema = v.looseObject(
     runs: f.listOf(runSchema),
     readings: f.listOf(readingSchema),
     stations: f.listOf(stationSchema),
+    facts: v.optional(f.listOf(factSchema)),
+    photos: v.optional(f.listOf(photoSchema)),
   },
   'an object: one survey',
 );

@@ -42,6 +42,43 @@ export interface Survey {
   runs: Run[];
   readings: Reading[];
   stations: Station[];
+  /** What the office needs to know of the house, in the surveyor's words. */
+  facts?: SiteFact[];
+  photos?: Photo[];
+}
+
+/** One thing to know of the site: of a list of such things, or of the surveyor's own. */
+export interface SiteFact {
+  /** The row of the list it answers, such as `roof-covering`; any other id for one of the surveyor's own. */
+  id: string;
+  order?: number;
+  /** What is told, where no list says so. */
+  label?: string;
+  /** In words; several where several hold. */
+  value: string | string[];
+}
+
+/** A photo; its picture is kept under its hash, apart from the record. */
+export interface Photo {
+  id: string;
+  order?: number;
+  of: PhotoSubject;
+  takenAt: string;
+  /** Where the camera looked, clockwise from true north. */
+  azimuth?: number;
+  /** Of the picture, in its own dots. */
+  width: number;
+  height: number;
+  bytes: number;
+  /** Of the picture's bytes, hexadecimal. */
+  sha256: string;
+}
+
+/** What a photo shows: the site as a whole, or one thing of the record. */
+export interface PhotoSubject {
+  kind: 'site' | 'station' | 'plane' | 'obstruction' | 'fact';
+  /** Absent for the site. */
+  id?: string;
 }
 
 export interface Site {
@@ -54,6 +91,8 @@ export interface Site {
   /** IANA name such as `Europe/Lisbon`. */
   timeZone: string;
   address?: string;
+  /** Country whose lists the site's facts are taken from, two letters of ISO 3166-1. */
+  country?: string;
   /** Share of light the ground reflects, 0 to 1; absent means 0.2. */
   albedo?: number;
 }

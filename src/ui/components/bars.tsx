@@ -1,4 +1,4 @@
-import { asAppError } from '../../app/app-error.ts';
+import { attempt } from '../../app/attempt.ts';
 import { useApp } from '../app-context.ts';
 import { ERROR_MESSAGES, noticeText } from '../messages.ts';
 
@@ -7,7 +7,8 @@ function TroubleBar() {
   const code = state.database.value ?? state.trouble.value?.code;
   if (!code) return null;
   const { what, remedy } = ERROR_MESSAGES[code];
-  const detail = code === 'unexpected' ? state.trouble.value?.detail : undefined;
+  const tellsWhy = code === 'unexpected' || code === 'change-refused';
+  const detail = tellsWhy ? state.trouble.value?.detail : undefined;
   return (
     <div class="bar bar-trouble">
       <p>
@@ -54,7 +55,7 @@ function NoticeBar() {
   if (!notice) return null;
   const takeBack = async () => {
     state.notice.value = null;
-    await notice.undo?.().catch((error: unknown) => (state.trouble.value = { code: asAppError(error).code }));
+    if (notice.undo) await attempt(state, notice.undo);
   };
   return (
     <div class="bar">

@@ -12,6 +12,7 @@ import { ERROR_MESSAGES } from '../../messages.ts';
 import { SURVEY_SECTIONS } from '../../routes.ts';
 import type { SurveySection } from '../../section.ts';
 import { surveyPath } from '../../survey-path.ts';
+import { HistoryButtons } from './history-buttons.tsx';
 import { SurveyTitle } from './survey-title.tsx';
 import './survey.css';
 
@@ -86,6 +87,7 @@ function Readable(props: { stored: Extract<StoredSurvey, { state: 'readable' }>;
       <section ref={content} class="section" tabIndex={-1} aria-label={section.label}>
         <LazyScreen load={section.load} with={{ surveyId: stored.id, survey: stored.survey, services }} />
       </section>
+      <HistoryButtons surveyId={stored.id} />
     </>
   );
 }
