@@ -1,8 +1,10 @@
 import { turnBetween } from '../angles/angles.ts';
+import { pointSurvey } from '../pointing/point-survey.ts';
+import type { PointedSurvey } from '../pointing/pointed-survey.ts';
 import { monthlyTransmittance, traceEdge } from '../survey/obstruction-kinds.ts';
 import { ordered } from '../survey/order.ts';
-import { sightingDirection } from '../survey/sighting-direction.ts';
-import type { Station, Survey, Trace } from '../survey/survey.ts';
+import type { SightingDirection } from '../survey/sighting-direction.ts';
+import type { Sighting, Station, Survey, Trace } from '../survey/survey.ts';
 import type { SkyPoint } from './horizon-edge.ts';
 import type { HorizonProfile } from './horizon-profile.ts';
 import { horizonProfile } from './horizon-profile.ts';
@@ -14,22 +16,40 @@ export interface StationHorizon {
   observed: [number, number][];
 }
 
+/** Where a sighting points; null where that is not known. */
+export type DirectionOf = (sighting: Sighting) => SightingDirection | null;
+
+/** The true directions of a survey's sightings. */
+export const pointedDirections =
+  ({ sightings }: Pick<PointedSurvey, 'sightings'>): DirectionOf =>
+  ({ id }) =>
+    sightings.get(id)?.direction ?? null;
+
 /**
- * The horizon of a station of a survey that the parser has passed. Sightings that have no direction yet (a raw reading
- * alone) are left out, and with them a trace that does not hold together without them; `undirectedSightings` names them.
+ * The horizon of a station of a survey that the parser has passed. Sightings without a direction (their warnings are
+ * in the pointed survey) are left out, and with them a trace that does not hold together without them. `directionOf`
+ * saves pointing the survey anew, or stands for other directions.
  */
-export function stationHorizon(survey: Survey, station: Station): StationHorizon {
-  const obstructions = tracedObstructions(survey, station);
+export function stationHorizon(
+  survey: Survey,
+  station: Station,
+  directionOf: DirectionOf = pointedDirections(pointSurvey(survey)),
+): StationHorizon {
+  const obstructions = tracedObstructions(survey, station, directionOf);
   const spans = obstructions.flatMap(({ traces }) => traces.map(traceSpan));
   return { profile: horizonProfile(obstructions), observed: [...spans, ...(station.observedOpen ?? [])] };
 }
 
 /** What a station traced, by obstruction, in the order of the survey's obstructions. */
-export function tracedObstructions(survey: Survey, station: Station): TracedObstruction[] {
+export function tracedObstructions(
+  survey: Survey,
+  station: Station,
+  directionOf: DirectionOf = pointedDirections(pointSurvey(survey)),
+): TracedObstruction[] {
   return ordered(survey.obstructions).flatMap((obstruction) => {
     const traces = ordered(station.traces)
       .filter((trace) => trace.obstruction === obstruction.id)
-      .map((trace) => settledTrace(trace, traceEdge(trace, obstruction) === 'straight'))
+      .map((trace) => settledTrace(trace, traceEdge(trace, obstruction) === 'straight', directionOf))
       .filter(joinsUp);
     const transmittance = monthlyTransmittance(obstruction, survey.site.latitude);
     return traces.length > 0 ? [{ id: obstruction.id, transmittance, traces }] : [];
@@ -45,17 +65,11 @@ function joinsUp({ shape, fullCircle, points }: SettledTrace): boolean {
   return points.length >= (shape === 'outline' ? 3 : 2) && neighbours.every((i) => turn(i) < 180);
 }
 
-function settledTrace(trace: Trace, straight: boolean): SettledTrace {
-  const points: SkyPoint[] = ordered(trace.sightings).flatMap(
-    (sighting) => sightingDirection(sighting) ?? [],
-  );
+function settledTrace(trace: Trace, straight: boolean, directionOf: DirectionOf): SettledTrace {
+  const points: SkyPoint[] = ordered(trace.sightings).flatMap((sighting) => directionOf(sighting) ?? []);
   const { shape, fullCircle = false, angularWidth = 0 } = trace;
   return { shape, straight, fullCircle, angularWidth, points };
 }
-
-/** Indexes of the sightings of a trace that have a raw reading but no direction. */
-export const undirectedSightings = (trace: Trace): number[] =>
-  trace.sightings.flatMap((sighting, index) => (sightingDirection(sighting) ? [] : [index]));
 
 /** The azimuths a trace goes over, clockwise. */
 function traceSpan({ points, fullCircle }: SettledTrace): [number, number] {

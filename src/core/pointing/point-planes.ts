@@ -86,14 +86,16 @@ function azimuthOf(plane: RoofPlane, groups: readonly LaidGroup[], solved: Solve
       }),
     );
   });
-  if (sighted.length > 0) return combined(sighted, sighted[0].value);
+  if (sighted.length > 0) return wrapped(combined(sighted, sighted[0].value));
   const laid = groups.flatMap(({ run, atMs, laid: one }) =>
     one.facing === null
       ? []
       : inTruth(run, atMs, one.facing, one.facingDeviation, solved).map((angle) => ({ ...one, ...angle })),
   );
-  return laid.length > 0 ? combined(laid, laid[0].value) : null;
+  return laid.length > 0 ? wrapped(combined(laid, laid[0].value)) : null;
 }
+
+const wrapped = (angle: PlaneAngle | null) => angle && { ...angle, value: fullCircle(angle.value) };
 
 /** An azimuth of a run's frame as a true one; none where the run has no heading. */
 function inTruth(run: string, atMs: number, azimuth: number, deviation: number, { runs }: SolvedRuns) {
@@ -107,14 +109,14 @@ function inTruth(run: string, atMs: number, azimuth: number, deviation: number, 
   ];
 }
 
-/** Weighted mean about a base; no surer than the surest, since their errors are largely the same. */
+/** Weighted mean about a base [degrees]; no surer than the surest, since their errors are largely the same. */
 function combined(angles: readonly PlaneAngle[], base: number): PlaneAngle | null {
   if (angles.length === 0) return null;
   const weights = angles.map(({ standardDeviation }) => 1 / standardDeviation ** 2);
   const total = weights.reduce((sum, weight) => sum + weight, 0);
   const turn = angles.reduce((sum, { value }, i) => sum + weights[i] * turnBetween(base, value), 0) / total;
   const count = angles.reduce((sum, angle) => sum + angle.count, 0);
-  const value = base === 0 ? turn : fullCircle(base + turn);
+  const value = base + turn;
   const squares = angles.reduce(
     (sum, angle) => sum + angle.count * (angle.scatter ** 2 + turnBetween(value, angle.value) ** 2),
     0,

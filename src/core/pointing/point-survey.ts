@@ -23,6 +23,7 @@ export function pointSurvey(survey: Survey): PointedSurvey {
     sightings.set(pointed.id, pointed);
     if (pointed.undirected) warnings.push({ path: pointed.path, message: pointed.undirected.message });
   }
+  warnings.push(...uncheckedRuns(survey, solved, sightings));
   return {
     runs: [...solved.runs.values()],
     sightings,
@@ -30,6 +31,21 @@ export function pointSurvey(survey: Survey): PointedSurvey {
     typed: { heading: PLANNING.typedHeading, index: PLANNING.typedIndex },
     warnings,
   };
+}
+
+/** A warning for each run whose sightings rest on a compass alone. */
+function uncheckedRuns(
+  survey: Survey,
+  { runs }: SolvedRuns,
+  sightings: ReadonlyMap<string, PointedSighting>,
+): Problem[] {
+  const used = new Set([...sightings.values()].map(({ run }) => run));
+  return survey.runs.flatMap(({ id }, i) => {
+    const heading = runs.get(id)?.heading;
+    if (!used.has(id) || !heading?.outliers) return [];
+    const message = `The azimuths of this run rest on a compass alone, good to about ${heading.standardDeviation.toFixed(0)}° and now and then far off. One heading check, by shadow or by a mark of known bearing, makes them sure.`;
+    return [{ path: `runs[${i}]`, message }];
+  });
 }
 
 interface PlacedSighting {
