@@ -1,11 +1,15 @@
-import { stationHorizon, undirectedSightings } from '../horizon/station-horizon.ts';
+import { pointedDirections, stationHorizon } from '../horizon/station-horizon.ts';
 import type { Climate } from '../irradiance/climate.ts';
+import { pointSurvey } from '../pointing/point-survey.ts';
 import { sunTrack } from '../solar-position/sun-track.ts';
 import { standardOffsetMinutes } from '../solar-position/time-zone.ts';
 import { ordered } from '../survey/order.ts';
 import type { Problem } from '../survey/problem.ts';
 import type { Obstruction, RoofPlane, Site, Station, Survey, TranspositionId } from '../survey/survey.ts';
 import { transpositionOf } from '../transposition/transposition-models.ts';
+import type { DrawnAccess } from '../uncertainty/access-interval.ts';
+import { accessInterval, drawAccess, drawnSurvey } from '../uncertainty/access-interval.ts';
+import { uncertainStation } from '../uncertainty/uncertain-station.ts';
 import type { Assessment, PlaneAccess, PlaneAssessment, StationAssessment } from './assessment.ts';
 import { assessStation } from './assess-station.ts';
 import type { Orientation } from './orientation-factor.ts';
@@ -35,6 +39,8 @@ export interface AssessOptions {
   stepMinutes?: number;
   /** What `siteLight` made for this very site, climate, transposition and step, where the caller has it already. */
   light?: SiteLight;
+  /** Whether to draw how sure each access is; absent means true. The draws are the same for the same survey id. */
+  intervals?: boolean;
   signal?: Cancellation;
   /** Called between parts of the work with the share done; the work waits for what it returns. */
   onProgress?: (share: number, stage: string) => void | Promise<void>;
@@ -72,6 +78,8 @@ export async function assessSurvey(
   climate: Climate,
   options: AssessOptions = {},
 ): Promise<Assessment> {
+  const pointed = pointSurvey(survey);
+  const directionOf = pointedDirections(pointed);
   const transposition = options.transposition ?? survey.transposition ?? 'hay-davies';
   const planes = ordered(survey.planes);
   const parts = 1 + planes.reduce((count, plane) => count + 1 + stationsOf(survey, plane).length, 0);
@@ -82,16 +90,30 @@ export async function assessSurvey(
   };
   await advance('The sun and the sky of a year');
   const light = options.light ?? siteLight(survey.site, climate, { ...options, transposition });
+  const drawn =
+    options.intervals === false
+      ? null
+      : drawnSurvey(pointed, survey.site.latitude, climate.source, { seed: survey.id });
   const assessed: PlaneAssessment[] = [];
   for (const plane of planes) {
     await advance(plane.name);
     const map = skyMap(light.year, light.grid, plane.surfaceTilt, plane.surfaceAzimuth);
     const stations: StationAssessment[] = [];
+    const draws: DrawnAccess[] = [];
     for (const station of stationsOf(survey, plane)) {
       await advance(`${plane.name}, ${station.name}`);
-      stations.push(assessStation(map, stationHorizon(survey, station), station, obstructionsById(survey)));
+      const horizon = stationHorizon(survey, station, directionOf);
+      const result = assessStation(map, horizon, station, obstructionsById(survey));
+      if (drawn) {
+        const uncertain = uncertainStation(survey, station, pointed, horizon);
+        draws.push(drawAccess(map, uncertain, result.solarAccess.annual, drawn));
+        result.solarAccess.interval = accessInterval([draws[draws.length - 1]], drawn);
+      }
+      stations.push(result);
     }
-    assessed.push(planeAssessment(plane, map, light.orientation, stations));
+    const result = planeAssessment(plane, map, light.orientation, stations);
+    if (drawn && result.solarAccess) result.solarAccess.interval = accessInterval(draws, drawn);
+    assessed.push(result);
   }
   await options.onProgress?.(1, 'Done');
   const { source, name, reference, warnings } = climate;
@@ -99,7 +121,7 @@ export async function assessSurvey(
     climate: { source, name, reference, warnings },
     transposition,
     stepMinutes: light.year.paths.track.stepMinutes,
-    warnings: surveyWarnings(survey),
+    warnings: [...surveyWarnings(survey), ...pointed.warnings],
     planes: assessed,
   };
 }
@@ -157,14 +179,6 @@ function surveyWarnings(survey: Survey): Problem[] {
         path: `stations[${s}].serves`,
         message: `Station "${station.name}" serves no plane, so it is in no result. Name the planes it speaks for.`,
       });
-    station.traces.forEach((trace, t) => {
-      for (const i of undirectedSightings(trace))
-        warnings.push({
-          path: `stations[${s}].traces[${t}].sightings[${i}]`,
-          message:
-            'This sighting has a raw reading but no azimuth and elevation, so it is left out. Type them, or amend it.',
-        });
-    });
   });
   survey.planes.forEach((plane, p) => {
     if (stationsOf(survey, plane).length === 0)

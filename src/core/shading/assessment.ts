@@ -1,5 +1,6 @@
 import type { Problem } from '../survey/problem.ts';
 import type { TranspositionId } from '../survey/survey.ts';
+import type { CureId, IntervalSourceId } from '../uncertainty/interval-source.ts';
 
 /** Twelve monthly values; null in a month without sun on the plane. */
 export type MonthlyShares = (number | null)[];
@@ -42,6 +43,33 @@ export interface PlaneAccess {
   /** Lowest annual access among the stations. */
   lowest: number;
   count: number;
+  /** How sure the annual mean is; left out where no intervals were asked for. */
+  interval?: AccessInterval;
+}
+
+/**
+ * How sure an annual solar access is: between `low` and `high` the truth is expected 95 times in 100. The access itself may
+ * lie near one end or even outside, since what nobody looked at counts as clear in it and is drawn in the interval.
+ */
+export interface AccessInterval {
+  /** The 2.5 % and 97.5 % quantiles, 0 to 1. */
+  low: number;
+  high: number;
+  standardDeviation: number;
+  /** Monte Carlo draws it was made from. */
+  draws: number;
+  /** What it comes from, the largest first. */
+  sources: IntervalSource[];
+}
+
+export interface IntervalSource {
+  source: IntervalSourceId;
+  /** Share of the variance, 0 to 1; they sum to 1. */
+  share: number;
+  /** What would shrink it; null where nothing that can be named would. */
+  cure: CureId | null;
+  /** Standard deviation of the access after that, all else as it is. */
+  standardDeviationAfter: number | null;
 }
 
 export interface StationAssessment {
@@ -52,6 +80,8 @@ export interface StationAssessment {
     monthly: MonthlyShares;
     /** [month][hour], hours of local standard time; null where the month has no light in that hour. */
     hourly: (number | null)[][];
+    /** How sure `annual` is; left out where no intervals were asked for. */
+    interval?: AccessInterval;
   };
   /** Share of the plane's unshaded energy that comes through azimuths somebody observed. */
   coverage: number;
