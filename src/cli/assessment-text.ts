@@ -1,5 +1,6 @@
 import type { Assessment, PlaneAssessment, StationAssessment } from '../core/shading/assessment.ts';
 import { TRANSPOSITIONS } from '../core/transposition/transposition-models.ts';
+import { spreadText, withInterval } from './interval-text.ts';
 import { grouped, monthsTable, percent, table } from './table.ts';
 
 /** The result of one survey for a person to read. */
@@ -12,6 +13,7 @@ export function assessmentText(assessed: Assessment & { file: string; title: str
     ...climate.warnings.map((warning) => `Note: ${warning}`),
     `Sky light on the tilted plane: ${model}. Steps of ${assessed.stepMinutes} minutes.`,
     'Solar access is the light that obstructions leave, in percent of the light without them.',
+    'In brackets: the truth is expected between these 95 times in 100.',
     '',
   ];
   const results =
@@ -47,13 +49,14 @@ function planeText(plane: PlaneAssessment): string {
 
 function verdict({ solarAccess }: PlaneAssessment): string {
   if (!solarAccess) return 'No station serves this plane, so its solar access is not known.';
-  const { annual, count, lowest } = solarAccess;
+  const { annual, count, lowest, interval } = solarAccess;
   const of = count === 1 ? 'one station' : `${count} stations, lowest ${percent(lowest)} %`;
-  return `Solar access ${percent(annual)} %, shading loss ${percent(1 - annual)} % a year (${of}).`;
+  return `Solar access ${withInterval(annual, interval)} %, shading loss ${percent(1 - annual)} % a year (${of}).${interval ? `\n${spreadText(interval)}` : ''}`;
 }
 
 function stationText(station: StationAssessment): string {
-  const heading = `At ${station.name}: observed ${percent(station.coverage)} % of the light's directions.`;
+  const { annual, interval } = station.solarAccess;
+  const heading = `At ${station.name}: access ${withInterval(annual, interval)} %, observed ${percent(station.coverage)} % of the light's directions.`;
   if (station.obstructions.length === 0) return `${heading} Nothing was traced.\n`;
   const names = new Map(station.obstructions.map(({ id, name }) => [id, name]));
   const rows = station.obstructions.map(({ name, gainIfRemoved, lossIfAlone }) => [

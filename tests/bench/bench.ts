@@ -12,9 +12,12 @@ import { assessStation } from '../../src/core/shading/assess-station.ts';
 import { DEFAULT_STEP_MINUTES, obstructionsById, siteLight } from '../../src/core/shading/assess-survey.ts';
 import { blockedLight, shadedMonths } from '../../src/core/shading/blocked-light.ts';
 import { skyMap } from '../../src/core/shading/sky-map.ts';
+import { pointSurvey } from '../../src/core/pointing/point-survey.ts';
 import { standardOffsetMinutes } from '../../src/core/solar-position/time-zone.ts';
 import { parseSurvey } from '../../src/core/survey/parse-survey.ts';
 import type { Survey } from '../../src/core/survey/survey.ts';
+import { accessInterval, drawAccess, drawnSurvey } from '../../src/core/uncertainty/access-interval.ts';
+import { uncertainStation } from '../../src/core/uncertainty/uncertain-station.ts';
 import { weatherText } from '../reference-values/weather-text.ts';
 import { exactness } from './exactness.ts';
 import { assessMemory } from './memory.ts';
@@ -49,6 +52,15 @@ const map = assess(world());
 const profile = horizonProfile(tracedObstructions(survey, station));
 const traced = tracedObstructions(survey, station);
 
+const pointed = pointSurvey(survey);
+const uncertain = uncertainStation(survey, station, pointed);
+
+/** All of it for one station: the survey's shared draws, the condensed map, the draws, their interval. */
+function drawInterval(sources: boolean) {
+  const drawn = drawnSurvey(pointed, latitude, 'world', { seed: survey.id, sources });
+  return accessInterval([drawAccess(map, uncertain, 0.94, drawn)], drawn);
+}
+
 const times = medians(
   {
     t0: () => {
@@ -69,6 +81,8 @@ const times = medians(
       for (let i = 0; i < FURTHER; i++)
         shadedMonths(map, blockedLight(map, blockedSpans(horizonProfile(traced))));
     },
+    draws: () => drawInterval(false),
+    drawsAndSources: () => drawInterval(true),
   },
   ROUNDS,
 );
@@ -81,6 +95,8 @@ const results = {
     ratio('the same with a weather file, parsing included', times.weatherFile, 1),
     ratio('each further profile, annual and monthly', times.profiles / FURTHER, 1 / 1000),
     ratio('the same from its traces', times.profilesFromTraces / FURTHER, null),
+    ratio('1,000 Monte Carlo draws for one station', times.draws, 0.3),
+    ratio('the same with its ranked sources', times.drawsAndSources, null),
   ],
   exactness: exactness(map, world(), site),
   assessMemoryMB: { value: assessMemory(SURVEY), bar: 200 },

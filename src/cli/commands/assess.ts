@@ -38,7 +38,9 @@ export const assess: Command = {
   --json                       { surveys: [ { file, problems?, climate, transposition, stepMinutes, warnings,
                                  planes: [ { id, orientationFactor, unshaded, solarAccess, stations } ] } ] }
                                irradiation in kWh/m2, shares 0 to 1, null for a month without sun;
-                               hours are local standard time
+                               hours are local standard time; solarAccess of planes and stations has
+                               interval: { low, high, standardDeviation, draws, sources: [ { source,
+                               share, cure, standardDeviationAfter } ] }, 95 % on the annual access
 
 A file that cannot be used is told, the others are assessed, and the exit code is 1.
 Counted: light from the sun and the sky that obstructions block. Not counted: what obstructions reflect.`,
