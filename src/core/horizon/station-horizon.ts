@@ -66,9 +66,24 @@ function joinsUp({ shape, fullCircle, points }: SettledTrace): boolean {
 }
 
 function settledTrace(trace: Trace, straight: boolean, directionOf: DirectionOf): SettledTrace {
-  const points: SkyPoint[] = ordered(trace.sightings).flatMap((sighting) => directionOf(sighting) ?? []);
+  const points = overZenith(ordered(trace.sightings).flatMap((sighting) => directionOf(sighting) ?? []));
   const { shape, fullCircle = false, angularWidth = 0 } = trace;
   return { shape, straight, fullCircle, angularWidth, points };
+}
+
+/** Above this, neighbours in opposite azimuths are joined over the zenith, degrees. */
+const NEAR_ZENITH = 60;
+
+/** The points with the zenith between neighbours that face each other across it: a sweep went straight over. */
+function overZenith(points: SkyPoint[]): SkyPoint[] {
+  return points.flatMap((point, i) => {
+    const before = points[i - 1];
+    const isAcross =
+      i > 0 &&
+      Math.min(before.elevation, point.elevation) > NEAR_ZENITH &&
+      180 - Math.abs(turnBetween(before.azimuth, point.azimuth)) < 1e-6;
+    return isAcross ? [{ azimuth: (before.azimuth + 90) % 360, elevation: 90 }, point] : [point];
+  });
 }
 
 /** The azimuths a trace goes over, clockwise. */

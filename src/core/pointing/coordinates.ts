@@ -36,15 +36,17 @@ const refused = (message: string): Parsed<never> => ({ ok: false, problems: [{ p
 
 /** One sort of each sign, letters for the words of direction, and no labels. */
 function plainText(text: string): string {
-  return text
-    // Before the letters are made alike, which turns this sign into a letter o.
-    .replace(/[º˚]/g, '°')
-    .normalize('NFKC')
-    .trim()
-    .replace(/[−–—]/g, '-')
-    .replace(/''|′′|’’|[″”“]/g, '"')
-    .replace(/[′’‘`´]/g, "'")
-    .replace(/\b(north|south|east|west)\b/gi, (word) => word[0].toUpperCase());
+  return (
+    text
+      // Before the letters are made alike, which turns this sign into a letter o.
+      .replace(/[º˚]/g, '°')
+      .normalize('NFKC')
+      .trim()
+      .replace(/[−–—]/g, '-')
+      .replace(/''|′′|’’|[″”“]/g, '"')
+      .replace(/[′’‘`´]/g, "'")
+      .replace(/\b(north|south|east|west)\b/gi, (word) => word[0].toUpperCase())
+  );
 }
 
 /** Two decimal numbers side by side in an address. */

@@ -237,10 +237,10 @@ describe('planes and places', () => {
 });
 
 describe('what goes with the result', () => {
-  test('a sighting that has a raw reading alone is named and left out', async () => {
+  test('a sighting in a run that nothing ties to north is named and left out', async () => {
     const { warnings } = await assess(
       survey((made) => {
-        made.runs = [{ id: 'r', frame: 'magnetic', startedAt: '2026-05-14T10:00:00Z' }];
+        made.runs = [{ id: 'r', frame: 'relative', startedAt: '2026-05-14T10:00:00Z' }];
         made.readings = [
           { id: 'x', run: 'r', takenAt: '2026-05-14T10:00:00Z', alpha: 0, beta: 90, gamma: 0 },
         ];
