@@ -7,7 +7,7 @@ import type { Connection } from './connection.ts';
 import { stampOfAct } from './device-stamps.ts';
 import { addStep, changesOfMove, rowsToMove, stepOf, stepsOf } from './history-rows.ts';
 import type { SurveyRow } from './schema.ts';
-import { keysOf, storedDocument, summaryOf } from './survey-rows.ts';
+import { keysOf, storedDocument, summaryOf, touchesLine } from './survey-rows.ts';
 import { reading, writing, type Writing } from './transaction.ts';
 import { writeChanges } from './write-changes.ts';
 
@@ -123,7 +123,9 @@ export function surveyDatabase({ connection, checker, now, newId }: SurveyDataba
       return act(async (transaction) => {
         const row = await rowOf(transaction, id);
         await change(transaction, id, changes);
-        await changed(transaction, id, row, check);
+        // readings come several times a second: the survey is not read for each, only its time is moved on
+        if (check || changes.some(touchesLine)) await changed(transaction, id, row, check);
+        else await transaction.objectStore('surveys').put({ ...row, changedAt: now() });
         return step ? addStep(transaction, id, changes, step) : null;
       });
     },

@@ -15,6 +15,11 @@ const READING_PATH = /^readings\/[^/]+$/;
 /** Whether a path is that of a raw reading, which has a row of its own and is never put over. */
 export const isReadingPath = (path: string): boolean => READING_PATH.test(path);
 
+const LINE_PATH = /^(?:title|surveyedOn|site(?:\/.*)?|(?:planes|stations|obstructions)(?:\/[^/]+\/id)?)$/;
+
+/** Whether a change of a field may change the survey's line in the list. */
+export const touchesLine = ({ path }: FieldChange): boolean => LINE_PATH.test(path);
+
 function fieldOf({ path, value }: FieldRow): FieldChange {
   return { path, value };
 }
