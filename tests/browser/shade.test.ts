@@ -158,11 +158,20 @@ describe('the Shade screen', () => {
     const [{ stations }] = (await computed(survey)).planes;
     const { name, gainIfRemoved } = stations[0].obstructions[0];
     const { annual } = stations[0].solarAccess;
-    await page.getByRole('combobox', { name: `Imagine it lower: ${name}` }).selectOption('3');
+    await page
+      .getByRole('combobox', { name: `Imagine it otherwise: ${name}` })
+      .selectOption({ label: '3 m lower' });
     await page.locator('.imagined', { hasText: `${name} 3 m lower` }).waitFor();
     const imagined = parseFloat(await page.locator('.imagined strong').innerText()) / 100;
     expect(imagined).toBeGreaterThan(annual + 0.002);
     expect(imagined).toBeLessThan(annual + gainIfRemoved - 0.002);
+    const otherwise = async (label: string) => {
+      await page.getByRole('combobox', { name: `Imagine it otherwise: ${name}` }).selectOption({ label });
+      await page.locator('.imagined', { hasText: `${name} ${label}` }).waitFor();
+      return parseFloat(await page.locator('.imagined strong').innerText()) / 100;
+    };
+    expect(await otherwise('4 m higher')).toBeLessThan(annual);
+    expect(await otherwise('bare all year')).toBeGreaterThan(annual);
     await page.getByRole('combobox', { name: 'Station' }).selectOption(stations[1].id);
     await page.locator('.imagined').waitFor({ state: 'detached' });
   });

@@ -1,6 +1,7 @@
 import { RADIANS } from '../../../core/angles/angles.ts';
 import type { HorizonProfile } from '../../../core/horizon/horizon-profile.ts';
 import type { ObstructionChange } from '../../../core/shading/what-if.ts';
+import type { Months } from '../../../core/survey/survey.ts';
 
 /** One change imagined, and how it is told: "Sugar maple 2 m lower". */
 export interface Imagined {
@@ -25,6 +26,22 @@ export function imaginedLower(
   };
 }
 
+/** A tree grown by some metres. */
+export const imaginedGrown = (
+  { id, name }: { id: string; name: string },
+  distance: number,
+  by: number,
+): Imagined => ({
+  change: { obstruction: id, kind: 'grown', by, distance },
+  words: `${name} ${by} m higher`,
+});
+
+/** A tree without its leaves all year: the most light its crown lets through. */
+export const imaginedBare = ({ id, name }: { id: string; name: string }, bare: number): Imagined => ({
+  change: { obstruction: id, kind: 'transmittance', transmittance: Array<number>(12).fill(bare) as Months },
+  words: `${name} bare all year`,
+});
+
 /** How far an obstruction rises above the instrument, metres, taking it to stand at one distance. */
 export function heightOver(profile: HorizonProfile, id: string, distance: number): number {
   const place = profile.obstructionIds.indexOf(id);
@@ -36,6 +53,9 @@ export function heightOver(profile: HorizonProfile, id: string, distance: number
 }
 
 const CUTS = [1, 2, 3, 5, 8, 12];
+
+/** Growth worth asking about, metres. */
+export const GROWTHS = [1, 2, 4];
 
 /** Cuts worth offering for something so high. */
 export const cutsBelow = (height: number): number[] => CUTS.filter((by) => by < height);

@@ -9,7 +9,15 @@ import { monthTicks } from '../../../report/pictures/month-ticks.ts';
 import { Drawing } from './drawing.tsx';
 import { energy, listed, percent } from './figures.ts';
 import type { Imagined } from './imagined.ts';
-import { cutsBelow, heightOver, imaginedGone, imaginedLower } from './imagined.ts';
+import {
+  cutsBelow,
+  GROWTHS,
+  heightOver,
+  imaginedBare,
+  imaginedGone,
+  imaginedGrown,
+  imaginedLower,
+} from './imagined.ts';
 
 /** Below this an obstruction's removal gives nothing worth naming, share of the year. */
 const NOTHING = 0.0005;
@@ -24,7 +32,7 @@ interface Props {
   onImagine: (imagined: Imagined | null) => void;
 }
 
-/** One thing in the way: what it takes, when, and what it would be to have it away or lower. */
+/** One thing in the way: what it takes, when, and what it would be to have it away, lower, higher or bare. */
 export function ObstructionRow({ row, obstruction, shade, most, imagined, onImagine }: Props) {
   const place = shade.profile.obstructionIds.indexOf(row.id);
   const swatch = useMemo(() => swatchOf(place), [place]);
@@ -53,39 +61,49 @@ export function ObstructionRow({ row, obstruction, shade, most, imagined, onImag
           >
             Imagine it gone
           </button>
-          <Lower obstruction={obstruction} shade={shade} imagined={imagined} onImagine={onImagine} />
+          <Otherwise obstruction={obstruction} shade={shade} imagined={imagined} onImagine={onImagine} />
         </div>
       )}
     </li>
   );
 }
 
-/** Cuts by whole metres, where the distance is known. */
-function Lower({ obstruction, shade, imagined, onImagine }: Omit<Props, 'row' | 'most'>) {
-  const { distance } = obstruction;
-  if (distance === undefined) return null;
-  const height = heightOver(shade.profile, obstruction.id, distance);
-  const cuts = cutsBelow(height);
-  if (cuts.length === 0) return null;
-  const { change } = imagined ?? {};
-  const by = change?.kind === 'cut-to-height' ? Math.round(height - change.height) : 0;
+/** What else could be asked of it: cuts and growth by whole metres where the distance is known, a crown without leaves. */
+function Otherwise({ obstruction, shade, imagined, onImagine }: Omit<Props, 'row' | 'most'>) {
+  const choices = otherChoices(obstruction, shade);
+  if (choices.length === 0) return null;
+  const chosen = choices.findIndex(({ words }) => words === imagined?.words);
   return (
     <select
-      aria-label={`Imagine it lower: ${obstruction.name}`}
-      value={String(by)}
-      onChange={({ currentTarget }) => {
-        const metres = Number(currentTarget.value);
-        onImagine(metres > 0 ? imaginedLower(obstruction, { height, distance }, metres) : null);
-      }}
+      aria-label={`Imagine it otherwise: ${obstruction.name}`}
+      value={String(chosen)}
+      onChange={({ currentTarget }) => onImagine(choices[Number(currentTarget.value)] ?? null)}
     >
-      <option value="0">or lower by …</option>
-      {cuts.map((metres) => (
-        <option key={metres} value={String(metres)}>
-          {metres} m lower
+      <option value="-1">or otherwise …</option>
+      {choices.map(({ words }, i) => (
+        <option key={words} value={String(i)}>
+          {words.slice(obstruction.name.length + 1)}
         </option>
       ))}
     </select>
   );
+}
+
+function otherChoices(obstruction: Obstruction, { profile }: StationShade): Imagined[] {
+  const { distance } = obstruction;
+  const { leaves } = obstructionKind(obstruction.kind);
+  const choices: Imagined[] = [];
+  if (distance !== undefined) {
+    const height = heightOver(profile, obstruction.id, distance);
+    choices.push(...cutsBelow(height).map((by) => imaginedLower(obstruction, { height, distance }, by)));
+    if (leaves) choices.push(...GROWTHS.map((by) => imaginedGrown(obstruction, distance, by)));
+  }
+  if (leaves && leaves.off > leaves.on) {
+    const place = profile.obstructionIds.indexOf(obstruction.id) * 12;
+    const most = Math.max(...profile.transmittance.subarray(place, place + 12));
+    choices.push(imaginedBare(obstruction, Math.max(leaves.off, most)));
+  }
+  return choices;
 }
 
 const swatchOf = (place: number) => ({

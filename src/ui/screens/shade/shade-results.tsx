@@ -17,6 +17,8 @@ interface Props {
   plane: PlaneAssessment;
   shade: StationShade;
   imagined: ReadonlyMap<string, Imagined>;
+  /** Whether `shade` has all of `imagined` in it. */
+  settled: boolean;
   /** Null: as measured again. */
   onImagine: (id: string, imagined: Imagined | null) => void;
   onPutBack: () => void;
@@ -30,6 +32,7 @@ export function ShadeResults({
   plane,
   shade,
   imagined,
+  settled,
   onImagine,
   onPutBack,
 }: Props) {
@@ -37,7 +40,7 @@ export function ShadeResults({
   const list = useMemo(() => [...imagined.values()], [imagined]);
   return (
     <>
-      <Headline shade={shade} imagined={list} onPutBack={onPutBack} />
+      <Headline shade={shade} imagined={settled ? list : []} onPutBack={onPutBack} />
       <HorizonView site={survey.site} shade={shade} names={names} year={year} />
       <HeadlineFacts assessment={assessment} plane={plane} shade={shade} />
       <ObstructionList survey={survey} shade={shade} imagined={imagined} onImagine={onImagine} />

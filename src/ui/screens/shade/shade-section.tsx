@@ -75,6 +75,7 @@ export function ShadeSection({ survey, services }: SectionProps) {
           plane={assessed}
           shade={state.shade}
           imagined={imagined}
+          settled={state.settled}
           onImagine={imagine}
           onPutBack={() => setWished(NONE)}
         />

@@ -13,6 +13,8 @@ export interface ShadeState {
   fault: CalculationFault | null;
   assessment: Assessment | null;
   shade: StationShade | null;
+  /** Whether `shade` has the changes now wished for in it; else they are still being worked out. */
+  settled: boolean;
   cancel: () => void;
   retry: () => void;
 }
@@ -31,7 +33,11 @@ export function useShade(services: AppServices, { survey, plane, station, change
   const [working, setWorking] = useState<ShadeState['working']>(null);
   const [fault, setFault] = useState<CalculationFault | null>(null);
   const [assessed, setAssessed] = useState<{ request: AssessRequest; assessment: Assessment } | null>(null);
-  const [shade, setShade] = useState<{ shade: StationShade; of: string } | null>(null);
+  const [shade, setShade] = useState<{
+    shade: StationShade;
+    of: string;
+    changes: readonly ObstructionChange[];
+  } | null>(null);
   const abort = useMemo(() => new AbortController(), [survey, attemptNumber]);
 
   useEffect(() => {
@@ -65,7 +71,7 @@ export function useShade(services: AppServices, { survey, plane, station, change
     const leaving = new AbortController();
     void services.assess.shade(request, { plane, station, changes }, leaving.signal).then((outcome) => {
       if (leaving.signal.aborted) return;
-      if (outcome.ok) setShade({ shade: outcome.value, of: `${plane} ${station}` });
+      if (outcome.ok) setShade({ shade: outcome.value, of: `${plane} ${station}`, changes });
       else setFault(outcome.fault);
     });
     return () => leaving.abort();
@@ -76,6 +82,7 @@ export function useShade(services: AppServices, { survey, plane, station, change
     fault,
     assessment: assessed?.assessment ?? null,
     shade: shade?.of === `${plane} ${station}` ? shade.shade : null,
+    settled: shade?.changes === changes,
     cancel: () => abort.abort(),
     retry: () => setAttempt((n) => n + 1),
   };
