@@ -14,7 +14,7 @@ const mayImport = {
 const mayUse = {
   core: ['suncalc', 'geomagnetism', 'valibot'],
   report: [],
-  app: ['@preact/signals-core', '@preact/signals'],
+  app: ['@preact/signals-core', '@preact/signals', '@photostructure/tz-lookup', 'fflate'],
   sensors: [],
   storage: ['idb'],
   workers: ['comlink'],

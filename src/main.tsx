@@ -4,7 +4,9 @@ import { appState } from './app/app-state.ts';
 import type { AppServices, SampleSurvey } from './app/app-services.ts';
 import { offerUpdates } from './app/update-flow.ts';
 import { Connection } from './storage/connection.ts';
+import { photoDatabase } from './storage/photo-database.ts';
 import { surveyDatabase } from './storage/survey-database.ts';
+import { deviceLocation } from './sensors/location.ts';
 import { weatherDatabase } from './storage/weather-database.ts';
 import { App } from './ui/app.tsx';
 import { startInstallOffer } from './ui/device/install-offer.ts';
@@ -49,6 +51,8 @@ const services: AppServices = {
     newId,
   }),
   weather: weatherDatabase(connection, now),
+  photos: photoDatabase(connection, now),
+  location: deviceLocation,
   assess: new AssessOnWorker(
     () => new Worker(new URL('./workers/assess-worker.ts', import.meta.url), { type: 'module' }),
   ),

@@ -2,6 +2,8 @@ import type { Parsed } from '../core/survey/problem.ts';
 import type { Survey } from '../core/survey/survey.ts';
 import type { AppState } from './app-state.ts';
 import type { AssessClient } from './assess-client.ts';
+import type { LocationSource } from './location-source.ts';
+import type { PhotoStore } from './photo-store.ts';
 import type { SurveyStore } from './survey-store.ts';
 import type { WeatherStore } from './weather-store.ts';
 
@@ -18,6 +20,8 @@ export interface AppServices {
   state: AppState;
   store: SurveyStore;
   weather: WeatherStore;
+  photos: PhotoStore;
+  location: LocationSource;
   assess: AssessClient;
   samples: SampleSurvey[];
   parse: (text: string) => Promise<Parsed<Survey>>;

@@ -47,6 +47,8 @@ export interface PhotoRow {
   sha256: string;
   type: string;
   contents: ArrayBuffer;
+  /** Milliseconds since 1970. */
+  keptAt: number;
 }
 
 /** What this device remembers of itself. */

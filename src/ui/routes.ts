@@ -25,6 +25,12 @@ export const SURVEY_SECTIONS: SurveySection[] = [
 
 export const PLAIN_SCREENS: PlainScreen[] = [
   {
+    path: '/new-survey',
+    label: 'New survey',
+    main: true,
+    load: async () => (await import('./screens/new-survey/new-survey-screen.tsx')).NewSurveyScreen,
+  },
+  {
     path: '/self-check',
     label: 'Self-check',
     load: async () => (await import('./screens/self-check/self-check-screen.tsx')).SelfCheckScreen,

@@ -21,5 +21,7 @@ export interface SurveySection {
 export interface PlainScreen {
   path: string;
   label: string;
+  /** Stands at the head of the list of surveys, not at its foot. */
+  main?: boolean;
   load: () => Promise<ComponentType<{ services: AppServices }>>;
 }

@@ -13,10 +13,22 @@ import { SurveyRow } from './survey-row.tsx';
 import { WeatherFiles } from './weather-files.tsx';
 import './survey-list.css';
 
+function MainScreens() {
+  return (
+    <p class="row">
+      {PLAIN_SCREENS.filter(({ main }) => main).map(({ path, label }) => (
+        <a key={path} class="button main" href={path}>
+          {label}
+        </a>
+      ))}
+    </p>
+  );
+}
+
 function OtherScreens() {
   return (
     <p class="row">
-      {PLAIN_SCREENS.map(({ path, label }) => (
+      {PLAIN_SCREENS.filter(({ main }) => !main).map(({ path, label }) => (
         <a key={path} class="button" href={path}>
           {label}
         </a>
@@ -47,8 +59,12 @@ export function SurveyListScreen() {
   return (
     <div class="stack survey-list">
       <ScreenHeading title="Surveys" />
+      <MainScreens />
       {surveys !== null && present.length === 0 && (
-        <p>No surveys on this device yet. Open a sample to see what one holds, or import a survey file.</p>
+        <p>
+          No surveys on this device yet. Start one, open a sample to see what one holds, or import a survey
+          file.
+        </p>
       )}
       {present.length > 0 && (
         <ul class="ledger">

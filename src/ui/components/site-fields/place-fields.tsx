@@ -1,0 +1,53 @@
+import { placeText } from '../../value-text.ts';
+import { TextField } from '../form/text-field.tsx';
+import { DeclinationLine } from './declination-line.tsx';
+import type { PlaceDraft } from './use-place.ts';
+import { ZoneField } from './zone-field.tsx';
+import { numberOf } from '../../typed.ts';
+
+/** Where the site is: from the device or typed, with its time zone and the declination there. */
+export function PlaceFields({ place, nowMs, asked }: { place: PlaceDraft; nowMs: number; asked: boolean }) {
+  const { coordinates, altitude } = place;
+  const height = numberOf(altitude);
+  const missing =
+    asked && place.text.trim() === '' ? 'The place is needed: from this device, or typed.' : null;
+  return (
+    <>
+      <div class="form-actions">
+        <button type="button" class="main" disabled={place.locating} onClick={place.locate}>
+          {place.locating ? 'Finding the position…' : 'Use this device’s position'}
+        </button>
+      </div>
+      <TextField
+        label="Coordinates"
+        value={place.text}
+        onInput={place.setText}
+        fault={place.fault ?? missing}
+        hint={
+          coordinates
+            ? [placeText(coordinates.latitude, coordinates.longitude), place.told].filter(Boolean).join('. ')
+            : "Typed or pasted: 44.91, -72.20 or 44° 54' 36\" N, 72° 12' W."
+        }
+      />
+      {coordinates && (
+        <>
+          <ZoneField value={place.zone} onInput={place.setZone} found={place.zoneFound} nowMs={nowMs} />
+          <TextField
+            label="Altitude"
+            unit="metres above the sea"
+            keys="numbers"
+            value={altitude}
+            onInput={place.setAltitude}
+            fault={
+              altitude.trim() === '' || (height !== null && height >= -430 && height <= 9000)
+                ? null
+                : 'A number from -430 to 9000 is needed, or nothing.'
+            }
+            hint="Optional; within 100 m is enough."
+          />
+          <DeclinationLine {...coordinates} timeMs={nowMs} />
+        </>
+      )}
+    </>
+  );
+}

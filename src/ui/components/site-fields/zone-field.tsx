@@ -1,0 +1,36 @@
+import { useMemo } from 'preact/hooks';
+import { isTimeZone, utcOffsetMinutes } from '../../../core/solar-position/time-zone.ts';
+import { TextField } from '../form/text-field.tsx';
+
+function offsetText(minutes: number): string {
+  const size = Math.abs(Math.round(minutes));
+  const hours = `${Math.floor(size / 60)}`;
+  return `UTC${minutes < 0 ? '−' : '+'}${hours}${size % 60 ? `:${String(size % 60).padStart(2, '0')}` : ''}`;
+}
+
+/** A time zone, found by typing a part of its name. */
+export function ZoneField({
+  value,
+  onInput,
+  found,
+  nowMs,
+}: {
+  value: string;
+  onInput: (zone: string) => void;
+  /** Where the value comes from, as a sentence. */
+  found: string;
+  nowMs: number;
+}) {
+  const zones = useMemo(() => Intl.supportedValuesOf('timeZone'), []);
+  const known = isTimeZone(value);
+  return (
+    <TextField
+      label="Time zone"
+      value={value}
+      onInput={onInput}
+      choices={zones}
+      fault={known ? null : 'Type a part of the zone’s name, such as Lisbon, and choose from the list.'}
+      hint={known ? `${offsetText(utcOffsetMinutes(nowMs, value))} today. ${found}` : undefined}
+    />
+  );
+}
