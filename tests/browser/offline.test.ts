@@ -24,7 +24,7 @@ describe('without a network', () => {
     const linked = await context.newPage();
     await linked.goto(address);
     await linked.getByRole('heading', { level: 1, name: title }).waitFor();
-    await linked.getByRole('region', { name: 'Obstructions' }).waitFor();
+    await linked.getByRole('list', { name: 'Obstructions' }).waitFor();
 
     await linked.goto(app.server.address);
     const count = await linked.locator('.ledger-button').count();

@@ -1,19 +1,102 @@
+import { useMemo, useState } from 'preact/hooks';
+import { changeSurvey } from '../../../app/actions/change-survey.ts';
+import { attempt } from '../../../app/attempt.ts';
+import { nextOrder } from '../../../app/capture/station-edits.ts';
+import type { StepCode } from '../../../app/survey-store.ts';
+import { withoutObstruction } from '../../../core/survey/removed-entries.ts';
+import type { Obstruction, Survey } from '../../../core/survey/survey.ts';
+import { focusHeading } from '../../components/screen-heading.tsx';
 import type { SectionProps } from '../../section.ts';
-import { ObstructionsTable } from './obstructions-table.tsx';
+import { ObstructionForm } from './obstruction-form.tsx';
+import { ObstructionList } from './obstruction-list.tsx';
+import { SiteForm } from './site-form.tsx';
 import { SiteSummary } from './site-summary.tsx';
+import './site.css';
+
+type Editing = { what: 'site' } | { what: 'obstruction'; obstruction: Obstruction | null; newId: string };
 
 /** Where the site is, what is known of it, and what stands around. */
-export function SiteSection({ survey }: SectionProps) {
+export function SiteSection({ survey, services }: SectionProps) {
+  const [editing, setEditing] = useState<Editing | null>(null);
+  const nowMs = useMemo(() => services.now(), [services]);
+  const store = (after: Survey, code: StepCode, name: string) =>
+    attempt(services.state, () => changeSurvey(services, survey, after, code, name));
+  const close = () => {
+    setEditing(null);
+    focusHeading();
+  };
+  const saved = async (done: Promise<boolean>) => {
+    const isDone = await done;
+    if (isDone) close();
+    return isDone;
+  };
+  const saveObstruction = (obstruction: Obstruction, isNew: boolean) => {
+    const { obstructions } = survey;
+    const list = isNew
+      ? [...obstructions, obstruction]
+      : obstructions.map((other) => (other.id === obstruction.id ? obstruction : other));
+    return saved(
+      store({ ...survey, obstructions: list }, isNew ? 'entry-added' : 'entry-changed', obstruction.name),
+    );
+  };
+  const remove = async ({ id, name }: Obstruction) => {
+    if (await store(withoutObstruction(survey, id), 'entry-deleted', name)) focusHeading();
+  };
+
+  if (editing?.what === 'site')
+    return (
+      <div class="stack">
+        <h2>Site</h2>
+        <SiteForm
+          survey={survey}
+          services={services}
+          nowMs={nowMs}
+          onSave={(after) => saved(store(after, 'survey-changed', survey.title))}
+          onCancel={close}
+        />
+      </div>
+    );
+  if (editing)
+    return (
+      <div class="stack">
+        <h2>{editing.obstruction ? `Change ${editing.obstruction.name}` : 'New obstruction'}</h2>
+        <ObstructionForm
+          obstruction={editing.obstruction}
+          newId={editing.newId}
+          order={nextOrder(survey.obstructions)}
+          latitude={survey.site.latitude}
+          taken={survey.obstructions.filter((other) => other !== editing.obstruction).map(({ name }) => name)}
+          onSave={(obstruction) => saveObstruction(obstruction, editing.obstruction === null)}
+          onCancel={close}
+        />
+      </div>
+    );
   return (
     <div class="stack">
       <h2>Site</h2>
       <SiteSummary survey={survey} />
+      <div class="form-actions">
+        <button type="button" onClick={() => setEditing({ what: 'site' })}>
+          Change the site
+        </button>
+      </div>
       <h2>Obstructions</h2>
-      {survey.obstructions.length > 0 ? (
-        <ObstructionsTable obstructions={survey.obstructions} />
-      ) : (
-        <p>No obstruction yet.</p>
+      {survey.obstructions.length === 0 && <p>No obstruction yet. Name one here, or while sighting it.</p>}
+      {survey.obstructions.length > 0 && (
+        <ObstructionList
+          obstructions={survey.obstructions}
+          onEdit={(obstruction) => setEditing({ what: 'obstruction', obstruction, newId: obstruction.id })}
+          onDelete={(obstruction) => void remove(obstruction)}
+        />
       )}
+      <div class="form-actions">
+        <button
+          type="button"
+          onClick={() => setEditing({ what: 'obstruction', obstruction: null, newId: services.newId() })}
+        >
+          Add an obstruction
+        </button>
+      </div>
     </div>
   );
 }
