@@ -33,18 +33,30 @@ export interface AnnualLight {
   readonly ground: number;
 }
 
+/** Stations of one plane mostly group the months alike, so what was condensed once is kept as long as its map is. */
+const condensed = new WeakMap<SkyMap, Map<string, AnnualLight>>();
+
 /** Condenses a sky map; months with equal keys become one class. */
 export function annualLight(map: SkyMap, monthKeys: readonly string[]): AnnualLight {
   const keys = [...new Set(monthKeys)];
   const classOfMonth = monthKeys.map((key) => keys.indexOf(key));
-  const below = new Float32Array(DRAW_COLUMNS * NODES * (keys.length + 1));
-  addDirect(map, classOfMonth, keys.length, below);
-  addEven(map, keys.length, below);
+  const known = condensed.get(map) ?? new Map<string, AnnualLight>();
+  condensed.set(map, known);
+  const name = classOfMonth.join();
+  const light = known.get(name) ?? condense(map, classOfMonth, keys.length);
+  known.set(name, light);
+  return light;
+}
+
+function condense(map: SkyMap, classOfMonth: readonly number[], classes: number): AnnualLight {
+  const below = new Float32Array(DRAW_COLUMNS * NODES * (classes + 1));
+  addDirect(map, classOfMonth, classes, below);
+  addEven(map, classes, below);
   const even = sum(map.dome) + sum(map.band);
-  const evenShare = new Float64Array(keys.length);
+  const evenShare = new Float64Array(classes);
   classOfMonth.forEach((k, month) => (evenShare[k] += (map.dome[month] + map.band[month]) / (even || 1)));
   return {
-    classes: keys.length,
+    classes,
     classOfMonth,
     below,
     evenShare,

@@ -1,7 +1,7 @@
 import { turnBetween } from '../angles/angles.ts';
 import type { SkyPoint } from '../horizon/horizon-edge.ts';
 import { lineStrips } from '../horizon/line-strip.ts';
-import { DRAWN_STRAY, STRAIGHT_STRAY } from './planning-values.ts';
+import { BULGE, DRAWN_STRAY, STRAIGHT_STRAY } from './planning-values.ts';
 import type { SightingError, UncertainObstruction, UncertainTrace } from './uncertain-station.ts';
 
 /**
@@ -23,6 +23,8 @@ export interface DrawnRegions {
   readonly edgeStraight: Uint8Array;
   /** Standard deviation of the middle of the edge, degrees. */
   readonly edgeStray: Float64Array;
+  /** By how much the middle of a crown's edge is expected to bulge outward, degrees; up is positive. */
+  readonly edgeBulge: Float64Array;
   readonly regions: readonly DrawnRegion[];
 }
 
@@ -53,6 +55,7 @@ interface Edge {
   turn: number;
   straight: boolean;
   stray: number;
+  bulge: number;
 }
 
 /** Takes the traces of a station apart. */
@@ -61,16 +64,16 @@ export function drawnRegions(obstructions: readonly UncertainObstruction[]): Dra
   const corners: Corner[] = [];
   const edges: Edge[] = [];
   const regions: DrawnRegion[] = [];
-  obstructions.forEach(({ traces }, obstruction) => {
+  obstructions.forEach(({ traces, isCrown }, obstruction) => {
     for (const trace of traces) {
       const first = sightings.length;
       trace.points.forEach((point, i) => sightings.push({ ...point, ...trace.errors[i] }));
       for (const ring of rings(trace, first)) {
         const firstEdge = edges.length;
-        edges.push(...edgesAlong(ring, corners.length, trace));
+        const way = sense(ring, trace.shape !== 'skyline');
+        edges.push(...edgesAlong(ring, corners.length, trace, isCrown, way.top));
         corners.push(...ring);
-        const closed = trace.shape !== 'skyline';
-        regions.push({ obstruction, firstEdge, lastEdge: edges.length, ...sense(ring, closed) });
+        regions.push({ obstruction, firstEdge, lastEdge: edges.length, ...way });
       }
     }
   });
@@ -86,6 +89,7 @@ export function drawnRegions(obstructions: readonly UncertainObstruction[]): Dra
     edgeTurn: Float64Array.from(edges, ({ turn }) => turn),
     edgeStraight: Uint8Array.from(edges, ({ straight }) => Number(straight)),
     edgeStray: Float64Array.from(edges, ({ stray }) => stray),
+    edgeBulge: Float64Array.from(edges, ({ bulge }) => bulge),
     regions,
   };
 }
@@ -111,7 +115,13 @@ function rings({ shape, points, angularWidth, straight }: UncertainTrace, first:
   return sides;
 }
 
-function edgesAlong(ring: readonly Corner[], first: number, trace: UncertainTrace): Edge[] {
+function edgesAlong(
+  ring: readonly Corner[],
+  first: number,
+  trace: UncertainTrace,
+  isCrown: boolean,
+  top: DrawnRegion['top'],
+): Edge[] {
   const closed = trace.shape !== 'skyline' || trace.fullCircle;
   const line = trace.shape === 'line';
   const straight = line || trace.straight;
@@ -121,7 +131,9 @@ function edgesAlong(ring: readonly Corner[], first: number, trace: UncertainTrac
     const turn = turnBetween(corner.azimuth, next.azimuth);
     const gap = Math.hypot(turn * cosine(corner, next), next.elevation - corner.elevation);
     const stray = line ? 0 : (straight ? STRAIGHT_STRAY : DRAWN_STRAY) * Math.sqrt(gap);
-    return [{ start: first + i, end: first + ((i + 1) % ring.length), turn, straight, stray }];
+    const outward = top === 0 || top > 0 === turn > 0 ? 1 : -1;
+    const bulge = isCrown && !straight ? outward * Math.min(BULGE.most, gap ** 2 / (8 * BULGE.radius)) : 0;
+    return [{ start: first + i, end: first + ((i + 1) % ring.length), turn, straight, stray, bulge }];
   });
 }
 

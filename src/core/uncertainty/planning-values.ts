@@ -7,6 +7,8 @@
 export const DRAWS = 1000;
 /** Draws made again with one source changed, to see what that source does. */
 export const SOURCE_DRAWS = 256;
+/** Draws, each with its opposite, to find the mean error of pointing. */
+export const BIAS_PAIRS = 48;
 
 /**
  * How far the middle of an edge strays from how it is joined, degrees (standard deviation) per square root of the gap
@@ -15,6 +17,18 @@ export const SOURCE_DRAWS = 256;
  */
 export const DRAWN_STRAY = 0.25;
 export const STRAIGHT_STRAY = 0.03;
+
+/**
+ * The outline of a crown bulges outward between its sightings as a circle of this radius does, degrees: by gap² / (8
+ * radius) at the middle, no more than `most`. Drawn evenly from nothing to twice that.
+ */
+export const BULGE = { radius: 20, most: 6 };
+
+/**
+ * How much a survey's own repeats weigh against what is planned of pointing: as much as so many repeats that came out as
+ * planned. A repeat further out than `farthest` deviations counts as that far.
+ */
+export const REPEATS = { asPlanned: 1, farthest: 4 };
 
 /**
  * Sky that nobody looked at is cut into patches no wider than this, degrees. In each one stands, apart from the others:

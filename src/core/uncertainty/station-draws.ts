@@ -9,6 +9,7 @@ import type { DrawnRegions } from './drawn-regions.ts';
 import { drawnRegions } from './drawn-regions.ts';
 import type { IntervalSourceId } from './interval-source.ts';
 import { LEFT_AFTER } from './planning-values.ts';
+import type { RandomSource } from './random-source.ts';
 import { randomSource } from './random-source.ts';
 import type { SurveyDraws } from './survey-draws.ts';
 import type { Spread, UncertainObstruction, UncertainStation } from './uncertain-station.ts';
@@ -75,13 +76,12 @@ export class StationDraws {
     const random = randomSource(survey.seed, 'station', this.station.id);
     const unseen = randomSource(survey.seed, 'unseen', this.station.id);
     const sighting = cured === 'pointing' ? LEFT_AFTER.sightedAgain : 1;
-    const stray = cured === 'gaps' ? LEFT_AFTER.moreSightings : 1;
+    const gap = cured === 'gaps' ? LEFT_AFTER.moreSightings : 1;
     const passing = cured === 'transmittance' ? LEFT_AFTER.measuredPassing : 1;
     const u = this.station.obstructions.map(({ id }) => survey.passing(id));
     for (let i = 0; i < count; i++) {
       this.moveSightings(survey, i, random.normal.bind(random), sighting);
-      for (let edge = 0; edge < this.deviations.stray.length; edge++)
-        this.deviations.stray[edge] = stray * this.regions.edgeStray[edge] * random.normal();
+      this.strayEdges(random, gap);
       this.station.obstructions.forEach((one, o) => this.setLost(one, o, u[o][i], passing));
       const { direct, even } = this.blocked.take(this.deviations);
       losses.direct[i] = direct;
@@ -94,6 +94,41 @@ export class StationDraws {
     return losses;
   }
 
+  /**
+   * What the pointing's errors take from the plane in the mean, beyond what no error takes: thin and upright things are
+   * seen wider, for one. Each draw is held against its opposite, so that a few are enough.
+   */
+  pointingBias(survey: SurveyDraws, pairs: number): { direct: number; even: number } {
+    const without = this.nominal();
+    const { azimuth, elevation } = this.deviations;
+    const random = randomSource(survey.seed, 'station', this.station.id);
+    const normal = random.normal.bind(random);
+    const bias = { direct: 0, even: 0 };
+    const count = Math.min(pairs, survey.count);
+    for (let i = 0; i < count; i++) {
+      this.moveSightings(survey, i, normal, 1);
+      for (const sign of [1, -1]) {
+        const { direct, even } = this.blocked.take(this.deviations);
+        bias.direct += (direct - without.direct) / (2 * count);
+        bias.even += (even - without.even) / (2 * count);
+        for (let k = 0; sign > 0 && k < azimuth.length; k++) {
+          azimuth[k] = -azimuth[k];
+          elevation[k] = -elevation[k];
+        }
+      }
+    }
+    return bias;
+  }
+
+  private strayEdges(random: RandomSource, scale: number): void {
+    const { edgeStray, edgeBulge } = this.regions;
+    const { stray } = this.deviations;
+    for (let edge = 0; edge < stray.length; edge++) {
+      stray[edge] = scale * edgeStray[edge] * random.normal();
+      if (edgeBulge[edge] !== 0) stray[edge] += scale ** 2 * edgeBulge[edge] * 2 * random.uniform();
+    }
+  }
+
   private moveSightings(survey: SurveyDraws, i: number, normal: () => number, scale: number): void {
     const { azimuth, elevation } = this.deviations;
     const { sightings } = this.regions;
@@ -102,8 +137,9 @@ export class StationDraws {
       const drawn = run === null ? undefined : survey.runs.get(run);
       azimuth[k] = drawn ? drawn.heading[i] + drawn.rate[i] * minutes : survey.typed.heading[i];
       elevation[k] = drawn ? drawn.index[axis][i] : survey.typed.index[i];
-      azimuth[k] += scale * across * normal();
-      elevation[k] += scale * upward * normal();
+      const own = drawn ? scale * survey.noise : scale;
+      azimuth[k] += own * across * normal();
+      elevation[k] += own * upward * normal();
     }
   }
 

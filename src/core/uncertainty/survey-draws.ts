@@ -2,6 +2,7 @@ import { PLANNING } from '../pointing/planning-values.ts';
 import type { PointedRun, PointedSurvey, RunHeading } from '../pointing/pointed-survey.ts';
 import type { SightingAxis } from '../survey/survey.ts';
 import type { IntervalSourceId } from './interval-source.ts';
+import { noiseScale } from './noise-scale.ts';
 import { CHECKED_HEADING, LEFT_AFTER } from './planning-values.ts';
 import { randomSource } from './random-source.ts';
 
@@ -9,6 +10,8 @@ import { randomSource } from './random-source.ts';
 export interface SurveyDraws {
   readonly seed: string;
   readonly count: number;
+  /** How much worse than planned the survey was pointed; in all that is drawn for its runs. */
+  readonly noise: number;
   readonly runs: ReadonlyMap<string, RunDraws>;
   readonly typed: { heading: Float64Array; index: Float64Array };
   /** Normal, of standard deviation 1. */
@@ -37,7 +40,8 @@ export function surveyDraws(
 ): SurveyDraws {
   const runs = new Map<string, RunDraws>();
   const byId = new Map(pointed.runs.map((run) => [run.id, run]));
-  for (const run of pointed.runs) drawRun(run, byId, runs, seed, count, cured);
+  const noise = noiseScale(pointed);
+  for (const run of pointed.runs) drawRun(run, byId, runs, { seed, count, noise, cured });
   const normals = (name: string, deviation: number) => {
     const random = randomSource(seed, name);
     return Float64Array.from({ length: count }, () => deviation * random.normal());
@@ -47,6 +51,7 @@ export function surveyDraws(
   return {
     seed,
     count,
+    noise,
     runs,
     typed: {
       heading: normals('typed heading', cured === 'heading' ? Math.min(heading, CHECKED_HEADING) : heading),
@@ -65,15 +70,21 @@ export function surveyDraws(
   };
 }
 
+interface RunDrawing {
+  seed: string;
+  count: number;
+  noise: number;
+  cured?: IntervalSourceId;
+}
+
 /** Draws a run, the one it takes its heading from before it. */
 function drawRun(
   run: PointedRun,
   byId: ReadonlyMap<string, PointedRun>,
   drawn: Map<string, RunDraws>,
-  seed: string,
-  count: number,
-  cured?: IntervalSourceId,
+  drawing: RunDrawing,
 ): void {
+  const { seed, count, noise, cured } = drawing;
   if (drawn.has(run.id)) return;
   const { heading, index } = run;
   const draws: RunDraws = {
@@ -82,11 +93,11 @@ function drawRun(
     index: { camera: new Float64Array(count), 'top-edge': new Float64Array(count) },
   };
   drawn.set(run.id, draws);
-  if (heading) drawHeading(run.id, heading, draws, seed, cured);
+  if (heading) drawHeading(run.id, heading, draws, drawing);
   const from = heading?.from ? byId.get(heading.from) : undefined;
   const apart = cured === 'heading' && heading !== null && curedDeviation(heading) !== heading.ownDeviation;
   if (from && !apart) {
-    drawRun(from, byId, drawn, seed, count, cured);
+    drawRun(from, byId, drawn, drawing);
     const other = drawn.get(from.id)!.heading;
     for (let i = 0; i < count; i++) draws.heading[i] += other[i];
   }
@@ -94,7 +105,7 @@ function drawRun(
     const random = randomSource(seed, 'index', run.id, axis);
     const { standardDeviation } = index[axis];
     const deviation = cured === 'elevation-index' ? curedIndex(standardDeviation) : standardDeviation;
-    for (let i = 0; i < count; i++) draws.index[axis][i] = deviation * random.normal();
+    for (let i = 0; i < count; i++) draws.index[axis][i] = noise * deviation * random.normal();
   }
 }
 
@@ -102,8 +113,7 @@ function drawHeading(
   run: string,
   heading: RunHeading,
   draws: RunDraws,
-  seed: string,
-  cured?: IntervalSourceId,
+  { seed, noise, cured }: RunDrawing,
 ): void {
   const random = randomSource(seed, 'heading', run);
   const deviation = cured === 'heading' ? curedDeviation(heading) : heading.ownDeviation;
@@ -111,8 +121,8 @@ function drawHeading(
   for (let i = 0; i < draws.heading.length; i++) {
     const [usual, rate, chance, far] = [random.normal(), random.normal(), random.uniform(), random.uniform()];
     const isOutlier = outliers !== null && chance < outliers.share;
-    draws.heading[i] = isOutlier ? outliers.reach * (2 * far - 1) : deviation * usual;
-    draws.rate[i] = heading.ratePerMinuteDeviation * rate;
+    draws.heading[i] = isOutlier ? outliers.reach * (2 * far - 1) : noise * deviation * usual;
+    draws.rate[i] = noise * heading.ratePerMinuteDeviation * rate;
   }
 }
 

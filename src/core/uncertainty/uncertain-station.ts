@@ -35,6 +35,8 @@ export interface UncertainObstruction {
   /** In full leaf, and bare. */
   leafOn: Spread;
   leafOff: Spread;
+  /** A tree: between its sightings the outline bulges outward. */
+  isCrown: boolean;
   traces: readonly UncertainTrace[];
 }
 
@@ -71,6 +73,7 @@ export function uncertainStation(
       id,
       transmittance,
       ...spreadsOf(byId.get(id)!),
+      isCrown: obstructionKind(byId.get(id)!.kind).leaves !== undefined,
       traces: traces.map((trace) => ({ ...trace, errors: errors.get(keyOf(id, trace.points))! })),
     }),
   );
