@@ -1,11 +1,11 @@
 import { turnBetween } from '../angles/angles.ts';
+import { overZenith } from '../pointing/over-zenith.ts';
 import { pointSurvey } from '../pointing/point-survey.ts';
 import type { PointedSurvey } from '../pointing/pointed-survey.ts';
 import { monthlyTransmittance, traceEdge } from '../survey/obstruction-kinds.ts';
 import { ordered } from '../survey/order.ts';
 import type { SightingDirection } from '../survey/sighting-direction.ts';
 import type { Sighting, Station, Survey, Trace } from '../survey/survey.ts';
-import type { SkyPoint } from './horizon-edge.ts';
 import type { HorizonProfile } from './horizon-profile.ts';
 import { horizonProfile } from './horizon-profile.ts';
 import type { SettledTrace, TracedObstruction } from './traced-obstruction.ts';
@@ -56,34 +56,22 @@ export function tracedObstructions(
   });
 }
 
+/** A turn this close to half a circle could go either way, degrees. */
+const HALF_CIRCLE = 180 - 1e-9;
+
 /** Whether a trace still has enough sightings, and none of its neighbours 180° apart, once those without direction are out. */
 function joinsUp({ shape, fullCircle, points }: SettledTrace): boolean {
   const closed = shape === 'outline' || fullCircle;
   const neighbours = closed ? points.map((_, i) => i) : points.map((_, i) => i).slice(1);
   const turn = (i: number) =>
     Math.abs(turnBetween(points[(i + points.length - 1) % points.length].azimuth, points[i].azimuth));
-  return points.length >= (shape === 'outline' ? 3 : 2) && neighbours.every((i) => turn(i) < 180);
+  return points.length >= (shape === 'outline' ? 3 : 2) && neighbours.every((i) => turn(i) < HALF_CIRCLE);
 }
 
 function settledTrace(trace: Trace, straight: boolean, directionOf: DirectionOf): SettledTrace {
   const points = overZenith(ordered(trace.sightings).flatMap((sighting) => directionOf(sighting) ?? []));
   const { shape, fullCircle = false, angularWidth = 0 } = trace;
   return { shape, straight, fullCircle, angularWidth, points };
-}
-
-/** Above this, neighbours in opposite azimuths are joined over the zenith, degrees. */
-const NEAR_ZENITH = 60;
-
-/** The points with the zenith between neighbours that face each other across it: a sweep went straight over. */
-function overZenith(points: SkyPoint[]): SkyPoint[] {
-  return points.flatMap((point, i) => {
-    const before = points[i - 1];
-    const isAcross =
-      i > 0 &&
-      Math.min(before.elevation, point.elevation) > NEAR_ZENITH &&
-      180 - Math.abs(turnBetween(before.azimuth, point.azimuth)) < 1e-6;
-    return isAcross ? [{ azimuth: (before.azimuth + 90) % 360, elevation: 90 }, point] : [point];
-  });
 }
 
 /** The azimuths a trace goes over, clockwise. */

@@ -3,6 +3,7 @@ import { RADIANS, fullCircle } from '../angles/angles.ts';
 import type { Problem } from '../survey/problem.ts';
 import { sightingDirection } from '../survey/sighting-direction.ts';
 import type { Sighting, Survey } from '../survey/survey.ts';
+import { pointedTraceWarnings } from './pointed-traces.ts';
 import { pointPlanes } from './point-planes.ts';
 import { offsetAt } from './run-ties.ts';
 import { solveRuns } from './solve-runs.ts';
@@ -23,7 +24,7 @@ export function pointSurvey(survey: Survey): PointedSurvey {
     sightings.set(pointed.id, pointed);
     if (pointed.undirected) warnings.push({ path: pointed.path, message: pointed.undirected.message });
   }
-  warnings.push(...uncheckedRuns(survey, solved, sightings));
+  warnings.push(...uncheckedRuns(survey, solved, sightings), ...pointedTraceWarnings(survey, sightings));
   return {
     runs: [...solved.runs.values()],
     sightings,

@@ -1,4 +1,5 @@
 import { jsonFault } from './json-fault.ts';
+import { addHeadingCheckProblems } from './heading-check-checks.ts';
 import { isRecord, shown } from './json-value.ts';
 import type { JsonRecord } from './json-value.ts';
 import { LIMITS } from './limits.ts';
@@ -51,6 +52,7 @@ export function surveyFromJson(value: unknown): Parsed<Survey> {
   addReferenceProblems(document, problems);
   addPlaneProblems(document, problems);
   addTraceProblems(document, problems);
+  addHeadingCheckProblems(document, problems);
   if (!problems.isEmpty) return { ok: false, problems: problems.list() };
   return {
     ok: true,

@@ -21,6 +21,8 @@ export function addTraceProblems(document: JsonRecord, problems: ProblemList): v
     const pointed = pointedSightings(trace, problems);
     if (pointed) addShapeProblems(trace, pointed, kinds.get(trace.value.obstruction), problems);
   }
+  for (const { value, path } of rowsOf(document, 'stations'))
+    for (const sighting of rowsOf(value, 'markSightings', path)) addDirectionProblem(sighting, problems);
 }
 
 /** What the trace says of itself: enough sightings, the width of a line, a circle only of a skyline. */
@@ -60,7 +62,8 @@ function pointedSightings({ value, path }: Row, problems: ProblemList): Pointed[
   return whole ? pointed : null;
 }
 
-function pointedAt({ value, path }: Row, problems: ProblemList): Pointed | null {
+/** Adds a problem where a sighting has half a direction, or none and nothing to have it from. */
+function addDirectionProblem({ value, path }: Row, problems: ProblemList): void {
   const hasAzimuth = value.azimuth !== undefined;
   const hasElevation = value.elevation !== undefined;
   if (hasAzimuth !== hasElevation)
@@ -73,6 +76,16 @@ function pointedAt({ value, path }: Row, problems: ProblemList): Pointed | null 
       path,
       'The sighting points nowhere. Give azimuth and elevation, or the reading it was taken with.',
     );
+  if (value.sampleAt !== undefined && value.reading === undefined)
+    problems.add(
+      pathBelow(path, 'sampleAt'),
+      'The sighting names a time within a reading, but no reading. Name the reading, or take sampleAt out.',
+    );
+}
+
+function pointedAt(row: Row, problems: ProblemList): Pointed | null {
+  addDirectionProblem(row, problems);
+  const { value, path } = row;
   const amendments: unknown = value.amendments;
   if (amendments !== undefined && !(Array.isArray(amendments) && amendments.every(isObject))) return null;
   const direction = sightingDirection(value as unknown as Sighting);

@@ -35,6 +35,9 @@ const traces = rows({ order, sightings });
 const headingChecks = fc.option(rows({ method: fc.constantFrom('sun-shadow', 'known-mark') }), {
   nil: undefined,
 });
+const perhaps = <T extends object>(shape: { [K in keyof T]: fc.Arbitrary<T[K]> }) =>
+  fc.option(rows(shape), { nil: undefined });
+const placings = perhaps({ order, reading: id });
 const serves = fc.subarray(['a', 'b', 'c']);
 
 export const arbitrarySurvey: fc.Arbitrary<Survey> = fc
@@ -49,11 +52,23 @@ export const arbitrarySurvey: fc.Arbitrary<Survey> = fc
       albedo: fc.constantFrom(0, 1),
     }),
     climate: fc.constantFrom({ source: 'world' }, { source: 'weather-file', name: 'x' }),
-    planes: rows({ order, surfaceTilt: fc.constantFrom(0, 30) }),
+    planes: rows({
+      order,
+      surfaceTilt: fc.constantFrom(0, 30),
+      tiltPlacings: placings,
+      azimuthSightings: placings,
+    }),
     obstructions: rows({ order, transmittance: fc.constantFrom(0.5, Array(12).fill(0.1)) }),
     runs: rows({ startedAt: instant }),
     readings: rows({ takenAt: instant, alpha: fc.constantFrom(1, 2) }),
-    stations: rows({ order, serves, headingChecks, traces }),
+    stations: rows({
+      order,
+      serves,
+      headingChecks,
+      traces,
+      markSightings: fc.option(sightings, { nil: undefined }),
+      indexChecks: perhaps({ order, upright: id, turned: id }),
+    }),
     later: fc.option(fc.jsonValue({ maxDepth: 2 }), { nil: undefined }),
   })
   .map((survey) => plain(survey) as unknown as Survey);
