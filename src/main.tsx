@@ -7,6 +7,7 @@ import { Connection } from './storage/connection.ts';
 import { photoDatabase } from './storage/photo-database.ts';
 import { surveyDatabase } from './storage/survey-database.ts';
 import { deviceLocation } from './sensors/location.ts';
+import type { Recordings } from './sensors/recorded-stream.ts';
 import { weatherDatabase } from './storage/weather-database.ts';
 import { App } from './ui/app.tsx';
 import { startInstallOffer } from './ui/device/install-offer.ts';
@@ -30,6 +31,13 @@ const samples: SampleSurvey[] = Object.entries(titles).map(([name, title]) => ({
   title,
   text: texts[name],
 }));
+
+async function practiceRecordings(): Promise<Recordings> {
+  const response = await fetch('/practice-recording.json');
+  if (!response.ok)
+    throw new AppError('part-missing', new Error(`practice-recording.json: ${response.status}`));
+  return (await response.json()) as Recordings;
+}
 
 /** Once a survey is stored there is something to lose; most browsers answer by their own rules, some ask. */
 async function keepStorage(): Promise<void> {
@@ -56,6 +64,10 @@ const services: AppServices = {
   assess: new AssessOnWorker(
     () => new Worker(new URL('./workers/assess-worker.ts', import.meta.url), { type: 'module' }),
   ),
+  capture: async () => {
+    const { captureDevices } = await import('./sensors/capture-devices.ts');
+    return captureDevices(practiceRecordings);
+  },
   samples,
   parse: async (text) => (await parser()).parseSurvey(text),
   newId,

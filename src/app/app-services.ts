@@ -2,6 +2,7 @@ import type { Parsed } from '../core/survey/problem.ts';
 import type { Survey } from '../core/survey/survey.ts';
 import type { AppState } from './app-state.ts';
 import type { AssessClient } from './assess-client.ts';
+import type { CaptureDevices } from './capture/sensor-interfaces.ts';
 import type { LocationSource } from './location-source.ts';
 import type { PhotoStore } from './photo-store.ts';
 import type { SurveyStore } from './survey-store.ts';
@@ -23,6 +24,8 @@ export interface AppServices {
   photos: PhotoStore;
   location: LocationSource;
   assess: AssessClient;
+  /** What a capture needs of the device; loaded when the first one is opened. */
+  capture: () => Promise<CaptureDevices>;
   samples: SampleSurvey[];
   parse: (text: string) => Promise<Parsed<Survey>>;
   newId: () => string;

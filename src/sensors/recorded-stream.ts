@@ -5,11 +5,15 @@ export interface RecordedStream {
   title: string;
   device: string;
   kind: 'magnetic' | 'carried' | 'relative';
-  /** Where it was made. */
-  site: { latitude: number; longitude: number; altitude: number; timeZone: string };
   /** Instant of the first row, UTC. */
   startedAt: string;
   parts: RecordedPart[];
+}
+
+/** The recordings that come with the app. */
+export interface Recordings {
+  sighting: RecordedStream;
+  plane: RecordedStream;
 }
 
 export interface RecordedPart {

@@ -27,7 +27,6 @@ export class ReplayedOrientation implements OrientationSensor {
     this.device = stream.device;
     this.recording = {
       title: stream.title,
-      site: stream.site,
       cue: () => this.cue(),
       goOn: () => this.goOn(),
       onCue: (listener) => {

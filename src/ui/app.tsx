@@ -43,7 +43,9 @@ function Screen({ place, services }: { place: Place; services: AppServices }) {
     case 'list':
       return <SurveyListScreen />;
     case 'survey':
-      return <LazyScreen load={loadSurvey} with={{ id: place.id, section: place.section }} />;
+      return (
+        <LazyScreen load={loadSurvey} with={{ id: place.id, section: place.section, inner: place.inner }} />
+      );
     case 'plain':
       return <LazyScreen key={place.plain.path} load={place.plain.load} with={{ services }} />;
     case 'nowhere':

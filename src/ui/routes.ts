@@ -14,7 +14,8 @@ export const SURVEY_SECTIONS: SurveySection[] = [
   {
     path: 'stations',
     label: 'Stations',
-    load: async () => (await import('./components/field-book/all-stations.tsx')).AllStations,
+    hasInner: true,
+    load: async () => (await import('./screens/stations/stations-section.tsx')).StationsSection,
   },
   {
     path: 'shade',
@@ -39,7 +40,7 @@ export const PLAIN_SCREENS: PlainScreen[] = [
 
 export type Place =
   | { screen: 'list' }
-  | { screen: 'survey'; id: string; section: SurveySection }
+  | { screen: 'survey'; id: string; section: SurveySection; inner: string[] }
   | { screen: 'plain'; plain: PlainScreen }
   | { screen: 'nowhere' };
 
@@ -56,8 +57,12 @@ export function placeOf(pathname: string): Place {
   if (pathname === '/' || pathname === '/index.html') return { screen: 'list' };
   const plain = PLAIN_SCREENS.find(({ path }) => path === pathname);
   if (plain) return { screen: 'plain', plain };
-  const [, encodedId, sectionPath = ''] = /^\/survey\/([^/]+)(?:\/([^/]*))?$/.exec(pathname) ?? [];
+  const [, encodedId, sectionPath = '', rest = ''] =
+    /^\/survey\/([^/]+)(?:\/([^/]*)((?:\/[^/]+)*))?$/.exec(pathname) ?? [];
   const id = encodedId === undefined ? null : decoded(encodedId);
   const section = SURVEY_SECTIONS.find(({ path }) => path === sectionPath);
-  return id !== null && section ? { screen: 'survey', id, section } : { screen: 'nowhere' };
+  const inner = rest.split('/').slice(1).map(decoded);
+  if (id === null || !section || inner.includes(null)) return { screen: 'nowhere' };
+  if (inner.length > 0 && !section.hasInner) return { screen: 'nowhere' };
+  return { screen: 'survey', id, section, inner: inner as string[] };
 }

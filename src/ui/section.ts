@@ -7,6 +7,8 @@ export interface SectionProps {
   surveyId: string;
   survey: Survey;
   services: AppServices;
+  /** What stands in the address after the section's own part. */
+  inner: readonly string[];
 }
 
 /** A section of a survey, a tab on its screen: one row in `routes.ts`, one folder in `screens/`. */
@@ -14,6 +16,8 @@ export interface SurveySection {
   /** Last part of the address; empty for the first section. */
   path: string;
   label: string;
+  /** Whether addresses go on below it. */
+  hasInner?: boolean;
   load: () => Promise<ComponentType<SectionProps>>;
 }
 

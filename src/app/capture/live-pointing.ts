@@ -17,6 +17,8 @@ export interface LivePointing {
   elevationDeviation: number;
   /** Angle of the screen from level, 0 where the phone lies flat with its screen up. */
   fromFlat: number;
+  /** Elevation of the phone's top edge. */
+  topEdge: number;
   /** Seconds since the platform last told of a movement. */
   stillFor: number;
 }
@@ -38,6 +40,7 @@ export function livePointing(sample: SensorSample, axis: SightingAxis, run: Poin
       : null,
     elevationDeviation: Math.hypot(index?.standardDeviation ?? PLANNING.elevationIndex, PLANNING.pointing),
     fromFlat: Math.acos(Math.min(1, Math.max(-1, held.z[2]))) / RADIANS,
+    topEdge: directionOf(held.y).elevation,
     stillFor: Math.max(0, sample.timeMs - sample.eventMs) / 1000,
   };
 }

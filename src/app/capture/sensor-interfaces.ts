@@ -31,8 +31,6 @@ export type OrientationStart =
 /** A person is told what a recording shows now, and lets it go on. */
 export interface Recording {
   title: string;
-  /** Where and when it was made, so that the sun stands where it stood. */
-  site: { latitude: number; longitude: number; altitude: number; timeZone: string };
   /** What it shows now, and what to do. */
   cue(): { text: string; place: number; count: number; resting: boolean };
   /** Moves on to the next pose. */
@@ -79,8 +77,8 @@ export interface CaptureDevices {
   feedback: Feedback;
   /** Keeps the screen on until the returned function is called; quietly does nothing where that is not offered. */
   keepAwake(): () => void;
-  /** A recorded movement in place of the sensor. */
-  openRecording(): Promise<OrientationSensor>;
+  /** A recorded movement in place of the sensor: sighting from a station, or measuring a plane. */
+  openRecording(of: 'sighting' | 'plane'): Promise<OrientationSensor>;
 }
 
 /** A row of a reading from a sample: whole milliseconds, angles to a ten-thousandth. */

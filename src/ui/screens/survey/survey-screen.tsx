@@ -70,9 +70,13 @@ function Unreadable({ stored }: { stored: Extract<StoredSurvey, { state: 'unread
   );
 }
 
-function Readable(props: { stored: Extract<StoredSurvey, { state: 'readable' }>; section: SurveySection }) {
+function Readable(props: {
+  stored: Extract<StoredSurvey, { state: 'readable' }>;
+  section: SurveySection;
+  inner: readonly string[];
+}) {
   const services = useApp();
-  const { stored, section } = props;
+  const { stored, section, inner } = props;
   const content = useRef<HTMLElement>(null);
   const shown = useRef(section.path);
   useEffect(() => {
@@ -85,7 +89,10 @@ function Readable(props: { stored: Extract<StoredSurvey, { state: 'readable' }>;
       {stored.deletedAt !== null && <p>This survey is among the deleted ones; restore it from the list.</p>}
       <Sections id={stored.id} shown={section} />
       <section ref={content} class="section" tabIndex={-1} aria-label={section.label}>
-        <LazyScreen load={section.load} with={{ surveyId: stored.id, survey: stored.survey, services }} />
+        <LazyScreen
+          load={section.load}
+          with={{ surveyId: stored.id, survey: stored.survey, services, inner }}
+        />
       </section>
       <HistoryButtons surveyId={stored.id} />
     </>
@@ -93,7 +100,15 @@ function Readable(props: { stored: Extract<StoredSurvey, { state: 'readable' }>;
 }
 
 /** A survey: its title, its sections, and the section that the address names. */
-export function SurveyScreen({ id, section }: { id: string; section: SurveySection }) {
+export function SurveyScreen({
+  id,
+  section,
+  inner,
+}: {
+  id: string;
+  section: SurveySection;
+  inner: readonly string[];
+}) {
   const services = useApp();
   const { state } = services;
   useEffect(() => void attempt(state, () => openSurvey(services, id)), [id, services, state]);
@@ -103,7 +118,9 @@ export function SurveyScreen({ id, section }: { id: string; section: SurveySecti
     <div class="stack">
       {stored === 'missing' && <Missing />}
       {stored !== 'missing' && stored.state === 'unreadable' && <Unreadable stored={stored} />}
-      {stored !== 'missing' && stored.state === 'readable' && <Readable stored={stored} section={section} />}
+      {stored !== 'missing' && stored.state === 'readable' && (
+        <Readable stored={stored} section={section} inner={inner} />
+      )}
     </div>
   );
 }

@@ -1,0 +1,127 @@
+import { useEffect, useState } from 'preact/hooks';
+import type { CheckFacts } from '../../../../app/capture/heading-takes.ts';
+import { takeCheck } from '../../../../app/capture/heading-takes.ts';
+import { stationOf } from '../../../../app/capture/station-edits.ts';
+import { headingMethod } from '../../../../core/pointing/heading-methods.ts';
+import type { HeadingMethodId } from '../../../../core/survey/survey.ts';
+import { faultOf, typedNumber, valueOf } from '../../../typed.ts';
+import { checkWords } from '../heading-words.ts';
+import { FacesPanel } from './faces-panel.tsx';
+import { ShadowHours } from './shadow-hours.tsx';
+import type { Sitting } from './sitting.ts';
+import { Switches, Thumb } from './thumb.tsx';
+
+type Way = HeadingMethodId | 'two-face';
+
+const WAYS: { value: Way; label: string }[] = [
+  { value: 'sun-shadow', label: 'Shadow' },
+  { value: 'known-mark', label: 'Known mark' },
+  { value: 'plan-bearing', label: 'Plan, later' },
+  { value: 'two-face', label: 'Two faces' },
+];
+
+const FRAMES = [
+  { value: 'true', label: 'True north' },
+  { value: 'magnetic', label: 'Magnetic' },
+  { value: 'grid', label: 'Map grid' },
+] as const;
+
+/** Tying the sitting to north, and testing the phone's own inclination. */
+export function CheckPanel({ sitting }: { sitting: Sitting }) {
+  const [way, setWay] = useState<Way>('sun-shadow');
+  const { session } = sitting;
+  useEffect(() => {
+    // a shadow is laid along the phone's edge: nobody needs to look towards the sun, nor the camera
+    const before = session.axis.value;
+    if (way === 'sun-shadow') session.axis.value = 'top-edge';
+    return () => {
+      session.axis.value = before;
+    };
+  }, [way, session]);
+  return (
+    <>
+      <Switches label="Way of checking" value={way} options={WAYS} onChoose={setWay} />
+      {way === 'two-face' ? <FacesPanel sitting={sitting} /> : <MethodPanel sitting={sitting} method={way} />}
+    </>
+  );
+}
+
+function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMethodId }) {
+  const { session, stationId } = sitting;
+  const { howTo, caution, needsBearing } = headingMethod(method);
+  const [mark, setMark] = useState('');
+  const [bearing, setBearing] = useState('');
+  const [frame, setFrame] = useState<(typeof FRAMES)[number]['value']>('true');
+  const [last, setLast] = useState<string | null>(null);
+  const typed = typedNumber(bearing, { least: 0, most: 360, unit: '°', optional: method !== 'known-mark' });
+  const take = async () => {
+    const facts: CheckFacts = {
+      method,
+      ...(mark.trim() && { mark: mark.trim() }),
+      ...(valueOf(typed) !== undefined && { bearing: valueOf(typed), frame }),
+    };
+    const station = stationOf(session.record.survey, stationId);
+    const id = await takeCheck(session, station, facts, sitting.open.looked);
+    if (id) setLast(id);
+  };
+  return (
+    <>
+      {caution && (
+        <p class="banner">
+          <strong>{caution}</strong>
+        </p>
+      )}
+      <p>{howTo}</p>
+      {method === 'sun-shadow' && <ShadowHours session={session} />}
+      {needsBearing && (
+        <div class="check-fields">
+          <label>
+            Mark
+            <input
+              type="text"
+              value={mark}
+              maxLength={200}
+              autocomplete="off"
+              onInput={({ currentTarget }) => setMark(currentTarget.value)}
+            />
+          </label>
+          {method === 'known-mark' && (
+            <label>
+              Bearing, degrees
+              <input
+                type="text"
+                inputMode="decimal"
+                value={bearing}
+                autocomplete="off"
+                onInput={({ currentTarget }) => setBearing(currentTarget.value)}
+              />
+            </label>
+          )}
+        </div>
+      )}
+      {method === 'known-mark' && (
+        <Switches label="North of the bearing" value={frame} options={FRAMES} onChoose={setFrame} />
+      )}
+      <CheckResult sitting={sitting} id={last} />
+      <Thumb
+        session={session}
+        label={method === 'sun-shadow' ? 'Take the shadow' : 'Sight the mark'}
+        disabled={faultOf(typed) !== null || (method !== 'sun-shadow' && mark.trim() === '')}
+        onPress={() => void take()}
+      />
+    </>
+  );
+}
+
+/** What the last check found, and what speaks against it. */
+function CheckResult({ sitting, id }: { sitting: Sitting; id: string | null }) {
+  const pointed = sitting.session.pointed.value;
+  const found = pointed?.runs.flatMap(({ checks }) => checks).find(({ check }) => check === id);
+  if (!pointed || !found) return null;
+  const warning = pointed.warnings.find(({ path }) => path.startsWith(found.path))?.message;
+  return (
+    <p class="banner" role="status">
+      {checkWords(found)} {warning !== found.refused && warning}
+    </p>
+  );
+}

@@ -1,0 +1,121 @@
+import { useEffect, useMemo, useState } from 'preact/hooks';
+import { liveSurvey, sweptDirections, type LiveSweep } from '../../../../app/capture/live-survey.ts';
+import type { AzimuthRange } from '../../../../core/shading/coverage.ts';
+import type { RoofPlane, Station } from '../../../../core/survey/survey.ts';
+import type { SkyPlace } from '../../../../report/pictures/sky-frame.ts';
+import { unseenRanges } from '../../../../report/pictures/unseen-sky.ts';
+import type { SectionProps } from '../../../section.ts';
+import { HorizonStrip } from '../strip/horizon-strip.tsx';
+import { sunBand, unseenInBand } from '../strip/sun-band.ts';
+import { useLiveShade } from '../strip/use-live-shade.ts';
+import { CheckPanel } from './check-panel.tsx';
+import { Figures } from './figures.tsx';
+import { HeadingBanner } from './heading-banner.tsx';
+import { MarkPanel } from './mark-panel.tsx';
+import { NewsLine } from './news-line.tsx';
+import { OpenPanel } from './open-panel.tsx';
+import { RecordingBar } from './recording-bar.tsx';
+import { SightView } from './sight-view.tsx';
+import type { Sitting, Task } from './sitting.ts';
+import { Switches } from './thumb.tsx';
+import { TracePanel } from './trace-panel.tsx';
+import type { Capture } from './use-capture.ts';
+
+const TASKS: { value: Task; label: string }[] = [
+  { value: 'trace', label: 'Trace' },
+  { value: 'open', label: 'Open' },
+  { value: 'mark', label: 'Mark' },
+  { value: 'check', label: 'Heading' },
+];
+
+type Props = SectionProps & { station: Station; capture: Capture; sitting: Sitting };
+
+/** The plane whose figures are shown: the first this station speaks for, else the first of all. */
+const planeOf = ({ survey, station }: Props): RoofPlane | null =>
+  survey.planes.find(({ id }) => station.serves.includes(id)) ?? survey.planes[0] ?? null;
+
+/** A sitting at work: picture, figures, strip, and the panel of the task in hand. */
+export function SittingView(props: Props) {
+  const { capture, sitting, survey } = props;
+  const { session } = sitting;
+  const task = sitting.task.value;
+  const plane = planeOf(props);
+  const { strip, gaps } = useStrip(props, plane);
+  const { recording } = session.orientation;
+  return (
+    <div class="sitting">
+      <div class="sitting-scene">
+        {task === 'check' ? null : <SightView capture={capture} session={session} />}
+        <Figures session={session} />
+        {plane && (
+          <HorizonStrip session={session} latitude={survey.site.latitude} plane={plane.name} {...strip} />
+        )}
+      </div>
+      <div class="sitting-hand">
+        {recording && <RecordingBar recording={recording} />}
+        {task !== 'check' && (
+          <HeadingBanner session={session} onCheck={() => (sitting.task.value = 'check')} />
+        )}
+        <NewsLine session={session} />
+        <Switches
+          label="Task"
+          value={task}
+          options={TASKS}
+          disabled={session.phase.value === 'sweeping'}
+          onChoose={(wanted) => (sitting.task.value = wanted)}
+        />
+        {task === 'trace' && <TracePanel sitting={sitting} />}
+        {task === 'open' && <OpenPanel sitting={sitting} gaps={gaps} />}
+        {task === 'mark' && <MarkPanel sitting={sitting} />}
+        {task === 'check' && <CheckPanel sitting={sitting} />}
+      </div>
+    </div>
+  );
+}
+
+/** How often the live figures look at a sweep at work [ms]. */
+const LOOK_MS = 350;
+
+/** The sweep as far as it has gone, looked at a few times a second. */
+function useLiveSweep(sitting: Sitting): LiveSweep | null {
+  const { session, sweep } = sitting;
+  const sweeping = session.phase.value === 'sweeping' && sitting.task.value === 'trace';
+  const [live, setLive] = useState<LiveSweep | null>(null);
+  useEffect(() => {
+    if (!sweeping) return setLive(null);
+    const look = () => {
+      const run = session.runNow;
+      if (run)
+        setLive({ samples: [...sweep.samples], axis: session.axis.value, run, choice: sitting.choice.value });
+    };
+    const timer = setInterval(look, LOOK_MS);
+    return () => clearInterval(timer);
+  }, [sweeping, session, sweep, sitting]);
+  return live;
+}
+
+const NOTHING: readonly AzimuthRange[] = [];
+
+function useStrip(props: Props, plane: RoofPlane | null) {
+  const { services, survey, station, sitting } = props;
+  const pointed = sitting.session.pointed.value;
+  const sweep = useLiveSweep(sitting);
+  const light = useMemo(
+    () => pointed && liveSurvey(survey, station.id, pointed, sweep),
+    [survey, station.id, pointed, sweep],
+  );
+  const question = useMemo(
+    () => (light && plane ? { survey: light, station: station.id, plane: plane.id } : null),
+    [light, plane, station.id],
+  );
+  const live = useLiveShade(services, question);
+  const observed = live.shade?.observed ?? NOTHING;
+  const band = useMemo(
+    () => (plane ? sunBand(survey.site.latitude, plane.surfaceTilt, plane.surfaceAzimuth) : []),
+    [survey.site.latitude, plane?.surfaceTilt, plane?.surfaceAzimuth],
+  );
+  const swept = useMemo(() => (sweep ? (sweptDirections(sweep) as SkyPlace[]) : []), [sweep]);
+  const gaps = useMemo(() => unseenRanges(observed), [observed]);
+  const unseen = useMemo(() => unseenInBand(band, gaps), [band, gaps]);
+  return { gaps, strip: { band, live, observed, sweep: swept, unseen } };
+}

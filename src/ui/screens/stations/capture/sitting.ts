@@ -1,0 +1,47 @@
+import { signal } from '@preact/signals';
+import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
+import { OpenTake } from '../../../../app/capture/open-take.ts';
+import { PointTrace } from '../../../../app/capture/point-trace.ts';
+import { SweepTake } from '../../../../app/capture/sweep-take.ts';
+import type { TraceChoice } from '../../../../app/capture/trace-choice.ts';
+
+export type Task = 'trace' | 'open' | 'mark' | 'check';
+
+/** All that one sitting at one station works with. */
+export class Sitting {
+  readonly task = signal<Task>('trace');
+  readonly choice = signal<TraceChoice>({
+    obstruction: null,
+    shape: 'skyline',
+    way: 'sweep',
+    angularWidth: 1,
+  });
+  /** The obstruction traced last, offered again in one tap. */
+  readonly last = signal<string | null>(null);
+  readonly sweep: SweepTake;
+  readonly points: PointTrace;
+  readonly open: OpenTake;
+
+  constructor(
+    readonly session: CaptureSession,
+    readonly stationId: string,
+  ) {
+    this.sweep = new SweepTake(session, stationId);
+    this.points = new PointTrace(session, stationId);
+    this.open = new OpenTake(session, stationId);
+  }
+
+  choose(part: Partial<TraceChoice>): void {
+    this.choice.value = { ...this.choice.value, ...part };
+  }
+
+  nameOf(id: string | null): string {
+    return this.session.record.survey.obstructions.find((one) => one.id === id)?.name ?? '';
+  }
+
+  /** After a trace is stored: the next one is asked about anew, with this one in reach. */
+  traced(): void {
+    this.last.value = this.choice.value.obstruction;
+    this.choose({ obstruction: null });
+  }
+}

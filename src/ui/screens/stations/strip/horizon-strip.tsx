@@ -1,0 +1,84 @@
+import { useSignalEffect } from '@preact/signals';
+import { useMemo, useRef } from 'preact/hooks';
+import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
+import type { AzimuthRange } from '../../../../core/shading/coverage.ts';
+import type { SkyPlace } from '../../../../report/pictures/sky-frame.ts';
+import { xOf, yOf } from '../../../../report/pictures/sky-frame.ts';
+import { percentText } from '../../../value-text.ts';
+import { Drawing } from '../../shade/drawing.tsx';
+import { useWidth } from '../../shade/use-width.ts';
+import type { BandColumn } from './sun-band.ts';
+import { stripPicture } from './strip-picture.ts';
+import type { LiveShade } from './use-live-shade.ts';
+
+const HEIGHT = 112;
+
+interface Props {
+  session: CaptureSession;
+  latitude: number;
+  band: readonly BandColumn[];
+  live: LiveShade;
+  observed: readonly AzimuthRange[];
+  sweep: readonly SkyPlace[];
+  /** What of the sun's band nobody has looked at. */
+  unseen: readonly [number, number][];
+  plane: string;
+}
+
+/** The horizon unrolled: where the sun goes, what is traced, what is still unseen, and where the phone points. */
+export function HorizonStrip({ session, latitude, band, live, observed, sweep, unseen, plane }: Props) {
+  const [box, width] = useWidth<HTMLDivElement>();
+  const profile = live.shade?.profile ?? null;
+  const picture = useMemo(
+    () => width > 0 && stripPicture({ latitude, band, profile, observed, sweep, width, height: HEIGHT }),
+    [latitude, band, profile, observed, sweep, width],
+  );
+  return (
+    <figure class="strip">
+      <div ref={box} class="strip-box">
+        {picture && <Drawing picture={picture} id="strip" label={words(unseen)} />}
+        {picture && <Pointer session={session} frame={picture.frame} />}
+      </div>
+      <figcaption>
+        <AccessLine live={live} plane={plane} />
+      </figcaption>
+    </figure>
+  );
+}
+
+const whole = (azimuth: number) => Math.round(azimuth) % 360;
+
+function words(unseen: Props['unseen']): string {
+  if (unseen.length === 0) return 'All of the sun’s band in front of the plane has been looked at.';
+  const ranges = unseen.map(([from, to]) => `${whole(from)}° to ${whole(to)}°`);
+  return `Still unseen in the sun’s band: ${ranges.join(', ')}.`;
+}
+
+function AccessLine({ live: { shade, fault }, plane }: { live: LiveShade; plane: string }) {
+  if (fault && fault.code !== 'cancelled')
+    return <p class="small">The live figure is missing: the Shade section says why.</p>;
+  if (!shade) return <p class="small">Reading the climate…</p>;
+  const { solarAccess, coverage } = shade.measured;
+  return (
+    <p>
+      {plane}: access <strong>{percentText(solarAccess.annual)}</strong>, covered{' '}
+      <strong>{percentText(coverage)}</strong>
+    </p>
+  );
+}
+
+/** Where the phone points now; moved by hand, since it moves with every frame. */
+function Pointer({ session, frame }: { session: CaptureSession; frame: Parameters<typeof xOf>[0] }) {
+  const mark = useRef<HTMLDivElement>(null);
+  useSignalEffect(() => {
+    const live = session.live.value;
+    const element = mark.current;
+    if (!element) return;
+    const azimuth = live?.azimuth ?? null;
+    element.hidden = azimuth === null;
+    if (!live || azimuth === null) return;
+    const y = yOf(frame, Math.min(frame.top, Math.max(0, live.elevation)));
+    element.style.transform = `translate(${xOf(frame, azimuth)}px, ${y}px)`;
+  });
+  return <div ref={mark} class="strip-pointer" aria-hidden="true" hidden />;
+}
