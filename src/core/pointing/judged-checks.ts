@@ -31,7 +31,8 @@ export interface Judgement {
 export function judgedChecks(results: readonly CheckResult[], judgement: Judgement): JudgedChecks {
   const warnings: Problem[] = [];
   const pair = pairVerdict(results, judgement);
-  const checks = results.map((result) => {
+  const checks = results.map((read) => {
+    const result = alongEdge(read, judgement);
     if (result.offset === null) return result;
     const judged = judgedCheck(result, verdictOn(result, pair, judgement), judgement);
     if (judged.warning) warnings.push({ path: result.path, message: judged.warning });
@@ -40,12 +41,22 @@ export function judgedChecks(results: readonly CheckResult[], judgement: Judgeme
   return { checks, warnings };
 }
 
-/** The first two checks by shadow that are far enough apart to decide. */
+/** The bearing of an edge on a plan may be that of either way along it; a compass tells which was sighted. */
+function alongEdge(result: CheckResult, { compass, recordOf }: Judgement): CheckResult {
+  const isEdge = result.method === 'plan-bearing' && recordOf(result).mark === undefined;
+  if (!isEdge || !compass || result.offset === null) return result;
+  const isOtherWay = Math.abs(turnBetween(compass.offset, result.offset)) > 90;
+  return isOtherWay ? { ...result, offset: turnBetween(0, result.offset + 180) } : result;
+}
+
+/** The verdict of the first and the last check by shadow. */
 function pairVerdict(results: readonly CheckResult[], { site, driftPerMinute }: Judgement): ClockVerdict {
-  const bySun = results.filter(({ method, offset }) => method === 'sun-shadow' && offset !== null);
+  const bySun = results
+    .filter(({ method, offset }) => method === 'sun-shadow' && offset !== null)
+    .sort((a, b) => a.takenAtMs - b.takenAtMs);
   const [first, last] = [bySun[0], bySun.at(-1)];
   if (!first || !last || first === last) return { is: 'unknown' };
-  const minutes = Math.abs(last.takenAtMs - first.takenAtMs) / 60_000;
+  const minutes = (last.takenAtMs - first.takenAtMs) / 60_000;
   return clockByPair(first, last, site, driftPerMinute * minutes);
 }
 
@@ -89,11 +100,11 @@ function wrongClock({ minutes, because }: { minutes: number | null; because: str
 function undecided({ method }: CheckResult, against: number): string {
   const off = Math.abs(against).toFixed(0);
   const counted = 'Until then it counts with half the difference as its deviation.';
-  const isRound = Math.abs(against) > 180 - COMPASS_REACH;
   if (method !== 'sun-shadow')
-    return `Check and compass differ by ${off}°, more than a compass can be off: another mark was sighted, its bearing is wrong${isRound ? ' or is that of the other way along the edge' : ''}, or there is steel. A check by shadow decides. ${counted}`;
-  const round = isRound
-    ? ' The phone may also have pointed towards the sun instead of along the shadow, away from it.'
-    : '';
+    return `Check and compass differ by ${off}°, more than a compass can be off: another mark was sighted, its bearing is wrong, or there is steel. A check by shadow decides. ${counted}`;
+  const round =
+    Math.abs(against) > 180 - COMPASS_REACH
+      ? ' The phone may also have pointed towards the sun instead of along the shadow, away from it.'
+      : '';
   return `Check and compass differ by ${off}°, more than a compass can be off: clock, zone or steel.${round} A second check an hour later, or the length of an upright’s shadow, decides. ${counted}`;
 }

@@ -22,38 +22,58 @@ export interface RunState {
   rate: OffsetRate;
 }
 
+/** A pointing is tied to so many later ones of its mark; more would add nothing. */
+const MOST_TIES = 20;
+
 /**
  * Hands headings on from the runs that are known best: by marks that two runs sighted from one station, and among runs
  * of one compass with a widened deviation. A run with a check of its own keeps it. Changes the states.
  */
 export function tieRuns(states: readonly RunState[], marks: readonly MarkPointing[]): void {
+  const byId = new Map(states.map((state) => [state.id, state]));
   const ties = tiesOf(marks);
-  const open = new Set(states);
-  for (;;) {
-    const best = [...open]
-      .filter(({ heading }) => heading !== null)
-      .sort((a, b) => a.heading!.standardDeviation - b.heading!.standardDeviation)[0];
-    if (!best) return;
+  const open = new Set(states.filter((state) => ties.has(state.id) || isShareable(state)));
+  for (let best = surest(open); best; best = surest(open)) {
     open.delete(best);
-    for (const state of open) {
-      if (state.heading?.source === 'check') continue;
-      for (const offer of [tiedHeading(best, state, ties), sharedHeading(best, state)])
-        if (offer && offer.standardDeviation < (state.heading?.standardDeviation ?? Infinity))
-          state.heading = offer;
+    for (const [to, between] of ties.get(best.id) ?? []) {
+      const state = byId.get(to);
+      if (state && open.has(state)) offer(state, tiedHeading(best, state, between));
     }
+    if (isShareable(best)) for (const state of states) offer(state, sharedHeading(best, state));
   }
 }
 
-const pairKey = (from: string, to: string) => JSON.stringify([from, to]);
+/** Of the runs not yet settled, the one whose heading is known best. */
+function surest(open: ReadonlySet<RunState>): RunState | null {
+  let best: RunState | null = null;
+  for (const state of open)
+    if (state.heading && state.heading.standardDeviation < (best?.heading!.standardDeviation ?? Infinity))
+      best = state;
+  return best;
+}
 
-function tiesOf(marks: readonly MarkPointing[]): Map<string, Tie[]> {
-  const seen = [...groupedBy(marks, ({ station, mark }) => JSON.stringify([station, mark])).values()];
-  const ties = seen.flatMap((group) =>
-    group.flatMap((from) =>
-      group.filter((to) => to.pointing.run !== from.pointing.run).map((to) => ({ from, to })),
+/** Gives a run a heading that is surer than its own, unless that is from a check. */
+function offer(state: RunState, heading: RunHeading | null): void {
+  if (!heading || state.heading?.source === 'check') return;
+  if (heading.standardDeviation < (state.heading?.standardDeviation ?? Infinity)) state.heading = heading;
+}
+
+/** Ties by the run they come from, then by the run they go to. */
+function tiesOf(marks: readonly MarkPointing[]): Map<string, Map<string, Tie[]>> {
+  const seen = groupedBy(marks, ({ station, mark }) => JSON.stringify([station, mark]));
+  const ties = [...seen.values()].flatMap((group) =>
+    group.flatMap((one, i) =>
+      group
+        .slice(i + 1, i + 1 + MOST_TIES)
+        .filter((other) => other.pointing.run !== one.pointing.run)
+        .flatMap((other) => [
+          { from: one, to: other },
+          { from: other, to: one },
+        ]),
     ),
   );
-  return groupedBy(ties, ({ from, to }) => pairKey(from.pointing.run, to.pointing.run));
+  const byRun = groupedBy(ties, ({ from }) => from.pointing.run);
+  return new Map([...byRun].map(([run, of]) => [run, groupedBy(of, ({ to }) => to.pointing.run)]));
 }
 
 /** Offset of a heading at an instant, degrees. */
@@ -66,9 +86,7 @@ export const deviationAt = (
   timeMs: number,
 ): number => Math.hypot(standardDeviation, (ratePerMinuteDeviation * (timeMs - atMs)) / 60_000);
 
-function tiedHeading(from: RunState, to: RunState, all: Map<string, Tie[]>): RunHeading | null {
-  const ties = all.get(pairKey(from.id, to.id));
-  if (!ties) return null;
+function tiedHeading(from: RunState, to: RunState, ties: readonly Tie[]): RunHeading {
   const source = from.heading!;
   const fit = fitOffset(
     ties.map((tie) => {
@@ -96,11 +114,12 @@ function tiedHeading(from: RunState, to: RunState, all: Map<string, Tie[]>): Run
   };
 }
 
+const isShareable = ({ isMagnetic, heading }: RunState) => isMagnetic && heading?.source === 'check';
+
 /** The check of another run of the same compass. */
 function sharedHeading(from: RunState, to: RunState): RunHeading | null {
+  if (!to.isMagnetic || from.device !== to.device || from === to) return null;
   const source = from.heading!;
-  const sameCompass = from.isMagnetic && to.isMagnetic && from.device === to.device;
-  if (!sameCompass || source.source !== 'check') return null;
   const own = PLANNING.compassBetweenRuns;
   return {
     ...source,

@@ -258,7 +258,8 @@ export interface HeadingCheck {
   order?: number;
   /**
    * `sun-shadow`: the axis pointed along a shadow, away from the sun; `known-mark`: at a mark whose bearing is known;
-   * `plan-bearing`: at a mark or along an eave whose bearing was read from a plan.
+   * `plan-bearing`: at a mark, or (naming none) along an eave, whose bearing was read from a plan; of an eave either
+   * way along it, which a compass tells apart.
    */
   method: HeadingMethodId;
   /** Absent: every sighting of `mark` at this station. */

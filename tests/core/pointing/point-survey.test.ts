@@ -139,6 +139,19 @@ describe('a heading check', () => {
     expect(messages(virtual).join()).toMatch(/No sighting of "mast" from this station/);
   });
 
+  test('of an eave may have the bearing of either way along it, where a compass tells which', () => {
+    for (const bearing of [95, 275]) {
+      const virtual = new VirtualSurvey().run('r', 'magnetic', { north: 7 - declinationAt(SITE) });
+      virtual.check({
+        method: 'plan-bearing',
+        bearing,
+        reading: virtual.read('r', { minutes: 1, azimuth: 95 }),
+      });
+      const id = virtual.sight('r', { minutes: 1, azimuth: 10 });
+      expect(off(virtual, id, 10)).toBeLessThan(1e-6);
+    }
+  });
+
   test.each([
     [{ method: 'known-mark' as const }, /has no bearing yet/, 'stations[0].headingChecks[0].bearing'],
     [
@@ -310,6 +323,22 @@ describe('one run to another', () => {
     expect(two.standardDeviation).toBeGreaterThan(one.standardDeviation + 1);
     expect(two.standardDeviation).toBeLessThan(other.standardDeviation);
     expect(other.source).toBe('compass');
+  });
+
+  test('many runs are all tied', () => {
+    const virtual = new VirtualSurvey();
+    const names = Array.from({ length: 400 }, (_, i) => `r${i}`);
+    names.forEach((name, i) => {
+      virtual.run(name, 'relative', { north: i });
+      virtual.sight(name, { minutes: i, azimuth: 30 }, { mark: 'spire' });
+    });
+    virtual.check({
+      method: 'known-mark',
+      bearing: 60,
+      reading: virtual.read('r0', { minutes: 0, azimuth: 60 }),
+    });
+    const { runs } = pointSurvey(virtual.made());
+    expect(Math.abs(turnBetween(runs[399].heading!.offset, -399))).toBeLessThan(1e-4);
   });
 
   test('a refused run ties nothing', () => {
