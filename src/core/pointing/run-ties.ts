@@ -1,5 +1,6 @@
 import { RADIANS, turnBetween } from '../angles/angles.ts';
 import { groupedBy } from './grouped-by.ts';
+import { LeastFirst } from './least-first.ts';
 import type { OffsetRate } from './heading-fit.ts';
 import { fitOffset } from './heading-fit.ts';
 import type { MarkPointing } from './mark-pointings.ts';
@@ -32,30 +33,28 @@ const MOST_TIES = 20;
 export function tieRuns(states: readonly RunState[], marks: readonly MarkPointing[]): void {
   const byId = new Map(states.map((state) => [state.id, state]));
   const ties = tiesOf(marks);
-  const open = new Set(states.filter((state) => ties.has(state.id) || isShareable(state)));
-  for (let best = surest(open); best; best = surest(open)) {
-    open.delete(best);
+  const settled = new Set<RunState>();
+  const shared = new Set<string | undefined>();
+  const queue = new LeastFirst<RunState>();
+  const offer = (state: RunState | undefined, heading: RunHeading | null) => {
+    if (!state || !heading || settled.has(state) || state.heading?.source === 'check') return;
+    if (heading.standardDeviation >= (state.heading?.standardDeviation ?? Infinity)) return;
+    state.heading = heading;
+    queue.push(heading.standardDeviation, state);
+  };
+  for (const state of states) if (state.heading) queue.push(state.heading.standardDeviation, state);
+  for (let next = queue.pop(); next; next = queue.pop()) {
+    const best = next.item;
+    if (settled.has(best)) continue;
+    settled.add(best);
     for (const [to, between] of ties.get(best.id) ?? []) {
       const state = byId.get(to);
-      if (state && open.has(state)) offer(state, tiedHeading(best, state, between));
+      if (state && !settled.has(state)) offer(state, tiedHeading(best, state, between));
     }
-    if (isShareable(best)) for (const state of states) offer(state, sharedHeading(best, state));
+    if (!isShareable(best) || shared.has(best.device)) continue;
+    shared.add(best.device); // the surest check of a device comes first
+    for (const state of states) offer(state, sharedHeading(best, state));
   }
-}
-
-/** Of the runs not yet settled, the one whose heading is known best. */
-function surest(open: ReadonlySet<RunState>): RunState | null {
-  let best: RunState | null = null;
-  for (const state of open)
-    if (state.heading && state.heading.standardDeviation < (best?.heading!.standardDeviation ?? Infinity))
-      best = state;
-  return best;
-}
-
-/** Gives a run a heading that is surer than its own, unless that is from a check. */
-function offer(state: RunState, heading: RunHeading | null): void {
-  if (!heading || state.heading?.source === 'check') return;
-  if (heading.standardDeviation < (state.heading?.standardDeviation ?? Infinity)) state.heading = heading;
 }
 
 /** Ties by the run they come from, then by the run they go to. */

@@ -38,6 +38,7 @@ export function solveRuns(survey: Survey): SolvedRuns {
   const marks = markPointings(survey, readings, indexOf);
   const checks = checkResults({ survey, readings, indexOf, marks });
   const marksByRun = groupedBy(marks, ({ pointing }) => pointing.run);
+  const checksByRun = groupedBy(checks.results, ({ run }) => run);
   const readingsByRun = groupedBy(survey.readings, ({ run }) => run);
   const recordOf = checkRecords(survey);
   const solved = survey.runs.map((run, i) =>
@@ -47,7 +48,7 @@ export function solveRuns(survey: Survey): SolvedRuns {
       recordOf,
       closure: runClosure(marksByRun.get(run.id) ?? []),
       compass: compassLook(run, `runs[${i}]`, readingsByRun.get(run.id) ?? [], survey.site),
-      checks: checks.results.filter((result) => result.run === run.id),
+      checks: checksByRun.get(run.id) ?? [],
     }),
   );
   const usable = solved.filter(({ closure }) => !closure?.refused);
