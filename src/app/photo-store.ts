@@ -14,8 +14,8 @@ export interface UnusedPictures {
 
 /** Where the pictures of photos are kept, under the hash of their bytes. Rejects with an `AppError`. */
 export interface PhotoStore {
-  /** Resolves when the picture is durable. One that is there already is left as it is. */
-  keep(picture: StoredPicture): Promise<void>;
+  /** Gives the hash, once the picture is durable. One that is there already is left as it is. */
+  keep(picture: Omit<StoredPicture, 'sha256'>): Promise<string>;
   /** Null where it is not on this device. */
   picture(sha256: string): Promise<StoredPicture | null>;
   unused(): Promise<UnusedPictures>;

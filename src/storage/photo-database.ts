@@ -1,6 +1,7 @@
 import type { PhotoStore } from '../app/photo-store.ts';
 import type { Connection } from './connection.ts';
 import type { Database } from './open-database.ts';
+import { sha256Of } from './sha256-of.ts';
 import { writingTo } from './transaction.ts';
 
 const PHOTO_HASH = /^photos\/[^/]+\/sha256$/;
@@ -36,14 +37,17 @@ async function unusedPictures(
 /** Pictures in the database, in a store of their own that is only read by its key. */
 export function photoDatabase(connection: Connection, now: () => number): PhotoStore {
   return {
-    keep: (picture) =>
-      connection.run((database) =>
+    keep: async ({ type, contents }) => {
+      const sha256 = await sha256Of(contents);
+      await connection.run((database) =>
         writingTo(database, ['photos'], async (transaction) => {
           const store = transaction.objectStore('photos');
-          if ((await store.getKey(picture.sha256)) === undefined)
-            await store.put({ ...picture, keptAt: now() });
+          const isThere = (await store.getKey(sha256)) !== undefined;
+          if (!isThere) await store.put({ sha256, type, contents, keptAt: now() });
         }),
-      ),
+      );
+      return sha256;
+    },
 
     picture: (sha256) =>
       connection.run(async (database) => {

@@ -1,12 +1,8 @@
 import type { WeatherFileSummary, WeatherStore } from '../app/weather-store.ts';
 import type { Connection } from './connection.ts';
 import type { Database } from './open-database.ts';
+import { sha256Of } from './sha256-of.ts';
 import { writingTo } from './transaction.ts';
-
-async function sha256Of(contents: ArrayBuffer): Promise<string> {
-  const digest = new Uint8Array(await crypto.subtle.digest('SHA-256', contents));
-  return Array.from(digest, (byte) => byte.toString(16).padStart(2, '0')).join('');
-}
 
 const STORES: ('weather-files' | 'weather-bytes')[] = ['weather-files', 'weather-bytes'];
 

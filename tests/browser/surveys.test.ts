@@ -181,6 +181,7 @@ describe('a survey', () => {
       '1 131.2° 24.6° raw reading',
       '2 140.0° 31.0° mark: top',
       '3 151.5° 22.0°',
+      'Add a sighting Delete the trace',
     ]);
   });
 
@@ -192,11 +193,11 @@ describe('a survey', () => {
     const rows = page.getByRole('region', { name: 'Sightings from Eave, left' }).getByRole('row');
     const more = page.getByRole('button', { name: 'Show 350 more sightings' });
     await more.waitFor();
-    // The head, the trace, the first hundred, and the row of the button.
-    expect(await rows.count()).toBe(103);
+    // The head, the trace, the first hundred, and the rows of the buttons.
+    expect(await rows.count()).toBe(104);
     await more.click();
     await more.waitFor({ state: 'detached' });
-    expect(await rows.count()).toBe(452);
+    expect(await rows.count()).toBe(453);
   });
 
   it('is renamed, with a way back', async () => {

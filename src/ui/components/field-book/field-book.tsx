@@ -9,6 +9,7 @@ import { withoutTrace, type SightingList } from '../../../core/survey/sighting-e
 import type { Sighting, Station, Survey, Trace } from '../../../core/survey/survey.ts';
 import { useApp } from '../../app-context.ts';
 import { degreesText } from '../../value-text.ts';
+import { PhotoStrip } from '../photos/photo-strip.tsx';
 import { WideTable } from '../wide-table.tsx';
 import { BookDialog } from './book-dialog.tsx';
 import type { BookEdit } from './book-edit.ts';
@@ -213,6 +214,7 @@ export function FieldBook({ station, survey, open }: { station: Station; survey:
           Type a trace
         </button>
       </div>
+      <PhotoStrip survey={survey} subject={{ kind: 'station', id: station.id }} name={station.name} />
       {edit && <BookDialog station={station} survey={survey} edit={edit} onDone={() => setEdit(null)} />}
     </details>
   );

@@ -1,7 +1,9 @@
-import type { RoofPlane } from '../../../core/survey/survey.ts';
+import type { RoofPlane, Survey } from '../../../core/survey/survey.ts';
+import { PhotoStrip } from '../../components/photos/photo-strip.tsx';
 import { lengthUnit } from '../../device/length-unit.ts';
 import { lengthText } from '../../length-text.ts';
 import { degreesText } from '../../value-text.ts';
+import { measurePath } from '../stations/station-path.ts';
 
 function sizeOf({ width, slopeLength, outline }: RoofPlane): string {
   if (outline) return `outline of ${outline.length} corners`;
@@ -16,6 +18,7 @@ function sizeOf({ width, slopeLength, outline }: RoofPlane): string {
 
 /** A plane of the list: how it lies, how large it is, and what can be done with it. */
 export function PlaneRow(props: {
+  survey: Survey;
   plane: RoofPlane;
   onEdit: () => void;
   onDuplicate: () => void;
@@ -33,10 +36,18 @@ export function PlaneRow(props: {
         </p>
         <p class="faint small">{sizeOf(plane)}</p>
       </div>
+      <PhotoStrip survey={props.survey} subject={{ kind: 'plane', id: plane.id }} name={name} />
       <div class="form-actions">
         <button type="button" aria-label={`Change ${name}`} onClick={props.onEdit}>
           Change
         </button>
+        <a
+          class="button"
+          href={measurePath(props.survey.id, plane.id)}
+          aria-label={`Measure ${name} with the phone`}
+        >
+          Measure with the phone
+        </a>
         <button type="button" aria-label={`Duplicate ${name}`} onClick={props.onDuplicate}>
           Duplicate
         </button>

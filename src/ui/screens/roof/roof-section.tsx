@@ -90,13 +90,14 @@ export function RoofSection({ survey, services }: SectionProps) {
         </div>
       )}
       {planes.length === 0 && (
-        <p>No roof plane yet. Type one from a plan or a tape, or measure it with the phone.</p>
+        <p>No roof plane yet. Type one from a plan or a tape; then it can also be measured with the phone.</p>
       )}
       {planes.length > 0 && (
         <ul class="entries" aria-label="Roof planes">
           {planes.map((plane) => (
             <PlaneRow
               key={plane.id}
+              survey={survey}
               plane={plane}
               onEdit={() => setEdited({ plane, newId: plane.id })}
               onDuplicate={() => duplicate(plane)}

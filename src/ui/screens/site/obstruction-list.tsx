@@ -1,6 +1,7 @@
 import { obstructionKinds } from '../../../core/survey/obstruction-kinds.ts';
 import { ordered } from '../../../core/survey/order.ts';
-import type { Obstruction } from '../../../core/survey/survey.ts';
+import type { Obstruction, Survey } from '../../../core/survey/survey.ts';
+import { PhotoStrip } from '../../components/photos/photo-strip.tsx';
 import { lengthUnit } from '../../device/length-unit.ts';
 import { lengthText } from '../../length-text.ts';
 import { percentText } from '../../value-text.ts';
@@ -26,18 +27,23 @@ function aboutOf(obstruction: Obstruction): string {
 
 /** What stands around, each with its acts. */
 export function ObstructionList(props: {
-  obstructions: Obstruction[];
+  survey: Survey;
   onEdit: (obstruction: Obstruction) => void;
   onDelete: (obstruction: Obstruction) => void;
 }) {
   return (
     <ul class="entries" aria-label="Obstructions">
-      {ordered(props.obstructions).map((obstruction) => (
+      {ordered(props.survey.obstructions).map((obstruction) => (
         <li key={obstruction.id} class="stack entry">
           <div>
             <h3>{obstruction.name}</h3>
             <p class="small">{aboutOf(obstruction)}</p>
           </div>
+          <PhotoStrip
+            survey={props.survey}
+            subject={{ kind: 'obstruction', id: obstruction.id }}
+            name={obstruction.name}
+          />
           <div class="form-actions">
             <button
               type="button"

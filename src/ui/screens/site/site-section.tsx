@@ -4,16 +4,25 @@ import { attempt } from '../../../app/attempt.ts';
 import { nextOrder } from '../../../app/capture/station-edits.ts';
 import type { StepCode } from '../../../app/survey-store.ts';
 import { withoutObstruction } from '../../../core/survey/removed-entries.ts';
+import type { FactGroup } from '../../../core/survey/site-facts-general.ts';
 import type { Obstruction, Survey } from '../../../core/survey/survey.ts';
+import { PhotoSpace } from '../../components/photos/photo-space.tsx';
+import { PhotoStrip } from '../../components/photos/photo-strip.tsx';
 import { focusHeading } from '../../components/screen-heading.tsx';
 import type { SectionProps } from '../../section.ts';
+import { Caution } from './facts/cautions.tsx';
+import { FactForm } from './facts/fact-form.tsx';
+import { FactGroups } from './facts/fact-groups.tsx';
 import { ObstructionForm } from './obstruction-form.tsx';
 import { ObstructionList } from './obstruction-list.tsx';
 import { SiteForm } from './site-form.tsx';
 import { SiteSummary } from './site-summary.tsx';
 import './site.css';
 
-type Editing = { what: 'site' } | { what: 'obstruction'; obstruction: Obstruction | null; newId: string };
+type Editing =
+  | { what: 'site' }
+  | { what: 'facts'; group: FactGroup }
+  | { what: 'obstruction'; obstruction: Obstruction | null; newId: string };
 
 /** Where the site is, what is known of it, and what stands around. */
 export function SiteSection({ survey, services }: SectionProps) {
@@ -56,6 +65,20 @@ export function SiteSection({ survey, services }: SectionProps) {
         />
       </div>
     );
+  if (editing?.what === 'facts')
+    return (
+      <div class="stack">
+        <h2>{editing.group.label}</h2>
+        <Caution group={editing.group.id} />
+        <FactForm
+          survey={survey}
+          group={editing.group}
+          newId={services.newId}
+          onSave={(after) => saved(store(after, 'entry-changed', editing.group.label))}
+          onCancel={close}
+        />
+      </div>
+    );
   if (editing)
     return (
       <div class="stack">
@@ -84,7 +107,7 @@ export function SiteSection({ survey, services }: SectionProps) {
       {survey.obstructions.length === 0 && <p>No obstruction yet. Name one here, or while sighting it.</p>}
       {survey.obstructions.length > 0 && (
         <ObstructionList
-          obstructions={survey.obstructions}
+          survey={survey}
           onEdit={(obstruction) => setEditing({ what: 'obstruction', obstruction, newId: obstruction.id })}
           onDelete={(obstruction) => void remove(obstruction)}
         />
@@ -97,6 +120,17 @@ export function SiteSection({ survey, services }: SectionProps) {
           Add an obstruction
         </button>
       </div>
+      <h2>For the order</h2>
+      <FactGroups
+        survey={survey}
+        onEdit={(group) => setEditing({ what: 'facts', group })}
+        onCountry={(country) =>
+          void store({ ...survey, site: { ...survey.site, country } }, 'survey-changed', survey.title)
+        }
+      />
+      <h2>Photos of the site</h2>
+      <PhotoStrip survey={survey} subject={{ kind: 'site' }} name="the site" />
+      <PhotoSpace survey={survey} />
     </div>
   );
 }
