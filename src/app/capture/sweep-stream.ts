@@ -1,7 +1,7 @@
 import type { SightingAxis } from '../../core/survey/survey.ts';
 import type { SensorSample } from './sensor-interfaces.ts';
 
-/** A chunk is handed on before it is this old [ms]: at most half a second is lost whatever happens. */
+/** A chunk is handed on when the next sample is this much younger [ms]: it is never longer than half a second. */
 const CHUNK_MS = 450;
 
 /** The stream of a sweep, cut into chunks as it comes. */
@@ -14,11 +14,13 @@ export class SweepStream {
     readonly axis: SightingAxis,
   ) {}
 
-  /** Takes a sample; gives a chunk when one is full. */
+  /** Takes a sample; gives a chunk when one is full. A sample that comes late begins the next one. */
   push(sample: SensorSample): readonly SensorSample[] | null {
+    const ageMs = this.chunk.length > 0 ? sample.timeMs - this.chunk[0].timeMs : 0;
+    const full = ageMs >= CHUNK_MS ? this.cut() : null;
     this.samples.push(sample);
     this.chunk.push(sample);
-    return sample.timeMs - this.chunk[0].timeMs >= CHUNK_MS ? this.cut() : null;
+    return full;
   }
 
   /** What is not handed on yet; null where nothing is. */

@@ -15,8 +15,8 @@ type Way = HeadingMethodId | 'two-face';
 
 const WAYS: { value: Way; label: string }[] = [
   { value: 'sun-shadow', label: 'Shadow' },
-  { value: 'known-mark', label: 'Known mark' },
-  { value: 'plan-bearing', label: 'Plan, later' },
+  { value: 'known-mark', label: 'Mark' },
+  { value: 'plan-bearing', label: 'Plan' },
   { value: 'two-face', label: 'Two faces' },
 ];
 
@@ -66,6 +66,7 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
   };
   return (
     <>
+      <CheckResult sitting={sitting} id={last} />
       {caution && (
         <p class="banner">
           <strong>{caution}</strong>
@@ -102,7 +103,6 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
       {method === 'known-mark' && (
         <Switches label="North of the bearing" value={frame} options={FRAMES} onChoose={setFrame} />
       )}
-      <CheckResult sitting={sitting} id={last} />
       <Thumb
         session={session}
         label={method === 'sun-shadow' ? 'Take the shadow' : 'Sight the mark'}

@@ -1,6 +1,13 @@
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import { newsWords } from './capture-words.ts';
 
+/** What goes on; null where nothing does. */
+function phaseWords({ phase, news }: CaptureSession): string | null {
+  if (phase.value !== 'sweeping' || (news.value?.kind === 'stored' && news.value.what === 'open-start'))
+    return null;
+  return 'Follow the edge, slowly.';
+}
+
 /** What came of the last tap, and how many readings are safe on the device. */
 export function NewsLine({ session }: { session: CaptureSession }) {
   const news = session.news.value;
@@ -8,7 +15,7 @@ export function NewsLine({ session }: { session: CaptureSession }) {
   return (
     <div class="news" data-kind={news?.kind}>
       <p role="status" class="news-text">
-        {news ? newsWords(news) : 'Ready.'}
+        {phaseWords(session) ?? (news ? newsWords(news) : 'Ready.')}
       </p>
       <p class="small faint news-count">
         <span class="stored-count">{stored}</span> on this device

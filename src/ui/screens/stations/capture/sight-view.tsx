@@ -28,19 +28,13 @@ export function SightView({ capture, session }: { capture: Capture; session: Cap
           </svg>
         </>
       ) : (
-        <TopEdge session={session} noCamera={noCamera} />
+        <TopEdge noCamera={noCamera} />
       )}
     </div>
   );
 }
 
-function TopEdge({ session, noCamera }: { session: CaptureSession; noCamera: Capture['noCamera'] }) {
-  if (session.orientation.recording)
-    return (
-      <p class="sight-words">
-        A recorded movement stands in for the phone. What it shows is told below the figures.
-      </p>
-    );
+function TopEdge({ noCamera }: { noCamera: Capture['noCamera'] }) {
   return (
     <div class="sight-words">
       {noCamera && <p>{NO_CAMERA[noCamera]}</p>}

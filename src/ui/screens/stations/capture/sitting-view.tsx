@@ -45,14 +45,14 @@ export function SittingView(props: Props) {
   return (
     <div class="sitting">
       <div class="sitting-scene">
-        {task === 'check' ? null : <SightView capture={capture} session={session} />}
+        {recording && <RecordingBar recording={recording} />}
+        {!recording && task !== 'check' && <SightView capture={capture} session={session} />}
         <Figures session={session} />
-        {plane && (
+        {plane && task !== 'check' && (
           <HorizonStrip session={session} latitude={survey.site.latitude} plane={plane.name} {...strip} />
         )}
       </div>
       <div class="sitting-hand">
-        {recording && <RecordingBar recording={recording} />}
         {task !== 'check' && (
           <HeadingBanner session={session} onCheck={() => (sitting.task.value = 'check')} />
         )}

@@ -29,7 +29,12 @@ export function StartCard({ capture, children }: { capture: Capture; children?: 
         <button type="button" class="thumb" disabled={waiting} onClick={() => capture.begin('top-edge')}>
           Along the top edge
         </button>
-        <button type="button" class="thumb main" disabled={waiting} onClick={() => capture.begin('camera')}>
+        <button
+          type="button"
+          class={`thumb ${capture.mayPlay ? '' : 'main'}`}
+          disabled={waiting}
+          onClick={() => capture.begin('camera')}
+        >
           With the camera
         </button>
       </div>

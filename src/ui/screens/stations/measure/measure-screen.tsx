@@ -10,6 +10,7 @@ import { Figures } from '../capture/figures.tsx';
 import { FullScreen } from '../capture/full-screen.tsx';
 import { HeadingBanner } from '../capture/heading-banner.tsx';
 import { NewsLine } from '../capture/news-line.tsx';
+import { RecordingBar } from '../capture/recording-bar.tsx';
 import { SightView } from '../capture/sight-view.tsx';
 import { isOn, StartCard } from '../capture/start-card.tsx';
 import { Switches, Thumb } from '../capture/thumb.tsx';
@@ -67,15 +68,17 @@ function Measuring(props: SectionProps & { plane: RoofPlane; capture: Capture; s
     session.lies = laid;
   }, [laid, session]);
   const take = () => (laid ? takePlacing(session, plane, way) : takeEdge(session, plane, way));
+  const { recording } = session.orientation;
   const found = session.pointed.value?.planes.find(({ id }) => id === plane.id) ?? null;
   return (
     <div class="sitting">
       <div class="sitting-scene">
+        {recording && <RecordingBar recording={recording} />}
         {laid ? (
           <LiveTilt session={session} held={way} />
         ) : (
           <>
-            <SightView capture={capture} session={session} />
+            {!recording && <SightView capture={capture} session={session} />}
             <Figures session={session} />
           </>
         )}

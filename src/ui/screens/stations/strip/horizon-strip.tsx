@@ -36,11 +36,12 @@ export function HorizonStrip({ session, latitude, band, live, observed, sweep, u
   return (
     <figure class="strip">
       <div ref={box} class="strip-box">
-        {picture && <Drawing picture={picture} id="strip" label={words(unseen)} />}
+        {picture && <Drawing picture={picture} id="strip" label="The horizon unrolled" />}
         {picture && <Pointer session={session} frame={picture.frame} />}
       </div>
       <figcaption>
         <AccessLine live={live} plane={plane} />
+        {live.shade && <p class="small">{words(unseen)}</p>}
       </figcaption>
     </figure>
   );
@@ -48,10 +49,15 @@ export function HorizonStrip({ session, latitude, band, live, observed, sweep, u
 
 const whole = (azimuth: number) => Math.round(azimuth) % 360;
 
+/** Ranges told in words; the picture shows all. */
+const MOST_RANGES = 3;
+
 function words(unseen: Props['unseen']): string {
-  if (unseen.length === 0) return 'All of the sun’s band in front of the plane has been looked at.';
-  const ranges = unseen.map(([from, to]) => `${whole(from)}° to ${whole(to)}°`);
-  return `Still unseen in the sun’s band: ${ranges.join(', ')}.`;
+  const wide = unseen.filter(([from, to]) => to - from >= 1);
+  if (wide.length === 0) return 'All of the sun’s band in front of the plane has been looked at.';
+  const ranges = wide.slice(0, MOST_RANGES).map(([from, to]) => `${whole(from)}° to ${whole(to)}°`);
+  const more = wide.length > MOST_RANGES ? ` and ${wide.length - MOST_RANGES} more` : '';
+  return `Unseen in the sun’s band: ${ranges.join(', ')}${more}.`;
 }
 
 function AccessLine({ live: { shade, fault }, plane }: { live: LiveShade; plane: string }) {

@@ -35,7 +35,7 @@ export function stripFrame({ latitude, band, profile, width, height }: StripInpu
   };
 }
 
-/** The sun's band, hatched where nobody looked yet; what is traced; the sweep at work. */
+/** The sun's band, with rings where nobody looked yet; what is traced; the sweep at work. */
 export function stripPicture(input: StripInput): Picture & { frame: SkyFrame } {
   const { band, profile, observed, sweep, width, height } = input;
   const frame = stripFrame(input);
@@ -49,7 +49,7 @@ export function stripPicture(input: StripInput): Picture & { frame: SkyFrame } {
       kind: 'path',
       lines: boxes(open),
       closed: true,
-      fill: { hatch: { angle: 45, spacing: 5, width: 1.8, tone: 'ink' } },
+      fill: { hatch: { angle: 45, spacing: 7, width: 3.4, ringed: true, tone: 'ink' } },
     },
     ...(profile ? obstructionMarks(frame, obstructionShapes(profile, new Map(), null)) : []),
     { kind: 'path', lines: linesOf(frame, sweep), pen: { tone: 'accent', width: 3 } },
