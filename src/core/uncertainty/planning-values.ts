@@ -31,14 +31,16 @@ export const BULGE = { radius: 20, most: 6 };
 export const REPEATS = { asPlanned: 1, farthest: 4 };
 
 /**
- * Sky that nobody looked at is cut into patches no wider than this, degrees. In each one stands, apart from the others:
+ * Sky that nobody looked at is cut into patches no wider than `patch`, degrees. In each one stands, apart from the others:
  * nothing (a share `open`); or where something was traced right beside it, more of that (a share `alike`, at 0.6 to 1.4
- * times its height); or else something opaque of a height with a falling exponential distribution, degrees.
+ * times its height); or else something opaque of a height with a falling exponential distribution, degrees. A gap of one
+ * patch between two traces of one obstruction has the shares `between`.
  */
 export const UNSEEN = {
   patch: 20,
   open: 0.45,
   alike: 0.3,
+  between: { open: 0.1, alike: 0.8 },
   alikeFrom: 0.6,
   alikeTo: 1.4,
   height: 10,

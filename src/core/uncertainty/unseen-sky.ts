@@ -12,9 +12,18 @@ import type { RandomSource } from './random-source.ts';
 export interface UnseenPatch {
   readonly direct: Float64Array;
   readonly even: Float64Array;
-  /** Height of what was traced right beside it, degrees; 0 for nothing. */
-  readonly beside: number;
+  readonly beside: Beside;
 }
+
+/** What was traced right beside a patch. */
+export interface Beside {
+  /** Degrees; 0 for nothing. */
+  height: number;
+  /** One obstruction on both sides: it hardly ends and begins again. */
+  goesOn: boolean;
+}
+
+const NOTHING: Beside = { height: 0, goesOn: false };
 
 const PER_COLUMN = COLUMNS / DRAW_COLUMNS;
 /** Patches that bring less than this share of the plane's light are left out. */
@@ -29,11 +38,13 @@ export function unseenPatches(
   const unseen = observedShares(observed).map((share) => 1 - Math.min(1, share));
   const patches: UnseenPatch[] = [];
   for (const [from, to] of openRuns(unseen)) {
-    const beside = Math.max(heightAt(profile, from - 1), heightAt(profile, to));
     const pieces = Math.ceil(((to - from) * COLUMN_WIDTH) / UNSEEN.patch);
+    const beside = besideOf(profile, from - 1, to, pieces === 1);
     for (let k = 0; k < pieces; k++) {
       const part = (share: number) => from + Math.round(((to - from) * share) / pieces);
-      patches.push(patchOf(light, unseen, part(k), part(k + 1), k === 0 || k === pieces - 1 ? beside : 0));
+      patches.push(
+        patchOf(light, unseen, part(k), part(k + 1), k === 0 || k === pieces - 1 ? beside : NOTHING),
+      );
     }
   }
   const least = LEAST_SHARE * (light.direct + light.even);
@@ -55,13 +66,25 @@ function openRuns(unseen: Float64Array): [number, number][] {
   return runs;
 }
 
-/** Highest blocked elevation in a column. */
-function heightAt({ columnFirst, intervalFirst, high }: HorizonProfile, column: number): number {
+function besideOf(profile: HorizonProfile, left: number, right: number, narrow: boolean): Beside {
+  const [a, b] = [standingAt(profile, left), standingAt(profile, right)];
+  const goesOn = narrow && [...a.obstructions].some((one) => b.obstructions.has(one));
+  return { height: goesOn ? (a.height + b.height) / 2 : Math.max(a.height, b.height), goesOn };
+}
+
+/** What stands in a column, and how high it reaches. */
+function standingAt(
+  { columnFirst, intervalFirst, intervalObstruction, high }: HorizonProfile,
+  column: number,
+) {
   const c = (column + COLUMNS) % COLUMNS;
+  const obstructions = new Set<number>();
   let height = 0;
-  for (let k = intervalFirst[columnFirst[c]]; k < intervalFirst[columnFirst[c + 1]]; k++)
+  for (let k = intervalFirst[columnFirst[c]]; k < intervalFirst[columnFirst[c + 1]]; k++) {
+    obstructions.add(intervalObstruction[k]);
     height = Math.max(height, high[k]);
-  return height;
+  }
+  return { obstructions, height };
 }
 
 function patchOf(
@@ -69,7 +92,7 @@ function patchOf(
   unseen: Float64Array,
   from: number,
   to: number,
-  beside: number,
+  beside: Beside,
 ): UnseenPatch {
   const direct = new Float64Array(NODES);
   const even = new Float64Array(NODES);
@@ -88,11 +111,12 @@ function patchOf(
 export function takeUnseen(patches: readonly UnseenPatch[], random: RandomSource, taken: Taken): void {
   for (const { direct, even, beside } of patches) {
     const [choice, size] = [random.uniform(), random.uniform()];
-    if (choice < UNSEEN.open) continue;
-    const alike = beside > 0 && choice < UNSEEN.open + UNSEEN.alike;
-    const height = alike
-      ? beside * (UNSEEN.alikeFrom + size * (UNSEEN.alikeTo - UNSEEN.alikeFrom))
-      : -UNSEEN.height * Math.log(1 - size);
+    const { open, alike } = beside.goesOn ? UNSEEN.between : UNSEEN;
+    if (choice < open) continue;
+    const height =
+      beside.height > 0 && choice < open + alike
+        ? beside.height * (UNSEEN.alikeFrom + size * (UNSEEN.alikeTo - UNSEEN.alikeFrom))
+        : -UNSEEN.height * Math.log(1 - size);
     const node = Math.min(NODES - 1, Math.round(Math.min(UNSEEN.highest, height) / NODE));
     taken.direct += direct[node];
     taken.even += even[node];
