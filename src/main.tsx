@@ -3,8 +3,10 @@ import { AppError } from './app/app-error.ts';
 import { appState } from './app/app-state.ts';
 import type { AppServices, SampleSurvey } from './app/app-services.ts';
 import { offerUpdates } from './app/update-flow.ts';
+import { backupDatabase } from './storage/backup-database.ts';
 import { Connection } from './storage/connection.ts';
 import { photoDatabase } from './storage/photo-database.ts';
+import { sha256Of } from './storage/sha256-of.ts';
 import { surveyDatabase } from './storage/survey-database.ts';
 import { deviceLocation } from './sensors/location.ts';
 import type { Recordings } from './sensors/recorded-stream.ts';
@@ -48,18 +50,21 @@ async function keepStorage(): Promise<void> {
   }
 }
 
+const checker = async () => (await parser()).surveyFromJson;
 const state = appState();
 const connection = new Connection((report) => (state.database.value = report));
 const services: AppServices = {
   state,
   store: surveyDatabase({
     connection,
-    checker: async () => (await parser()).surveyFromJson,
+    checker,
     now,
     newId,
   }),
   weather: weatherDatabase(connection, now),
   photos: photoDatabase(connection, now),
+  backup: backupDatabase({ connection, checker, now }),
+  hash: sha256Of,
   location: deviceLocation,
   assess: new AssessOnWorker(
     () => new Worker(new URL('./workers/assess-worker.ts', import.meta.url), { type: 'module' }),

@@ -3,6 +3,7 @@ import type { Survey } from '../core/survey/survey.ts';
 import type { AppState } from './app-state.ts';
 import type { AssessClient } from './assess-client.ts';
 import type { CaptureDevices } from './capture/sensor-interfaces.ts';
+import type { BackupStore } from './backup/backup-store.ts';
 import type { LocationSource } from './location-source.ts';
 import type { PhotoStore } from './photo-store.ts';
 import type { SurveyStore } from './survey-store.ts';
@@ -22,6 +23,7 @@ export interface AppServices {
   store: SurveyStore;
   weather: WeatherStore;
   photos: PhotoStore;
+  backup: BackupStore;
   location: LocationSource;
   assess: AssessClient;
   /** What a capture needs of the device; loaded when the first one is opened. */
@@ -29,6 +31,8 @@ export interface AppServices {
   samples: SampleSurvey[];
   parse: (text: string) => Promise<Parsed<Survey>>;
   newId: () => string;
+  /** SHA-256, hexadecimal. */
+  hash: (contents: Uint8Array) => Promise<string>;
   /** Milliseconds since 1970. */
   now: () => number;
   /** Asks the browser to keep what is stored; a refusal is normal. */

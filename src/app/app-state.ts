@@ -2,6 +2,7 @@ import { signal, type Signal } from '@preact/signals-core';
 import type { Problem } from '../core/survey/problem.ts';
 import type { Survey } from '../core/survey/survey.ts';
 import type { AppErrorCode } from './app-error.ts';
+import type { MergeResult } from './backup/backup-store.ts';
 import type { StepCode, Steps, StoredSurvey, SurveySummary } from './survey-store.ts';
 import type { WeatherFileSummary } from './weather-store.ts';
 
@@ -25,6 +26,17 @@ export type ImportResult =
   | { file: string; outcome: 'refused'; problems: Problem[] }
   | { file: string; outcome: 'failed'; code: AppErrorCode }
   | { file: string; outcome: 'left-out'; title: string };
+
+/** What came of one survey of an archive. */
+export type RestoredSurvey = { id: string; title: string } & (
+  MergeResult | { outcome: 'refused'; code: AppErrorCode; detail?: string }
+);
+
+/** What came of one archive. */
+export type RestoreResult =
+  | { file: string; outcome: 'restored'; surveys: RestoredSurvey[]; photos: number }
+  | { file: string; outcome: 'damaged'; problems: Problem[] }
+  | { file: string; outcome: 'failed'; code: AppErrorCode };
 
 /** A good file whose id is on this device already; a person decides. */
 export interface ImportConflict {
@@ -57,6 +69,7 @@ export interface AppState {
   notice: Signal<Notice | null>;
   imports: Signal<ImportResult[]>;
   conflicts: Signal<ImportConflict[]>;
+  restores: Signal<RestoreResult[]>;
   /** Ids of surveys found unreadable, with why. */
   unreadable: Signal<ReadonlyMap<string, Problem[]>>;
   /** When each survey had last been changed when it was looked at for that; for actions only. */
@@ -77,6 +90,7 @@ export function appState(): AppState {
     notice: signal(null),
     imports: signal([]),
     conflicts: signal([]),
+    restores: signal([]),
     unreadable: signal(new Map()),
     lookedAt: new Map(),
     trouble: signal(null),

@@ -2,6 +2,9 @@ import 'fake-indexeddb/auto';
 import { IDBFactory } from 'fake-indexeddb';
 import { surveyFromJson } from '../../src/core/survey/parse-survey.ts';
 import { Connection, type ConnectionReport } from '../../src/storage/connection.ts';
+import { backupDatabase } from '../../src/storage/backup-database.ts';
+import { photoDatabase } from '../../src/storage/photo-database.ts';
+import { sha256Of } from '../../src/storage/sha256-of.ts';
 import { surveyDatabase } from '../../src/storage/survey-database.ts';
 import { weatherDatabase } from '../../src/storage/weather-database.ts';
 
@@ -22,6 +25,10 @@ export function tab(report: ConnectionReport = () => undefined) {
     connection,
     surveys: surveyDatabase({ connection, checker, now, newId }),
     weather: weatherDatabase(connection, now),
+    photos: photoDatabase(connection, now),
+    backup: backupDatabase({ connection, checker, now }),
+    hash: sha256Of,
+    now,
     setClock: (ms: number) => (timeMs = ms),
   };
 }

@@ -1,6 +1,11 @@
 /** Hands a text to the browser as a file to keep. */
 export function saveFile(fileName: string, text: string): void {
-  const address = URL.createObjectURL(new Blob([text], { type: 'application/json' }));
+  saveBlob(fileName, new Blob([text], { type: 'application/json' }));
+}
+
+/** Hands any contents to the browser as a file to keep. */
+export function saveBlob(fileName: string, contents: Blob): void {
+  const address = URL.createObjectURL(contents);
   const link = document.createElement('a');
   link.href = address;
   link.download = fileName;

@@ -1,6 +1,7 @@
 import { useRef } from 'preact/hooks';
 import { attempt } from '../../../app/attempt.ts';
-import { importSurveys, type PickedFile } from '../../../app/actions/import-surveys.ts';
+import { restoreBackup } from '../../../app/actions/restore-backup.ts';
+import { importSurveys } from '../../../app/actions/import-surveys.ts';
 import { useApp } from '../../app-context.ts';
 import { ConflictDialog } from './conflict-dialog.tsx';
 import { ImportResults } from './import-results.tsx';
@@ -11,8 +12,13 @@ export function ImportFiles() {
   const services = useApp();
   const { state } = services;
   const input = useRef<HTMLInputElement>(null);
-  const take = (files: readonly PickedFile[]) => {
-    if (files.length > 0) void attempt(state, () => importSurveys(services, files));
+  const take = (files: readonly File[]) => {
+    const archives = files.filter(({ name }) => /[.]zip$/i.test(name));
+    const surveys = files.filter((file) => !archives.includes(file));
+    void attempt(state, async () => {
+      if (archives.length > 0) await restoreBackup(services, archives);
+      if (surveys.length > 0) await importSurveys(services, surveys);
+    });
   };
   const dropping = useFileDrop(take);
   const conflict = state.conflicts.value[0];

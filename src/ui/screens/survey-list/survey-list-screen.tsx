@@ -5,6 +5,7 @@ import { refreshList } from '../../../app/actions/refresh-list.ts';
 import { useApp } from '../../app-context.ts';
 import { ScreenHeading } from '../../components/screen-heading.tsx';
 import { PLAIN_SCREENS } from '../../routes.ts';
+import { BackupSection } from './backup-section.tsx';
 import { DeletedSurveys } from './deleted-surveys.tsx';
 import { ImportFiles } from './import-files.tsx';
 import { SampleList } from './sample-list.tsx';
@@ -74,6 +75,7 @@ export function SurveyListScreen() {
         </ul>
       )}
       <ImportFiles />
+      <BackupSection surveys={present} />
       <SampleList open={surveys !== null && present.length === 0} />
       {deleted.length > 0 && <DeletedSurveys surveys={deleted} />}
       <WeatherFiles />

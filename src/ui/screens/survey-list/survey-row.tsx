@@ -9,6 +9,7 @@ import { ProblemList } from '../../components/problem-list.tsx';
 import { focusHeading } from '../../components/screen-heading.tsx';
 import { saveFile } from '../../device/save-file.ts';
 import { surveyPath } from '../../survey-path.ts';
+import { saveBackup } from './save-backup.ts';
 import { summaryLine } from './summary-line.ts';
 
 function RowActions({ summary, unreadable }: { summary: SurveySummary; unreadable: boolean }) {
@@ -26,6 +27,9 @@ function RowActions({ summary, unreadable }: { summary: SurveySummary; unreadabl
     <>
       <button type="button" onClick={run(save)}>
         {unreadable ? 'Export as stored' : 'Export'}
+      </button>
+      <button type="button" onClick={run(() => saveBackup(services, [summary.id], 'survey'))}>
+        Back up with photos
       </button>
       {!unreadable && (
         <button type="button" onClick={run(() => duplicateSurvey(services, summary.id))}>
