@@ -5,7 +5,7 @@ import type { SceneLight } from './true-light.ts';
 import { annualAccess, sceneLight } from './true-light.ts';
 import { CAREFUL, CHECKED, UNCHECKED } from './virtual-survey.ts';
 
-/** All seeded surveys of all scenes, as tables: `npx tsx tests/virtual-phone/run-all.ts [surveys] [draws]`. */
+/** All seeded surveys of all scenes, as tables: `npx tsx tests/virtual-phone/run-all.ts [surveys] [draws] [checked|careful]`. */
 const surveys = Number(process.argv[2] ?? 500);
 const draws = Number(process.argv[3] ?? 400);
 const started = process.cpuUsage();
@@ -34,7 +34,9 @@ for (const light of lights) {
 }
 
 print(`\nTruth inside the 95 % interval (${draws} draws), trees and year drawn; mean width in points`);
-for (const routine of ['checked', 'careful'] as const)
+for (const routine of (process.argv[4] ? [process.argv[4]] : ['checked', 'careful']) as (
+  'checked' | 'careful'
+)[])
   for (const [name, noise] of Object.entries(noises)) {
     let [inside, count] = [0, 0];
     for (const light of lights) {

@@ -48,6 +48,32 @@ describe('how much worse than planned a survey was pointed', () => {
     expect(noiseScale({ runs: [run(closing(200, 200))] })).toBeLessThanOrEqual(4);
   });
 
+  test('grows with an inclination that was found far off, once for all runs of the phone', () => {
+    const found = { value: 2.1, standardDeviation: 0.2, source: 'two-face' } as const;
+    const turned = run({ index: { camera: found, 'top-edge': index } });
+    expect(noiseScale({ runs: [turned] })).toBeGreaterThan(2);
+    expect(noiseScale({ runs: [turned, turned] })).toBe(noiseScale({ runs: [turned] }));
+  });
+
+  test('grows with checks that disagree, less what the run turned between them', () => {
+    const pair = (later: number) => [check(null), { ...check(null), takenAtMs: 600_000, offset: 1 + later }];
+    expect(noiseScale({ runs: [run({ checks: pair(0.5) })] })).toBe(1);
+    const apart = noiseScale({ runs: [run({ checks: pair(4) })] });
+    expect(apart).toBeGreaterThan(2);
+    const heading = {
+      offset: 1,
+      standardDeviation: 0.8,
+      atMs: 0,
+      ratePerMinute: 0.4,
+      ratePerMinuteDeviation: 0.05,
+      source: 'check',
+      from: null,
+      ownDeviation: 0.8,
+      outliers: null,
+    } as const;
+    expect(noiseScale({ runs: [run({ heading, checks: pair(4) })] })).toBe(1);
+  });
+
   test('a compass that stands by its check pulls back what a closing shows', () => {
     const shown = noiseScale({ runs: [run(closing(1.2, 1.2))] });
     const pulled = noiseScale({ runs: [run({ ...closing(1.2, 1.2), checks: [check(1)] })] });
