@@ -12,7 +12,7 @@ type File = ReturnType<typeof surveyFile>;
 
 /** Gives files to the picker of the list. */
 export async function importFiles(page: Page, ...files: File[]): Promise<void> {
-  await page.locator('input[type="file"]').setInputFiles(files);
+  await page.locator('#survey-files').setInputFiles(files);
 }
 
 /** Imports a survey and waits until it is told to be stored. */
