@@ -2,12 +2,13 @@ import type { Climate } from '../irradiance/climate.ts';
 import type { PointedSurvey } from '../pointing/pointed-survey.ts';
 import type { AccessInterval, IntervalSource } from '../shading/assessment.ts';
 import type { SkyMap } from '../shading/sky-map.ts';
+import { AccessAccount } from './access-account.ts';
 import type { IntervalSourceId } from './interval-source.ts';
 import { INTERVAL_SOURCES } from './interval-source.ts';
-import { BIAS_PAIRS, DRAWS, LEFT_AFTER, SOURCE_DRAWS } from './planning-values.ts';
+import { DRAWS, LEFT_AFTER, SOURCE_DRAWS } from './planning-values.ts';
 import { cureOf, diffuseLeft, diffuseSpread, varianceLeft } from './source-cures.ts';
 import type { DrawnLosses } from './station-draws.ts';
-import { diffuseOverDirect, StationDraws } from './station-draws.ts';
+import { StationDraws } from './station-draws.ts';
 import type { SurveyDraws } from './survey-draws.ts';
 import { surveyDraws } from './survey-draws.ts';
 import type { UncertainStation } from './uncertain-station.ts';
@@ -73,7 +74,14 @@ export function drawAccess(
   survey: DrawnSurvey,
 ): DrawnAccess {
   const drawn = new StationDraws(map, station, survey.latitude);
-  const account = new AccessAccount(map, drawn, annual, survey, station.obstructions.length > 0);
+  const account = new AccessAccount(
+    map,
+    drawn,
+    annual,
+    survey.draws,
+    diffuseSpread(survey.climate),
+    station.obstructions.length > 0,
+  );
   const losses = drawn.draw(survey.draws, survey.draws.count);
   const cured: DrawnAccess['cured'] = new Map();
   if (survey.sources)
@@ -121,57 +129,6 @@ function cureSource(
       const left = diffuseLeft(survey.climate);
       return { access: account.access(losses, count, { diffuse: left }), left: left ** 2 };
     }
-  }
-}
-
-/**
- * Turns losses into solar access, with the split between direct and even light drawn too. The survey has erred once already
- * and the draws err again from there, so the mean error of pointing stands in them twice too much and is taken off: the
- * draws then lie about the truth. Ref: Davison and Hinkley (1997), Bootstrap Methods and their Application, section 2.4.
- */
-class AccessAccount {
-  private readonly shift: number;
-  private readonly diffuseOverDirect: number;
-  private readonly spread: number;
-  private readonly bias: { direct: number; even: number };
-
-  constructor(
-    map: SkyMap,
-    private readonly drawn: StationDraws,
-    annual: number,
-    private readonly survey: DrawnSurvey,
-    anything: boolean,
-  ) {
-    this.diffuseOverDirect = diffuseOverDirect(map);
-    this.spread = diffuseSpread(survey.climate);
-    const { direct, even } = drawn.nominal();
-    this.shift = annual - this.left(direct, even, 0);
-    this.bias = anything ? drawn.pointingBias(survey.draws, BIAS_PAIRS) : { direct: 0, even: 0 };
-  }
-
-  access(
-    losses: DrawnLosses,
-    count: number,
-    scale: { unseen?: number; diffuse?: number } = {},
-  ): Float64Array {
-    const { unseen = 1, diffuse = 1 } = scale;
-    const access = new Float64Array(count);
-    for (let i = 0; i < count; i++) {
-      const direct = losses.direct[i] + unseen * losses.unseenDirect[i] - 2 * this.bias.direct;
-      const even = losses.even[i] + unseen * losses.unseenEven[i] - 2 * this.bias.even;
-      const share = this.left(direct, even, diffuse * this.spread * this.survey.draws.diffuse[i]);
-      access[i] = Math.max(0, Math.min(1, share + this.shift));
-    }
-    return access;
-  }
-
-  /** Share of the light that is left, with `more` diffuse light (a share of it) and as much less direct light. */
-  private left(lostDirect: number, lostEven: number, more: number): number {
-    const { direct, even, ground } = this.drawn.light;
-    const evenScale = Math.max(0.1, 1 + more);
-    const directScale = Math.max(0.1, 1 - more * this.diffuseOverDirect);
-    const whole = directScale * direct + evenScale * even + ground;
-    return whole > 0 ? 1 - (directScale * lostDirect + evenScale * lostEven) / whole : 1;
   }
 }
 

@@ -1,6 +1,5 @@
 import { leafShares } from '../survey/leaf-months.ts';
 import type { SkyMap } from '../shading/sky-map.ts';
-import { monthsOf } from '../shading/sky-year.ts';
 import type { AnnualLight } from './annual-light.ts';
 import { annualLight } from './annual-light.ts';
 import type { Deviations } from './blocked-annual.ts';
@@ -172,12 +171,4 @@ function triangular([below, above]: Spread, u: number): number {
   return u < below / width
     ? -below + Math.sqrt(u * width * below)
     : above - Math.sqrt((1 - u) * width * above);
-}
-
-/** Diffuse over direct light on the horizontal in a year, without what comes from the sun's place. */
-export function diffuseOverDirect(map: SkyMap): number {
-  const sum = (values: readonly number[]) => values.reduce((all, value) => all + value, 0);
-  const diffuse = sum(monthsOf(map.year.dome));
-  const direct = sum(monthsOf(map.year.ghi)) - diffuse;
-  return direct > 0 ? diffuse / direct : 0;
 }
