@@ -34,9 +34,9 @@ export function rowAt(part: RecordedPart, ms: number): ReadingSample {
   const restStart = rows[restFrom][0] - start;
   const rest = lengthOf(part) - restStart;
   const over = ms - restStart;
-  const turned = rest > 0 && over > 0 ? over % (2 * rest) : Math.max(0, over);
-  const at = over > 0 ? restStart + (turned > rest ? 2 * rest - turned : turned) : ms;
-  return nearestRow(rows, start + at);
+  if (over <= 0) return nearestRow(rows, start + ms);
+  const turned = rest > 0 ? over % (2 * rest) : 0;
+  return nearestRow(rows, start + restStart + (turned > rest ? 2 * rest - turned : turned));
 }
 
 /** Whether a part has come to its rest. */

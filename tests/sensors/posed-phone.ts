@@ -1,4 +1,4 @@
-import { DEGREES, RADIANS, fullCircle, safeAsin } from '../../src/core/angles/angles.ts';
+import { DEGREES, RADIANS, fullCircle } from '../../src/core/angles/angles.ts';
 import type { DeviceAngles, Vector } from '../../src/core/pointing/attitude.ts';
 import { vectorOf } from '../../src/core/pointing/attitude.ts';
 
@@ -17,8 +17,11 @@ const rightOf = (azimuth: number): Vector => [Math.cos(azimuth * RADIANS), -Math
 /** Angles of a device whose axes lie so: the inverse of the W3C matrix Z(alpha) X(beta) Y(gamma). */
 export function anglesOf({ x, y, z }: Axes): DeviceAngles {
   const side = z[2] < 0 ? -1 : 1;
-  const rise = safeAsin(y[2]) * DEGREES;
+  const rise = Math.atan2(y[2], Math.hypot(y[0], y[1])) * DEGREES;
   const beta = side > 0 ? rise : rise >= 0 ? 180 - rise : -180 - rise;
+  // upright, alpha and gamma turn about one axis: all of the turn is given to alpha
+  if (Math.hypot(y[0], y[1]) < 1e-9)
+    return { alpha: fullCircle(Math.atan2(x[1], x[0]) * DEGREES), beta: rise, gamma: 0 };
   return {
     alpha: fullCircle(Math.atan2(-y[0] * side, y[1] * side) * DEGREES),
     beta,

@@ -51,10 +51,7 @@ export class PointTrace {
     const waiting = this.waiting();
     this.trace.value = null;
     if (waiting.length === 0) return;
-    if (waiting.length < FEWEST[choice.shape] || obstruction === null) {
-      this.session.refuse('too-short');
-      return;
-    }
+    if (obstruction === null) return;
     await this.session.act({
       edit: (survey) =>
         withStation(survey, this.stationId, (station) =>
@@ -64,6 +61,22 @@ export class PointTrace {
       title: name,
       news: { what: 'trace', name, count: waiting.length },
     });
+  }
+
+  /** Whether the waiting points are enough to stand by themselves. */
+  enough({ shape }: TraceChoice): boolean {
+    return this.waiting().length >= FEWEST[shape];
+  }
+
+  /** Leaves the waiting points out, too few to be a trace; their raw readings stay. */
+  async drop(): Promise<void> {
+    const ids = this.waiting().map(({ id }) => id);
+    this.trace.value = null;
+    await this.session.record.act(
+      (survey) => withStation(survey, this.stationId, (station) => withoutOwnSightings(station, ids)),
+      { code: 'entry-deleted', title: 'Sighting' },
+    );
+    this.session.refuse('too-short');
   }
 
   /** Ends the trace at work; the next point begins another. */

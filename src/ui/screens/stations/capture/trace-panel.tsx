@@ -1,7 +1,6 @@
 import { useState } from 'preact/hooks';
 import { undoLast } from '../../../../app/capture/undo-last.ts';
 import { useApp } from '../../../app-context.ts';
-import { FEWEST } from '../../../../app/capture/trace-choice.ts';
 import { ObstructionSheet } from './obstruction-sheet.tsx';
 import type { Sitting } from './sitting.ts';
 import { Switches, Thumb } from './thumb.tsx';
@@ -33,7 +32,7 @@ export function TracePanel({ sitting }: { sitting: Sitting }) {
   const sight = async () => {
     await points.sight(choice);
     if (choice.way !== 'ridge') return;
-    if (choice.obstruction === null && points.waiting().length >= FEWEST[choice.shape]) setSheet('after');
+    if (choice.obstruction === null && points.enough(choice)) setSheet('after');
     if (choice.obstruction !== null && points.trace.value === null && points.waiting().length === 0)
       sitting.traced();
   };
@@ -41,7 +40,8 @@ export function TracePanel({ sitting }: { sitting: Sitting }) {
     if (points.trace.value !== null) {
       points.end();
       sitting.traced();
-    } else if (choice.obstruction === null) setSheet('after');
+    } else if (!points.enough(choice)) await points.drop();
+    else if (choice.obstruction === null) setSheet('after');
     else {
       await points.finish(choice, name);
       sitting.traced();
