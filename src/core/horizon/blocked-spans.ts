@@ -14,13 +14,20 @@ export interface BlockedSpans {
   readonly low: Float64Array;
   readonly high: Float64Array;
   /** Row of each span in `lost`. */
-  readonly row: Uint16Array;
+  readonly row: Uint32Array;
   /** Share of light lost, [row · 12 + month]. */
   readonly lost: Float64Array;
 }
 
-/** Spans that the standing obstructions block. */
-export function blockedSpans(profile: HorizonProfile, standing?: Standing): BlockedSpans {
+/**
+ * Spans that the standing obstructions block; with `around`, only in slices where one of those obstructions stands,
+ * which is all that taking them away can change.
+ */
+export function blockedSpans(
+  profile: HorizonProfile,
+  standing?: Standing,
+  around?: ReadonlySet<number>,
+): BlockedSpans {
   const slices = profile.sliceColumn.length;
   const spans = new SpanList(profile);
   const first = new Uint32Array(slices + 1);
@@ -28,6 +35,7 @@ export function blockedSpans(profile: HorizonProfile, standing?: Standing): Bloc
   for (let slice = 0; slice < slices; slice++) {
     first[slice] = spans.count;
     here.length = 0;
+    if (around && !standsIn(profile, slice, around)) continue;
     for (let k = profile.intervalFirst[slice]; k < profile.intervalFirst[slice + 1]; k++)
       if (!standing || standing[profile.intervalObstruction[k]]) here.push(k);
     if (here.length === 1) spans.addSingle(here[0]);
@@ -37,11 +45,17 @@ export function blockedSpans(profile: HorizonProfile, standing?: Standing): Bloc
   return { profile, first, ...spans.arrays() };
 }
 
+function standsIn(profile: HorizonProfile, slice: number, obstructions: ReadonlySet<number>): boolean {
+  for (let k = profile.intervalFirst[slice]; k < profile.intervalFirst[slice + 1]; k++)
+    if (obstructions.has(profile.intervalObstruction[k])) return true;
+  return false;
+}
+
 class SpanList {
   count = 0;
   private readonly low: Float64Array;
   private readonly high: Float64Array;
-  private readonly row: Uint16Array;
+  private readonly row: Uint32Array;
   private readonly lost: number[];
   private readonly rowOfPair = new Map<number, number>();
   private readonly ends: number[] = [];
@@ -50,7 +64,7 @@ class SpanList {
     const room = 2 * profile.low.length; // n intervals have 2n ends, so under 2n spans between them
     this.low = new Float64Array(room);
     this.high = new Float64Array(room);
-    this.row = new Uint16Array(room);
+    this.row = new Uint32Array(room);
     this.lost = [];
     for (const passes of profile.transmittance) this.lost.push(1 - passes);
   }

@@ -1,20 +1,14 @@
 import { blockedSpans } from '../horizon/blocked-spans.ts';
 import type { StationHorizon } from '../horizon/station-horizon.ts';
-import type { MonthlyShares, StationAssessment } from './assessment.ts';
+import type { StationAssessment } from './assessment.ts';
 import { blockedLight, shadedMonths } from './blocked-light.ts';
 import { coverage } from './coverage.ts';
 import { hourlyAccess } from './hourly-access.ts';
 import type { KnownObstructions } from './obstruction-shading.ts';
+import { monthlyShares } from './monthly-shares.ts';
 import { obstructionCosts } from './obstruction-shading.ts';
 import type { SkyMap } from './sky-map.ts';
 import { unshadedMonths } from './sky-map.ts';
-
-/** Less light in a month than this is a month without sun, kWh/m2. */
-const DARK_MONTH = 1e-4;
-
-/** Shares of two rows of twelve months; null where the month is dark. */
-export const monthlyShares = (light: readonly number[], whole: readonly number[]): MonthlyShares =>
-  whole.map((all, month) => (all > DARK_MONTH ? Math.min(1, light[month] / all) : null));
 
 /** What one station saw costs one plane. */
 export function assessStation(

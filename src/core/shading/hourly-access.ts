@@ -29,7 +29,7 @@ export function hourlyAccess(map: SkyMap, spans: BlockedSpans, blocked: BlockedL
       const whole = map.directHours[cell] + even + band + ghi[cell] * groundShare;
       if (whole < DARK) return null;
       const lost = directLost[cell] + even * blocked.domeShare[month] + band * blocked.bandShare[month];
-      return Math.max(0, 1 - lost / whole);
+      return Math.min(1, Math.max(0, 1 - lost / whole));
     }),
   );
 }

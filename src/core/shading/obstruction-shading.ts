@@ -1,9 +1,11 @@
+import type { Standing } from '../horizon/blocked-spans.ts';
 import { blockedSpans } from '../horizon/blocked-spans.ts';
 import type { HorizonProfile } from '../horizon/horizon-profile.ts';
 import { obstructionKind } from '../survey/obstruction-kinds.ts';
 import type { Obstruction } from '../survey/survey.ts';
 import type { ObstructionGroup, ObstructionShading } from './assessment.ts';
 import { blockedLight, shadedMonths } from './blocked-light.ts';
+import { DARK_MONTH } from './monthly-shares.ts';
 import type { SkyMap } from './sky-map.ts';
 import { unshadedMonths } from './sky-map.ts';
 
@@ -14,10 +16,7 @@ import { unshadedMonths } from './sky-map.ts';
 const LEAST_SHARED_GAIN = 0.002;
 const LEAST_SHARED_PART = 0.1;
 /** Pairs are compared among this many obstructions, those that would cost most alone. */
-const MOST_COMPARED = 40;
-
-/** Light behind the obstructions that stand, kWh/m2 by month; the sum is the year. */
-type LightBehind = (standing: readonly boolean[]) => number[];
+const MOST_COMPARED = 12;
 
 /** What is known of each obstruction, by id. */
 export type KnownObstructions = ReadonlyMap<string, Pick<Obstruction, 'name' | 'kind'>>;
@@ -35,27 +34,31 @@ export function obstructionCosts(
 ): ObstructionCosts {
   const count = profile.obstructionIds.length;
   const whole = unshadedMonths(map);
-  const lightBehind: LightBehind = (standing) =>
-    shadedMonths(map, blockedLight(map, blockedSpans(profile, standing)));
-  const all = lightBehind(Array<boolean>(count).fill(true));
-  const without = (gone: readonly number[]) =>
-    lightBehind(Array.from({ length: count }, (_, i) => !gone.includes(i)));
-  const gain = (light: readonly number[]) => (sum(light) - sum(all)) / sum(whole);
-  const rows = profile.obstructionIds.map((id, i) => {
-    const cleared = without([i]);
-    const alone = lightBehind(Array.from({ length: count }, (_, other) => other === i));
+  const lost = (standing: Standing | undefined, around?: ReadonlySet<number>): number[] => {
+    const light = shadedMonths(map, blockedLight(map, blockedSpans(profile, standing, around)));
+    return whole.map((all, m) => all - light[m]);
+  };
+  const standingWithout = (gone: readonly number[]) =>
+    Array.from({ length: count }, (_, i) => !gone.includes(i));
+  const gained = (gone: readonly number[]): number[] => {
+    const around = new Set(gone);
+    const cleared = lost(standingWithout(gone), around);
+    return lost(undefined, around).map((all, m) => all - cleared[m]);
+  };
+  const share = (light: readonly number[]) => notBelowZero(sum(light) / sum(whole));
+  const rows = profile.obstructionIds.map((id, i): ObstructionShading => {
+    const gain = gained([i]);
+    const alone = Array.from({ length: count }, (_, other) => other === i);
     return {
       id,
       name: obstructions.get(id)?.name ?? id,
-      gainIfRemoved: notBelowZero(gain(cleared)),
-      lossIfAlone: notBelowZero(1 - sum(alone) / sum(whole)),
-      monthly: whole.map((light, m): number | null =>
-        light > 0 ? notBelowZero((cleared[m] - all[m]) / light) : null,
-      ),
+      gainIfRemoved: share(gain),
+      lossIfAlone: share(lost(alone, new Set([i]))),
+      monthly: whole.map((light, m) => (light > DARK_MONTH ? notBelowZero(gain[m] / light) : null)),
     };
   });
   const removable = rows.map(({ id }) => obstructionKind(obstructions.get(id)?.kind ?? 'other').removable);
-  const groups = hiddenBehindEachOther(rows, removable, (gone) => gain(without(gone)));
+  const groups = hiddenBehindEachOther(rows, removable, (gone) => share(gained(gone)));
   return { obstructions: [...rows].sort((a, b) => b.gainIfRemoved - a.gainIfRemoved), groups };
 }
 

@@ -14,6 +14,10 @@ export const LIMITS = {
   runs: 20_000,
   /** In all stations together. */
   traces: 2_000,
+  /** Traced from one station. */
+  obstructionsPerStation: 200,
+  /** Planes served, over all stations. */
+  served: 1_000,
   /** In all traces and of marks together. */
   sightings: 20_000,
   /** In one outline, where every edge is held against every other. */

@@ -12,9 +12,11 @@ import { addSchemaProblems } from './schema-problems.ts';
 import { addStructureProblems } from './structure-checks.ts';
 import { SURVEY_FORMAT, SURVEY_VERSION } from './survey.ts';
 import type { Survey } from './survey.ts';
+import { surveyDoubts } from './survey-doubts.ts';
 import { surveySchema } from './survey-schema.ts';
 import { addTraceProblems } from './trace-checks.ts';
 import { unknownFields } from './unknown-fields.ts';
+import { addWorkProblems } from './work-limits.ts';
 
 /** Reads a survey from the text of a file: the survey with what a person should know of it, or all that is wrong. */
 export function parseSurvey(text: string): Parsed<Survey> {
@@ -54,11 +56,11 @@ export function surveyFromJson(value: unknown): Parsed<Survey> {
   addTraceProblems(document, problems);
   addHeadingCheckProblems(document, problems);
   if (!problems.isEmpty) return { ok: false, problems: problems.list() };
-  return {
-    ok: true,
-    value: document as unknown as Survey,
-    warnings: unknownFields(surveySchema, document),
-  };
+  const survey = document as unknown as Survey;
+  addWorkProblems(survey, problems);
+  if (!problems.isEmpty) return { ok: false, problems: problems.list() };
+  const warnings = [...unknownFields(surveySchema, document), ...surveyDoubts(survey)];
+  return { ok: true, value: survey, warnings };
 }
 
 const refused = (path: string, message: string): Parsed<never> => ({

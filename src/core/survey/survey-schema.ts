@@ -30,7 +30,7 @@ const climateSchema = v.variant(
     v.looseObject({
       source: v.literal('clear-sky'),
       model: f.oneOf(['ineichen', 'haurwitz-erbs']),
-      linkeTurbidity: v.optional(f.monthsOf(f.numberBetween(1, 20))),
+      linkeTurbidity: v.optional(f.monthsOf(f.numberBetween(1, 15))),
     }),
   ],
   'one of the climate sources "world", "weather-file" (with name) and "clear-sky" (with model)',
