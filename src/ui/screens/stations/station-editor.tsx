@@ -93,11 +93,15 @@ export function StationEditor(props: SectionProps & { station: Station | null })
         />
         <ChoiceField label="Place" value={on} options={places} onChoose={fields.setOn} />
         {onPlane && (
+          <p class="faint small">
+            Measured from the lower-left corner of the plane, looking up the slope; empty where not measured.
+          </p>
+        )}
+        {onPlane && (
           <div class="pair">
             <TextField
               label="Along the eave"
               unit="m"
-              hint="From the lower-left corner, looking up the slope; empty where not measured."
               keys="numbers"
               value={x}
               onInput={fields.setX}

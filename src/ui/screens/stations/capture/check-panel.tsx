@@ -3,17 +3,15 @@ import type { CheckFacts } from '../../../../app/capture/heading-takes.ts';
 import { takeCheck } from '../../../../app/capture/heading-takes.ts';
 import { stationOf } from '../../../../app/capture/station-edits.ts';
 import { headingMethod } from '../../../../core/pointing/heading-methods.ts';
-import type { HeadingMethodId } from '../../../../core/survey/survey.ts';
+import type { HeadingMethodId, Site } from '../../../../core/survey/survey.ts';
 import { faultOf, typedNumber, valueOf } from '../../../typed.ts';
 import { checkWords } from '../heading-words.ts';
 import { FacesPanel } from './faces-panel.tsx';
 import { ShadowHours } from './shadow-hours.tsx';
-import type { Sitting } from './sitting.ts';
+import type { CheckWay, Sitting } from './sitting.ts';
 import { Switches, Thumb } from './thumb.tsx';
 
-type Way = HeadingMethodId | 'two-face';
-
-const WAYS: { value: Way; label: string }[] = [
+const WAYS: { value: CheckWay; label: string }[] = [
   { value: 'sun-shadow', label: 'Shadow' },
   { value: 'known-mark', label: 'Mark' },
   { value: 'plan-bearing', label: 'Plan' },
@@ -28,8 +26,8 @@ const FRAMES = [
 
 /** Tying the sitting to north, and testing the phone's own inclination. */
 export function CheckPanel({ sitting }: { sitting: Sitting }) {
-  const [way, setWay] = useState<Way>('sun-shadow');
   const { session } = sitting;
+  const way = sitting.checkWay.value;
   useEffect(() => {
     // a shadow is laid along the phone's edge: nobody needs to look towards the sun, nor the camera
     const before = session.axis.value;
@@ -40,7 +38,12 @@ export function CheckPanel({ sitting }: { sitting: Sitting }) {
   }, [way, session]);
   return (
     <>
-      <Switches label="Way of checking" value={way} options={WAYS} onChoose={setWay} />
+      <Switches
+        label="Way of checking"
+        value={way}
+        options={WAYS}
+        onChoose={(wanted) => (sitting.checkWay.value = wanted)}
+      />
       {way === 'two-face' ? <FacesPanel sitting={sitting} /> : <MethodPanel sitting={sitting} method={way} />}
     </>
   );
@@ -59,6 +62,7 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
       method,
       ...(mark.trim() && { mark: mark.trim() }),
       ...(valueOf(typed) !== undefined && { bearing: valueOf(typed), frame }),
+      ...(frame === 'grid' && { gridZone: utmZone(session.record.survey.site) }),
     };
     const station = stationOf(session.record.survey, stationId);
     const id = await takeCheck(session, station, facts, sitting.open.looked);
@@ -103,6 +107,9 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
       {method === 'known-mark' && (
         <Switches label="North of the bearing" value={frame} options={FRAMES} onChoose={setFrame} />
       )}
+      {frame === 'grid' && method === 'known-mark' && (
+        <p class="small">Taken to be of UTM zone {utmZone(session.record.survey.site)}.</p>
+      )}
       <Thumb
         session={session}
         label={method === 'sun-shadow' ? 'Take the shadow' : 'Sight the mark'}
@@ -112,6 +119,10 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
     </>
   );
 }
+
+/** The UTM zone of a site, of which a map's grid is taken to be. */
+const utmZone = ({ latitude, longitude }: Site): string =>
+  `${(Math.floor((longitude + 180) / 6) % 60) + 1}${latitude < 0 ? 'S' : 'N'}`;
 
 /** What the last check found, and what speaks against it. */
 function CheckResult({ sitting, id }: { sitting: Sitting; id: string | null }) {

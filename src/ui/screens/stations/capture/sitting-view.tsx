@@ -46,7 +46,7 @@ export function SittingView(props: Props) {
     <div class="sitting">
       <div class="sitting-scene">
         {recording && <RecordingBar recording={recording} />}
-        {!recording && task !== 'check' && <SightView capture={capture} session={session} />}
+        {!recording && !sitting.byShadow && <SightView capture={capture} session={session} />}
         <Figures session={session} />
         {plane && task !== 'check' && (
           <HorizonStrip session={session} latitude={survey.site.latitude} plane={plane.name} {...strip} />

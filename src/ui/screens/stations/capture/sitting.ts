@@ -4,12 +4,17 @@ import { OpenTake } from '../../../../app/capture/open-take.ts';
 import { PointTrace } from '../../../../app/capture/point-trace.ts';
 import { SweepTake } from '../../../../app/capture/sweep-take.ts';
 import type { TraceChoice } from '../../../../app/capture/trace-choice.ts';
+import type { HeadingMethodId } from '../../../../core/survey/survey.ts';
+
+/** The way of a heading check, or the test of the phone's own inclination. */
+export type CheckWay = HeadingMethodId | 'two-face';
 
 export type Task = 'trace' | 'open' | 'mark' | 'check';
 
 /** All that one sitting at one station works with. */
 export class Sitting {
   readonly task = signal<Task>('trace');
+  readonly checkWay = signal<CheckWay>('sun-shadow');
   readonly choice = signal<TraceChoice>({
     obstruction: null,
     shape: 'skyline',
@@ -29,6 +34,11 @@ export class Sitting {
     this.sweep = new SweepTake(session, stationId);
     this.points = new PointTrace(session, stationId);
     this.open = new OpenTake(session, stationId);
+  }
+
+  /** Whether the shadow of the sun is laid along the phone's edge: nobody needs a picture then. */
+  get byShadow(): boolean {
+    return this.task.value === 'check' && this.checkWay.value === 'sun-shadow';
   }
 
   choose(part: Partial<TraceChoice>): void {
