@@ -6,6 +6,7 @@ import { ordered } from '../../../core/survey/order.ts';
 import { withoutPlane } from '../../../core/survey/removed-entries.ts';
 import type { RoofPlane } from '../../../core/survey/survey.ts';
 import { copyTitle } from '../../../app/actions/duplicate-survey.ts';
+import { EditHeading } from '../../components/edit-heading.tsx';
 import { focusHeading } from '../../components/screen-heading.tsx';
 import { roofPlan } from '../../../report/pictures/roof-plan.ts';
 import type { SectionProps } from '../../section.ts';
@@ -65,7 +66,7 @@ export function RoofSection({ survey, services }: SectionProps) {
   if (edited)
     return (
       <div class="stack">
-        <h2>{edited.plane ? `Change ${edited.plane.name}` : 'New roof plane'}</h2>
+        <EditHeading>{edited.plane ? `Change ${edited.plane.name}` : 'New roof plane'}</EditHeading>
         <PlaneForm
           survey={survey}
           plane={edited.plane}

@@ -6,6 +6,7 @@ import type { StepCode } from '../../../app/survey-store.ts';
 import { withoutObstruction } from '../../../core/survey/removed-entries.ts';
 import type { FactGroup } from '../../../core/survey/site-facts-general.ts';
 import type { Obstruction, Survey } from '../../../core/survey/survey.ts';
+import { EditHeading } from '../../components/edit-heading.tsx';
 import { PhotoSpace } from '../../components/photos/photo-space.tsx';
 import { PhotoStrip } from '../../components/photos/photo-strip.tsx';
 import { focusHeading } from '../../components/screen-heading.tsx';
@@ -55,7 +56,7 @@ export function SiteSection({ survey, services }: SectionProps) {
   if (editing?.what === 'site')
     return (
       <div class="stack">
-        <h2>Site</h2>
+        <EditHeading>Change the site</EditHeading>
         <SiteForm
           survey={survey}
           services={services}
@@ -68,7 +69,7 @@ export function SiteSection({ survey, services }: SectionProps) {
   if (editing?.what === 'facts')
     return (
       <div class="stack">
-        <h2>{editing.group.label}</h2>
+        <EditHeading>{editing.group.label}</EditHeading>
         <Caution group={editing.group.id} />
         <FactForm
           survey={survey}
@@ -82,7 +83,9 @@ export function SiteSection({ survey, services }: SectionProps) {
   if (editing)
     return (
       <div class="stack">
-        <h2>{editing.obstruction ? `Change ${editing.obstruction.name}` : 'New obstruction'}</h2>
+        <EditHeading>
+          {editing.obstruction ? `Change ${editing.obstruction.name}` : 'New obstruction'}
+        </EditHeading>
         <ObstructionForm
           obstruction={editing.obstruction}
           newId={editing.newId}
