@@ -8,6 +8,7 @@ import { Dialog } from '../../components/dialog.tsx';
 import { FieldBook } from '../../components/field-book/field-book.tsx';
 import { navigate } from '../../router.ts';
 import type { SectionProps } from '../../section.ts';
+import { BearingForm } from './bearing-form.tsx';
 import { hasParts, placeWords, servedNames, withoutNorth } from './station-facts.ts';
 import { capturePath, editStationPath, stationsPath } from './station-path.ts';
 import { checkWords, closureWords, headingWords } from './heading-words.ts';
@@ -52,6 +53,11 @@ export function StationPage(props: SectionProps & { station: Station }) {
         </button>
       </div>
       <Headings station={station} pointed={pointed} runs={survey.runs} />
+      {(station.headingChecks ?? [])
+        .filter(({ method, bearing }) => method !== 'sun-shadow' && bearing === undefined)
+        .map((check) => (
+          <BearingForm key={check.id} {...props} station={station} check={check} />
+        ))}
       <FieldBook station={station} survey={survey} open />
       {asking && (
         <Dialog title={`Delete ${station.name}?`} onCancel={() => setAsking(false)}>

@@ -3,9 +3,10 @@ import type { CheckFacts } from '../../../../app/capture/heading-takes.ts';
 import { takeCheck } from '../../../../app/capture/heading-takes.ts';
 import { stationOf } from '../../../../app/capture/station-edits.ts';
 import { headingMethod } from '../../../../core/pointing/heading-methods.ts';
-import type { HeadingMethodId, Site } from '../../../../core/survey/survey.ts';
+import type { HeadingMethodId } from '../../../../core/survey/survey.ts';
 import { faultOf, typedNumber, valueOf } from '../../../typed.ts';
 import { checkWords } from '../heading-words.ts';
+import { utmZone } from '../utm-zone.ts';
 import { FacesPanel } from './faces-panel.tsx';
 import { ShadowHours } from './shadow-hours.tsx';
 import type { CheckWay, Sitting } from './sitting.ts';
@@ -119,10 +120,6 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
     </>
   );
 }
-
-/** The UTM zone of a site, of which a map's grid is taken to be. */
-const utmZone = ({ latitude, longitude }: Site): string =>
-  `${(Math.floor((longitude + 180) / 6) % 60) + 1}${latitude < 0 ? 'S' : 'N'}`;
 
 /** What the last check found, and what speaks against it. */
 function CheckResult({ sitting, id }: { sitting: Sitting; id: string | null }) {
