@@ -45,5 +45,11 @@ export function viewBetween(toward: number, upward: number, lowRad: number, high
   return highRad > low ? viewBelow(toward, upward, highRad) - viewBelow(toward, upward, low) : 0;
 }
 
+/** What `viewBetween` gives from the horizontal up to an elevation [radians] at an azimuth [degrees]. */
+export function viewUpTo({ north, east, upward }: PlaneFacing, azimuth: number, topRad: number): number {
+  const angle = azimuth * RADIANS;
+  return viewBetween(north * Math.cos(angle) + east * Math.sin(angle), upward, 0, topRad);
+}
+
 /** Elevation up to which a brightened horizon reaches, radians: 6.5°, our reading of the model's thin band. */
 export const BAND_TOP = 6.5 * RADIANS;

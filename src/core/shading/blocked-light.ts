@@ -2,7 +2,7 @@ import { RADIANS } from '../angles/angles.ts';
 import type { BlockedSpans } from '../horizon/blocked-spans.ts';
 import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
 import { blockedView } from '../horizon/blocked-view.ts';
-import { BAND_TOP, viewBetween } from '../horizon/sky-view.ts';
+import { BAND_TOP, viewUpTo } from '../horizon/sky-view.ts';
 import { domeView } from '../transposition/plane-irradiance.ts';
 import type { SkyMap } from './sky-map.ts';
 import { BIN } from './sun-paths.ts';
@@ -98,15 +98,8 @@ export function directFrom(map: SkyMap, month: number, column: number, low: numb
 /** The plane's view of the whole sky up to an elevation [radians], as `blockedView` counts. */
 function wholeView({ facing }: SkyMap, topRad: number): number {
   let sum = 0;
-  for (let column = 0; column < COLUMNS; column++) {
-    const azimuth = (column + 0.5) * COLUMN_WIDTH * RADIANS;
-    sum += viewBetween(
-      facing.north * Math.cos(azimuth) + facing.east * Math.sin(azimuth),
-      facing.upward,
-      0,
-      topRad,
-    );
-  }
+  for (let column = 0; column < COLUMNS; column++)
+    sum += viewUpTo(facing, (column + 0.5) * COLUMN_WIDTH, topRad);
   return Math.max(sum * COLUMN_WIDTH * RADIANS, 1e-12);
 }
 

@@ -1,6 +1,5 @@
-import { RADIANS } from '../angles/angles.ts';
 import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
-import { viewBetween } from '../horizon/sky-view.ts';
+import { viewUpTo } from '../horizon/sky-view.ts';
 import type { SkyMap } from './sky-map.ts';
 
 /** A range of azimuth, degrees, clockwise from `from` to `to`, over north where `to` is below `from`. */
@@ -14,7 +13,9 @@ export function coverage(map: SkyMap, observed: readonly AzimuthRange[]): number
   const seen = observedShares(observed);
   const dome = map.dome.reduce((sum, light) => sum + light, 0);
   let [whole, covered] = [0, 0];
-  const views = Array.from({ length: COLUMNS }, (_, column) => columnView(map, column));
+  const views = Array.from({ length: COLUMNS }, (_, column) =>
+    viewUpTo(map.facing, (column + 0.5) * COLUMN_WIDTH, Math.PI / 2),
+  );
   const wholeView = views.reduce((sum, view) => sum + view, 0);
   for (let column = 0; column < COLUMNS; column++) {
     let light = (dome * views[column]) / wholeView;
@@ -30,12 +31,6 @@ function columnDirect({ grid, below }: SkyMap, month: number, column: number): n
   const strip = column * 12 + month;
   const end = grid.first[strip + 1];
   return end > grid.first[strip] ? below[end - 1] : 0;
-}
-
-function columnView(map: SkyMap, column: number): number {
-  const azimuth = (column + 0.5) * COLUMN_WIDTH * RADIANS;
-  const toward = map.facing.north * Math.cos(azimuth) + map.facing.east * Math.sin(azimuth);
-  return viewBetween(toward, map.facing.upward, 0, Math.PI / 2);
 }
 
 /** Share of each column that the ranges cover together. */

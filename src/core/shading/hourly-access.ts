@@ -1,8 +1,8 @@
 import type { BlockedSpans } from '../horizon/blocked-spans.ts';
 import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
 import { dayOf } from '../solar-position/sun-track.ts';
-import { domeView, groundView } from '../transposition/plane-irradiance.ts';
 import type { BlockedLight } from './blocked-light.ts';
+import { hourLight, monthHourTable } from './hour-light.ts';
 import type { SkyMap } from './sky-map.ts';
 import type { MonthHours } from './sky-year.ts';
 import { monthHourOf } from './sky-year.ts';
@@ -17,21 +17,13 @@ const DARK = 1e-6;
  */
 export function hourlyAccess(map: SkyMap, spans: BlockedSpans, blocked: BlockedLight): (number | null)[][] {
   const directLost = directLostByHour(map, spans);
-  const sine = Math.sqrt(1 - map.facing.upward ** 2);
-  const { dome, brightBand, darkBand, ghi, albedo } = map.year;
-  const view = domeView(map.surfaceTilt);
-  const groundShare = albedo * groundView(map.surfaceTilt);
-  return Array.from({ length: 12 }, (_, month) =>
-    Array.from({ length: 24 }, (_, hour) => {
-      const cell = month * 24 + hour;
-      const even = dome[cell] * view + darkBand[cell] * sine;
-      const band = brightBand[cell] * sine;
-      const whole = map.directHours[cell] + even + band + ghi[cell] * groundShare;
-      if (whole < DARK) return null;
-      const lost = directLost[cell] + even * blocked.domeShare[month] + band * blocked.bandShare[month];
-      return Math.min(1, Math.max(0, 1 - lost / whole));
-    }),
-  );
+  const light = hourLight(map);
+  return monthHourTable((cell, month) => {
+    const { dome, band, whole } = light(cell);
+    if (whole < DARK) return null;
+    const lost = directLost[cell] + dome * blocked.domeShare[month] + band * blocked.bandShare[month];
+    return Math.min(1, Math.max(0, 1 - lost / whole));
+  });
 }
 
 /** Direct light that the spans take, [month · 24 + hour], kWh/m2. */

@@ -1,9 +1,9 @@
 import type { HorizonProfile } from '../horizon/horizon-profile.ts';
 import type { StationHorizon } from '../horizon/station-horizon.ts';
-import { domeView, groundView } from '../transposition/plane-irradiance.ts';
 import { assessStation } from './assess-station.ts';
 import type { StationAssessment } from './assessment.ts';
 import type { AzimuthRange } from './coverage.ts';
+import { hourLight, monthHourTable } from './hour-light.ts';
 import type { SkyDensity } from './sky-density.ts';
 import type { KnownObstructions } from './obstruction-shading.ts';
 import type { SkyMap } from './sky-map.ts';
@@ -61,14 +61,6 @@ export function stationShade(
 
 /** Irradiation on a plane with nothing in the way by month and hour of local standard time, kWh/m2. */
 export function unshadedHours(map: SkyMap): number[][] {
-  const { dome, brightBand, darkBand, ghi, albedo } = map.year;
-  const sine = Math.sqrt(1 - map.facing.upward ** 2);
-  const [view, ground] = [domeView(map.surfaceTilt), albedo * groundView(map.surfaceTilt)];
-  return Array.from({ length: 12 }, (_, month) =>
-    Array.from({ length: 24 }, (_, hour) => {
-      const cell = month * 24 + hour;
-      const band = (brightBand[cell] + darkBand[cell]) * sine;
-      return Math.max(0, map.directHours[cell] + dome[cell] * view + band + ghi[cell] * ground);
-    }),
-  );
+  const light = hourLight(map);
+  return monthHourTable((cell) => light(cell).whole);
 }
