@@ -22,6 +22,11 @@ export const SURVEY_SECTIONS: SurveySection[] = [
     label: 'Shade',
     load: async () => (await import('./screens/shade/shade-section.tsx')).ShadeSection,
   },
+  {
+    path: 'climb-down',
+    label: 'To do',
+    load: async () => (await import('./screens/climb-down/climb-down-section.tsx')).ClimbDownSection,
+  },
 ];
 
 export const PLAIN_SCREENS: PlainScreen[] = [

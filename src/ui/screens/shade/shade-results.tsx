@@ -40,7 +40,7 @@ export function ShadeResults({
   const list = useMemo(() => [...imagined.values()], [imagined]);
   return (
     <>
-      <Headline shade={shade} imagined={settled ? list : []} onPutBack={onPutBack} />
+      <Headline plane={plane} shade={shade} imagined={settled ? list : []} onPutBack={onPutBack} />
       <HorizonView site={survey.site} shade={shade} names={names} year={year} />
       <HeadlineFacts assessment={assessment} plane={plane} shade={shade} />
       <ObstructionList survey={survey} shade={shade} imagined={imagined} onImagine={onImagine} />
