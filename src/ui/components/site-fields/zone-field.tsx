@@ -8,6 +8,12 @@ function offsetText(minutes: number): string {
   return `UTC${minutes < 0 ? '−' : '+'}${hours}${size % 60 ? `:${String(size % 60).padStart(2, '0')}` : ''}`;
 }
 
+/** Names to choose from; older browsers have no list, there the name is typed. */
+function knownZones(): string[] {
+  const { supportedValuesOf } = Intl as Partial<typeof Intl>;
+  return supportedValuesOf?.('timeZone') ?? [];
+}
+
 /** A time zone, found by typing a part of its name. */
 export function ZoneField({
   value,
@@ -21,7 +27,7 @@ export function ZoneField({
   found: string;
   nowMs: number;
 }) {
-  const zones = useMemo(() => Intl.supportedValuesOf('timeZone'), []);
+  const zones = useMemo(knownZones, []);
   const known = isTimeZone(value);
   return (
     <TextField

@@ -9,7 +9,7 @@ function spaceText({ used, kept }: StorageSpace): string {
   return `Space used: ${sizeText(used)}. ${
     kept
       ? 'The browser keeps it until you erase it.'
-      : 'The browser may clear it when the device runs short of room: export what matters.'
+      : 'The browser may clear it when the device runs short of room: back up what matters.'
   }`;
 }
 
@@ -27,7 +27,7 @@ function InstallAdvice() {
       <p class="small">
         Install Noonmark on the home screen before you survey: it then opens without a signal and its surveys
         are kept longer. {offer === null && 'Use “Install” or “Add to Home Screen” in the browser’s menu.'}{' '}
-        Surveys made in a browser tab may not move along; export them first.
+        Surveys made in a browser tab may not move along; back them up first, and restore them after.
       </p>
       {offer && (
         <div>
