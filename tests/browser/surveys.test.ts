@@ -174,6 +174,7 @@ describe('a survey', () => {
     for (const part of ['South roof', '178.0°', '9.2 × 4.8 m']) await main.getByText(part).first().waitFor();
     await page.getByRole('link', { name: 'Stations' }).tap();
     const book = page.getByRole('region', { name: 'Sightings from Eave, left' });
+    await book.waitFor();
     const rows = await book.getByRole('row').allInnerTexts();
     expect(rows.map((row) => row.replace(/\s+/g, ' ').trim())).toEqual([
       'No. Azimuth Elevation Remarks',
