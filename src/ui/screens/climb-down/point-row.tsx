@@ -22,7 +22,7 @@ export function PointRow({ surveyId, point }: { surveyId: string; point: OpenPoi
 }
 
 function Effect({ point: { kind, effect } }: { point: OpenPoint }) {
-  if (isGrave(kind)) return <span class="open-point-effect open-point-grave">No figure</span>;
+  if (isGrave(kind)) return <span class="open-point-effect open-point-grave">Do first</span>;
   if (effect === null) return <span class="open-point-effect faint small">not counted</span>;
   return (
     <span class="open-point-effect">
