@@ -8,6 +8,9 @@ import { Thumb } from './thumb.tsx';
 /** A range without north on either side of it. */
 export type Gap = [from: number, to: number];
 
+/** A wider gap is turned along, not called open at one glance; degrees. */
+const WIDEST = 90;
+
 const inGap = (azimuth: number, [from, to]: Gap): boolean => fullCircle(azimuth - from) <= to - from;
 const whole = (azimuth: number) => Math.round(fullCircle(azimuth)) % 360;
 
@@ -20,19 +23,21 @@ export function OpenPanel({ sitting, gaps }: { sitting: Sitting; gaps: readonly 
     const azimuth = session.live.value?.azimuth ?? null;
     return azimuth === null ? null : (gaps.find((one) => inGap(azimuth, one)) ?? null);
   }).value;
-  const isAll = gap !== null && gap[1] - gap[0] >= 360;
+  const isWide = gap !== null && gap[1] - gap[0] > WIDEST;
   return (
     <>
       <div class="panel-row">
         <button
           type="button"
           class="what"
-          disabled={gap === null || isAll || looking}
+          disabled={gap === null || isWide || looking}
           onClick={() => gap && void open.gap(gap[0], gap[1])}
         >
-          {gap && !isAll
+          {gap && !isWide
             ? `All open from ${whole(gap[0])}° to ${whole(gap[1])}°`
-            : 'Point into a gap to call it open'}
+            : isWide
+              ? 'A wide gap: turn along it'
+              : 'Point into a gap to call it open'}
         </button>
         <button
           type="button"

@@ -44,7 +44,7 @@ export function SittingView(props: Props) {
   const { recording } = session.orientation;
   return (
     <div class="sitting">
-      <div class="sitting-scene">
+      <div class="sitting-scene" role="group" aria-label="What the phone says" tabIndex={0}>
         {recording && <RecordingBar recording={recording} />}
         {!recording && !sitting.byShadow && <SightView capture={capture} session={session} />}
         <Figures session={session} />

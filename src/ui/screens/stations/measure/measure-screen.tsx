@@ -72,7 +72,7 @@ function Measuring(props: SectionProps & { plane: RoofPlane; capture: Capture; s
   const found = session.pointed.value?.planes.find(({ id }) => id === plane.id) ?? null;
   return (
     <div class="sitting">
-      <div class="sitting-scene">
+      <div class="sitting-scene" role="group" aria-label="What the phone says" tabIndex={0}>
         {recording && <RecordingBar recording={recording} />}
         {laid ? (
           <LiveTilt session={session} held={way} />
