@@ -51,7 +51,7 @@ describe('before you climb down', () => {
       points.map(({ sentence }) => sentence),
     );
     expect(await rows(page).locator('b').allTextContents()).toEqual(
-      points.flatMap(({ effect }) => (effect === null ? [] : [`±${effect.toFixed(1)}`])),
+      points.flatMap(({ effect }) => (effect === null ? [] : [effect.toFixed(1)])),
     );
     await rows(page).first().tap();
     await page.getByRole('heading', { name: 'New station' }).waitFor();
@@ -93,7 +93,9 @@ describe('before you climb down', () => {
     const range = `${(low * 100).toFixed(1)} to ${(high * 100).toFixed(1)}\u00a0%, 95 times in 100`;
     await page.getByText(range).waitFor();
     const sure = page.locator('.shade-facts > div', { hasText: 'How sure' });
-    expect(await sure.textContent()).toMatch(/either way, mostly for .* would bring it to \d+\.\d points\.$/);
+    expect(await sure.textContent()).toMatch(
+      /points from end to end, mostly for .* would bring it to \d+\.\d points\.$/,
+    );
   });
 
   it('goes by keyboard', async () => {

@@ -4,10 +4,10 @@ import type { IntervalSourceId } from '../uncertainty/interval-source.ts';
 /** Standard deviations either way that hold 95 of 100 draws. */
 const EITHER_WAY = 1.96;
 
-/** Half of a 95 % interval, percentage points. */
-export const halfWidth = ({ low, high }: AccessInterval): number => 50 * (high - low);
+/** A 95 % interval from end to end, percentage points. */
+export const width = ({ low, high }: AccessInterval): number => 100 * (high - low);
 
-/** What one source alone moves an access by, either way, 95 times in 100, percentage points; 0 where it is not listed. */
+/** What an access may be off by for one source alone, 95 times in 100, percentage points; 0 where it is not listed. */
 export function sourceEffect(
   { standardDeviation, sources }: AccessInterval,
   source: IntervalSourceId,

@@ -39,8 +39,8 @@ export interface OpenPoint {
   /** What is missing or weak and what it does, in plain words. */
   sentence: string;
   /**
-   * Percentage points of a plane's annual solar access that it alone may move the figure by, either way, 95 times in
-   * 100; null where that cannot be computed.
+   * Percentage points that a plane's annual solar access may be off by for this alone, 95 times in 100 (1.96 standard
+   * deviations); null where that cannot be computed.
    */
   effect: number | null;
   cure: Cure;

@@ -1,11 +1,11 @@
 import { describe, expect, test } from 'vitest';
-import { halfWidth, sourceEffect } from '../../../src/core/completeness/interval-effect.ts';
+import { sourceEffect, width } from '../../../src/core/completeness/interval-effect.ts';
 import { openPoints } from '../../../src/core/completeness/open-points.ts';
 import type { AccessInterval } from '../../../src/core/shading/assessment.ts';
 import { completeSurvey } from './complete-survey.ts';
 import { assessed, ofKind } from './found-points.ts';
 
-/** ± 5 points: seven tenths of the variance from the trees, two from a heading without check, one from the climate. */
+/** Ten points wide: seven tenths of the variance from the trees, two from a heading without check, one from the climate. */
 const WIDE: AccessInterval = {
   low: 0.85,
   high: 0.95,
@@ -31,13 +31,13 @@ describe('a wide interval', () => {
     expect(points).toHaveLength(1);
     expect(points[0]).toMatchObject({ subject: 'South roof', cure: { at: 'site' } });
     expect(points[0].sentence).toBe(
-      'Known to 5.0 points either way, in part for what the trees let through. Measuring what the crowns let through would shrink it.',
+      'Its yearly access is known to a range of 10.0 points, in part for what the trees let through. Measuring what the crowns let through would shrink it.',
     );
     // 1.96 · 2.55 · √0.7
     expect(points[0].effect).toBeCloseTo(4.18, 2);
   });
 
-  test('is let be where the figure is known to two points', async () => {
+  test('is let be where it is under four points wide', async () => {
     expect(await withInterval({ ...WIDE, low: 0.9, high: 0.93 })).toEqual([]);
   });
 
@@ -52,7 +52,7 @@ describe('effects', () => {
   test('of independent sources sum in squares to that of the whole', () => {
     const parts = WIDE.sources.map(({ source }) => sourceEffect(WIDE, source));
     expect(Math.hypot(...parts)).toBeCloseTo(100 * 1.96 * WIDE.standardDeviation, 9);
-    expect(halfWidth(WIDE)).toBeCloseTo(5, 9);
+    expect(width(WIDE)).toBeCloseTo(10, 9);
   });
 
   test('of a source that is not listed are none', () => {

@@ -1,12 +1,12 @@
 import type { AccessInterval, IntervalSource, PlaneAssessment } from '../../shading/assessment.ts';
 import type { CureId, IntervalSourceId } from '../../uncertainty/interval-source.ts';
-import { halfWidth, sourceEffect, stationEffects } from '../interval-effect.ts';
+import { sourceEffect, stationEffects, width } from '../interval-effect.ts';
 import { listed } from '../names.ts';
 import type { Cure, OpenPoint, OpenPointKind } from '../open-point.ts';
 import { CURE_WORDS, SOURCE_WORDS } from '../source-words.ts';
 
-/** A figure known worse than this either way is worth more work, percentage points; and a source that makes so much. */
-const WIDE = 2;
+/** An interval wider than this is worth more work, percentage points; and a source that makes so much. */
+const WIDE = 4;
 const LEAST = 0.5;
 
 /** What has a kind of point of its own. */
@@ -40,7 +40,7 @@ interface Wide {
 /** What makes a plane's interval wide and can be cured. */
 function wideSources(plane: PlaneAssessment): Wide[] {
   const interval = plane.solarAccess?.interval;
-  if (!interval || halfWidth(interval) < WIDE) return [];
+  if (!interval || width(interval) < WIDE) return [];
   return interval.sources
     .filter(({ cure }) => !OWN_KIND.includes(cure))
     .map((source) => ({
@@ -59,7 +59,7 @@ function pointOf({ plane, interval, source, effect, planes }: Wide): Omit<OpenPo
   const cure = capital(CURE_WORDS[source.cure!]);
   return {
     subject: plane.name,
-    sentence: `Known to ${halfWidth(interval).toFixed(1)} points either way, in part for ${SOURCE_WORDS[source.source]}. ${cure} would shrink it.${also}`,
+    sentence: `Its yearly access is known to a range of ${width(interval).toFixed(1)} points, in part for ${SOURCE_WORDS[source.source]}. ${cure} would shrink it.${also}`,
     effect,
     cure: cureOf(source, plane),
   };

@@ -58,8 +58,8 @@ function Points({ surveyId, points }: { surveyId: string; points: readonly OpenP
         first.
       </p>
       <p class="small faint">
-        A figure is how far the point alone may move a plane’s yearly solar access, in percentage points
-        either way, 95 times in 100.
+        The numerals say how many percentage points a plane’s yearly solar access may be off by for that
+        reason alone, 95 times in 100.
       </p>
       <ol class="open-points" aria-label="Missing or weak, worst first">
         {points.map((point, place) => (

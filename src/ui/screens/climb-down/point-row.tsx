@@ -26,10 +26,7 @@ function Effect({ point: { kind, effect } }: { point: OpenPoint }) {
   if (effect === null) return <span class="open-point-effect faint small">not counted</span>;
   return (
     <span class="open-point-effect">
-      <b>
-        <span class="open-point-sign">±</span>
-        {effect.toFixed(1)}
-      </b>
+      <b>{effect.toFixed(1)}</b>
       <span class="small">points</span>
     </span>
   );

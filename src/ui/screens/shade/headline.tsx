@@ -1,4 +1,4 @@
-import { halfWidth, sourceEffect } from '../../../core/completeness/interval-effect.ts';
+import { sourceEffect, width } from '../../../core/completeness/interval-effect.ts';
 import { CURE_WORDS, SOURCE_WORDS } from '../../../core/completeness/source-words.ts';
 import type { AccessInterval, Assessment, PlaneAssessment } from '../../../core/shading/assessment.ts';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
@@ -107,12 +107,12 @@ const meanRange = (interval?: AccessInterval) => (interval ? ` (${rangeText(inte
 /** What makes the figure unsure most of all, and what would shrink that. */
 function sureText(interval: AccessInterval): string {
   const [main] = interval.sources;
-  const either = `Within ${halfWidth(interval).toFixed(1)} points either way`;
-  if (!main || sourceEffect(interval, main.source) < 0.05) return `${either}.`;
-  const most = `${either}, mostly for ${SOURCE_WORDS[main.source]} (${percent(main.share, 0)} of the spread)`;
+  const wide = `${width(interval).toFixed(1)} points from end to end`;
+  if (!main || sourceEffect(interval, main.source) < 0.05) return `${wide}.`;
+  const most = `${wide}, mostly for ${SOURCE_WORDS[main.source]} (${percent(main.share, 0)} of the spread)`;
   if (main.cure === null || main.standardDeviationAfter === null) return `${most}.`;
   const left = main.standardDeviationAfter / interval.standardDeviation;
-  const after = (left * halfWidth(interval)).toFixed(1);
+  const after = (left * width(interval)).toFixed(1);
   return `${most}. ${capital(CURE_WORDS[main.cure])} would bring it to ${after} points.`;
 }
 
