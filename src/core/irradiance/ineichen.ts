@@ -14,7 +14,7 @@ export type ClearSky = (
 ) => void;
 
 /**
- * Clear-sky irradiance at an altitude [m, -430 to 9000] and a Linke turbidity [1 to 15], without the enhancement factor
+ * Clear-sky irradiance at an altitude [m, -1000 to 11000] and a Linke turbidity [1 to 15], without the enhancement factor
  * that a later programme added. Below the horizon there is no light.
  * Ref: Ineichen and Perez, A new airmass independent formulation for the Linke turbidity coefficient, Solar Energy 73
  * (2002), eqs. 8 and 11; the bound on dni keeps diffuse light from falling below its clean-air share (section 4).

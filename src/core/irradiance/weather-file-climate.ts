@@ -8,6 +8,8 @@ const EARTH_RADIUS_KM = 6371;
 /** Beyond these a weather file speaks for another place. */
 const FAR_KM = 100;
 const FAR_ABOVE = 300;
+/** Between the tropics the two hemispheres have much the same seasons, degrees. */
+const TROPIC = 23.44;
 
 /**
  * A weather file as climate of a site. Hour h covers h - 1 to h in the file's own standard time; the days of the file
@@ -50,6 +52,11 @@ function placeWarnings(
   site: { latitude: number; longitude: number; altitude?: number },
 ): string[] {
   const warnings: string[] = [];
+  const bothTropical = Math.abs(file.latitude) <= TROPIC && Math.abs(site.latitude) <= TROPIC;
+  if (file.latitude * site.latitude < 0 && !bothTropical)
+    warnings.push(
+      `The weather station ${file.place} lies in the other hemisphere; its seasons are the other way round.`,
+    );
   const away = distanceKm(file, site);
   if (away > FAR_KM)
     warnings.push(

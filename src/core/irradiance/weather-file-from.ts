@@ -1,6 +1,7 @@
 import type { Parsed } from '../survey/problem.ts';
 import type { HourlyYear } from './hourly-year.ts';
 import { fillMissingHours } from './missing-hours.ts';
+import { weatherDoubts } from './weather-doubts.ts';
 import type { WeatherFile, WeatherFormat } from './weather-year.ts';
 
 /** What a file's header says of its station, as text. */
@@ -29,20 +30,24 @@ export function weatherFileFrom(year: HourlyYear, header: StationHeader): Parsed
       );
     return value;
   };
-  const value: WeatherFile = {
-    name: header.name,
-    place: header.place || header.name,
+  const station = {
     latitude: number(header.latitude, 'latitude', -90, 90),
     longitude: number(header.longitude, 'longitude', -180, 180),
     altitude: number(header.altitude, 'altitude', -430, 9000),
     utcOffset: 60 * number(header.zone, 'time zone', -12, 14),
+  };
+  if (year.problems.length > 0) return { ok: false, problems: year.problems };
+  const warnings = [...year.warnings, ...weatherDoubts(year.ghi.values, station)];
+  const value: WeatherFile = {
+    name: header.name,
+    place: header.place || header.name,
+    ...station,
     ghi: year.ghi.values,
     dni: year.dni.values,
     dhi: year.dhi.values,
     temperature: year.temperature.values,
     format: header.format,
-    warnings: year.warnings.map(({ message }) => `The file ${message}`),
+    warnings: warnings.map(({ message }) => `The file ${message}`),
   };
-  if (year.problems.length > 0) return { ok: false, problems: year.problems };
-  return { ok: true, value, warnings: year.warnings };
+  return { ok: true, value, warnings };
 }

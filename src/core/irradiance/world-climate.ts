@@ -7,8 +7,8 @@ import { gridAt } from './world-grid.ts';
 const COARSE_LATITUDE = 60;
 
 const REFERENCE =
-  'Data obtained from the NASA Langley Research Center POWER Project, climatology 2001-2020 (its terms of use were not ' +
-  'read); beyond 60° latitude and over the sea the CORE normal year (Large and Yeager 2004)';
+  'Data obtained from the NASA Langley Research Center POWER Project, climatology 2001-2020; ' +
+  'beyond 60° latitude and over the sea the CORE normal year (Large and Yeager 2004)';
 
 /** The climate that the world grid gives for a place: latitude -90 to 90, longitude -360 to 360 degrees. */
 export function worldClimate(grid: WorldGrid, site: { latitude: number; longitude: number }): Climate {

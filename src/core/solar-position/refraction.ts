@@ -6,7 +6,7 @@ const TEMPERATURE = 12;
 const LOWEST = -1;
 
 /**
- * Pressure of the standard atmosphere, hPa, at an altitude of -430 to 11000 m.
+ * Pressure of the standard atmosphere, hPa, at an altitude of -1000 to 11000 m; RangeError outside.
  * Ref: ICAO standard atmosphere (1993), eq. 12: 1013.25 (1 - 2.25577e-5 h)^5.25588.
  */
 export function standardPressure(altitude: number): number {

@@ -63,4 +63,17 @@ describe('weatherFileClimate', () => {
     const east = { ...file, latitude: 0, longitude: 179.9 };
     expect(weatherFileClimate(east, { latitude: 0, longitude: -179.9 }).warnings).toEqual([]);
   });
+
+  it('says that the seasons are the other way round in the other hemisphere, but not between the tropics', () => {
+    const between = (from: number, to: number) =>
+      weatherFileClimate(
+        { ...file, latitude: from },
+        { latitude: to, longitude: file.longitude },
+      ).warnings.filter((warning) => warning.includes('its seasons are the other way round'));
+    expect(between(32, -32)).toHaveLength(1);
+    expect(between(-34, 12)).toHaveLength(1);
+    expect(between(23, -23)).toEqual([]);
+    expect(between(32, 5)).toEqual([]);
+    expect(between(-32, 0)).toEqual([]);
+  });
 });
