@@ -2,14 +2,16 @@ import { clearSkyClimate } from '../core/irradiance/clear-sky-climate.ts';
 import type { Climate } from '../core/irradiance/climate.ts';
 import { parseWeatherFile } from '../core/irradiance/weather-file.ts';
 import { weatherFileClimate } from '../core/irradiance/weather-file-climate.ts';
+import { weatherFileText } from '../core/irradiance/weather-file-text.ts';
 import { worldClimate } from '../core/irradiance/world-climate.ts';
 import type { WorldGrid } from '../core/irradiance/world-grid.ts';
 import { decodeWorldGrid } from '../core/irradiance/world-grid.ts';
 import type { AssessRequest } from '../core/shading/calculation.ts';
 import { Faulty } from './outcome-of.ts';
 
-/** Bytes of a text file; old weather files are not always UTF-8, and one odd letter must not stop them. */
-export const textOf = (contents: ArrayBuffer): string => new TextDecoder().decode(contents);
+/** Text of a weather file's bytes. */
+export const textOf = (contents: ArrayBuffer): string =>
+  weatherFileText(new Uint8Array(contents), TextDecoder);
 
 /** Makes the climate that a survey names; the world's grid is fetched when it is first asked for. */
 export class ClimateSource {

@@ -13,6 +13,7 @@ import type { StationShade } from '../core/shading/station-shade.ts';
 import { stationShade } from '../core/shading/station-shade.ts';
 import type { ClimateSource } from './climate-source.ts';
 import { textOf } from './climate-source.ts';
+import { HeldRequest } from './held-request.ts';
 import { Cancelled, outcomeOf } from './outcome-of.ts';
 
 interface HeldLight {
@@ -32,7 +33,7 @@ export type Progress = (share: number, stage: string) => void;
  * obstruction imagined gone is a subtraction and not a pass over the year.
  */
 export class ShadeEngine {
-  private request: AssessRequest | null = null;
+  private held: HeldRequest | null = null;
   private lights: HeldLight[] = [];
   private readonly cancelled = new Set<number>();
 
@@ -44,7 +45,7 @@ export class ShadeEngine {
 
   /** Takes a survey up; later questions are about it. */
   hold(request: AssessRequest): void {
-    this.request = request;
+    this.held = new HeldRequest(request);
   }
 
   /** Ends the call that was given this ticket, where it next looks up. */
@@ -53,10 +54,11 @@ export class ShadeEngine {
   }
 
   assess(ticket: number, onProgress: Progress): Promise<Outcome<Assessment>> {
-    return this.answer(ticket, async (request) => {
+    return this.answer(ticket, async (held) => {
+      const { request } = held;
       onProgress(0, 'The sun and the sky of a year');
       await this.lookUp(ticket);
-      const { climate, light } = await this.lightOf(request);
+      const { climate, light } = await this.lightOf(held);
       return assessSurvey(request.survey, climate, {
         transposition: request.transposition,
         stepMinutes: request.stepMinutes,
@@ -70,16 +72,16 @@ export class ShadeEngine {
   }
 
   shade(ticket: number, { plane, station, changes }: ShadeQuestion): Promise<Outcome<StationShade>> {
-    return this.answer(ticket, async (request) => {
-      const { survey } = request;
+    return this.answer(ticket, async (held) => {
+      const { survey } = held.request;
       const roof = survey.planes.find(({ id }) => id === plane);
       const place = survey.stations.find(({ id }) => id === station);
       if (!roof || !place) throw new RangeError(`no plane ${plane} or station ${station} in the survey`);
-      const held = await this.lightOf(request);
+      const light = await this.lightOf(held);
       await this.lookUp(ticket);
-      const { map, density } = this.planeOf(held, roof.surfaceTilt, roof.surfaceAzimuth);
+      const { map, density } = this.planeOf(light, roof.surfaceTilt, roof.surfaceAzimuth);
       await this.lookUp(ticket);
-      const horizon = stationHorizon(survey, place);
+      const horizon = stationHorizon(survey, place, held.directionOf());
       // what was imagined at another station may not be in the sky of this one
       const here = changes.filter(({ obstruction }) => horizon.profile.obstructionIds.includes(obstruction));
       return stationShade(map, density, horizon, place, obstructionsById(survey), here);
@@ -101,10 +103,10 @@ export class ShadeEngine {
     });
   }
 
-  private async answer<T>(ticket: number, work: (request: AssessRequest) => Promise<T>): Promise<Outcome<T>> {
-    const { request } = this;
-    if (!request) throw new RangeError('hold a survey before asking about it');
-    const outcome = await outcomeOf(async () => ({ ok: true, value: await work(request) }) as const);
+  private async answer<T>(ticket: number, work: (held: HeldRequest) => Promise<T>): Promise<Outcome<T>> {
+    const { held } = this;
+    if (!held) throw new RangeError('hold a survey before asking about it');
+    const outcome = await outcomeOf(async () => ({ ok: true, value: await work(held) }) as const);
     this.cancelled.delete(ticket);
     return outcome;
   }
@@ -114,11 +116,11 @@ export class ShadeEngine {
     if (this.cancelled.has(ticket)) throw new Cancelled();
   }
 
-  private async lightOf(request: AssessRequest): Promise<HeldLight> {
-    const { survey, stepMinutes, weatherFile } = request;
+  private async lightOf(asked: HeldRequest): Promise<HeldLight> {
+    const { request } = asked;
+    const { survey, stepMinutes } = request;
     const transposition = request.transposition ?? survey.transposition ?? 'hay-davies';
-    const file = weatherFile && [weatherFile.name, weatherFile.contents.byteLength];
-    const key = JSON.stringify([survey.site, survey.climate, file, transposition, stepMinutes]);
+    const key = JSON.stringify([survey.site, survey.climate, asked.weatherKey(), transposition, stepMinutes]);
     const known = this.lights.find((held) => held.key === key);
     if (known) return known;
     const climate = await this.climates.of(request);

@@ -1,12 +1,19 @@
 import { readFileSync } from 'node:fs';
 import { gunzipSync } from 'node:zlib';
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
+import { pointSurvey } from '../../src/core/pointing/point-survey.ts';
 import { worldClimate } from '../../src/core/irradiance/world-climate.ts';
 import { decodeWorldGrid } from '../../src/core/irradiance/world-grid.ts';
 import { assessSurvey } from '../../src/core/shading/assess-survey.ts';
+import type * as PointSurvey from '../../src/core/pointing/point-survey.ts';
 import type { Outcome } from '../../src/core/shading/calculation.ts';
 import type { Survey } from '../../src/core/survey/survey.ts';
 import { engineFor, sampleSurvey, underClearSky, worldGridBytes } from '../report/sample-shades.ts';
+
+vi.mock('../../src/core/pointing/point-survey.ts', async (original) => {
+  const real = await original<typeof PointSurvey>();
+  return { ...real, pointSurvey: vi.fn(real.pointSurvey) };
+});
 
 const survey = { ...sampleSurvey('suburban-maple-and-gable.json'), climate: { source: 'world' } as const };
 const STEP = { stepMinutes: 15 };
@@ -152,5 +159,48 @@ describe('the worker’s engine', () => {
     const assessment = valueOf(await engine.assess(0, silent));
     expect(assessment.climate.source).toBe('weather-file');
     expect(assessment.climate.name).toContain('Chicago');
+  });
+
+  it('points a held survey once for all questions about it, and anew once another is held', async () => {
+    const engine = engineFor();
+    engine.hold({ survey, ...STEP });
+    vi.mocked(pointSurvey).mockClear();
+    const first = valueOf(await engine.shade(0, question()));
+    const again = valueOf(await engine.shade(1, question()));
+    expect(again.measured).toEqual(first.measured);
+    expect(pointSurvey).toHaveBeenCalledTimes(1);
+    engine.hold({ survey: { ...survey, obstructions: [...survey.obstructions] }, ...STEP });
+    valueOf(await engine.shade(2, question()));
+    expect(pointSurvey).toHaveBeenCalledTimes(2);
+  });
+
+  it('does not take a weather file for another of the same name and length', async () => {
+    const name = 'USA_IL_Chicago-OHare.Intl.AP.725300_TMY3.epw';
+    const text = gunzipSync(
+      readFileSync(new URL(`../reference-values/weather/${name}.gz`, import.meta.url)),
+    ).toString('latin1');
+    const renamed = text.replace('Chicago', 'Chiccgo');
+    expect(renamed).not.toBe(text);
+    expect(renamed).toHaveLength(text.length);
+    const engine = engineFor();
+    const named: Survey = { ...survey, climate: { source: 'weather-file', name } };
+    const light = async (contents: string) => {
+      const bytes = new Uint8Array(Buffer.from(contents, 'latin1')).buffer;
+      engine.hold({ survey: named, weatherFile: { name, contents: bytes }, ...STEP });
+      return valueOf(await engine.assess(0, silent)).climate.name;
+    };
+    expect([await light(text), await light(renamed)]).toEqual([
+      expect.stringContaining('Chicago'),
+      expect.stringContaining('Chiccgo'),
+    ]);
+  });
+
+  it('reads a weather file of old letters as the command line does', async () => {
+    const name = 'USA_IL_Chicago-OHare.Intl.AP.725300_TMY3.epw';
+    const text = gunzipSync(
+      readFileSync(new URL(`../reference-values/weather/${name}.gz`, import.meta.url)),
+    ).toString('latin1');
+    const contents = new Uint8Array(Buffer.from(text.replace('Chicago', 'Ca\xf1ada'), 'latin1')).buffer;
+    expect(valueOf(await engineFor().readWeatherFile(name, contents)).place).toContain('Cañada');
   });
 });
