@@ -1,6 +1,7 @@
 import type { Assessment, PlaneAssessment, StationAssessment } from '../core/shading/assessment.ts';
 import { TRANSPOSITIONS } from '../core/transposition/transposition-models.ts';
 import { spreadText, withInterval } from './interval-text.ts';
+import { shownName, shownWords } from './shown-name.ts';
 import { grouped, monthsTable, percent, table } from './table.ts';
 
 /** The result of one survey for a person to read. */
@@ -8,9 +9,9 @@ export function assessmentText(assessed: Assessment & { file: string; title: str
   const { climate, transposition, planes } = assessed;
   const model = TRANSPOSITIONS.find(({ id }) => id === transposition)?.name ?? transposition;
   const lines = [
-    `${assessed.title} (${assessed.file})`,
-    `Climate: ${climate.name}. ${climate.reference}.`,
-    ...climate.warnings.map((warning) => `Note: ${warning}`),
+    `${shownName(assessed.title)} (${shownWords(assessed.file)})`,
+    `Climate: ${shownName(climate.name)}. ${shownWords(climate.reference)}.`,
+    ...climate.warnings.map((warning) => `Note: ${shownWords(warning)}`),
     `Sky light on the tilted plane: ${model}. Steps of ${assessed.stepMinutes} minutes.`,
     'Solar access is the light that obstructions leave, in percent of the light without them.',
     'In brackets: the truth is expected between these 95 times in 100.',
@@ -29,7 +30,7 @@ function planeText(plane: PlaneAssessment): string {
   const rows = [{ label: 'unshaded, kWh/m2', cells: [...monthly, grouped(unshaded.annual, 1)] }];
   for (const { name, solarAccess: access } of plane.stations)
     rows.push({
-      label: `access at ${name}, %`,
+      label: `access at ${shownName(name)}, %`,
       cells: [...access.monthly.map(percent), percent(access.annual)],
     });
   if (solarAccess && plane.stations.length > 1)
@@ -38,7 +39,7 @@ function planeText(plane: PlaneAssessment): string {
       cells: [...solarAccess.monthly.map(percent), percent(solarAccess.annual)],
     });
   return [
-    `${plane.name}: tilt ${plane.surfaceTilt}°, facing ${plane.surfaceAzimuth}°`,
+    `${shownName(plane.name)}: tilt ${plane.surfaceTilt}°, facing ${plane.surfaceAzimuth}°`,
     verdict(plane),
     `Orientation factor ${percent(plane.orientationFactor)} %: a plane lying best here, tilt ${Math.round(bestPlane.surfaceTilt)}°, facing ${Math.round(bestPlane.surfaceAzimuth)}°, is 100 %.`,
     '',
@@ -56,11 +57,11 @@ function verdict({ solarAccess }: PlaneAssessment): string {
 
 function stationText(station: StationAssessment): string {
   const { annual, interval } = station.solarAccess;
-  const heading = `At ${station.name}: access ${withInterval(annual, interval)} %, observed ${percent(station.coverage)} % of the light's directions.`;
+  const heading = `At ${shownName(station.name)}: access ${withInterval(annual, interval)} %, observed ${percent(station.coverage)} % of the light's directions.`;
   if (station.obstructions.length === 0) return `${heading} Nothing was traced.\n`;
-  const names = new Map(station.obstructions.map(({ id, name }) => [id, name]));
+  const names = new Map(station.obstructions.map(({ id, name }) => [id, shownName(name)]));
   const rows = station.obstructions.map(({ name, gainIfRemoved, lossIfAlone }) => [
-    name,
+    shownName(name),
     percent(gainIfRemoved),
     percent(lossIfAlone),
   ]);

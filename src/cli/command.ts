@@ -9,6 +9,8 @@ export interface Terminal {
   err(text: string): void;
   /** All of standard input; null where a person sits at it. */
   input(): Promise<string | null>;
+  /** Whether rows surely wait on standard input; false where that cannot be known without waiting for them. */
+  rowsWait(): boolean;
 }
 
 export interface CommandCall {

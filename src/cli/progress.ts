@@ -1,4 +1,5 @@
 import type { Terminal } from './command.ts';
+import { shownName, shownWords } from './shown-name.ts';
 
 const QUIET_MS = 1000;
 
@@ -8,6 +9,6 @@ export function progressTeller(terminal: Terminal, subject: string, now: () => n
   return (share: number, stage: string): void => {
     if (now() - toldAt < QUIET_MS) return;
     toldAt = now();
-    terminal.err(`${subject}: ${Math.round(share * 100)} %, ${stage}\n`);
+    terminal.err(`${shownWords(subject)}: ${Math.round(share * 100)} %, ${shownName(stage)}\n`);
   };
 }

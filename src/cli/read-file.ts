@@ -1,4 +1,5 @@
 import { readFileSync, statSync } from 'node:fs';
+import { weatherFileText } from '../core/irradiance/weather-file-text.ts';
 import type { Parsed } from '../core/survey/problem.ts';
 
 /** No file that any reader takes is larger: 20 million characters of up to 4 bytes. */
@@ -18,7 +19,7 @@ export function readSurveyText(file: string): Parsed<FileText> {
 
 /** Text of a weather file: UTF-8 where it is, else byte by byte (ISO 8859-1), as old ones are written. */
 export function readWeatherText(file: string): Parsed<FileText> {
-  return readFile(file, (bytes) => utf8(bytes) ?? new TextDecoder('latin1').decode(bytes));
+  return readFile(file, (bytes) => weatherFileText(bytes, TextDecoder));
 }
 
 function readFile(file: string, decoded: (bytes: Uint8Array) => string | null): Parsed<FileText> {

@@ -1,7 +1,9 @@
-import { parseArgs } from 'node:util';
+import { readFileSync } from 'node:fs';
 import { commands } from './command-table.ts';
-import type { Command, CommandCall, ExitCode, Terminal } from './command.ts';
+import type { Command, ExitCode, Terminal } from './command.ts';
 import { UsageError } from './command.ts';
+import { shownWords } from './shown-name.ts';
+import { typedOptions } from './typed-options.ts';
 
 /** Runs what was typed after `noonmark`. */
 export async function runCommandLine(typed: string[], terminal: Terminal): Promise<ExitCode> {
@@ -10,24 +12,34 @@ export async function runCommandLine(typed: string[], terminal: Terminal): Promi
     terminal.out(overview());
     return 0;
   }
+  if (name === '--version' || name === '-v') {
+    terminal.out(`${version()}\n`);
+    return 0;
+  }
   const command = commands.find((row) => row.name === name);
   if (!command) {
-    terminal.err(name === undefined ? overview() : `There is no command "${name}".\n\n${overview()}`);
+    terminal.err(
+      name === undefined ? overview() : `There is no command "${shownWords(name)}".\n\n${overview()}`,
+    );
     return 2;
   }
   try {
     return await runCommand(command, rest, terminal);
   } catch (error) {
     if (!(error instanceof UsageError)) throw error;
-    terminal.err(`${error.message}\n\nUsage: ${usageOf(command)}\nHelp:  noonmark ${command.name} --help\n`);
+    terminal.err(
+      `${shownWords(error.message)}\n\nUsage: ${usageOf(command)}\nHelp:  noonmark ${command.name} --help\n`,
+    );
     return 2;
   }
 }
 
 async function runCommand(command: Command, typed: string[], terminal: Terminal): Promise<ExitCode> {
-  const { values, positionals } = parsed(command, typed);
+  const { values, positionals } = typedOptions(command, typed);
   if (values.help) {
-    terminal.out(`${command.summary}\n\nUsage: ${usageOf(command)}\n\n${command.help.trim()}\n`);
+    terminal.out(
+      `${command.summary}\n\nUsage: ${usageOf(command)}\n\n${command.help.replace(/^\n+|\n+$/g, '')}\n`,
+    );
     return 0;
   }
   if (positionals.length > 0 && !command.usage.includes('FILE'))
@@ -39,29 +51,9 @@ async function runCommand(command: Command, typed: string[], terminal: Terminal)
   return command.run({ values, files: positionals, terminal });
 }
 
-function parsed(command: Command, typed: string[]) {
-  try {
-    const { values, positionals } = parseArgs({
-      args: withNegativeNumbers(typed),
-      options: { ...command.options, help: { type: 'boolean', short: 'h' } },
-      allowPositionals: true,
-    });
-    return { values: values as CommandCall['values'], positionals };
-  } catch (error) {
-    throw new UsageError((error as Error).message);
-  }
-}
-
-/** `--longitude -72.2` as `--longitude=-72.2`: a number is no option. */
-function withNegativeNumbers(typed: string[]): string[] {
-  const joined: string[] = [];
-  for (const word of typed) {
-    const before = joined.at(-1);
-    if (/^-[.\d]/.test(word) && before?.startsWith('--') && before.length > 2 && !before.includes('='))
-      joined[joined.length - 1] = `${before}=${word}`;
-    else joined.push(word);
-  }
-  return joined;
+function version(): string {
+  const text = readFileSync(new URL('../../package.json', import.meta.url), 'utf8');
+  return (JSON.parse(text) as { version: string }).version;
 }
 
 const usageOf = ({ name, usage }: Command) => `noonmark ${name} ${usage}`;
@@ -77,6 +69,7 @@ function overview(): string {
     ...lines,
     '',
     'Help on a command: noonmark COMMAND --help',
+    'Version: noonmark --version',
     'With --json a command writes its result for machines on standard output; all else goes to standard error.',
     'Exit code: 0 done, 1 bad input, 2 wrong usage.',
     '',

@@ -94,6 +94,7 @@ describe('progress', () => {
       out: () => undefined,
       err: (text: string) => void (said += text),
       input: () => Promise.resolve(null),
+      rowsWait: () => false,
     };
     const tell = progressTeller(terminal, 'house.json', () => now);
     for (const [time, share] of [

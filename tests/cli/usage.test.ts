@@ -1,20 +1,9 @@
+import { readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import { commands } from '../../src/cli/command-table.ts';
-import type { Terminal } from '../../src/cli/command.ts';
-import { runCommandLine } from '../../src/cli/run-command-line.ts';
-import { noonmark, project } from './run-noonmark.ts';
-
-/** The same in this process, for the many cases that need no process of their own. */
-async function typed(...words: string[]) {
-  const said = { out: '', err: '' };
-  const terminal: Terminal = {
-    out: (text) => void (said.out += text),
-    err: (text) => void (said.err += text),
-    input: () => Promise.resolve(null),
-  };
-  return { code: await runCommandLine(words, terminal), ...said };
-}
+import { newFolder, noonmark, project } from './run-noonmark.ts';
+import { typed } from './typed-words.ts';
 
 describe('help', () => {
   it('lists every command and exits with 0', async () => {
@@ -75,6 +64,19 @@ describe('the other commands', () => {
     const { files } = JSON.parse(both.out) as { files: { ok: boolean; problems: { path: string }[] }[] };
     expect(files.map(({ ok }) => ok)).toEqual([true, false]);
     expect(files[1].problems[0].path).toBe('format');
+  });
+
+  it('check: tells a warning as the other commands do', async () => {
+    const folder = newFolder();
+    const file = join(folder, 'odd.json');
+    const survey = JSON.parse(
+      readFileSync(join(project, 'survey-samples/valley-full-horizon.json'), 'utf8'),
+    ) as object;
+    writeFileSync(file, JSON.stringify({ ...survey, unheardOf: 1 }));
+    const { code, err } = await typed('check', file);
+    rmSync(folder, { recursive: true, force: true });
+    expect(code).toBe(0);
+    expect(err).toContain('unheardOf: Warning: ');
   });
 
   it('climate: gives twelve months whose diffuse share is that of the grid', async () => {

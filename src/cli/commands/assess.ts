@@ -8,7 +8,7 @@ import { assessmentText } from '../assessment-text.ts';
 import { climateByOption, climateOfSurvey } from '../climate-choice.ts';
 import type { Command, CommandCall, Terminal } from '../command.ts';
 import { numberOption, textOption, UsageError, wordOption } from '../command.ts';
-import { problemLines } from '../problem-lines.ts';
+import { problemLines, warningLines } from '../problem-lines.ts';
 import { progressTeller } from '../progress.ts';
 import { readSurveyText } from '../read-file.ts';
 
@@ -55,16 +55,11 @@ Counted: light from the sun and the sky that obstructions block. Not counted: wh
     const { terminal, values } = call;
     const surveys: Assessed[] = [];
     for (const file of call.files) {
-      const assessed = await assessFile(file, choice, terminal);
+      const assessed = await assessedOrFault(file, choice, terminal);
       surveys.push(assessed);
       if ('problems' in assessed) terminal.err(problemLines(file, assessed.problems));
       else {
-        terminal.err(
-          problemLines(
-            file,
-            assessed.warnings.map(({ path, message }) => ({ path, message: `Warning: ${message}` })),
-          ),
-        );
+        terminal.err(warningLines(file, assessed.warnings));
         if (!values.json) terminal.out(assessmentText(assessed));
       }
     }
@@ -82,6 +77,17 @@ function choiceOf(call: CommandCall): AssessChoice {
     transposition: wordOption(call, 'transposition', MODELS),
     stepMinutes,
   };
+}
+
+/** One file's unexpected error must not cost the others their results. */
+async function assessedOrFault(file: string, choice: AssessChoice, terminal: Terminal): Promise<Assessed> {
+  try {
+    return await assessFile(file, choice, terminal);
+  } catch (error) {
+    const reason = error instanceof Error ? error.message : String(error);
+    const message = `Noonmark could not assess this file, by a fault of its own (${reason}). Please report it, with the file if you can.`;
+    return { file, problems: [{ path: 'file', message }], planes: [] };
+  }
 }
 
 async function assessFile(file: string, choice: AssessChoice, terminal: Terminal): Promise<Assessed> {

@@ -1,8 +1,9 @@
 import { parseSurvey } from '../../core/survey/parse-survey.ts';
 import type { Problem } from '../../core/survey/problem.ts';
 import type { Command } from '../command.ts';
-import { problemLines } from '../problem-lines.ts';
+import { problemLines, warningLines } from '../problem-lines.ts';
 import { readSurveyText } from '../read-file.ts';
+import { shownName, shownWords } from '../shown-name.ts';
 
 interface CheckedFile {
   file: string;
@@ -26,14 +27,9 @@ Exit code 1 where any file has a problem. Warnings alone leave it at 0.`,
     if (values.json) terminal.out(`${JSON.stringify({ files: checked }, null, 1)}\n`);
     for (const { file, ok, title, problems, warnings } of checked) {
       terminal.err(problemLines(file, problems));
-      terminal.err(
-        problemLines(
-          file,
-          warnings.map(({ path, message }) => ({ path, message: `Warning. ${message}` })),
-        ),
-      );
-      if (!values.json)
-        terminal.out(ok ? `${file}: a good survey, "${title}"\n` : `${file}: cannot be used as it is\n`);
+      terminal.err(warningLines(file, warnings));
+      const verdict = ok ? `a good survey, "${shownName(title ?? '')}"` : 'cannot be used as it is';
+      if (!values.json) terminal.out(`${shownWords(file)}: ${verdict}\n`);
     }
     return checked.every(({ ok }) => ok) ? 0 : 1;
   },

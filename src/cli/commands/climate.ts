@@ -7,6 +7,7 @@ import { numberOption, textOption, UsageError } from '../command.ts';
 import { climateByOption, worldGrid } from '../climate-choice.ts';
 import type { ClimatePlace } from '../climate-choice.ts';
 import { problemLines } from '../problem-lines.ts';
+import { shownName, shownWords } from '../shown-name.ts';
 import { grouped, monthsTable } from '../table.ts';
 
 const STEP_MINUTES = 5;
@@ -81,6 +82,6 @@ function climateText(months: ClimateMonths): string {
     rows.push({ label: 'diffuse fraction', cells: diffuseFraction.map((value) => value.toFixed(2)) });
   if (temperature)
     rows.push({ label: 'air temperature, °C', cells: temperature.map((value) => value.toFixed(1)) });
-  const notes = months.warnings.map((warning) => `Note: ${warning}\n`).join('');
-  return `${months.name}\n${months.reference}\nLatitude ${months.latitude}, longitude ${months.longitude}\n${notes}\n${monthsTable(rows)}`;
+  const notes = months.warnings.map((warning) => `Note: ${shownWords(warning)}\n`).join('');
+  return `${shownName(months.name)}\n${shownWords(months.reference)}\nLatitude ${months.latitude}, longitude ${months.longitude}\n${notes}\n${monthsTable(rows)}`;
 }

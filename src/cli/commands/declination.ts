@@ -5,6 +5,7 @@ import type { Command, CommandCall } from '../command.ts';
 import { numberOption, textOption, UsageError } from '../command.ts';
 import { readCsv } from '../csv-rows.ts';
 import { dateOf } from '../instants.ts';
+import { refuseRowsToo, rowsAlone } from '../place-or-rows.ts';
 import { problemLines } from '../problem-lines.ts';
 import { table } from '../table.ts';
 
@@ -29,7 +30,7 @@ with elevation in metres above sea level.
   --date DATE           2026-05-14, an instant, or a decimal year; today where it is left out
   --latitude DEGREES    -90 to 90, north positive
   --longitude DEGREES   -180 to 180, east positive
-  --elevation METRES    above sea level; 0 where it is left out
+  --altitude METRES     above sea level; 0 where it is left out
   --json                a list with declination, standardDeviation, model, epoch, validUntil, withinValidity
 
 True azimuth = magnetic azimuth + declination (east positive). Steel nearby turns a compass by far more.`,
@@ -37,7 +38,7 @@ True azimuth = magnetic azimuth + declination (east positive). Steel nearby turn
     date: { type: 'string' },
     latitude: { type: 'string' },
     longitude: { type: 'string' },
-    elevation: { type: 'string' },
+    altitude: { type: 'string' },
     json: { type: 'boolean' },
   },
   async run(call) {
@@ -59,17 +60,19 @@ True azimuth = magnetic azimuth + declination (east positive). Steel nearby turn
 async function rowsOf(call: CommandCall): Promise<Parsed<DeclinationRow[]>> {
   const latitude = numberOption(call, 'latitude', -90, 90);
   const longitude = numberOption(call, 'longitude', -180, 180);
-  const elevation = numberOption(call, 'elevation', -1000, 850_000) ?? 0;
+  const altitude = numberOption(call, 'altitude', -1000, 850_000);
   if (latitude !== undefined && longitude !== undefined) {
+    refuseRowsToo(call);
     const date = textOption(call, 'date') ?? new Date().toISOString().slice(0, 10);
     const timeMs = dateOf(date);
     if (timeMs === null) throw new UsageError(`--date ${DATE_FORM}, got "${date}"`);
-    return { ok: true, value: [declinationRow(date, timeMs, latitude, longitude, elevation)], warnings: [] };
+    return {
+      ok: true,
+      value: [declinationRow(date, timeMs, latitude, longitude, altitude ?? 0)],
+      warnings: [],
+    };
   }
-  if (latitude !== undefined || longitude !== undefined || call.values.date !== undefined)
-    throw new UsageError('Give both --latitude and --longitude, or rows on standard input.');
-  const csv = await call.terminal.input();
-  if (csv === null) throw new UsageError('Give --latitude and --longitude, or rows on standard input.');
+  const csv = await rowsAlone(call, ['latitude', 'longitude', 'date', 'altitude']);
   return readCsv(csv, ['date', 'latitude', 'longitude', 'elevation'], (row) => {
     const timeMs = dateOf(row.text('date'));
     if (timeMs === null) row.problem('date', DATE_FORM);

@@ -4,6 +4,7 @@ import type { Command, CommandCall } from '../command.ts';
 import { numberOption, textOption, UsageError } from '../command.ts';
 import { readCsv } from '../csv-rows.ts';
 import { INSTANT_FORM, instantOf } from '../instants.ts';
+import { refuseRowsToo, rowsAlone } from '../place-or-rows.ts';
 import { problemLines } from '../problem-lines.ts';
 import type { SunDay } from '../sun-day.ts';
 import { sunDay, sunDayText } from '../sun-day.ts';
@@ -74,6 +75,9 @@ function dayOf(call: CommandCall): SunDay | null {
   const longitude = numberOption(call, 'longitude', -180, 180);
   if (latitude === undefined || longitude === undefined || call.values.at !== undefined)
     throw new UsageError('With --day give --latitude and --longitude, and no --at.');
+  if (call.values.altitude !== undefined)
+    throw new UsageError('--altitude does not go with --day: rise and set are by the usual refraction.');
+  refuseRowsToo(call);
   return sunDay(day, textOption(call, 'time-zone') ?? 'UTC', latitude, longitude);
 }
 
@@ -82,15 +86,13 @@ async function rowsOf(call: CommandCall): Promise<Parsed<SunRow[]>> {
   const longitude = numberOption(call, 'longitude', -180, 180);
   const altitude = numberOption(call, 'altitude', -430, 9000);
   if (latitude !== undefined && longitude !== undefined) {
+    refuseRowsToo(call);
     const utc = textOption(call, 'at') ?? new Date().toISOString();
     const timeMs = instantOf(utc);
     if (timeMs === null) throw new UsageError(`--at ${INSTANT_FORM}, got "${utc}"`);
     return { ok: true, value: [sunRow(utc, timeMs, latitude, longitude, altitude)], warnings: [] };
   }
-  if (latitude !== undefined || longitude !== undefined || call.values.at !== undefined)
-    throw new UsageError('Give both --latitude and --longitude, or rows on standard input.');
-  const csv = await call.terminal.input();
-  if (csv === null) throw new UsageError('Give --latitude and --longitude, or rows on standard input.');
+  const csv = await rowsAlone(call, ['latitude', 'longitude', 'at', 'altitude']);
   return readCsv(csv, ['utc', 'latitude', 'longitude'], (row) => {
     const timeMs = instantOf(row.text('utc'));
     if (timeMs === null) row.problem('utc', INSTANT_FORM);

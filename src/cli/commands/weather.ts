@@ -3,8 +3,9 @@ import type { WeatherFile } from '../../core/irradiance/weather-file.ts';
 import { parseWeatherFile } from '../../core/irradiance/weather-file.ts';
 import { DAYS_IN_MONTH } from '../../core/solar-position/sun-track.ts';
 import type { Command } from '../command.ts';
-import { problemLines } from '../problem-lines.ts';
+import { problemLines, warningLines } from '../problem-lines.ts';
 import { readWeatherText } from '../read-file.ts';
+import { shownName, shownWords } from '../shown-name.ts';
 import { grouped, monthsTable } from '../table.ts';
 
 export const weather: Command = {
@@ -24,12 +25,7 @@ export const weather: Command = {
       terminal.err(problemLines(file, parsed.problems));
       return 1;
     }
-    terminal.err(
-      problemLines(
-        file,
-        parsed.warnings.map(({ path, message }) => ({ path, message: `Warning: ${message}` })),
-      ),
-    );
+    terminal.err(warningLines(file, parsed.warnings));
     const sums = { file, ...weatherSums(parsed.value) };
     terminal.out(values.json ? `${JSON.stringify(sums, null, 1)}\n` : weatherText(sums));
     return 0;
@@ -78,7 +74,7 @@ function weatherText(sums: ReturnType<typeof weatherSums> & { file: string }): s
   });
   const hours = sums.utcOffset / 60;
   return [
-    `${sums.place} (${sums.format} file ${sums.file})`,
+    `${shownName(sums.place)} (${sums.format} file ${shownWords(sums.file)})`,
     `Latitude ${sums.latitude}, longitude ${sums.longitude}, ${sums.altitude} m above sea level, UTC${hours < 0 ? '' : '+'}${hours}`,
     '',
     monthsTable([
