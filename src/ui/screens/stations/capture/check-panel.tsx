@@ -57,12 +57,19 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
   const [bearing, setBearing] = useState('');
   const [frame, setFrame] = useState<(typeof FRAMES)[number]['value']>('true');
   const [last, setLast] = useState<string | null>(null);
+  const [height, setHeight] = useState('');
+  const [length, setLength] = useState('');
+  const metres = { least: 0.01, most: 1000, unit: ' m', optional: true };
+  const [tall, long] = [typedNumber(height, metres), typedNumber(length, metres)];
   const typed = typedNumber(bearing, { least: 0, most: 360, unit: '°', optional: method !== 'known-mark' });
   const take = async () => {
     const facts: CheckFacts = {
       method,
       ...(mark.trim() && { mark: mark.trim() }),
       ...(valueOf(typed) !== undefined && { bearing: valueOf(typed), frame }),
+      ...(method === 'sun-shadow' &&
+        valueOf(tall) !== undefined &&
+        valueOf(long) !== undefined && { shadowHeight: valueOf(tall), shadowLength: valueOf(long) }),
       ...(frame === 'grid' && { gridZone: utmZone(session.record.survey.site) }),
     };
     const station = stationOf(session.record.survey, stationId);
@@ -79,6 +86,15 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
       )}
       <p>{howTo}</p>
       {method === 'sun-shadow' && <ShadowHours session={session} />}
+      {method === 'sun-shadow' && (
+        <details class="clock-test">
+          <summary>Test the clock by the shadow’s length</summary>
+          <div class="check-fields">
+            <Measured label="Height of the upright, m" value={height} onInput={setHeight} />
+            <Measured label="Shadow on level ground, m" value={length} onInput={setLength} />
+          </div>
+        </details>
+      )}
       {needsBearing && (
         <div class="check-fields">
           <label>
@@ -92,16 +108,7 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
             />
           </label>
           {method === 'known-mark' && (
-            <label>
-              Bearing, degrees
-              <input
-                type="text"
-                inputMode="decimal"
-                value={bearing}
-                autocomplete="off"
-                onInput={({ currentTarget }) => setBearing(currentTarget.value)}
-              />
-            </label>
+            <Measured label="Bearing, degrees" value={bearing} onInput={setBearing} />
           )}
         </div>
       )}
@@ -114,10 +121,28 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
       <Thumb
         session={session}
         label={method === 'sun-shadow' ? 'Take the shadow' : 'Sight the mark'}
-        disabled={faultOf(typed) !== null || (method !== 'sun-shadow' && mark.trim() === '')}
+        disabled={
+          [typed, tall, long].some((one) => faultOf(one) !== null) ||
+          (method !== 'sun-shadow' && mark.trim() === '')
+        }
         onPress={() => void take()}
       />
     </>
+  );
+}
+
+function Measured(props: { label: string; value: string; onInput: (value: string) => void }) {
+  return (
+    <label>
+      {props.label}
+      <input
+        type="text"
+        inputMode="decimal"
+        autocomplete="off"
+        value={props.value}
+        onInput={({ currentTarget }) => props.onInput(currentTarget.value)}
+      />
+    </label>
   );
 }
 
