@@ -10,8 +10,7 @@ export const largeClosure: OpenPointKind = {
   title: 'Large error of closure',
   isGrave: false,
   find: ({ survey, pointed }) =>
-    runsInUse(pointed).flatMap(({ run }) => {
-      const { closure = null, refused = null } = pointed.runs.find(({ id }) => id === run) ?? {};
+    runsInUse(pointed).flatMap(({ run, pointed: { closure, refused } }) => {
       if (!closure || refused) return [];
       const [azimuth, elevation] = [Math.abs(closure.azimuth), Math.abs(closure.elevation)];
       if (azimuth <= LARGE.azimuth && elevation <= LARGE.elevation) return [];

@@ -11,9 +11,7 @@ export const noClosure: OpenPointKind = {
   isGrave: false,
   find: ({ survey, pointed }) =>
     runsInUse(pointed)
-      .filter(
-        ({ run, minutes }) => minutes >= SHORT && pointed.runs.find(({ id }) => id === run)?.closure === null,
-      )
+      .filter(({ minutes, pointed: { closure } }) => minutes >= SHORT && closure === null)
       .map(({ run, stations, minutes }) => ({
         subject: stationNames(survey, stations),
         sentence: `A sitting of ${minutes.toFixed(0)} minutes, and no mark was sighted at its start and again at its end, so nobody knows whether the phone drifted.`,

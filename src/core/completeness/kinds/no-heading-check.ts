@@ -16,11 +16,10 @@ export const noHeadingCheck: OpenPointKind = {
   title: 'No heading check',
   isGrave: false,
   find: ({ survey, pointed, assessment }) =>
-    runsInUse(pointed).flatMap(({ run, stations }) => {
-      const found = pointed.runs.find(({ id }) => id === run);
-      const restsOn = found?.heading && RESTS_ON[found.heading.source];
-      if (!found?.heading || !restsOn || found.refused) return [];
-      const { standardDeviation, outliers } = found.heading;
+    runsInUse(pointed).flatMap(({ run, stations, pointed: { heading, refused } }) => {
+      const restsOn = heading && RESTS_ON[heading.source];
+      if (!heading || !restsOn || refused) return [];
+      const { standardDeviation, outliers } = heading;
       const far = outliers ? `, now and then to ${outliers.reach}°` : '';
       return [
         {

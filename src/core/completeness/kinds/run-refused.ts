@@ -7,8 +7,7 @@ export const runRefused: OpenPointKind = {
   title: 'The horizon does not close',
   isGrave: true,
   find: ({ survey, pointed }) =>
-    runsInUse(pointed).flatMap(({ run, stations }) => {
-      const refused = pointed.runs.find(({ id }) => id === run)?.refused;
+    runsInUse(pointed).flatMap(({ run, stations, pointed: { refused } }) => {
       if (!refused) return [];
       return [
         {
