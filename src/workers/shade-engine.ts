@@ -1,8 +1,10 @@
 import { stationHorizon } from '../core/horizon/station-horizon.ts';
 import type { Climate } from '../core/irradiance/climate.ts';
 import { parseWeatherFile } from '../core/irradiance/weather-file.ts';
-import type { SiteLight } from '../core/shading/assess-survey.ts';
-import { assessSurvey, obstructionsById, siteLight } from '../core/shading/assess-survey.ts';
+import type { SiteLight } from '../core/shading/site-light.ts';
+import { assessSurvey } from '../core/assessment/assess-survey.ts';
+import { obstructionsById } from '../core/survey/served-planes.ts';
+import { siteLight } from '../core/shading/site-light.ts';
 import type { Assessment } from '../core/shading/assessment.ts';
 import type { AssessRequest, Outcome, ShadeQuestion, WeatherFileFacts } from '../core/shading/calculation.ts';
 import type { SkyDensity } from '../core/shading/sky-density.ts';

@@ -4,7 +4,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { openPoints } from '../../src/core/completeness/open-points.ts';
 import { worldClimate } from '../../src/core/irradiance/world-climate.ts';
 import { decodeWorldGrid } from '../../src/core/irradiance/world-grid.ts';
-import { assessSurvey } from '../../src/core/shading/assess-survey.ts';
+import { assessSurvey } from '../../src/core/assessment/assess-survey.ts';
 import type { Survey } from '../../src/core/survey/survey.ts';
 import { completeSurvey } from '../core/completeness/complete-survey.ts';
 import { sampleSurvey, worldGridBytes } from '../report/sample-shades.ts';

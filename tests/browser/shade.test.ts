@@ -6,7 +6,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { clearSkyClimate } from '../../src/core/irradiance/clear-sky-climate.ts';
 import { worldClimate } from '../../src/core/irradiance/world-climate.ts';
 import { decodeWorldGrid } from '../../src/core/irradiance/world-grid.ts';
-import { assessSurvey } from '../../src/core/shading/assess-survey.ts';
+import { assessSurvey } from '../../src/core/assessment/assess-survey.ts';
 import type { Assessment } from '../../src/core/shading/assessment.ts';
 import type { Survey } from '../../src/core/survey/survey.ts';
 import { inventedSurvey } from '../app/invented-survey.ts';

@@ -1,12 +1,12 @@
 import { join } from 'node:path';
 import { expect, it, vi } from 'vitest';
-import type * as AssessSurvey from '../../src/core/shading/assess-survey.ts';
+import type * as AssessSurvey from '../../src/core/assessment/assess-survey.ts';
 import type { Survey } from '../../src/core/survey/survey.ts';
 import { runCommandLine } from '../../src/cli/run-command-line.ts';
 import { project } from './run-noonmark.ts';
 import { typedWith } from './typed-words.ts';
 
-vi.mock('../../src/core/shading/assess-survey.ts', async (original) => {
+vi.mock('../../src/core/assessment/assess-survey.ts', async (original) => {
   const real = await original<typeof AssessSurvey>();
   return {
     ...real,

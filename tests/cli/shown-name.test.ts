@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { assessmentText } from '../../src/cli/assessment-text.ts';
 import { problemLines, warningLines } from '../../src/cli/problem-lines.ts';
 import { shownName, shownWords } from '../../src/cli/shown-name.ts';
-import { assessSurvey } from '../../src/core/shading/assess-survey.ts';
+import { assessSurvey } from '../../src/core/assessment/assess-survey.ts';
 import { sampleSurvey, underClearSky } from '../report/sample-shades.ts';
 import { clearSkyClimate } from '../../src/core/irradiance/clear-sky-climate.ts';
 

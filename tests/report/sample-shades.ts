@@ -1,6 +1,6 @@
 import { readFileSync, readdirSync } from 'node:fs';
 import type { StationShade } from '../../src/core/shading/station-shade.ts';
-import { stationsOf } from '../../src/core/shading/assess-survey.ts';
+import { stationsOf } from '../../src/core/survey/served-planes.ts';
 import { parseSurvey } from '../../src/core/survey/parse-survey.ts';
 import type { Survey } from '../../src/core/survey/survey.ts';
 import { ClimateSource } from '../../src/workers/climate-source.ts';

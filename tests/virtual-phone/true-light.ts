@@ -2,7 +2,7 @@ import { blockedSpans } from '../../src/core/horizon/blocked-spans.ts';
 import type { HorizonProfile } from '../../src/core/horizon/horizon-profile.ts';
 import { horizonProfile } from '../../src/core/horizon/horizon-profile.ts';
 import { worldClimate } from '../../src/core/irradiance/world-climate.ts';
-import { siteLight } from '../../src/core/shading/assess-survey.ts';
+import { siteLight } from '../../src/core/shading/site-light.ts';
 import { blockedLight } from '../../src/core/shading/blocked-light.ts';
 import type { SkyMap } from '../../src/core/shading/sky-map.ts';
 import { skyMap } from '../../src/core/shading/sky-map.ts';

@@ -4,7 +4,7 @@ import { describe, expect, it, vi } from 'vitest';
 import { pointSurvey } from '../../src/core/pointing/point-survey.ts';
 import { worldClimate } from '../../src/core/irradiance/world-climate.ts';
 import { decodeWorldGrid } from '../../src/core/irradiance/world-grid.ts';
-import { assessSurvey } from '../../src/core/shading/assess-survey.ts';
+import { assessSurvey } from '../../src/core/assessment/assess-survey.ts';
 import type * as PointSurvey from '../../src/core/pointing/point-survey.ts';
 import type { Outcome } from '../../src/core/shading/calculation.ts';
 import type { Survey } from '../../src/core/survey/survey.ts';

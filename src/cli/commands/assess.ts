@@ -1,4 +1,4 @@
-import { assessSurvey } from '../../core/shading/assess-survey.ts';
+import { assessSurvey } from '../../core/assessment/assess-survey.ts';
 import type { Assessment } from '../../core/shading/assessment.ts';
 import { parseSurvey } from '../../core/survey/parse-survey.ts';
 import type { Problem } from '../../core/survey/problem.ts';

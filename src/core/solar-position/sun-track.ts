@@ -62,7 +62,7 @@ export interface TrackSite {
  * Positions are asked of the library every six hours only; between, declination and the departure of the hour angle
  * from mean time are linear. Parallax and refraction as in `solarPosition`, with the refraction held below -1°.
  */
-export function sunTrack(site: TrackSite, stepMinutes = 2): SunTrack {
+export function sunTrack(site: TrackSite, stepMinutes: number): SunTrack {
   if (!(stepMinutes >= 1 && stepMinutes <= 15 && Number.isInteger(60 / stepMinutes)))
     throw new RangeError(`stepMinutes must divide an hour and be 1 to 15, got ${stepMinutes}`);
   if (!(Math.abs(site.latitude) <= 90))

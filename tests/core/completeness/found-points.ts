@@ -1,7 +1,7 @@
 import { openPoints } from '../../../src/core/completeness/open-points.ts';
 import type { OpenPoint, OpenPointKindId } from '../../../src/core/completeness/open-point.ts';
 import { clearSkyClimate } from '../../../src/core/irradiance/clear-sky-climate.ts';
-import { assessSurvey } from '../../../src/core/shading/assess-survey.ts';
+import { assessSurvey } from '../../../src/core/assessment/assess-survey.ts';
 import type { Assessment } from '../../../src/core/shading/assessment.ts';
 import type { RoofPlane, Survey } from '../../../src/core/survey/survey.ts';
 

@@ -3,7 +3,7 @@ import { lightByAzimuth } from '../../../src/core/completeness/light-by-azimuth.
 import { openPoints } from '../../../src/core/completeness/open-points.ts';
 import { unseenParts } from '../../../src/core/completeness/unseen-parts.ts';
 import { worldClimate } from '../../../src/core/irradiance/world-climate.ts';
-import { siteLight } from '../../../src/core/shading/assess-survey.ts';
+import { siteLight } from '../../../src/core/shading/site-light.ts';
 import type { AzimuthRange } from '../../../src/core/shading/coverage.ts';
 import { coverage } from '../../../src/core/shading/coverage.ts';
 import { skyMap } from '../../../src/core/shading/sky-map.ts';

@@ -4,7 +4,7 @@ import { horizonProfile } from '../../../src/core/horizon/horizon-profile.ts';
 import { clearSkyClimate } from '../../../src/core/irradiance/clear-sky-climate.ts';
 import { weatherFileClimate } from '../../../src/core/irradiance/weather-file-climate.ts';
 import { parseWeatherFile } from '../../../src/core/irradiance/weather-file.ts';
-import { DEFAULT_STEP_MINUTES } from '../../../src/core/shading/assess-survey.ts';
+import { DEFAULT_STEP_MINUTES } from '../../../src/core/shading/site-light.ts';
 import { blockedLight, shadedMonths } from '../../../src/core/shading/blocked-light.ts';
 import { skyGrid } from '../../../src/core/shading/sky-grid.ts';
 import { skyMap, unshadedMonths } from '../../../src/core/shading/sky-map.ts';

@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { pointSurvey } from '../../../src/core/pointing/point-survey.ts';
 import type { PointedSurvey } from '../../../src/core/pointing/pointed-survey.ts';
-import { assessSurvey } from '../../../src/core/shading/assess-survey.ts';
+import { assessSurvey } from '../../../src/core/assessment/assess-survey.ts';
 import { worldClimate } from '../../../src/core/irradiance/world-climate.ts';
 import type { Survey } from '../../../src/core/survey/survey.ts';
 import { accessInterval, drawAccess, drawnSurvey } from '../../../src/core/uncertainty/access-interval.ts';

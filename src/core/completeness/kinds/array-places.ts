@@ -1,4 +1,4 @@
-import { stationsOf } from '../../shading/assess-survey.ts';
+import { stationsOf } from '../../survey/served-planes.ts';
 import { ordered } from '../../survey/order.ts';
 import type { PlanePoint, RoofPlane, Station } from '../../survey/survey.ts';
 import { listed } from '../names.ts';

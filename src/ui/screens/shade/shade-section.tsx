@@ -1,5 +1,5 @@
 import { useMemo, useState } from 'preact/hooks';
-import { stationsOf } from '../../../core/shading/assess-survey.ts';
+import { stationsOf } from '../../../core/survey/served-planes.ts';
 import { ordered } from '../../../core/survey/order.ts';
 import type { SectionProps } from '../../section.ts';
 import { Choices } from './choices.tsx';

@@ -1,30 +1,21 @@
 import { pointedDirections, stationHorizon } from '../horizon/station-horizon.ts';
 import type { Climate } from '../irradiance/climate.ts';
 import { pointSurvey } from '../pointing/point-survey.ts';
-import { sunTrack } from '../solar-position/sun-track.ts';
-import { standardOffsetMinutes } from '../solar-position/time-zone.ts';
 import { ordered } from '../survey/order.ts';
 import type { Problem } from '../survey/problem.ts';
-import type { Obstruction, RoofPlane, Site, Station, Survey, TranspositionId } from '../survey/survey.ts';
-import { transpositionOf } from '../transposition/transposition-models.ts';
-import type { DrawnAccess } from '../uncertainty/access-interval.ts';
+import { obstructionsById, stationsOf } from '../survey/served-planes.ts';
+import type { RoofPlane, Survey, TranspositionId } from '../survey/survey.ts';
+import type { PointedSurvey } from '../pointing/pointed-survey.ts';
+import type { DrawnAccess, DrawnSurvey } from '../uncertainty/access-interval.ts';
 import { accessInterval, drawAccess, drawnSurvey } from '../uncertainty/access-interval.ts';
 import { uncertainStation } from '../uncertainty/uncertain-station.ts';
-import type { Assessment, PlaneAccess, PlaneAssessment, StationAssessment } from './assessment.ts';
-import { assessStation } from './assess-station.ts';
-import type { Orientation } from './orientation-factor.ts';
-import { orientation } from './orientation-factor.ts';
-import type { SkyGrid } from './sky-grid.ts';
-import { skyGrid } from './sky-grid.ts';
-import type { SkyMap } from './sky-map.ts';
-import { skyMap, unshadedMonths } from './sky-map.ts';
-import type { SkyYear } from './sky-year.ts';
-import { skyYear } from './sky-year.ts';
-import { sunPaths } from './sun-paths.ts';
-
-/** Minutes of a step where nothing else is asked for; the exactness of the results is measured at it. */
-export const DEFAULT_STEP_MINUTES = 5;
-export const DEFAULT_ALBEDO = 0.2;
+import type { Assessment, PlaneAccess, PlaneAssessment, StationAssessment } from '../shading/assessment.ts';
+import { assessStation } from '../shading/assess-station.ts';
+import type { Orientation } from '../shading/orientation-factor.ts';
+import type { SiteLight } from '../shading/site-light.ts';
+import { siteLight } from '../shading/site-light.ts';
+import type { SkyMap } from '../shading/sky-map.ts';
+import { skyMap, unshadedMonths } from '../shading/sky-map.ts';
 
 /** What an AbortSignal offers, without the platform's type. */
 export interface Cancellation {
@@ -46,29 +37,6 @@ export interface AssessOptions {
   onProgress?: (share: number, stage: string) => void | Promise<void>;
 }
 
-/** One site's light, ready to be laid on any plane. */
-export interface SiteLight {
-  year: SkyYear;
-  grid: SkyGrid;
-  orientation: Orientation;
-}
-
-/** A year of light over a site. Throws RangeError for a step or a site out of range. */
-export function siteLight(site: Site, climate: Climate, options: AssessOptions = {}): SiteLight {
-  const track = sunTrack(
-    { ...site, utcOffset: standardOffsetMinutes(site.timeZone) },
-    options.stepMinutes ?? DEFAULT_STEP_MINUTES,
-  );
-  const paths = sunPaths(track);
-  const year = skyYear(
-    paths,
-    climate,
-    transpositionOf(options.transposition ?? 'hay-davies'),
-    site.albedo ?? DEFAULT_ALBEDO,
-  );
-  return { year, grid: skyGrid(paths), orientation: orientation(year) };
-}
-
 /**
  * Solar access and shading loss of every plane and station of a survey, by month, hour and obstruction.
  * The survey is one that the parser has passed. Throws the signal's reason when aborted.
@@ -79,7 +47,6 @@ export async function assessSurvey(
   options: AssessOptions = {},
 ): Promise<Assessment> {
   const pointed = pointSurvey(survey);
-  const directionOf = pointedDirections(pointed);
   const transposition = options.transposition ?? survey.transposition ?? 'hay-davies';
   const planes = ordered(survey.planes);
   const parts = 1 + planes.reduce((count, plane) => count + 1 + stationsOf(survey, plane).length, 0);
@@ -95,26 +62,8 @@ export async function assessSurvey(
       ? null
       : drawnSurvey(pointed, survey.site.latitude, climate.source, { seed: survey.id });
   const assessed: PlaneAssessment[] = [];
-  for (const plane of planes) {
-    await advance(plane.name);
-    const map = skyMap(light.year, light.grid, plane.surfaceTilt, plane.surfaceAzimuth);
-    const stations: StationAssessment[] = [];
-    const draws: DrawnAccess[] = [];
-    for (const station of stationsOf(survey, plane)) {
-      await advance(`${plane.name}, ${station.name}`);
-      const horizon = stationHorizon(survey, station, directionOf);
-      const result = assessStation(map, horizon, station, obstructionsById(survey));
-      if (drawn) {
-        const uncertain = uncertainStation(survey, station, pointed, horizon);
-        draws.push(drawAccess(map, uncertain, result.solarAccess.annual, drawn));
-        result.solarAccess.interval = accessInterval([draws[draws.length - 1]], drawn);
-      }
-      stations.push(result);
-    }
-    const result = planeAssessment(plane, map, light.orientation, stations);
-    if (drawn && result.solarAccess) result.solarAccess.interval = accessInterval(draws, drawn);
-    assessed.push(result);
-  }
+  for (const plane of planes)
+    assessed.push(await assessPlane(plane, { survey, pointed, light, drawn }, advance));
   await options.onProgress?.(1, 'Done');
   const { source, name, reference, warnings } = climate;
   return {
@@ -126,11 +75,42 @@ export async function assessSurvey(
   };
 }
 
-export const stationsOf = (survey: Survey, plane: RoofPlane): Station[] =>
-  ordered(survey.stations).filter(({ serves }) => serves.includes(plane.id));
+/** What every plane of a survey is assessed with. */
+interface Context {
+  survey: Survey;
+  pointed: PointedSurvey;
+  light: SiteLight;
+  /** Null where no intervals are asked for. */
+  drawn: DrawnSurvey | null;
+}
 
-export const obstructionsById = (survey: Survey): Map<string, Obstruction> =>
-  new Map(survey.obstructions.map((obstruction) => [obstruction.id, obstruction]));
+async function assessPlane(
+  plane: RoofPlane,
+  { survey, pointed, light, drawn }: Context,
+  advance: (stage: string) => Promise<void>,
+): Promise<PlaneAssessment> {
+  await advance(plane.name);
+  const map = skyMap(light.year, light.grid, plane.surfaceTilt, plane.surfaceAzimuth);
+  const obstructions = obstructionsById(survey);
+  const directionOf = pointedDirections(pointed);
+  const stations: StationAssessment[] = [];
+  const draws: DrawnAccess[] = [];
+  for (const station of stationsOf(survey, plane)) {
+    await advance(`${plane.name}, ${station.name}`);
+    const horizon = stationHorizon(survey, station, directionOf);
+    const result = assessStation(map, horizon, station, obstructions);
+    if (drawn) {
+      const uncertain = uncertainStation(survey, station, pointed, horizon);
+      const draw = drawAccess(map, uncertain, result.solarAccess.annual, drawn);
+      result.solarAccess.interval = accessInterval([draw], drawn);
+      draws.push(draw);
+    }
+    stations.push(result);
+  }
+  const result = planeAssessment(plane, map, light.orientation, stations);
+  if (drawn && result.solarAccess) result.solarAccess.interval = accessInterval(draws, drawn);
+  return result;
+}
 
 function planeAssessment(
   plane: RoofPlane,

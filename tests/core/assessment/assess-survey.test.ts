@@ -1,8 +1,8 @@
 import { beforeAll, describe, expect, test } from 'vitest';
 import { clearSkyClimate } from '../../../src/core/irradiance/clear-sky-climate.ts';
 import type { Assessment, StationAssessment } from '../../../src/core/shading/assessment.ts';
-import type { AssessOptions } from '../../../src/core/shading/assess-survey.ts';
-import { assessSurvey } from '../../../src/core/shading/assess-survey.ts';
+import type { AssessOptions } from '../../../src/core/assessment/assess-survey.ts';
+import { assessSurvey } from '../../../src/core/assessment/assess-survey.ts';
 import type { Survey, Trace } from '../../../src/core/survey/survey.ts';
 
 const climate = clearSkyClimate('ineichen');
