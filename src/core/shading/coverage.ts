@@ -1,29 +1,36 @@
 import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
-import { viewUpTo } from '../horizon/sky-view.ts';
+import { BAND_TOP, viewUpTo } from '../horizon/sky-view.ts';
 import type { SkyMap } from './sky-map.ts';
 
 /** A range of azimuth, degrees, clockwise from `from` to `to`, over north where `to` is below `from`. */
 export type AzimuthRange = readonly [from: number, to: number];
 
 /**
- * Share of a plane's unshaded sky light (direct light and dome) that comes through azimuths somebody observed, 0 to 1.
- * Sky behind the plane sends it nothing and so is not missed.
+ * Share of a plane's unshaded sky light (direct light, dome and horizon band) that comes through azimuths somebody
+ * observed, 0 to 1. Sky behind the plane sends it nothing and so is not missed.
  */
 export function coverage(map: SkyMap, observed: readonly AzimuthRange[]): number {
   const seen = observedShares(observed);
-  const dome = map.dome.reduce((sum, light) => sum + light, 0);
+  const dome = evenLight(map, map.dome, Math.PI / 2);
+  const band = evenLight(map, map.band, BAND_TOP);
   let [whole, covered] = [0, 0];
-  const views = Array.from({ length: COLUMNS }, (_, column) =>
-    viewUpTo(map.facing, (column + 0.5) * COLUMN_WIDTH, Math.PI / 2),
-  );
-  const wholeView = views.reduce((sum, view) => sum + view, 0);
   for (let column = 0; column < COLUMNS; column++) {
-    let light = (dome * views[column]) / wholeView;
+    let light = dome[column] + band[column];
     for (let month = 0; month < 12; month++) light += columnDirect(map, month, column);
     whole += light;
     covered += light * seen[column];
   }
   return whole > 0 ? covered / whole : 1;
+}
+
+/** A year of even light from the horizontal up to an elevation [radians], shared out to columns by the plane's view. */
+function evenLight({ facing }: SkyMap, monthly: readonly number[], topRad: number): number[] {
+  const light = monthly.reduce((sum, month) => sum + month, 0);
+  const views = Array.from({ length: COLUMNS }, (_, column) =>
+    light === 0 ? 0 : viewUpTo(facing, (column + 0.5) * COLUMN_WIDTH, topRad),
+  );
+  const whole = views.reduce((sum, view) => sum + view, 0);
+  return views.map((view) => (whole > 0 ? (light * view) / whole : 0));
 }
 
 /** All direct light of a month and a column, kWh/m2. */
