@@ -8,7 +8,7 @@ import { gzipSync } from 'node:zlib';
 export function builtSizes(): { firstScreen: number; precache: number } {
   const folder = mkdtempSync(join(tmpdir(), 'noonmark-sizes-'));
   try {
-    execFileSync('npx', ['vite', 'build', '--outDir', folder, '--emptyOutDir', '--logLevel', 'error'], {
+    execFileSync('npx', ['vite', 'build', '--outDir', folder, '--emptyOutDir', '--logLevel', 'silent'], {
       env: { ...process.env, NODE_ENV: 'production' },
       stdio: ['ignore', 'ignore', 'inherit'],
     });

@@ -19,7 +19,7 @@ describe('a new survey', () => {
     await page.getByRole('link', { name: 'New survey' }).tap();
     await page.getByRole('button', { name: 'Use this device’s position' }).tap();
     await page.getByText('to within 12 m').waitFor();
-    expect(await page.getByLabel('Time zone').inputValue()).toBe('Europe/Lisbon');
+    await expect.poll(() => page.getByLabel('Time zone').inputValue()).toBe('Europe/Lisbon');
     expect(await page.getByText(/Magnetic declination/).innerText()).toMatch(/\d\.\d° west ± 0\.\d°.*2025/);
     await page.getByRole('button', { name: 'Start the survey' }).tap();
     await page.getByRole('heading', { name: 'Roof planes' }).waitFor();
