@@ -3,6 +3,7 @@ import { useApp } from '../../app-context.ts';
 import { ProblemList } from '../../components/problem-list.tsx';
 import { ERROR_MESSAGES } from '../../messages.ts';
 import { surveyPath } from '../../survey-path.ts';
+import { FileReport } from './file-report.tsx';
 
 function Outcome({ result }: { result: ImportResult }) {
   switch (result.outcome) {
@@ -43,26 +44,11 @@ function Outcome({ result }: { result: ImportResult }) {
 /** What came of each file of the last import. */
 export function ImportResults() {
   const { state } = useApp();
-  const results = state.imports.value;
   return (
-    <div role="status">
-      {results.length > 0 && (
-        <div class="import-results stack">
-          <ul class="ledger">
-            {results.map((result, place) => (
-              <li key={place} class="stack">
-                <h2 class="file-name">{result.file}</h2>
-                <Outcome result={result} />
-              </li>
-            ))}
-          </ul>
-          <div>
-            <button type="button" onClick={() => (state.imports.value = [])}>
-              Close this report
-            </button>
-          </div>
-        </div>
-      )}
-    </div>
+    <FileReport
+      results={state.imports.value}
+      outcome={(result) => <Outcome result={result} />}
+      onClose={() => (state.imports.value = [])}
+    />
   );
 }

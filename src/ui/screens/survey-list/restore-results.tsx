@@ -3,6 +3,7 @@ import { useApp } from '../../app-context.ts';
 import { ProblemList } from '../../components/problem-list.tsx';
 import { ERROR_MESSAGES } from '../../messages.ts';
 import { surveyPath } from '../../survey-path.ts';
+import { FileReport } from './file-report.tsx';
 
 const OUTCOMES = {
   added: 'is restored.',
@@ -59,26 +60,11 @@ function Outcome({ result }: { result: RestoreResult }) {
 /** What came of each archive of the last restore. */
 export function RestoreResults() {
   const { state } = useApp();
-  const results = state.restores.value;
   return (
-    <div role="status">
-      {results.length > 0 && (
-        <div class="import-results stack">
-          <ul class="ledger">
-            {results.map((result, place) => (
-              <li key={place} class="stack">
-                <h2 class="file-name">{result.file}</h2>
-                <Outcome result={result} />
-              </li>
-            ))}
-          </ul>
-          <div>
-            <button type="button" onClick={() => (state.restores.value = [])}>
-              Close this report
-            </button>
-          </div>
-        </div>
-      )}
-    </div>
+    <FileReport
+      results={state.restores.value}
+      outcome={(result) => <Outcome result={result} />}
+      onClose={() => (state.restores.value = [])}
+    />
   );
 }
