@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState } from 'preact/hooks';
+import { useEffect, useLayoutEffect, useRef, useState } from 'preact/hooks';
 import { attempt } from '../../../app/attempt.ts';
 import { renameSurvey } from '../../../app/actions/rename-survey.ts';
 import type { Survey } from '../../../core/survey/survey.ts';
@@ -9,10 +9,14 @@ const LONGEST_TITLE = 200;
 
 function TitleForm({ survey, onDone }: { survey: Survey; onDone: () => void }) {
   const services = useApp();
-  const [title, setTitle] = useState(survey.title);
   const input = useRef<HTMLInputElement>(null);
-  useEffect(() => input.current?.select(), []);
+  // before the next key can arrive: what is typed at once must land in the field
+  useLayoutEffect(() => {
+    input.current?.focus();
+    input.current?.select();
+  }, []);
   const save = async () => {
+    const title = input.current?.value ?? survey.title;
     if (await attempt(services.state, () => renameSurvey(services, survey, title))) onDone();
   };
   return (
@@ -26,14 +30,7 @@ function TitleForm({ survey, onDone }: { survey: Survey; onDone: () => void }) {
     >
       <label class="grow">
         Title
-        <input
-          ref={input}
-          type="text"
-          required
-          maxLength={LONGEST_TITLE}
-          value={title}
-          onInput={({ currentTarget }) => setTitle(currentTarget.value)}
-        />
+        <input ref={input} type="text" required maxLength={LONGEST_TITLE} defaultValue={survey.title} />
       </label>
       <button type="submit" class="main">
         Save
