@@ -1,10 +1,11 @@
+import type { StationHorizon } from '../horizon/station-horizon.ts';
 import { pointedDirections, stationHorizon } from '../horizon/station-horizon.ts';
 import type { Climate } from '../irradiance/climate.ts';
 import { pointSurvey } from '../pointing/point-survey.ts';
 import { ordered } from '../survey/order.ts';
 import type { Problem } from '../survey/problem.ts';
 import { obstructionsById, stationsOf } from '../survey/served-planes.ts';
-import type { RoofPlane, Survey, TranspositionId } from '../survey/survey.ts';
+import type { RoofPlane, Station, Survey, TranspositionId } from '../survey/survey.ts';
 import type { PointedSurvey } from '../pointing/pointed-survey.ts';
 import type { DrawnAccess, DrawnSurvey } from '../uncertainty/access-interval.ts';
 import { accessInterval, drawAccess, drawnSurvey } from '../uncertainty/access-interval.ts';
@@ -33,8 +34,19 @@ export interface AssessOptions {
   /** Whether to draw how sure each access is; absent means true. The draws are the same for the same survey id. */
   intervals?: boolean;
   signal?: Cancellation;
+  /** Called for each station of each plane with what its result was made from. */
+  onStation?: (made: AssessedStation) => void;
   /** Called between parts of the work with the share done; the work waits for what it returns. */
   onProgress?: (share: number, stage: string) => void | Promise<void>;
+}
+
+/** A station laid over a plane. */
+export interface AssessedStation {
+  plane: RoofPlane;
+  station: Station;
+  map: SkyMap;
+  horizon: StationHorizon;
+  result: StationAssessment;
 }
 
 /**
@@ -63,7 +75,9 @@ export async function assessSurvey(
       : drawnSurvey(pointed, survey.site.latitude, climate.source, { seed: survey.id });
   const assessed: PlaneAssessment[] = [];
   for (const plane of planes)
-    assessed.push(await assessPlane(plane, { survey, pointed, light, drawn }, advance));
+    assessed.push(
+      await assessPlane(plane, { survey, pointed, light, drawn, onStation: options.onStation }, advance),
+    );
   await options.onProgress?.(1, 'Done');
   const { source, name, reference, warnings } = climate;
   return {
@@ -82,11 +96,12 @@ interface Context {
   light: SiteLight;
   /** Null where no intervals are asked for. */
   drawn: DrawnSurvey | null;
+  onStation: AssessOptions['onStation'];
 }
 
 async function assessPlane(
   plane: RoofPlane,
-  { survey, pointed, light, drawn }: Context,
+  { survey, pointed, light, drawn, onStation }: Context,
   advance: (stage: string) => Promise<void>,
 ): Promise<PlaneAssessment> {
   await advance(plane.name);
@@ -105,6 +120,7 @@ async function assessPlane(
       result.solarAccess.interval = accessInterval([draw], drawn);
       draws.push(draw);
     }
+    onStation?.({ plane, station, map, horizon, result });
     stations.push(result);
   }
   const result = planeAssessment(plane, map, light.orientation, stations);

@@ -2,7 +2,7 @@ import type { HorizonProfile } from '../horizon/horizon-profile.ts';
 import type { StationHorizon } from '../horizon/station-horizon.ts';
 import { assessStation } from './assess-station.ts';
 import type { StationAssessment } from './assessment.ts';
-import type { AzimuthRange } from './coverage.ts';
+import type { AzimuthRange } from '../angles/azimuth-ranges.ts';
 import { hourLight, monthHourTable } from './hour-light.ts';
 import type { SkyDensity } from './sky-density.ts';
 import type { KnownObstructions } from './obstruction-shading.ts';
@@ -38,16 +38,30 @@ export function stationShade(
   obstructions: KnownObstructions,
   changes: readonly ObstructionChange[] = [],
 ): StationShade {
-  const monthly = unshadedMonths(map);
   const assess = (profile: HorizonProfile) =>
     assessStation(map, { ...horizon, profile }, station, obstructions);
   const imaginedProfile = changes.length > 0 ? changedProfile(horizon.profile, changes) : null;
   return {
-    surfaceTilt: map.surfaceTilt,
-    surfaceAzimuth: map.surfaceAzimuth,
-    measured: assess(horizon.profile),
+    ...measuredShade(map, density, horizon, assess(horizon.profile)),
     imagined: imaginedProfile && assess(imaginedProfile),
     imaginedProfile,
+  };
+}
+
+/** The same where the station has been assessed and nothing is imagined. */
+export function measuredShade(
+  map: SkyMap,
+  density: SkyDensity,
+  horizon: StationHorizon,
+  measured: StationAssessment,
+): StationShade {
+  const monthly = unshadedMonths(map);
+  return {
+    surfaceTilt: map.surfaceTilt,
+    surfaceAzimuth: map.surfaceAzimuth,
+    measured,
+    imagined: null,
+    imaginedProfile: null,
     unshaded: {
       annual: monthly.reduce((sum, light) => sum + light, 0),
       monthly,

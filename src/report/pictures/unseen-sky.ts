@@ -1,5 +1,6 @@
-import { fullCircle, turnBetween } from '../../core/angles/angles.ts';
-import type { AzimuthRange } from '../../core/shading/coverage.ts';
+import { turnBetween } from '../../core/angles/angles.ts';
+import type { AzimuthRange } from '../../core/angles/azimuth-ranges.ts';
+import { rangesBetween } from '../../core/angles/azimuth-ranges.ts';
 import type { Mark } from '../marks.ts';
 import { textWidth } from '../marks.ts';
 import type { LabelPlaces } from './label-places.ts';
@@ -7,29 +8,7 @@ import { boxAround } from './label-places.ts';
 import type { SkyFrame } from './sky-frame.ts';
 import { xOfTurn } from './sky-frame.ts';
 
-/** What is left of the circle between ranges somebody looked at: [from, to], `to` may run past 360. */
-export function unseenRanges(observed: readonly AzimuthRange[]): [number, number][] {
-  if (observed.length === 0) return [[0, 360]];
-  const ranges = observed
-    .map(([from, to]): [number, number] => {
-      const width = to - from >= 360 ? 360 : fullCircle(to - from);
-      return [fullCircle(from), fullCircle(from) + width];
-    })
-    .sort((a, b) => a[0] - b[0]);
-  const gaps: [number, number][] = [];
-  let reached = ranges[0][1];
-  for (const [from, to] of ranges.slice(1)) {
-    if (from > reached) gaps.push([reached, from]);
-    reached = Math.max(reached, to);
-  }
-  // what the last ranges cover past north has been covered at the start as well
-  const covered = reached - 360;
-  const cut = gaps
-    .map(([from, to]): [number, number] => [Math.max(from, covered), to])
-    .filter(([from, to]) => to > from);
-  const end = ranges[0][0] + 360;
-  return end > reached ? [...cut, [reached, end]] : cut;
-}
+export { rangesBetween as unseenRanges };
 
 /** A light dotted pattern over the azimuths nobody looked at, and words where there is room. */
 export function unseenMarks(
@@ -40,7 +19,7 @@ export function unseenMarks(
 ): { under: Mark[]; words: Mark[] } {
   const under: Mark[] = [];
   const words: Mark[] = [];
-  for (const [from, to] of unseenRanges(observed)) {
+  for (const [from, to] of rangesBetween(observed)) {
     const first = to - from >= 360 ? -180 : turnBetween(frame.centre, from);
     for (const shift of [0, -360, 360]) {
       const left = Math.max(frame.left, xOfTurn(frame, first + shift));

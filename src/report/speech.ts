@@ -1,0 +1,109 @@
+import { fullCircle } from '../core/angles/angles.ts';
+import type { ReportChoices } from './report-input.ts';
+import type { Catalogue } from './words/catalogue.ts';
+import type { Language } from './words/languages.ts';
+import { LANGUAGES } from './words/languages.ts';
+import type { Plural } from './words/plural.ts';
+
+const FOOT = 0.3048;
+const SQUARE_FOOT = FOOT * FOOT;
+/** Between a number and its unit, so that a line does not break there. */
+const THIN = ' ';
+
+/** Writes numbers, days and units in one language and one system of units. */
+export class Speech {
+  readonly words: Catalogue;
+  readonly tag: string;
+
+  constructor(readonly choices: Pick<ReportChoices, 'language' | 'units'>) {
+    const language: Language = LANGUAGES.find(({ id }) => id === choices.language)!;
+    this.words = language.words;
+    this.tag = choices.units === 'us' ? (language.usTag ?? language.tag) : language.tag;
+  }
+
+  readonly plural: Plural = (count, forms) =>
+    forms[new Intl.PluralRules(this.tag).select(count)] ?? forms.other;
+
+  number(value: number, decimals = 0): string {
+    return new Intl.NumberFormat(this.tag, {
+      minimumFractionDigits: decimals,
+      maximumFractionDigits: decimals,
+    }).format(value);
+  }
+
+  /** A share as percent. */
+  percent(share: number, decimals = 0): string {
+    return new Intl.NumberFormat(this.tag, {
+      style: 'percent',
+      minimumFractionDigits: decimals,
+      maximumFractionDigits: decimals,
+    }).format(share);
+  }
+
+  /** kWh/m2, or kWh to the square foot. */
+  irradiation(kwhPerSquareMetre: number): string {
+    const isUs = this.choices.units === 'us';
+    const value = isUs ? kwhPerSquareMetre * SQUARE_FOOT : kwhPerSquareMetre;
+    return `${this.number(value, value < 10 ? 1 : 0)}${THIN}kWh/${isUs ? 'ft²' : 'm²'}`;
+  }
+
+  /** Degrees; whole ones by default. */
+  angle(degrees: number, decimals = 0): string {
+    return `${this.number(degrees, decimals)}°`;
+  }
+
+  azimuth(degrees: number, decimals = 0): string {
+    const step = 10 ** decimals;
+    return this.angle(fullCircle(Math.round(degrees * step) / step), decimals);
+  }
+
+  /** A length in metres, or in feet and inches. */
+  length(metres: number, decimals = 1): string {
+    if (this.choices.units !== 'us') return `${this.number(metres, decimals)}${THIN}m`;
+    const inches = Math.round(metres / (FOOT / 12));
+    const [feet, rest] = [Math.trunc(inches / 12), Math.abs(inches % 12)];
+    return `${feet}${THIN}ft${rest ? ` ${rest}${THIN}in` : ''}`;
+  }
+
+  area(squareMetres: number): string {
+    return this.choices.units === 'us'
+      ? `${this.number(squareMetres / SQUARE_FOOT)}${THIN}ft²`
+      : `${this.number(squareMetres, 1)}${THIN}m²`;
+  }
+
+  /** A calendar day YYYY-MM-DD written out. */
+  day(date: string): string {
+    return this.date(Date.parse(`${date}T00:00:00Z`), { dateStyle: 'long', timeZone: 'UTC' });
+  }
+
+  /** A day of any year, month 0 to 11. */
+  dayOfYear(month: number, day: number): string {
+    return this.date(Date.UTC(2025, month, day), { month: 'long', day: 'numeric', timeZone: 'UTC' });
+  }
+
+  /** Day and clock time of an instant at a place. */
+  instant(timeMs: number, timeZone: string): string {
+    return this.date(timeMs, { dateStyle: 'medium', timeStyle: 'short', timeZone });
+  }
+
+  /** Minutes after midnight as the clock shows them. */
+  clock(minutes: number): string {
+    return this.date(minutes * 60_000, { timeStyle: 'short', timeZone: 'UTC' });
+  }
+
+  month(month: number, style: 'long' | 'short' | 'narrow' = 'long'): string {
+    return this.date(Date.UTC(2025, month, 15), { month: style, timeZone: 'UTC' });
+  }
+
+  list(items: readonly string[]): string {
+    return new Intl.ListFormat(this.tag, { type: 'conjunction' }).format(items);
+  }
+
+  range(low: string, high: string): string {
+    return low === high ? low : this.words['frame.range'](low, high);
+  }
+
+  private date(timeMs: number, options: Intl.DateTimeFormatOptions): string {
+    return new Intl.DateTimeFormat(this.tag, options).format(timeMs);
+  }
+}
