@@ -1,5 +1,12 @@
 import type { Assessment } from '../core/shading/assessment.ts';
-import type { AssessRequest, Outcome, ShadeQuestion, WeatherFileFacts } from '../core/shading/calculation.ts';
+import type { StationSoFar } from '../core/assessment/station-so-far.ts';
+import type {
+  AssessRequest,
+  Outcome,
+  PlaceQuestion,
+  ShadeQuestion,
+  WeatherFileFacts,
+} from '../core/shading/calculation.ts';
 import type { StationShade } from '../core/shading/station-shade.ts';
 
 /** The part of an AbortSignal that a long calculation needs. */
@@ -25,6 +32,12 @@ export interface AssessClient {
     question: ShadeQuestion,
     signal: CancelSignal,
   ): Promise<Outcome<StationShade>>;
+  /** The year's figures of one station before one plane, for somebody who traces there. */
+  soFar(
+    request: AssessRequest,
+    question: PlaceQuestion,
+    signal: CancelSignal,
+  ): Promise<Outcome<StationSoFar>>;
   /** Reads a weather file without keeping it. */
   readWeatherFile(name: string, contents: ArrayBuffer): Promise<Outcome<WeatherFileFacts>>;
 }

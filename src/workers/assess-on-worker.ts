@@ -5,9 +5,11 @@ import type {
   AssessRequest,
   CalculationFault,
   Outcome,
+  PlaceQuestion,
   ShadeQuestion,
   WeatherFileFacts,
 } from '../core/shading/calculation.ts';
+import type { StationSoFar } from '../core/assessment/station-so-far.ts';
 import type { StationShade } from '../core/shading/station-shade.ts';
 import type { Progress, ShadeEngine } from './shade-engine.ts';
 
@@ -51,6 +53,14 @@ export class AssessOnWorker {
     signal: CancelSignal,
   ): Promise<Outcome<StationShade>> {
     return this.ask(request, signal, (engine, ticket) => engine.shade(ticket, question));
+  }
+
+  soFar(
+    request: AssessRequest,
+    question: PlaceQuestion,
+    signal: CancelSignal,
+  ): Promise<Outcome<StationSoFar>> {
+    return this.ask(request, signal, (engine, ticket) => engine.soFar(ticket, question));
   }
 
   readWeatherFile(name: string, contents: ArrayBuffer): Promise<Outcome<WeatherFileFacts>> {

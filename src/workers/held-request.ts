@@ -1,20 +1,19 @@
-import type { DirectionOf } from '../core/horizon/station-horizon.ts';
-import { pointedDirections } from '../core/horizon/station-horizon.ts';
 import { pointSurvey } from '../core/pointing/point-survey.ts';
+import type { PointedSurvey } from '../core/pointing/pointed-survey.ts';
 import type { AssessRequest } from '../core/shading/calculation.ts';
 import { contentHash } from './content-hash.ts';
 
 /** A survey at work, with what is found out of it once for all questions about it. */
 export class HeldRequest {
-  private directions: DirectionOf | null = null;
+  private found: PointedSurvey | null = null;
   private weather: string | null = null;
 
   constructor(readonly request: AssessRequest) {}
 
-  /** The true directions of its sightings. */
-  directionOf(): DirectionOf {
-    this.directions ??= pointedDirections(pointSurvey(this.request.survey));
-    return this.directions;
+  /** The true directions of its sightings, and what they may err by. */
+  pointed(): PointedSurvey {
+    this.found ??= this.request.pointed ?? pointSurvey(this.request.survey);
+    return this.found;
   }
 
   /** Tells its weather file from any other, by name and contents; empty where it has none. */

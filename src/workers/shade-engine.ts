@@ -1,18 +1,27 @@
-import { stationHorizon } from '../core/horizon/station-horizon.ts';
+import { pointedDirections, stationHorizon } from '../core/horizon/station-horizon.ts';
 import type { Climate } from '../core/irradiance/climate.ts';
 import { parseWeatherFile } from '../core/irradiance/weather-file.ts';
 import type { SiteLight } from '../core/shading/site-light.ts';
 import { assessSurvey } from '../core/assessment/assess-survey.ts';
+import type { StationSoFar } from '../core/assessment/station-so-far.ts';
+import { stationSoFar } from '../core/assessment/station-so-far.ts';
 import { obstructionsById } from '../core/survey/served-planes.ts';
 import { siteLight } from '../core/shading/site-light.ts';
 import type { Assessment } from '../core/shading/assessment.ts';
-import type { AssessRequest, Outcome, ShadeQuestion, WeatherFileFacts } from '../core/shading/calculation.ts';
+import type {
+  AssessRequest,
+  Outcome,
+  PlaceQuestion,
+  ShadeQuestion,
+  WeatherFileFacts,
+} from '../core/shading/calculation.ts';
 import type { SkyDensity } from '../core/shading/sky-density.ts';
 import { skyDensity } from '../core/shading/sky-density.ts';
 import type { SkyMap } from '../core/shading/sky-map.ts';
 import { skyMap } from '../core/shading/sky-map.ts';
 import type { StationShade } from '../core/shading/station-shade.ts';
 import { stationShade } from '../core/shading/station-shade.ts';
+import type { Survey } from '../core/survey/survey.ts';
 import type { ClimateSource } from './climate-source.ts';
 import { textOf } from './climate-source.ts';
 import { HeldRequest } from './held-request.ts';
@@ -22,7 +31,7 @@ interface HeldLight {
   key: string;
   climate: Climate;
   light: SiteLight;
-  planes: Map<string, { map: SkyMap; density: SkyDensity }>;
+  planes: Map<string, { map: SkyMap; density: SkyDensity | null }>;
 }
 
 /** Lights kept: the one at work and the one before it, so that a look at another climate and back is quick. */
@@ -73,20 +82,34 @@ export class ShadeEngine {
     });
   }
 
-  shade(ticket: number, { plane, station, changes }: ShadeQuestion): Promise<Outcome<StationShade>> {
+  shade(ticket: number, question: ShadeQuestion): Promise<Outcome<StationShade>> {
     return this.answer(ticket, async (held) => {
       const { survey } = held.request;
-      const roof = survey.planes.find(({ id }) => id === plane);
-      const place = survey.stations.find(({ id }) => id === station);
-      if (!roof || !place) throw new RangeError(`no plane ${plane} or station ${station} in the survey`);
+      const { roof, place } = placeOf(survey, question);
       const light = await this.lightOf(held);
       await this.lookUp(ticket);
-      const { map, density } = this.planeOf(light, roof.surfaceTilt, roof.surfaceAzimuth);
+      const map = this.mapOf(light, roof.surfaceTilt, roof.surfaceAzimuth);
+      const density = this.densityOf(light, roof.surfaceTilt, roof.surfaceAzimuth);
       await this.lookUp(ticket);
-      const horizon = stationHorizon(survey, place, held.directionOf());
+      const horizon = stationHorizon(survey, place, pointedDirections(held.pointed()));
       // what was imagined at another station may not be in the sky of this one
-      const here = changes.filter(({ obstruction }) => horizon.profile.obstructionIds.includes(obstruction));
+      const here = question.changes.filter(({ obstruction }) =>
+        horizon.profile.obstructionIds.includes(obstruction),
+      );
       return stationShade(map, density, horizon, place, obstructionsById(survey), here);
+    });
+  }
+
+  /** What a station has so far: the year's figures alone, with how sure they are. */
+  soFar(ticket: number, question: PlaceQuestion): Promise<Outcome<StationSoFar>> {
+    return this.answer(ticket, async (held) => {
+      const { survey } = held.request;
+      const { roof, place } = placeOf(survey, question);
+      const light = await this.lightOf(held);
+      await this.lookUp(ticket);
+      const map = this.mapOf(light, roof.surfaceTilt, roof.surfaceAzimuth);
+      await this.lookUp(ticket);
+      return stationSoFar(map, light.climate.source, survey, place, held.pointed());
     });
   }
 
@@ -132,14 +155,31 @@ export class ShadeEngine {
     return made;
   }
 
+  private mapOf(light: HeldLight, surfaceTilt: number, surfaceAzimuth: number): SkyMap {
+    return this.planeOf(light, surfaceTilt, surfaceAzimuth).map;
+  }
+
+  private densityOf(light: HeldLight, surfaceTilt: number, surfaceAzimuth: number): SkyDensity {
+    const plane = this.planeOf(light, surfaceTilt, surfaceAzimuth);
+    plane.density ??= skyDensity(plane.map, 1);
+    return plane.density;
+  }
+
   private planeOf({ light, planes }: HeldLight, surfaceTilt: number, surfaceAzimuth: number) {
     const key = `${surfaceTilt} ${surfaceAzimuth}`;
     let plane = planes.get(key);
     if (!plane) {
-      const map = skyMap(light.year, light.grid, surfaceTilt, surfaceAzimuth);
-      plane = { map, density: skyDensity(map, 1) };
+      plane = { map: skyMap(light.year, light.grid, surfaceTilt, surfaceAzimuth), density: null };
       planes.set(key, plane);
     }
     return plane;
   }
+}
+
+/** The plane and the station that a question names. Throws RangeError where the survey has none. */
+function placeOf(survey: Survey, { plane, station }: PlaceQuestion) {
+  const roof = survey.planes.find(({ id }) => id === plane);
+  const place = survey.stations.find(({ id }) => id === station);
+  if (!roof || !place) throw new RangeError(`no plane ${plane} or station ${station} in the survey`);
+  return { roof, place };
 }

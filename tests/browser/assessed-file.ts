@@ -4,7 +4,7 @@ import type { Survey } from '../../src/core/survey/survey.ts';
 import { newFolder, noonmark } from '../cli/run-noonmark.ts';
 
 interface StationFigures {
-  solarAccess: { annual: number };
+  solarAccess: { annual: number; interval?: { low: number; high: number } };
   coverage: number;
 }
 

@@ -99,9 +99,10 @@ describe('a phone whose angles are tied to magnetic north', () => {
     await page.getByRole('button', { name: 'Open up to here' }).tap();
     await news(page).getByText('Looked, and open').waitFor();
     await expect.poll(() => storedCount(page)).toBeGreaterThan(8);
-    const strip = page.locator('.strip figcaption p').first();
-    await expect.poll(() => strip.innerText()).toMatch(/access \d+\s%, covered [5-9]\d\s%/);
-    const live = await strip.innerText();
+    const strip = page.locator('.live-access dd');
+    await expect.poll(async () => (await strip.allInnerTexts())[2]).toMatch(/^[5-9]\d\s%$/);
+    await expect.poll(() => page.locator('.live-access.is-stale').count()).toBe(0);
+    const live = await strip.allInnerTexts();
 
     await page.getByRole('button', { name: 'Done' }).tap();
     await page.getByRole('link', { name: 'Noonmark' }).tap();
@@ -117,7 +118,9 @@ describe('a phone whose angles are tied to magnetic north', () => {
     expect(station.markSightings).toBeUndefined();
     const file = await assessed(survey);
     const percent = (share: number) => `${Math.round(share * 100)}\u00a0%`;
-    expect(live).toContain(`access ${percent(file.solarAccess.annual)}, covered ${percent(file.coverage)}`);
+    const { annual, interval } = file.solarAccess;
+    const [low, high] = [Math.floor(interval!.low * 100), Math.ceil(interval!.high * 100)];
+    expect(live).toEqual([percent(annual), `${low} to ${high}\u00a0%`, percent(file.coverage)]);
   });
 
   it('refuses a hold while it moves, and says so', async () => {

@@ -95,6 +95,32 @@ describe('the worker’s engine', () => {
     );
   });
 
+  it('gives the year of a station so far, and how sure it is, as the whole assessment does', async () => {
+    const engine = engineFor();
+    engine.hold({ survey, ...STEP });
+    const soFar = valueOf(await engine.soFar(0, question()));
+    const whole = await byHand(survey);
+    const station = whole.planes
+      .find(({ id }) => id === question().plane)!
+      .stations.find(({ id }) => id === question().station)!;
+    const { annual, interval } = station.solarAccess;
+    expect(soFar.access).toBeCloseTo(annual, 12);
+    expect(soFar.coverage).toBe(station.coverage);
+    expect(soFar.interval).toEqual({ ...interval, sources: [] });
+    expect(interval!.sources.length).toBeGreaterThan(0);
+  });
+
+  it('takes a survey as pointed where it is given so, and its raw readings are not needed then', async () => {
+    const engine = engineFor();
+    const pointed = pointSurvey(survey);
+    engine.hold({ survey, ...STEP });
+    const whole = valueOf(await engine.soFar(0, question()));
+    vi.mocked(pointSurvey).mockClear();
+    engine.hold({ survey: { ...survey, runs: [], readings: [] }, pointed, ...STEP });
+    expect(valueOf(await engine.soFar(1, question()))).toEqual(whole);
+    expect(pointSurvey).not.toHaveBeenCalled();
+  });
+
   it('leaves alone what this station did not trace', async () => {
     const engine = engineFor();
     engine.hold({ survey, ...STEP });

@@ -5,7 +5,6 @@ import type { Climate } from '../irradiance/climate.ts';
 import type { PointedSurvey } from '../pointing/pointed-survey.ts';
 import type { AccessInterval } from '../shading/assessment.ts';
 import { blockedLight, shadedMonths } from '../shading/blocked-light.ts';
-
 import type { AzimuthRange } from '../shading/coverage.ts';
 import { coverage } from '../shading/coverage.ts';
 import type { SkyMap } from '../shading/sky-map.ts';

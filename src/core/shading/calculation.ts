@@ -1,3 +1,4 @@
+import type { PointedSurvey } from '../pointing/pointed-survey.ts';
 import type { Problem } from '../survey/problem.ts';
 import type { Survey, TranspositionId } from '../survey/survey.ts';
 import type { ObstructionChange } from './what-if.ts';
@@ -5,6 +6,8 @@ import type { ObstructionChange } from './what-if.ts';
 /** All that an assessment is made from. */
 export interface AssessRequest {
   survey: Survey;
+  /** The survey as pointed, where the caller has it: its raw readings may be left out of the survey then. */
+  pointed?: PointedSurvey;
   /** Stands over the survey's own choice. */
   transposition?: TranspositionId;
   /** Contents of the weather file that the survey's climate names. */
@@ -18,6 +21,9 @@ export interface ShadeQuestion {
   station: string;
   changes: readonly ObstructionChange[];
 }
+
+/** Which plane and station somebody is at work on. */
+export type PlaceQuestion = Pick<ShadeQuestion, 'plane' | 'station'>;
 
 /** Where a weather file's station is, once read. */
 export interface WeatherFileFacts {

@@ -2,12 +2,11 @@ import { useEffect, useMemo, useState } from 'preact/hooks';
 import { liveSurvey, sweptDirections, type LiveSweep } from '../../../../app/capture/live-survey.ts';
 import type { AzimuthRange } from '../../../../core/shading/coverage.ts';
 import type { RoofPlane, Station } from '../../../../core/survey/survey.ts';
-import type { SkyPlace } from '../../../../report/pictures/sky-frame.ts';
 import { unseenRanges } from '../../../../report/pictures/unseen-sky.ts';
 import type { SectionProps } from '../../../section.ts';
 import { HorizonStrip } from '../strip/horizon-strip.tsx';
 import { sunBand, unseenInBand } from '../strip/sun-band.ts';
-import { useLiveShade } from '../strip/use-live-shade.ts';
+import { useLiveAccess } from '../strip/use-live-access.ts';
 import { CheckPanel } from './check-panel.tsx';
 import { Figures } from './figures.tsx';
 import { HeadingBanner } from './heading-banner.tsx';
@@ -105,16 +104,16 @@ function useStrip(props: Props, plane: RoofPlane | null) {
     [survey, station.id, pointed, sweep],
   );
   const question = useMemo(
-    () => (light && plane ? { survey: light, station: station.id, plane: plane.id } : null),
+    () => (light && plane ? { ...light, station: station.id, plane: plane.id } : null),
     [light, plane, station.id],
   );
-  const live = useLiveShade(services, question);
-  const observed = live.shade?.observed ?? NOTHING;
+  const live = useLiveAccess(services, question);
+  const observed = live.found?.observed ?? NOTHING;
   const band = useMemo(
     () => (plane ? sunBand(survey.site.latitude, plane.surfaceTilt, plane.surfaceAzimuth) : []),
     [survey.site.latitude, plane?.surfaceTilt, plane?.surfaceAzimuth],
   );
-  const swept = useMemo(() => (sweep ? (sweptDirections(sweep) as SkyPlace[]) : []), [sweep]);
+  const swept = useMemo(() => (sweep ? sweptDirections(sweep) : []), [sweep]);
   const gaps = useMemo(() => unseenRanges(observed), [observed]);
   const unseen = useMemo(() => unseenInBand(band, gaps), [band, gaps]);
   return { gaps, strip: { band, live, observed, sweep: swept, unseen } };

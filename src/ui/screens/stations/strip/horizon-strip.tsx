@@ -4,12 +4,12 @@ import type { CaptureSession } from '../../../../app/capture/capture-session.ts'
 import type { AzimuthRange } from '../../../../core/shading/coverage.ts';
 import type { SkyPlace } from '../../../../report/pictures/sky-frame.ts';
 import { xOf, yOf } from '../../../../report/pictures/sky-frame.ts';
-import { percentText } from '../../../value-text.ts';
 import { Drawing } from '../../shade/drawing.tsx';
 import { useWidth } from '../../shade/use-width.ts';
 import type { BandColumn } from './sun-band.ts';
 import { stripPicture } from './strip-picture.ts';
-import type { LiveShade } from './use-live-shade.ts';
+import { AccessLine } from './access-line.tsx';
+import type { LiveAccess } from './use-live-access.ts';
 
 const HEIGHT = 112;
 
@@ -17,7 +17,7 @@ interface Props {
   session: CaptureSession;
   latitude: number;
   band: readonly BandColumn[];
-  live: LiveShade;
+  live: LiveAccess;
   observed: readonly AzimuthRange[];
   sweep: readonly SkyPlace[];
   /** What of the sun's band nobody has looked at. */
@@ -28,7 +28,7 @@ interface Props {
 /** The horizon unrolled: where the sun goes, what is traced, what is still unseen, and where the phone points. */
 export function HorizonStrip({ session, latitude, band, live, observed, sweep, unseen, plane }: Props) {
   const [box, width] = useWidth<HTMLDivElement>();
-  const profile = live.shade?.profile ?? null;
+  const profile = live.found?.profile ?? null;
   const picture = useMemo(
     () => width > 0 && stripPicture({ latitude, band, profile, observed, sweep, width, height: HEIGHT }),
     [latitude, band, profile, observed, sweep, width],
@@ -41,7 +41,7 @@ export function HorizonStrip({ session, latitude, band, live, observed, sweep, u
       </div>
       <figcaption>
         <AccessLine live={live} plane={plane} />
-        {live.shade && <p class="small">{words(unseen)}</p>}
+        {live.found && <p class="small">{words(unseen)}</p>}
       </figcaption>
     </figure>
   );
@@ -58,19 +58,6 @@ function words(unseen: Props['unseen']): string {
   const ranges = wide.slice(0, MOST_RANGES).map(([from, to]) => `${whole(from)}° to ${whole(to)}°`);
   const more = wide.length > MOST_RANGES ? ` and ${wide.length - MOST_RANGES} more` : '';
   return `Unseen in the sun’s band: ${ranges.join(', ')}${more}.`;
-}
-
-function AccessLine({ live: { shade, fault }, plane }: { live: LiveShade; plane: string }) {
-  if (fault && fault.code !== 'cancelled')
-    return <p class="small">The live figure is missing: the Shade section says why.</p>;
-  if (!shade) return <p class="small">Reading the climate…</p>;
-  const { solarAccess, coverage } = shade.measured;
-  return (
-    <p>
-      {plane}: access <strong>{percentText(solarAccess.annual)}</strong>, covered{' '}
-      <strong>{percentText(coverage)}</strong>
-    </p>
-  );
 }
 
 /** Where the phone points now; moved by hand, since it moves with every frame. */
