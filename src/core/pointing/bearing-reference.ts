@@ -1,8 +1,9 @@
 import { fullCircle } from '../angles/angles.ts';
 import type { HeadingCheck, Site } from '../survey/survey.ts';
 import { magneticDeclination } from './declination.ts';
-import { centralMeridian, gridConvergence } from './grid-convergence.ts';
+import { gridConvergence } from './grid-convergence.ts';
 import type { HeadingQuestion, HeadingReference } from './heading-method.ts';
+import { centralMeridian } from './utm.ts';
 
 /** Further from its central meridian a place is hardly in a UTM zone, degrees. */
 const ZONE_REACH = 6;

@@ -1,11 +1,6 @@
+import type { Coordinates } from '../angles/place.ts';
 import type { Parsed } from '../survey/problem.ts';
-
-export interface Coordinates {
-  /** Degrees, north positive. */
-  latitude: number;
-  /** Degrees, east positive. */
-  longitude: number;
-}
+import { parseGridReference } from './grid-reference.ts';
 
 /** An angle as typed: degrees, and minutes and seconds where given; the letter of its hemisphere, or none. */
 interface TypedAngle {
@@ -20,12 +15,15 @@ const TOKEN = /\s*(?:([-+]?\d+(?:\.\d+)?)\s*(°|'|")?|([NSEW])|[,;/|()])/gy;
 
 /**
  * Reads a place as people write it: decimal degrees, degrees and minutes, degrees, minutes and seconds; signs or the
- * letters N S E W before or after; decimal points or commas; a `geo:` address or a link that holds a pair. Without
- * letters the latitude comes first. Degrees, north and east positive, rounded to 1e-7 (a centimetre).
+ * letters N S E W before or after; decimal points or commas; a `geo:` address or a link that holds a pair; a place on the
+ * UTM grid, by metres or by lettered square. Without letters the latitude comes first. Degrees, north and east positive,
+ * rounded to 1e-7 (a centimetre); warnings where a grid reference is coarse or lies outside its zone.
  */
 export function parseCoordinates(text: string): Parsed<Coordinates> {
   const plain = plainText(text);
   if (plain === '') return refused('Type or paste the coordinates, such as 44.91, -72.20.');
+  const onGrid = parseGridReference(text);
+  if (onGrid) return onGrid;
   const linked = pairOfLink(plain);
   if (linked) return checked(linked.map((value) => angleOf(value)) as [TypedAngle, TypedAngle]);
   const angles = anglesOf(pointed(plain));

@@ -1,12 +1,5 @@
 import { DEGREES, RADIANS, turnBetween } from '../angles/angles.ts';
 
-/** Central meridian of a UTM zone 1 to 60, degrees east. Throws RangeError for another. */
-export function centralMeridian(zone: number): number {
-  if (!(Number.isInteger(zone) && zone >= 1 && zone <= 60))
-    throw new RangeError(`zone must be a whole number from 1 to 60, got ${zone}`);
-  return zone * 6 - 183;
-}
-
 /**
  * Grid convergence of a transverse Mercator grid, degrees: true bearing = grid bearing + convergence; positive east of
  * the central meridian in the north, west of it in the south. `latitude` -90 to 90, within 30° of the meridian.

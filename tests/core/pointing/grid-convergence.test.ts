@@ -1,6 +1,7 @@
 import { fc, test as property } from '@fast-check/vitest';
 import { describe, expect, test } from 'vitest';
-import { centralMeridian, gridConvergence } from '../../../src/core/pointing/grid-convergence.ts';
+import { gridConvergence } from '../../../src/core/pointing/grid-convergence.ts';
+import { centralMeridian } from '../../../src/core/pointing/utm.ts';
 
 const RADIANS = Math.PI / 180;
 

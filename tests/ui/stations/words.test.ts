@@ -5,7 +5,6 @@ import { freeName } from '../../../src/app/capture/obstruction-edits.ts';
 import { compassPoint } from '../../../src/ui/screens/stations/capture/compass-point.ts';
 import { newsWords } from '../../../src/ui/screens/stations/capture/capture-words.ts';
 import { hasParts, placeWords } from '../../../src/ui/screens/stations/station-facts.ts';
-import { utmZone } from '../../../src/ui/screens/stations/utm-zone.ts';
 import { inventedSurvey } from '../../app/invented-survey.ts';
 
 describe('words of a capture', () => {
@@ -63,14 +62,4 @@ describe('an open range', () => {
     expect(rangeOf(20, -30)).toEqual([350, 20]);
     expect(rangeOf(10, -370)).toEqual([0, 360]);
   });
-});
-
-describe('the zone of a map grid', () => {
-  // zones by definition: 6 degrees wide, zone 1 from 180 west
-  it.each([
-    [{ latitude: 48, longitude: 9 }, '32N'],
-    [{ latitude: -34, longitude: 151 }, '56S'],
-    [{ latitude: 0, longitude: -180 }, '1N'],
-    [{ latitude: 10, longitude: 180 }, '1N'],
-  ])('of %o is %s', (place, zone) => expect(utmZone({ ...place, timeZone: 'UTC' })).toBe(zone));
 });

@@ -26,7 +26,7 @@ export function PlaceFields({ place, nowMs, asked }: { place: PlaceDraft; nowMs:
         hint={
           coordinates
             ? [placeText(coordinates.latitude, coordinates.longitude), place.told].filter(Boolean).join('. ')
-            : "Typed or pasted: 44.91, -72.20 or 44° 54' 36\" N, 72° 12' W."
+            : "Typed or pasted: 44.91, -72.20 or 44° 54' 36\" N, 72° 12' W or 18T 721028 4976767."
         }
       />
       {coordinates && (

@@ -1,7 +1,8 @@
 import { useEffect, useRef, useState } from 'preact/hooks';
 import type { AppServices } from '../../../app/app-services.ts';
 import { zoneAt } from '../../../app/zone-at.ts';
-import { parseCoordinates, type Coordinates } from '../../../core/pointing/coordinates.ts';
+import type { Coordinates } from '../../../core/angles/place.ts';
+import { parseCoordinates } from '../../../core/pointing/coordinates.ts';
 import { isTimeZone, utcOffsetMinutes } from '../../../core/solar-position/time-zone.ts';
 import type { Site } from '../../../core/survey/survey.ts';
 import { numberOf } from '../../typed.ts';
@@ -92,7 +93,10 @@ export function usePlace(
     text,
     setText: typed,
     fault: refusal ?? (text.trim() !== '' && !parsed.ok ? parsed.problems[0].message : null),
-    told: oddity(zone, nowMs, before) ?? (accuracy === null ? null : accuracyText(accuracy)),
+    told:
+      oddity(zone, nowMs, before) ??
+      (parsed.ok ? parsed.warnings[0]?.message : undefined) ??
+      (accuracy === null ? null : accuracyText(accuracy)),
     altitude,
     setAltitude,
     zone,

@@ -1,6 +1,7 @@
 import { useMemo, useState } from 'preact/hooks';
 import { magneticDeclination } from '../../../core/pointing/declination.ts';
-import { centralMeridian, gridConvergence } from '../../../core/pointing/grid-convergence.ts';
+import { gridConvergence } from '../../../core/pointing/grid-convergence.ts';
+import { centralMeridian, utmZoneNumber } from '../../../core/pointing/utm.ts';
 import type { PlaneSort } from '../../../core/survey/plane-name.ts';
 import { planeName } from '../../../core/survey/plane-name.ts';
 import type { RoofPlane, Site, Survey } from '../../../core/survey/survey.ts';
@@ -28,7 +29,7 @@ const SORTS: { value: PlaneSort; label: string; tilt?: string }[] = [
 ];
 
 function northTurns({ latitude, longitude, altitude }: Site, timeMs: number): NorthTurns {
-  const zone = Math.min(60, Math.floor((longitude + 180) / 6) + 1);
+  const zone = utmZoneNumber(latitude, longitude);
   return {
     true: 0,
     grid: gridConvergence(latitude, longitude, centralMeridian(zone)),

@@ -7,7 +7,7 @@ import { Form } from '../../components/form/form.tsx';
 import { TextField } from '../../components/form/text-field.tsx';
 import type { SectionProps } from '../../section.ts';
 import { faultOf, typedNumber, valueOf } from '../../typed.ts';
-import { utmZone } from './utm-zone.ts';
+import { utmZone } from '../../../core/pointing/utm.ts';
 
 type Frame = NonNullable<HeadingCheck['frame']>;
 

@@ -6,7 +6,7 @@ import { headingMethod } from '../../../../core/pointing/heading-methods.ts';
 import type { HeadingMethodId } from '../../../../core/survey/survey.ts';
 import { faultOf, typedNumber, valueOf } from '../../../typed.ts';
 import { checkWords } from '../heading-words.ts';
-import { utmZone } from '../utm-zone.ts';
+import { utmZone } from '../../../../core/pointing/utm.ts';
 import { FacesPanel } from './faces-panel.tsx';
 import { ShadowHours } from './shadow-hours.tsx';
 import type { CheckWay, Sitting } from './sitting.ts';
