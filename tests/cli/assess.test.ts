@@ -69,6 +69,9 @@ describe('assess --json', () => {
         expect(station.solarAccess.hourly).toHaveLength(12);
         for (const hours of station.solarAccess.hourly) expect(hours).toHaveLength(24);
         expect(station.coverage).toBeGreaterThan(0);
+        expect(station.coverage + sum(station.unseen.map(({ share }) => share))).toBeCloseTo(1, 9);
+        for (const { from, to, inSunBand } of station.unseen)
+          expect([typeof from, typeof to, typeof inSunBand]).toEqual(['number', 'number', 'boolean']);
         for (const obstruction of station.obstructions)
           expect(Object.keys(obstruction)).toEqual(
             expect.arrayContaining(['id', 'gainIfRemoved', 'lossIfAlone', 'monthly']),

@@ -7,7 +7,6 @@ import type { SkyFrame } from '../../src/report/pictures/sky-frame.ts';
 import { directionAt, linesOf, xOf, yOf } from '../../src/report/pictures/sky-frame.ts';
 import { contourLevels, densityAt, smoothDensity } from '../../src/report/pictures/smooth-density.ts';
 import { dayLines, hourLines } from '../../src/report/pictures/sun-lines.ts';
-import { unseenRanges } from '../../src/report/pictures/unseen-sky.ts';
 
 const frame: SkyFrame = { centre: 180, span: 360, top: 90, left: 0, right: 720, above: 0, below: 180 };
 
@@ -133,23 +132,5 @@ describe('the sun’s lines', () => {
     const sun = solarPosition(Date.UTC(2025, 0, 1, 11), 48, 15);
     expect(noon[0].azimuth).toBeCloseTo(sun.solarAzimuth, 6);
     expect(noon[0].elevation).toBeCloseTo(sun.apparentElevation, 6);
-  });
-});
-
-describe('the azimuths nobody looked at', () => {
-  const range = fc.tuple(fc.integer({ min: 0, max: 359 }), fc.integer({ min: 1, max: 359 }));
-  test.prop([fc.array(range, { maxLength: 6 })])('are exactly those in no range', (pairs) => {
-    const observed = pairs.map(([from, width]): [number, number] => [from, (from + width) % 360]);
-    const unseen = unseenRanges(observed);
-    for (let azimuth = 0.5; azimuth < 360; azimuth++) {
-      const seen = pairs.some(([from, width]) => (azimuth - from + 360) % 360 < width);
-      const marked = unseen.some(([from, to]) => (azimuth - from + 720) % 360 < to - from);
-      expect(marked).toBe(!seen);
-    }
-  });
-
-  it('are the whole circle before anybody looked, and none after a full sweep', () => {
-    expect(unseenRanges([])).toEqual([[0, 360]]);
-    expect(unseenRanges([[0, 360]])).toEqual([]);
   });
 });

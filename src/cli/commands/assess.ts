@@ -40,7 +40,10 @@ export const assess: Command = {
                                irradiation in kWh/m2, shares 0 to 1, null for a month without sun;
                                hours are local standard time; solarAccess of planes and stations has
                                interval: { low, high, standardDeviation, draws, sources: [ { source,
-                               share, cure, standardDeviationAfter } ] }, 95 % on the annual access
+                               share, cure, standardDeviationAfter } ] }, 95 % on the annual access;
+                               stations have coverage and unseen: [ { from, to, share, inSunBand } ], the
+                               azimuths nobody looked at (clockwise degrees from true north): their
+                               shares of the light and coverage sum to 1
 
 A file that cannot be used is told, the others are assessed, and the exit code is 1.
 Counted: light from the sun and the sky that obstructions block. Not counted: what obstructions reflect.`,

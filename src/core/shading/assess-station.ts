@@ -2,7 +2,7 @@ import { blockedSpans } from '../horizon/blocked-spans.ts';
 import type { StationHorizon } from '../horizon/station-horizon.ts';
 import type { StationAssessment } from './assessment.ts';
 import { blockedLight, shadedMonths } from './blocked-light.ts';
-import { coverage } from './coverage.ts';
+import { observedLight } from './coverage.ts';
 import { hourlyAccess } from './hourly-access.ts';
 import type { KnownObstructions } from './obstruction-shading.ts';
 import { monthlyShares } from './monthly-shares.ts';
@@ -30,7 +30,7 @@ export function assessStation(
       monthly: monthlyShares(light, whole),
       hourly: hourlyAccess(map, spans, blocked),
     },
-    coverage: coverage(map, observed),
+    ...observedLight(map, observed),
     irradiation: { annual, monthly: light },
     ...obstructionCosts(map, profile, obstructions),
   };

@@ -85,11 +85,24 @@ export interface StationAssessment {
   };
   /** Share of the plane's unshaded energy that comes through azimuths somebody observed. */
   coverage: number;
+  /** What nobody observed, clockwise: the shares and `coverage` sum to 1. */
+  unseen: UnseenRange[];
   irradiation: Irradiation;
   /** Most gain first. */
   obstructions: ObstructionShading[];
   /** Obstructions that hide each other: removing all gives more than the sum of removing each. */
   groups: ObstructionGroup[];
+}
+
+/** Azimuths that nobody observed; cut where the sun's band begins and ends. */
+export interface UnseenRange {
+  /** Degrees clockwise from true north; over north where `to` is below `from`, 0 to 360 for the whole circle. */
+  from: number;
+  to: number;
+  /** Share of the plane's unshaded energy that comes from there, counted as `coverage` is, 0 to 1. */
+  share: number;
+  /** Whether the sun stands there at some time of the year, in front of the plane. */
+  inSunBand: boolean;
 }
 
 export interface ObstructionShading {

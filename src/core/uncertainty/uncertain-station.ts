@@ -3,7 +3,7 @@ import type { StationHorizon } from '../horizon/station-horizon.ts';
 import { pointedDirections, stationHorizon, tracedObstructions } from '../horizon/station-horizon.ts';
 import type { SettledTrace } from '../horizon/traced-obstruction.ts';
 import type { PointedSurvey } from '../pointing/pointed-survey.ts';
-import type { AzimuthRange } from '../shading/coverage.ts';
+import type { AzimuthRange } from '../angles/azimuth-ranges.ts';
 import { obstructionKind } from '../survey/obstruction-kinds.ts';
 import { ordered } from '../survey/order.ts';
 import type { Months, Obstruction, SightingAxis, Station, Survey } from '../survey/survey.ts';

@@ -1,6 +1,6 @@
 import type { HorizonProfile } from '../horizon/horizon-profile.ts';
 import { COLUMNS, COLUMN_WIDTH } from '../horizon/horizon-profile.ts';
-import type { AzimuthRange } from '../shading/coverage.ts';
+import type { AzimuthRange } from '../angles/azimuth-ranges.ts';
 import { observedShares } from '../shading/coverage.ts';
 import type { AnnualLight } from './annual-light.ts';
 import { DRAW_COLUMNS, NODE, NODES } from './annual-light.ts';

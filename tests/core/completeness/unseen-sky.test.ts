@@ -1,13 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { lightByAzimuth } from '../../../src/core/completeness/light-by-azimuth.ts';
 import { openPoints } from '../../../src/core/completeness/open-points.ts';
-import { unseenParts } from '../../../src/core/completeness/unseen-parts.ts';
-import { worldClimate } from '../../../src/core/irradiance/world-climate.ts';
-import { siteLight } from '../../../src/core/shading/site-light.ts';
-import type { AzimuthRange } from '../../../src/core/shading/coverage.ts';
-import { coverage } from '../../../src/core/shading/coverage.ts';
-import { skyMap } from '../../../src/core/shading/sky-map.ts';
-import { worldGrid } from '../irradiance/world-bytes.ts';
 import { completeSurvey } from './complete-survey.ts';
 import { assessed, ofKind, pointsOf, SOUTH } from './found-points.ts';
 
@@ -70,51 +62,5 @@ describe('sky that nobody looked at', () => {
     const points = openPoints(survey, await assessed(survey));
     expect(points).toHaveLength(1);
     expect(points[0].sentence).toContain('East roof');
-  });
-});
-
-describe('light by azimuth', () => {
-  // held against the sky map in the world's climate; the split is a planning value and need only rank directions
-  const parts: AzimuthRange[] = [
-    [60, 90],
-    [90, 120],
-    [120, 150],
-    [150, 180],
-    [180, 240],
-    [240, 300],
-  ];
-  test.each([
-    [44, 30, 180],
-    [52, 45, 230],
-    [-33, 20, 10],
-    [5, 10, 90],
-  ])(
-    'splits the light as the sky map does, to 3 points: latitude %d, tilt %d to %d',
-    (latitude, tilt, azimuth) => {
-      const site = { latitude, longitude: 0, timeZone: 'UTC' };
-      const { year, grid } = siteLight(site, worldClimate(worldGrid, site), { stepMinutes: 10 });
-      const map = skyMap(year, grid, tilt, azimuth);
-      const { shares } = lightByAzimuth(latitude, { surfaceTilt: tilt, surfaceAzimuth: azimuth });
-      for (const [from, to] of parts) {
-        const quick = shares.slice(from / 2, to / 2).reduce((sum, share) => sum + share, 0);
-        expect(Math.abs(quick - coverage(map, [[from, to]]))).toBeLessThan(0.03);
-      }
-    },
-  );
-
-  test('has shares that sum to 1, even where the sun never reaches a wall', () => {
-    for (const [latitude, tilt, azimuth] of [
-      [44, 30, 180],
-      [89, 90, 0],
-      [0, 0, 0],
-      [-66, 90, 180],
-    ]) {
-      const { shares } = lightByAzimuth(latitude, { surfaceTilt: tilt, surfaceAzimuth: azimuth });
-      expect(shares.reduce((sum, share) => sum + share, 0)).toBeCloseTo(1, 9);
-    }
-  });
-
-  test('leaves no part where all was seen', () => {
-    expect(unseenParts([[0, 360]], lightByAzimuth(44, SOUTH))).toEqual([]);
   });
 });

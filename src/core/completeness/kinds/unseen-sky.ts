@@ -1,15 +1,13 @@
-import type { PlaneAssessment, StationAssessment } from '../../shading/assessment.ts';
+import { fullCircle } from '../../angles/angles.ts';
+import type { PlaneAssessment, StationAssessment, UnseenRange } from '../../shading/assessment.ts';
 import { ordered } from '../../survey/order.ts';
 import type { Station } from '../../survey/survey.ts';
 import { sourceEffect } from '../interval-effect.ts';
-import type { LightByAzimuth } from '../light-by-azimuth.ts';
-import { lightByAzimuth } from '../light-by-azimuth.ts';
-import type { OpenPoint, OpenPointKind, SurveyLook } from '../open-point.ts';
-import type { UnseenPart } from '../unseen-parts.ts';
-import { observedFrom, unseenParts } from '../unseen-parts.ts';
+import type { OpenPoint, OpenPointKind } from '../open-point.ts';
 import { isEmpty } from './station-empty.ts';
 
-/** Parts that send a plane less of its light, or move its figure by fewer points, are not worth a climb. No source. */
+/** Parts that are narrower [degrees], send a plane less of its light or move its figure by fewer points are not worth a climb. No source. */
+const NARROWEST = 1;
 const LEAST_SHARE = 0.005;
 const LEAST_EFFECT = 0.1;
 
@@ -17,40 +15,23 @@ export const unseenSky: OpenPointKind = {
   id: 'unseen-sky',
   title: 'Nobody looked there',
   isGrave: false,
-  find: (look) => {
-    const planes = litPlanes(look);
-    return ordered(look.survey.stations)
+  find: ({ survey, assessment }) =>
+    ordered(survey.stations)
       .filter((station) => !isEmpty(station))
-      .flatMap((station) => partsOf(station, planes, look));
-  },
+      .flatMap((station) => partsOf(station, assessment?.planes ?? [])),
 };
 
-interface LitPlane {
-  plane: PlaneAssessment;
-  light: LightByAzimuth;
-}
-
-const litPlanes = ({ survey, assessment }: SurveyLook): LitPlane[] =>
-  (assessment?.planes ?? []).map((plane) => ({ plane, light: lightByAzimuth(survey.site.latitude, plane) }));
-
 /** A part as one plane has it. */
-interface PlanePart extends UnseenPart {
+interface PlanePart extends UnseenRange {
   plane: string;
-  /** Share of the plane's light, 0 to 1. */
-  share: number;
   effect: number | null;
 }
 
 /** The unseen parts of the plane that they matter most to. */
-function partsOf(
-  station: Station,
-  planes: readonly LitPlane[],
-  { survey, pointed }: SurveyLook,
-): Omit<OpenPoint, 'kind'>[] {
-  const observed = observedFrom(survey, station, pointed);
-  const found = planes.flatMap(({ plane, light }) => {
+function partsOf(station: Station, planes: readonly PlaneAssessment[]): Omit<OpenPoint, 'kind'>[] {
+  const found = planes.flatMap((plane) => {
     const assessed = plane.stations.find(({ id }) => id === station.id);
-    return assessed ? planeParts(unseenParts(observed, light), plane, assessed) : [];
+    return assessed ? planeParts(plane, assessed) : [];
   });
   const worst = found.filter((part) => !found.some((other) => overlaps(part, other) && isWorse(other, part)));
   return worst.map((part) => ({
@@ -66,13 +47,10 @@ function partsOf(
   }));
 }
 
-/** What each part is worth: the light nobody looked at, and its part of the interval, by the light that comes through. */
-function planeParts(
-  parts: readonly UnseenPart[],
-  plane: PlaneAssessment,
-  { coverage, solarAccess }: StationAssessment,
-): PlanePart[] {
-  const whole = Math.hypot(...parts.map(({ shareOfUnseen }) => shareOfUnseen));
+/** The parts of the sun's band, each with its part of the interval by the light that comes through. */
+function planeParts(plane: PlaneAssessment, { unseen, solarAccess }: StationAssessment): PlanePart[] {
+  const parts = unseen.filter((part) => part.inSunBand && widthOf(part) >= NARROWEST);
+  const whole = Math.hypot(...parts.map(({ share }) => share));
   const all = solarAccess.interval
     ? sourceEffect(solarAccess.interval, 'unseen') / plane.stations.length
     : null;
@@ -80,8 +58,7 @@ function planeParts(
     .map((part) => ({
       ...part,
       plane: plane.name,
-      share: (1 - coverage) * part.shareOfUnseen,
-      effect: all === null ? null : (all * part.shareOfUnseen) / whole,
+      effect: all === null ? null : (all * part.share) / whole,
     }))
     .filter(({ share, effect }) => share >= LEAST_SHARE && (effect ?? Infinity) >= LEAST_EFFECT);
 }
@@ -91,11 +68,11 @@ const isWorse = (a: PlanePart, b: PlanePart) =>
   a.plane !== b.plane && (weight(a) > weight(b) || (weight(a) === weight(b) && a.plane < b.plane));
 
 /** Whether two ranges, each clockwise, have azimuths in common. */
-function overlaps(a: UnseenPart, b: UnseenPart): boolean {
-  const inside = (azimuth: number, { from, to }: UnseenPart) =>
-    (azimuth - from + 360) % 360 < ((to - from + 360) % 360 || 360);
+function overlaps(a: UnseenRange, b: UnseenRange): boolean {
+  const inside = (azimuth: number, range: UnseenRange) => fullCircle(azimuth - range.from) < widthOf(range);
   return inside(a.from, b) || inside(b.from, a);
 }
 
+const widthOf = ({ from, to }: UnseenRange) => fullCircle(to - from) || 360;
 const degrees = (azimuth: number) => `${Math.round(azimuth) % 360}°`;
 const percent = (share: number) => `${(100 * share).toFixed(share < 0.02 ? 1 : 0)}\u00a0%`;

@@ -1,4 +1,5 @@
 import { fullCircle } from '../../../core/angles/angles.ts';
+import { isBetween, rangesBetween } from '../../../core/angles/azimuth-ranges.ts';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
 import type { SunVisit } from '../../../core/solar-position/when-sun-at.ts';
 import { datesWhenSunAt } from '../../../core/solar-position/when-sun-at.ts';
@@ -6,7 +7,6 @@ import type { Site } from '../../../core/survey/survey.ts';
 import { compassWord } from '../../../report/pictures/compass-names.ts';
 import { MONTH_NAMES } from '../../../report/pictures/month-columns.ts';
 import { obstructionsAt } from '../../../report/pictures/silhouettes.ts';
-import { unseenRanges } from '../../../report/pictures/unseen-sky.ts';
 import { clock, energy, listed, percent } from './figures.ts';
 
 export interface Direction {
@@ -94,6 +94,6 @@ function passesText(transmittance: Float64Array, months: readonly number[]): str
 }
 
 const isUnseen = (azimuth: number, { observed }: StationShade) =>
-  unseenRanges(observed).some(([from, to]) => fullCircle(azimuth - from) < to - from);
+  rangesBetween(observed).some((gap) => isBetween(azimuth, gap));
 
 const capital = (text: string) => text[0].toUpperCase() + text.slice(1);

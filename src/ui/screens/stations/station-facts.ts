@@ -1,5 +1,5 @@
 import type { PointedSurvey } from '../../../core/pointing/pointed-survey.ts';
-import { unseenRanges } from '../../../report/pictures/unseen-sky.ts';
+import { rangesBetween } from '../../../core/angles/azimuth-ranges.ts';
 import type { Station, Survey } from '../../../core/survey/survey.ts';
 
 const counted = (count: number, one: string, many = `${one}s`): string =>
@@ -35,7 +35,7 @@ export function placeWords({ position, instrumentHeight }: Station, survey: Surv
 
 /** Azimuth ranges nobody looked at, whole degrees; ranges narrower than a degree are left out. */
 export function unseenWords(observed: readonly (readonly [number, number])[]): string[] {
-  return unseenRanges(observed)
+  return rangesBetween(observed)
     .filter(([from, to]) => to - from >= 1)
     .map(([from, to]) =>
       to - from >= 360 ? 'all around' : `${Math.round(from) % 360}° to ${Math.round(to) % 360}°`,

@@ -1,11 +1,11 @@
 import type { HorizonProfile } from '../../../../core/horizon/horizon-profile.ts';
-import type { AzimuthRange } from '../../../../core/shading/coverage.ts';
+import type { AzimuthRange } from '../../../../core/angles/azimuth-ranges.ts';
+import { isBetween, rangesBetween } from '../../../../core/angles/azimuth-ranges.ts';
 import type { Line, Mark, Picture } from '../../../../report/marks.ts';
 import { obstructionMarks, obstructionShapes } from '../../../../report/pictures/horizon-obstructions.ts';
 import type { SkyFrame, SkyPlace } from '../../../../report/pictures/sky-frame.ts';
 import { linesOf, xOfTurn, yOf } from '../../../../report/pictures/sky-frame.ts';
-import { unseenRanges } from '../../../../report/pictures/unseen-sky.ts';
-import { fullCircle, turnBetween } from '../../../../core/angles/angles.ts';
+import { turnBetween } from '../../../../core/angles/angles.ts';
 import { COLUMN, type BandColumn } from './sun-band.ts';
 
 export interface StripInput {
@@ -39,8 +39,8 @@ export function stripFrame({ latitude, band, profile, width, height }: StripInpu
 export function stripPicture(input: StripInput): Picture & { frame: SkyFrame } {
   const { band, profile, observed, sweep, width, height } = input;
   const frame = stripFrame(input);
-  const unseen = unseenRanges(observed);
-  const isUnseen = (azimuth: number) => unseen.some(([from, to]) => fullCircle(azimuth - from) < to - from);
+  const unseen = rangesBetween(observed);
+  const isUnseen = (azimuth: number) => unseen.some((gap) => isBetween(azimuth, gap));
   const boxes = (columns: readonly BandColumn[]): Line[] => columns.map((column) => boxOf(frame, column));
   const open = band.filter(({ azimuth }) => isUnseen(azimuth + COLUMN / 2));
   const marks: Mark[] = [
