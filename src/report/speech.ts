@@ -57,6 +57,11 @@ export class Speech {
     return this.angle(fullCircle(Math.round(degrees * step) / step), decimals);
   }
 
+  /** The nearest of eight compass points, in words. */
+  compass(azimuth: number): string {
+    return this.words['compass.words'][Math.round(fullCircle(azimuth) / 45) % 8];
+  }
+
   /** A length in metres, or in feet and inches. */
   length(metres: number, decimals = 1): string {
     if (this.choices.units !== 'us') return `${this.number(metres, decimals)}${THIN}m`;

@@ -192,6 +192,18 @@ const positionSchema = v.union(
   'a place on a plane (on, x, y) or in the site’s frame (east, north, up), in metres',
 );
 
+const openLookSchema = v.looseObject(
+  {
+    id: f.identifier,
+    order: f.orderKey,
+    run: f.identifier,
+    azimuths: v.strictTuple([f.azimuth, f.azimuth], 'a pair of azimuths, from and to'),
+    lookedAt: f.instant,
+    readings: v.optional(f.listOf(f.identifier)),
+  },
+  'an object: one look that found it open',
+);
+
 const stationSchema = v.looseObject(
   {
     id: f.identifier,
@@ -203,6 +215,7 @@ const stationSchema = v.looseObject(
     observedOpen: v.optional(
       f.listOf(v.strictTuple([f.azimuth, f.azimuth], 'a pair of azimuths, from and to')),
     ),
+    openLooks: v.optional(f.listOf(openLookSchema)),
     headingChecks: v.optional(f.listOf(headingCheckSchema)),
     markSightings: v.optional(f.listOf(sightingSchema)),
     indexChecks: v.optional(f.listOf(indexCheckSchema)),
@@ -236,6 +249,7 @@ const photoSchema = v.looseObject(
     of: photoSubjectSchema,
     takenAt: f.instant,
     azimuth: v.optional(f.azimuth),
+    reading: v.optional(f.identifier),
     width: f.numberOver(0, 100_000, 'dots'),
     height: f.numberOver(0, 100_000, 'dots'),
     bytes: f.numberOver(0, 1e9, 'bytes'),
@@ -251,6 +265,7 @@ export const surveySchema = v.looseObject(
     id: f.identifier,
     title: f.name,
     surveyedOn: v.optional(f.calendarDay),
+    surveyor: v.optional(f.name),
     notes: v.optional(f.textUpTo(LIMITS.notesLength)),
     site: siteSchema,
     climate: climateSchema,

@@ -32,6 +32,8 @@ export interface Survey {
   title: string;
   /** Calendar day of the visit, YYYY-MM-DD. */
   surveyedOn?: string;
+  /** Who took the sightings. */
+  surveyor?: string;
   notes?: string;
   site: Site;
   climate: ClimateChoice;
@@ -64,8 +66,10 @@ export interface Photo {
   order?: number;
   of: PhotoSubject;
   takenAt: string;
-  /** Where the camera looked, clockwise from true north. */
+  /** Where the camera looked, clockwise from true north, as somebody typed it; it stands over the reading. */
   azimuth?: number;
+  /** Raw reading of where the camera looked. */
+  reading?: string;
   /** Of the picture, in its own dots. */
   width: number;
   height: number;
@@ -234,8 +238,10 @@ export interface Station {
   instrumentHeight?: number;
   /** Ids of the planes this station speaks for. */
   serves: string[];
-  /** Azimuth ranges [from, to], clockwise, looked at and found open. */
+  /** True azimuth ranges [from, to], clockwise, looked at and found open. */
   observedOpen?: [number, number][];
+  /** The same as the phone read them; they turn with the heading of their run. */
+  openLooks?: OpenLook[];
   headingChecks?: HeadingCheck[];
   /**
    * Sightings of marks that belong to no trace. A mark sighted twice in one run closes the horizon; a mark sighted in
@@ -245,6 +251,19 @@ export interface Station {
   /** Two-face checks of the inclination. */
   indexChecks?: IndexCheck[];
   traces: Trace[];
+}
+
+/** Azimuths that somebody looked along with the phone and found open. */
+export interface OpenLook {
+  id: string;
+  order?: number;
+  run: string;
+  /** [from, to], clockwise, as read in the frame of the run; 0 to 360 for all around. */
+  azimuths: [number, number];
+  /** Instant whose heading turns them. */
+  lookedAt: string;
+  /** Raw readings of the look, where the phone was turned along. */
+  readings?: string[];
 }
 
 export type StationPosition = ({ on: string } & PlanePoint) | LocalPoint;

@@ -6,4 +6,4 @@ import type { EN } from './en/en.ts';
  */
 export type Catalogue = { readonly [K in keyof typeof EN]: Same<(typeof EN)[K]> };
 
-type Same<T> = T extends string ? string : T;
+type Same<T> = T extends string ? string : T extends readonly string[] ? readonly string[] : T;
