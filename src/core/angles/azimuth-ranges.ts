@@ -41,6 +41,9 @@ export function rangesBetween(ranges: readonly AzimuthRange[]): [number, number]
   return [...gaps.slice(1, -1), [last[0], 360 + first[1]]];
 }
 
+/** Degrees clockwise from one azimuth to another; where they are the same, the whole circle. */
+export const widthOf = (from: number, to: number): number => fullCircle(to - from) || 360;
+
 /** Whether an azimuth lies in a range [degrees, clockwise; `to` may run past 360]. */
 export const isBetween = (azimuth: number, [from, to]: AzimuthRange): boolean =>
   fullCircle(azimuth - from) < to - from;

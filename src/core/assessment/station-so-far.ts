@@ -3,10 +3,10 @@ import type { HorizonProfile } from '../horizon/horizon-profile.ts';
 import { pointedDirections, stationHorizon } from '../horizon/station-horizon.ts';
 import type { Climate } from '../irradiance/climate.ts';
 import type { PointedSurvey } from '../pointing/pointed-survey.ts';
-import type { AccessInterval } from '../shading/assessment.ts';
+import type { AccessInterval, UnseenRange } from '../shading/assessment.ts';
 import { blockedLight, shadedMonths } from '../shading/blocked-light.ts';
-import type { AzimuthRange } from '../shading/coverage.ts';
-import { coverage } from '../shading/coverage.ts';
+import type { AzimuthRange } from '../angles/azimuth-ranges.ts';
+import { observedLight } from '../shading/coverage.ts';
 import type { SkyMap } from '../shading/sky-map.ts';
 import { unshadedMonths } from '../shading/sky-map.ts';
 import type { Station, Survey } from '../survey/survey.ts';
@@ -21,6 +21,8 @@ export interface StationSoFar {
   interval: AccessInterval;
   /** Share of the plane's light that comes through azimuths somebody observed, 0 to 1. */
   coverage: number;
+  /** What nobody observed, clockwise: the shares and `coverage` sum to 1. */
+  unseen: UnseenRange[];
   profile: HorizonProfile;
   observed: readonly AzimuthRange[];
 }
@@ -45,7 +47,7 @@ export function stationSoFar(
   return {
     access,
     interval: accessInterval([drawAccess(map, uncertain, access, drawn)], drawn),
-    coverage: coverage(map, horizon.observed),
+    ...observedLight(map, horizon.observed),
     ...horizon,
   };
 }

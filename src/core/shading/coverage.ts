@@ -6,8 +6,6 @@ import type { UnseenRange } from './assessment.ts';
 import { isInSunBand, lightByColumn } from './light-by-column.ts';
 import type { SkyMap } from './sky-map.ts';
 
-export type { AzimuthRange };
-
 /** How much of a plane's light comes through azimuths that somebody observed, and where the rest comes from. */
 export interface ObservedLight {
   /** 0 to 1. */
@@ -15,10 +13,6 @@ export interface ObservedLight {
   /** Clockwise; their shares and `coverage` sum to 1. */
   unseen: UnseenRange[];
 }
-
-/** The coverage alone. */
-export const coverage = (map: SkyMap, observed: readonly AzimuthRange[]): number =>
-  observedLight(map, observed).coverage;
 
 /**
  * Share of a plane's unshaded sky light (direct light, dome and horizon band) that comes through azimuths somebody

@@ -8,8 +8,6 @@ import { boxAround } from './label-places.ts';
 import type { SkyFrame } from './sky-frame.ts';
 import { xOfTurn } from './sky-frame.ts';
 
-export { rangesBetween as unseenRanges };
-
 /** A light dotted pattern over the azimuths nobody looked at, and words where there is room. */
 export function unseenMarks(
   frame: SkyFrame,

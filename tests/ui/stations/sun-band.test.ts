@@ -1,7 +1,6 @@
-import { fc, test } from '@fast-check/vitest';
 import { describe, expect, it } from 'vitest';
 import { solarPosition } from '../../../src/core/solar-position/solar-position.ts';
-import { COLUMN, sunBand, unseenInBand } from '../../../src/ui/screens/stations/strip/sun-band.ts';
+import { COLUMN, sunBand } from '../../../src/ui/screens/stations/strip/sun-band.ts';
 
 const START = Date.UTC(2026, 0, 1);
 const HOUR = 3_600_000;
@@ -26,27 +25,4 @@ describe('the band of the sun', () => {
     expect(wall.every(({ azimuth }) => azimuth >= 90 - COLUMN && azimuth <= 270)).toBe(true);
     expect(wall.length).toBeLessThan(sunBand(51, 0, 180).length);
   });
-});
-
-describe('what is unseen of the band', () => {
-  const band = sunBand(51, 0, 180);
-
-  it('is nothing where all is seen, and all of it where nothing is', () => {
-    expect(unseenInBand(band, [])).toEqual([]);
-    const all = unseenInBand(band, [[0, 360]]);
-    expect(all.reduce((sum, [from, to]) => sum + to - from, 0)).toBeCloseTo(band.length * COLUMN, 6);
-  });
-
-  it('goes over north', () => {
-    const south = sunBand(-34, 0, 0);
-    expect(unseenInBand(south, [[350, 375]])).toEqual([[350, 375]]);
-  });
-
-  test.prop([fc.double({ min: 0, max: 359, noNaN: true }), fc.double({ min: 0.5, max: 300, noNaN: true })])(
-    'is never wider than the gap',
-    (from, width) => {
-      const found = unseenInBand(band, [[from, from + width]]);
-      expect(found.reduce((sum, [start, end]) => sum + end - start, 0)).toBeLessThanOrEqual(width + 1e-6);
-    },
-  );
 });

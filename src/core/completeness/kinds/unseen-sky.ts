@@ -1,4 +1,5 @@
 import { fullCircle } from '../../angles/angles.ts';
+import { widthOf } from '../../angles/azimuth-ranges.ts';
 import type { PlaneAssessment, StationAssessment, UnseenRange } from '../../shading/assessment.ts';
 import { ordered } from '../../survey/order.ts';
 import type { Station } from '../../survey/survey.ts';
@@ -49,7 +50,7 @@ function partsOf(station: Station, planes: readonly PlaneAssessment[]): Omit<Ope
 
 /** The parts of the sun's band, each with its part of the interval by the light that comes through. */
 function planeParts(plane: PlaneAssessment, { unseen, solarAccess }: StationAssessment): PlanePart[] {
-  const parts = unseen.filter((part) => part.inSunBand && widthOf(part) >= NARROWEST);
+  const parts = unseen.filter((part) => part.inSunBand && widthOf(part.from, part.to) >= NARROWEST);
   const whole = Math.hypot(...parts.map(({ share }) => share));
   const all = solarAccess.interval
     ? sourceEffect(solarAccess.interval, 'unseen') / plane.stations.length
@@ -69,10 +70,10 @@ const isWorse = (a: PlanePart, b: PlanePart) =>
 
 /** Whether two ranges, each clockwise, have azimuths in common. */
 function overlaps(a: UnseenRange, b: UnseenRange): boolean {
-  const inside = (azimuth: number, range: UnseenRange) => fullCircle(azimuth - range.from) < widthOf(range);
+  const inside = (azimuth: number, { from, to }: UnseenRange) =>
+    fullCircle(azimuth - from) < widthOf(from, to);
   return inside(a.from, b) || inside(b.from, a);
 }
 
-const widthOf = ({ from, to }: UnseenRange) => fullCircle(to - from) || 360;
 const degrees = (azimuth: number) => `${Math.round(azimuth) % 360}°`;
 const percent = (share: number) => `${(100 * share).toFixed(share < 0.02 ? 1 : 0)}\u00a0%`;

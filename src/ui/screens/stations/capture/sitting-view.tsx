@@ -1,11 +1,11 @@
 import { useEffect, useMemo, useState } from 'preact/hooks';
 import { liveSurvey, sweptDirections, type LiveSweep } from '../../../../app/capture/live-survey.ts';
-import type { AzimuthRange } from '../../../../core/shading/coverage.ts';
+import type { AzimuthRange } from '../../../../core/angles/azimuth-ranges.ts';
+import { rangesBetween } from '../../../../core/angles/azimuth-ranges.ts';
 import type { RoofPlane, Station } from '../../../../core/survey/survey.ts';
-import { unseenRanges } from '../../../../report/pictures/unseen-sky.ts';
 import type { SectionProps } from '../../../section.ts';
 import { HorizonStrip } from '../strip/horizon-strip.tsx';
-import { sunBand, unseenInBand } from '../strip/sun-band.ts';
+import { sunBand } from '../strip/sun-band.ts';
 import { useLiveAccess } from '../strip/use-live-access.ts';
 import { CheckPanel } from './check-panel.tsx';
 import { Figures } from './figures.tsx';
@@ -114,7 +114,6 @@ function useStrip(props: Props, plane: RoofPlane | null) {
     [survey.site.latitude, plane?.surfaceTilt, plane?.surfaceAzimuth],
   );
   const swept = useMemo(() => (sweep ? sweptDirections(sweep) : []), [sweep]);
-  const gaps = useMemo(() => unseenRanges(observed), [observed]);
-  const unseen = useMemo(() => unseenInBand(band, gaps), [band, gaps]);
-  return { gaps, strip: { band, live, observed, sweep: swept, unseen } };
+  const gaps = useMemo(() => rangesBetween(observed), [observed]);
+  return { gaps, strip: { band, live, observed, sweep: swept } };
 }

@@ -1,7 +1,7 @@
 import { useSignalEffect } from '@preact/signals';
 import { useMemo, useRef } from 'preact/hooks';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
-import type { AzimuthRange } from '../../../../core/shading/coverage.ts';
+import type { AzimuthRange } from '../../../../core/angles/azimuth-ranges.ts';
 import type { SkyPlace } from '../../../../report/pictures/sky-frame.ts';
 import { xOf, yOf } from '../../../../report/pictures/sky-frame.ts';
 import { Drawing } from '../../shade/drawing.tsx';
@@ -9,6 +9,7 @@ import { useWidth } from '../../shade/use-width.ts';
 import type { BandColumn } from './sun-band.ts';
 import { stripPicture } from './strip-picture.ts';
 import { AccessLine } from './access-line.tsx';
+import { unseenInBand } from './unseen-in-band.ts';
 import type { LiveAccess } from './use-live-access.ts';
 
 const HEIGHT = 112;
@@ -20,13 +21,11 @@ interface Props {
   live: LiveAccess;
   observed: readonly AzimuthRange[];
   sweep: readonly SkyPlace[];
-  /** What of the sun's band nobody has looked at. */
-  unseen: readonly [number, number][];
   plane: string;
 }
 
 /** The horizon unrolled: where the sun goes, what is traced, what is still unseen, and where the phone points. */
-export function HorizonStrip({ session, latitude, band, live, observed, sweep, unseen, plane }: Props) {
+export function HorizonStrip({ session, latitude, band, live, observed, sweep, plane }: Props) {
   const [box, width] = useWidth<HTMLDivElement>();
   const profile = live.found?.profile ?? null;
   const picture = useMemo(
@@ -41,23 +40,10 @@ export function HorizonStrip({ session, latitude, band, live, observed, sweep, u
       </div>
       <figcaption>
         <AccessLine live={live} plane={plane} />
-        {live.found && <p class="small">{words(unseen)}</p>}
+        {live.found && <p class="small">{unseenInBand(live.found.unseen)}</p>}
       </figcaption>
     </figure>
   );
-}
-
-const whole = (azimuth: number) => Math.round(azimuth) % 360;
-
-/** Ranges told in words; the picture shows all. */
-const MOST_RANGES = 3;
-
-function words(unseen: Props['unseen']): string {
-  const wide = unseen.filter(([from, to]) => to - from >= 1);
-  if (wide.length === 0) return 'All of the sun’s band in front of the plane has been looked at.';
-  const ranges = wide.slice(0, MOST_RANGES).map(([from, to]) => `${whole(from)}° to ${whole(to)}°`);
-  const more = wide.length > MOST_RANGES ? ` and ${wide.length - MOST_RANGES} more` : '';
-  return `Unseen in the sun’s band: ${ranges.join(', ')}${more}.`;
 }
 
 /** Where the phone points now; moved by hand, since it moves with every frame. */

@@ -1,4 +1,4 @@
-import { DEGREES, fullCircle, RADIANS } from '../../../../core/angles/angles.ts';
+import { DEGREES, RADIANS } from '../../../../core/angles/angles.ts';
 import { planeFacing, planeHorizon } from '../../../../core/horizon/sky-view.ts';
 
 /** The sun's declination goes this far from the equator, degrees. */
@@ -36,24 +36,4 @@ export function sunBand(latitude: number, surfaceTilt: number, surfaceAzimuth: n
     }
     return { azimuth, low: up[0] ?? 0, high: up.at(-1) ?? 0 };
   }).filter(({ low, high }) => high > low);
-}
-
-/** What of the ranges nobody looked at lies in the band: from, to; `to` may run past 360. */
-export function unseenInBand(
-  band: readonly BandColumn[],
-  unseen: readonly (readonly [number, number])[],
-): [number, number][] {
-  const found: [number, number][] = [];
-  for (const [from, to] of unseen)
-    for (let start = from; start < to - 1e-9;) {
-      const column = Math.floor(fullCircle(start) / COLUMN + 1e-9) * COLUMN;
-      const end = Math.min(to, start + COLUMN - (fullCircle(start) - column));
-      const last = found.at(-1);
-      if (band.some(({ azimuth }) => azimuth === column % 360)) {
-        if (last && Math.abs(last[1] - start) < 1e-6) last[1] = end;
-        else found.push([start, end]);
-      }
-      start = end;
-    }
-  return found;
 }
