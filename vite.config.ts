@@ -1,3 +1,4 @@
+import { availableParallelism } from 'node:os';
 import { defineConfig } from 'vitest/config';
 import type { Plugin } from 'vite';
 import { VitePWA } from 'vite-plugin-pwa';
@@ -19,6 +20,10 @@ const contentPolicy: Plugin = {
     },
   ],
 };
+
+// All cores, and at least two files at a time: browser tests wait more than they compute. Modules are loaded once for
+// all files of a worker, since loading them anew costs more than the tests; so no test may leave a module changed.
+const sharedWorkers = { isolate: false, maxWorkers: Math.max(2, availableParallelism()) };
 
 export default defineConfig({
   oxc: jsx,
@@ -65,6 +70,9 @@ export default defineConfig({
           exclude: ['tests/browser/**'],
           environment: 'node',
           testTimeout: 60_000,
+          hookTimeout: 60_000,
+          ...sharedWorkers,
+          sequence: { groupOrder: 0 },
         },
       },
       {
@@ -75,7 +83,8 @@ export default defineConfig({
           environment: 'node',
           testTimeout: 120_000,
           hookTimeout: 180_000,
-          fileParallelism: false,
+          ...sharedWorkers,
+          sequence: { groupOrder: 1 },
         },
       },
     ],
