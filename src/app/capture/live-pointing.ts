@@ -1,5 +1,6 @@
 import { fullCircle, RADIANS } from '../../core/angles/angles.ts';
-import { attitude, axisVector, directionOf } from '../../core/pointing/attitude.ts';
+import { directionOf } from '../../core/angles/vectors.ts';
+import { attitude, axisVector } from '../../core/pointing/attitude.ts';
 import { PLANNING } from '../../core/pointing/planning-values.ts';
 import { offsetAt } from '../../core/pointing/run-ties.ts';
 import type { PointedRun } from '../../core/pointing/pointed-survey.ts';
@@ -11,6 +12,8 @@ export interface LivePointing {
   timeMs: number;
   /** From true north; null where nothing ties the run to north. */
   azimuth: number | null;
+  /** From the zero of its run. */
+  azimuthInRun: number;
   elevation: number;
   /** Standard deviations; null where there is no azimuth. */
   azimuthDeviation: number | null;
@@ -33,6 +36,7 @@ export function livePointing(sample: SensorSample, axis: SightingAxis, run: Poin
   const across = PLANNING.pointing / Math.max(Math.cos(elevation * RADIANS), 1e-3);
   return {
     timeMs: sample.timeMs,
+    azimuthInRun: azimuth,
     azimuth: heading && fullCircle(azimuth + offsetAt(heading, sample.timeMs)),
     elevation,
     azimuthDeviation: heading

@@ -1,20 +1,32 @@
 import { signal } from '@preact/signals-core';
 import { fullCircle, turnBetween } from '../../core/angles/angles.ts';
+import { offsetAt } from '../../core/pointing/run-ties.ts';
+import type { OpenLook, Run } from '../../core/survey/survey.ts';
 import type { CaptureSession } from './capture-session.ts';
-import type { LookedRange } from './heading-takes.ts';
 import { rawReading } from './raw-reading.ts';
-import { withStation } from './station-edits.ts';
+import type { SensorSample } from './sensor-interfaces.ts';
+import { nextOrder, withStation } from './station-edits.ts';
 import { SweepStream } from './sweep-stream.ts';
 
-/** Looked from here to there, and it is open. The stream of the look is kept as evidence. */
+/** A look at work. */
+interface Looking {
+  /** Where it began, in the frame of its run, and how far the phone was turned since; degrees. */
+  from: number;
+  turned: number;
+  last: number;
+  stream: SweepStream;
+  run: Run | null;
+  readings: string[];
+}
+
+/**
+ * Looked from here to there, and it is open. The look is kept as read in its run, with its stream, so that it turns with
+ * whatever the run's heading turns out to be; a phone without a compass may look before its check.
+ */
 export class OpenTake {
-  /** Azimuth where the look began; null while none is at work. */
-  readonly from = signal<number | null>(null);
-  /** Ranges of this sitting, which a later heading check of the same run moves. */
-  readonly looked: LookedRange[] = [];
-  private turned = 0;
-  private last = 0;
-  private run = '';
+  /** Whether a look is at work. */
+  readonly looking = signal(false);
+  private look: Looking | null = null;
 
   constructor(
     private readonly session: CaptureSession,
@@ -23,69 +35,94 @@ export class OpenTake {
 
   begin(): void {
     const { session } = this;
-    const azimuth = session.live.value?.azimuth ?? null;
-    if (session.phase.value !== 'idle') return;
-    if (azimuth === null) {
-      session.refuse('no-north');
-      return;
-    }
-    this.from.value = this.last = azimuth;
-    this.turned = 0;
+    const live = session.live.value;
+    if (session.phase.value !== 'idle' || !live) return;
+    const from = live.azimuthInRun;
     const stream = new SweepStream('', session.axis.value);
+    const look: Looking = { from, turned: 0, last: from, stream, run: null, readings: [] };
+    this.look = look;
+    this.looking.value = true;
     session.onBreak = () => this.cancel();
     session.watchSamples((sample, run) => {
-      this.run = run.id;
-      const now = session.live.value?.azimuth ?? this.last;
-      this.turned += turnBetween(this.last, now);
-      this.last = now;
+      look.run = run;
+      const now = session.live.value?.azimuthInRun ?? look.last;
+      look.turned += turnBetween(look.last, now);
+      look.last = now;
       const chunk = stream.push(sample);
-      if (!chunk) return;
-      const reading = rawReading(session.services.newId(), run.id, stream.axis, chunk);
-      void session.record.addReading(run, reading).then((stored) => stored && session.countStored());
+      if (chunk) void this.storeChunk(look, run, chunk);
     });
     session.tell({ what: 'open-start' });
   }
 
   async end(): Promise<void> {
-    const from = this.from.value;
-    if (from === null) return;
-    const { turned, run } = this;
+    const { look, session } = this;
+    if (!look?.run) return;
     this.cancel();
-    await this.session.record.settled();
-    await this.store(rangeOf(from, turned), run);
+    const rest = look.stream.cut();
+    if (rest) await this.storeChunk(look, look.run, rest);
+    await session.record.settled();
+    await this.store({
+      run: look.run.id,
+      azimuths: rangeOf(look.from, look.turned),
+      lookedAt: new Date(Math.round(look.stream.samples[0].timeMs)).toISOString(),
+      readings: look.readings,
+    });
   }
 
-  /** One tap for a whole gap between what was looked at. */
-  gap(from: number, to: number): Promise<void> {
-    return this.store(rangeOf(from, fullCircle(to - from)), this.session.runNow?.id ?? '');
+  /** One tap for a whole gap between what was looked at, true azimuths. The phone points into it. */
+  async gap(from: number, to: number): Promise<void> {
+    const { session } = this;
+    const heading = session.runNow?.heading;
+    if (!heading) {
+      session.refuse('no-north');
+      return;
+    }
+    const reading = await session.hold();
+    if (!reading) return;
+    const offset = offsetAt(heading, Date.parse(reading.takenAt));
+    await this.store({
+      run: reading.run,
+      azimuths: rangeOf(from - offset, to - from),
+      lookedAt: reading.takenAt,
+      readings: [reading.id],
+    });
   }
 
   cancel(): void {
-    this.from.value = null;
+    this.look = null;
+    this.looking.value = false;
     this.session.onBreak = null;
     this.session.watchSamples(null);
   }
 
-  private async store(range: [number, number], run: string): Promise<void> {
-    const stored = await this.session.act({
+  private async storeChunk(look: Looking, run: Run, chunk: readonly SensorSample[]): Promise<void> {
+    const { session } = this;
+    const reading = rawReading(session.services.newId(), run.id, look.stream.axis, chunk);
+    if (!(await session.record.addReading(run, reading))) return;
+    look.readings.push(reading.id);
+    session.countStored();
+  }
+
+  private async store(facts: Omit<OpenLook, 'id' | 'order'>): Promise<void> {
+    const id = this.session.services.newId();
+    await this.session.act({
       edit: (survey) =>
         withStation(survey, this.stationId, (station) => ({
           ...station,
-          observedOpen: [...(station.observedOpen ?? []), range],
+          openLooks: [...(station.openLooks ?? []), { id, order: nextOrder(station.openLooks), ...facts }],
         })),
       code: 'entry-added',
       title: 'Open horizon',
       news: { what: 'open' },
     });
-    if (stored) this.looked.push({ run, range });
   }
 }
 
-/** A range clockwise, whichever way it was turned, to a tenth of a degree. */
+/** A range clockwise, whichever way it was turned, to a hundredth of a degree. */
 export function rangeOf(from: number, turned: number): [number, number] {
   if (Math.abs(turned) >= 360) return [0, 360];
   const [start, end] = turned >= 0 ? [from, from + turned] : [from + turned, from];
-  return [tenths(start), tenths(end)];
+  return [hundredths(start), hundredths(end)];
 }
 
-const tenths = (azimuth: number) => fullCircle(Math.round(fullCircle(azimuth) * 10) / 10);
+const hundredths = (azimuth: number) => fullCircle(Math.round(fullCircle(azimuth) * 100) / 100);

@@ -1,11 +1,12 @@
 import { turnBetween } from '../angles/angles.ts';
+import { openRange } from '../pointing/open-looks.ts';
 import { overZenith } from '../pointing/over-zenith.ts';
 import { pointSurvey } from '../pointing/point-survey.ts';
 import type { PointedSurvey } from '../pointing/pointed-survey.ts';
 import { monthlyTransmittance, traceEdge } from '../survey/obstruction-kinds.ts';
 import { ordered } from '../survey/order.ts';
 import type { SightingDirection } from '../survey/sighting-direction.ts';
-import type { Sighting, Station, Survey, Trace } from '../survey/survey.ts';
+import type { OpenLook, Sighting, Station, Survey, Trace } from '../survey/survey.ts';
 import type { HorizonProfile } from './horizon-profile.ts';
 import { horizonProfile } from './horizon-profile.ts';
 import type { SettledTrace, TracedObstruction } from './traced-obstruction.ts';
@@ -16,14 +17,22 @@ export interface StationHorizon {
   observed: [number, number][];
 }
 
-/** Where a sighting points; null where that is not known. */
-export type DirectionOf = (sighting: Sighting) => SightingDirection | null;
+/** Where things of a survey point. */
+export interface DirectionOf {
+  /** Where a sighting points; null where that is not known. */
+  (sighting: Sighting): SightingDirection | null;
+  /** The true azimuths of an open look; null where they are not known. */
+  openRange(look: OpenLook): [number, number] | null;
+}
 
-/** The true directions of a survey's sightings. */
-export const pointedDirections =
-  ({ sightings }: Pick<PointedSurvey, 'sightings'>): DirectionOf =>
-  ({ id }) =>
-    sightings.get(id)?.direction ?? null;
+/** The true directions of a survey's sightings and open looks. */
+export function pointedDirections({
+  sightings,
+  runs,
+}: Pick<PointedSurvey, 'sightings' | 'runs'>): DirectionOf {
+  const directionOf = ({ id }: Sighting) => sightings.get(id)?.direction ?? null;
+  return Object.assign(directionOf, { openRange: (look: OpenLook) => openRange(look, runs) });
+}
 
 /**
  * The horizon of a station of a survey that the parser has passed. Sightings without a direction (their warnings are
@@ -37,7 +46,12 @@ export function stationHorizon(
 ): StationHorizon {
   const obstructions = tracedObstructions(survey, station, directionOf);
   const spans = obstructions.flatMap(({ traces }) => traces.map(traceSpan));
-  return { profile: horizonProfile(obstructions), observed: [...spans, ...(station.observedOpen ?? [])] };
+  const looks = (station.openLooks ?? []).flatMap((look) => {
+    const range = directionOf.openRange(look);
+    return range ? [range] : [];
+  });
+  const observed = [...spans, ...(station.observedOpen ?? []), ...looks];
+  return { profile: horizonProfile(obstructions), observed };
 }
 
 /** What a station traced, by obstruction, in the order of the survey's obstructions. */

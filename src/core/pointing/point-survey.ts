@@ -3,6 +3,7 @@ import { RADIANS, fullCircle } from '../angles/angles.ts';
 import type { Problem } from '../survey/problem.ts';
 import { sightingDirection } from '../survey/sighting-direction.ts';
 import type { Sighting, Survey } from '../survey/survey.ts';
+import { openLookWarnings } from './open-looks.ts';
 import { pointedTraceWarnings } from './pointed-traces.ts';
 import { pointPlanes } from './point-planes.ts';
 import { offsetAt } from './run-ties.ts';
@@ -24,9 +25,14 @@ export function pointSurvey(survey: Survey): PointedSurvey {
     sightings.set(pointed.id, pointed);
     if (pointed.undirected) warnings.push({ path: pointed.path, message: pointed.undirected.message });
   }
-  warnings.push(...uncheckedRuns(survey, solved, sightings), ...pointedTraceWarnings(survey, sightings));
+  const runs = [...solved.runs.values()];
+  warnings.push(
+    ...uncheckedRuns(survey, solved, sightings),
+    ...pointedTraceWarnings(survey, sightings),
+    ...openLookWarnings(survey, runs),
+  );
   return {
-    runs: [...solved.runs.values()],
+    runs,
     sightings,
     planes,
     typed: { heading: PLANNING.typedHeading, index: PLANNING.typedIndex },

@@ -46,6 +46,7 @@ export const surveyLayout: ObjectLayout = {
       required: true,
       row: {
         lists: {
+          openLooks: { sortedBy: 'order', row: {} },
           headingChecks: { sortedBy: 'order', row: {} },
           markSightings: { sortedBy: 'order', row: {} },
           indexChecks: { sortedBy: 'order', row: {} },

@@ -31,6 +31,8 @@ export const LIMITS = {
   photos: 5_000,
   /** Two-face checks in all stations together. */
   indexChecks: 2_000,
+  /** In all stations together. */
+  openLooks: 2_000,
   /** Placings and sightings along edges of all planes together. */
   placings: 20_000,
   /** Characters of an id, a name, and a longer text. */

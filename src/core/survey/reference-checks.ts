@@ -22,14 +22,17 @@ export function addReferenceProblems(document: JsonRecord, problems: ProblemList
   ids(stations, 'station');
   ids(sightings, 'sighting');
   ids(rowsOf(document, 'facts'), 'fact');
-  ids(rowsOf(document, 'photos'), 'photo');
+  const photos = rowsOf(document, 'photos');
+  ids(photos, 'photo');
   const refer = (rows: Row[], key: string, known: Set<unknown> | null, what: string) => {
     for (const { value, path } of rows) addDangling(value[key], pathBelow(path, key), known, what, problems);
   };
   refer(rowsOf(document, 'readings'), 'run', runs, 'run');
   refer(traces, 'obstruction', obstructions, 'obstruction');
-  refer(sightings, 'reading', readings, 'reading');
-  for (const { value, path } of sightings)
+  refer([...sightings, ...photos], 'reading', readings, 'reading');
+  const looks = stations.flatMap(({ value, path }) => rowsOf(value, 'openLooks', path));
+  refer(looks, 'run', runs, 'run');
+  for (const { value, path } of [...sightings, ...looks])
     for (const named of textsOf(value, 'readings', path))
       addDangling(named.text, named.path, readings, 'reading', problems);
   for (const { value, path } of rowsOf(document, 'planes')) {
@@ -41,6 +44,7 @@ export function addReferenceProblems(document: JsonRecord, problems: ProblemList
   }
   for (const { value, path } of stations) {
     ids(rowsOf(value, 'traces', path), 'trace of this station');
+    ids(rowsOf(value, 'openLooks', path), 'open look of this station');
     const checks = rowsOf(value, 'headingChecks', path);
     ids(checks, 'heading check of this station');
     refer(checks, 'reading', readings, 'reading');

@@ -67,6 +67,7 @@ function addTooMany(document: unknown, problems: ProblemList): void {
     headingChecks: sum(stations.map(({ value }) => length(value.headingChecks))),
     traces: sum(stations.map(({ value }) => length(value.traces))),
     indexChecks: sum(stations.map(({ value }) => length(value.indexChecks))),
+    openLooks: sum(stations.map(({ value }) => length(value.openLooks))),
     placings: sum(
       rowsOf(document, 'planes').map(
         ({ value }) => length(value.tiltPlacings) + length(value.azimuthSightings),
@@ -88,6 +89,7 @@ const WORDS: Partial<Record<string, string>> = {
   corners: 'corners in its plane outlines',
   headingChecks: 'heading checks',
   indexChecks: 'two-face checks',
+  openLooks: 'open looks',
   placings: 'placings and sightings along edges of its planes',
   sightings: 'sightings in its traces',
 };
@@ -95,6 +97,7 @@ const PLACES: Partial<Record<string, string>> = {
   corners: 'planes',
   placings: 'planes',
   indexChecks: 'stations',
+  openLooks: 'stations',
   headingChecks: 'stations',
   traces: 'stations',
   sightings: 'stations',

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { turnBetween } from '../../../src/core/angles/angles.ts';
 import { AppError } from '../../../src/app/app-error.ts';
 import { takeCheck, takeMark } from '../../../src/app/capture/heading-takes.ts';
 import { OpenTake } from '../../../src/app/capture/open-take.ts';
@@ -7,7 +8,9 @@ import { PointTrace } from '../../../src/app/capture/point-trace.ts';
 import { SweepTake } from '../../../src/app/capture/sweep-take.ts';
 import type { TraceChoice } from '../../../src/app/capture/trace-choice.ts';
 import { undoLast } from '../../../src/app/capture/undo-last.ts';
+import { stationHorizon } from '../../../src/core/horizon/station-horizon.ts';
 import { pointSurvey } from '../../../src/core/pointing/point-survey.ts';
+import type { Survey } from '../../../src/core/survey/survey.ts';
 import { cameraAt, laidOn } from '../../sensors/posed-phone.ts';
 import { inventedSitting } from './invented-sitting.ts';
 
@@ -208,14 +211,12 @@ describe('a heading check', () => {
     open.begin();
     sensor.give((at) => cameraAt(60 + 40 * at, 2), 1000);
     await open.end();
-    const [from] = (await stored()).stations[0].observedOpen![0];
-    expect(Math.abs(from - before)).toBeLessThan(1);
-    const taking = takeCheck(
-      session,
-      (await stored()).stations[0],
-      { method: 'known-mark', mark: 'church', bearing: 150 },
-      open.looked,
-    );
+    const looked = (survey: Survey) => stationHorizon(survey, survey.stations[0]).observed[0];
+    const [found] = (await stored()).stations[0].openLooks!;
+    expect(found.azimuths[0]).toBeCloseTo(60, 0);
+    expect(found.readings!.length).toBeGreaterThan(1);
+    expect(Math.abs(looked(await stored())[0] - before)).toBeLessThan(1);
+    const taking = takeCheck(session, 'A', { method: 'known-mark', mark: 'church', bearing: 150 });
     sensor.give(held(140, 5), 700);
     expect(await taking).not.toBeNull();
     const survey = await stored();
@@ -223,15 +224,50 @@ describe('a heading check', () => {
     expect(run.heading).toMatchObject({ source: 'check' });
     expect(run.heading!.offset).toBeCloseTo(10, 0);
     // the look began at 60 in the frame of the phone
-    expect(survey.stations[0].observedOpen![0][0]).toBeCloseTo(70, 0);
+    expect(looked(survey)[0]).toBeCloseTo(70, 0);
+    // the last sample of the movement is a fiftieth short of its end
+    expect(looked(survey)[1]).toBeCloseTo(109.2, 0);
+    expect(survey.stations[0].openLooks).toEqual([found]);
   });
 
-  it('is what a phone without a compass needs before azimuths are called open', async () => {
-    const { session, sensor } = await inventedSitting('relative');
+  it('gives what a phone without a compass found open its north, afterwards', async () => {
+    const { session, sensor, stored } = await inventedSitting('relative');
     sensor.give(held(60, 2), 100);
     expect(session.live.value).toMatchObject({ azimuth: null, azimuthDeviation: null });
-    new OpenTake(session, 'A').begin();
+    const open = new OpenTake(session, 'A');
+    await open.gap(10, 40);
     expect(session.news.value).toMatchObject({ kind: 'refused', why: 'no-north' });
+    open.begin();
+    sensor.give((at) => cameraAt(60 - 40 * at, 2), 1000);
+    await open.end();
+    const before = await stored();
+    expect(stationHorizon(before, before.stations[0]).observed).toEqual([]);
+    expect(pointSurvey(before).warnings.map(({ path }) => path)).toContain('stations[0].openLooks[0]');
+    const taking = takeCheck(session, 'A', { method: 'known-mark', mark: 'church', bearing: 90 });
+    sensor.give(held(20, 5), 700);
+    await taking;
+    const after = await stored();
+    const [[from, to]] = stationHorizon(after, after.stations[0]).observed;
+    // the last sample of the movement is a fiftieth short of its end
+    expect(from).toBeCloseTo(90.8, 0);
+    expect(to).toBeCloseTo(130, 0);
+    expect(pointSurvey(after).warnings).toEqual([]);
+  });
+
+  it('turns what was called open in one tap', async () => {
+    const { session, sensor, stored } = await inventedSitting();
+    sensor.give(held(60, 2), 100);
+    const calling = new OpenTake(session, 'A').gap(350, 375);
+    sensor.give(held(0, 2), 700);
+    await calling;
+    const taking = takeCheck(session, 'A', { method: 'known-mark', mark: 'church', bearing: 30 });
+    sensor.give(held(20, 5), 700);
+    await taking;
+    const survey = await stored();
+    const turned = pointSurvey(survey).runs[0].checks[0].againstCompass!;
+    const [from, to] = stationHorizon(survey, survey.stations[0]).observed[0];
+    expect(turnBetween(350, from)).toBeCloseTo(turned, 0);
+    expect(turnBetween(15, to)).toBeCloseTo(turned, 0);
   });
 });
 

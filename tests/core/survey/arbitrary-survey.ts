@@ -68,6 +68,7 @@ export const arbitrarySurvey: fc.Arbitrary<Survey> = fc
       traces,
       markSightings: fc.option(sightings, { nil: undefined }),
       indexChecks: perhaps({ order, upright: id, turned: id }),
+      openLooks: perhaps({ order, run: id, azimuths: fc.constantFrom([1, 2], [3, 4]) }),
     }),
     later: fc.option(fc.jsonValue({ maxDepth: 2 }), { nil: undefined }),
   })

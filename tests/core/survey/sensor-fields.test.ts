@@ -44,12 +44,30 @@ const sensed: Changes = {
     { id: 'm3', readings: ['q1'] },
   ],
   'stations[0].indexChecks': [{ id: 'i1', upright: 'q1', turned: 'q1' }],
+  'stations[0].observedOpen': [[20, 40]],
+  'stations[0].openLooks': [
+    { id: 'o1', run: 'r1', azimuths: [300, 20], lookedAt: '2026-05-14T09:00:00Z', readings: ['q1'] },
+    { id: 'o2', order: 3, run: 'r1', azimuths: [0, 360], lookedAt: '2026-05-14T09:01:00Z' },
+  ],
+  photos: [
+    {
+      id: 'f1',
+      of: { kind: 'site' },
+      takenAt: '2026-05-14T09:00:00Z',
+      reading: 'q1',
+      width: 4,
+      height: 3,
+      bytes: 9,
+      sha256: 'a'.repeat(64),
+    },
+  ],
 };
 
 test('what a phone with sensors writes is read, nothing of it unknown', () => {
   expect(surveyFromJson(smallSurvey(sensed))).toMatchObject({ ok: true, warnings: [] });
 });
 
+const LOOK = { id: 'o', run: 'r1', azimuths: [10, 20], lookedAt: '2026-05-14T09:00:00Z' };
 const THERE = 'stations[0]';
 const mark = (fields: object): Changes => ({ [`${THERE}.markSightings`]: [{ id: 'm', ...fields }] });
 const check = (fields: object): Changes => ({
@@ -143,6 +161,30 @@ describe('one thing is wrong', () => {
       /missing/,
     ],
     [
+      'look in no run',
+      { [`${THERE}.openLooks`]: [{ ...LOOK, run: 'r9' }] },
+      `${THERE}.openLooks[0].run`,
+      /No run has the id "r9"/,
+    ],
+    [
+      'look by no reading',
+      { [`${THERE}.openLooks`]: [{ ...LOOK, readings: ['q9'] }] },
+      `${THERE}.openLooks[0].readings[0]`,
+      /No reading has the id "q9"/,
+    ],
+    [
+      'look from nowhere',
+      { [`${THERE}.openLooks`]: [{ ...LOOK, azimuths: [10] }] },
+      `${THERE}.openLooks[0].azimuths[1]`,
+      /from 0 to 360/,
+    ],
+    [
+      'photo aimed by no reading',
+      { photos: [{ ...(sensed.photos as object[])[0], reading: 'q9' }] },
+      'photos[0].reading',
+      /No reading has the id "q9"/,
+    ],
+    [
       'placing of no reading',
       { 'planes[0].tiltPlacings': [{ id: 'p', reading: 'q9' }] },
       'planes[0].tiltPlacings[0].reading',
@@ -195,6 +237,7 @@ describe('as fields', () => {
     const after = survey();
     after.stations[0].markSightings![0].mark = 'spire';
     after.stations[0].indexChecks![0].order = 4;
+    after.stations[0].openLooks![1].azimuths = [10, 20];
     after.planes[0].tiltPlacings![0].held = 'edge';
     after.planes[0].azimuthSightings![0].along = 'fall';
     expect(
@@ -206,6 +249,7 @@ describe('as fields', () => {
       `planes/${plane.id}/tiltPlacings/p1/held`,
       `stations/${station.id}/indexChecks/i1/order`,
       `stations/${station.id}/markSightings/m1/mark`,
+      `stations/${station.id}/openLooks/o2/azimuths`,
     ]);
   });
 });

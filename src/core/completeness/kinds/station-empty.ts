@@ -4,8 +4,8 @@ import { effectThrough } from '../interval-effect.ts';
 import type { OpenPointKind } from '../open-point.ts';
 
 /** Whether nothing at all was seen from a station. */
-export const isEmpty = ({ traces, observedOpen = [] }: Station): boolean =>
-  traces.length === 0 && observedOpen.length === 0;
+export const isEmpty = ({ traces, observedOpen = [], openLooks = [] }: Station): boolean =>
+  traces.length === 0 && observedOpen.length === 0 && openLooks.length === 0;
 
 export const stationEmpty: OpenPointKind = {
   id: 'station-empty',

@@ -9,14 +9,16 @@ const counted = (count: number, one: string, many = `${one}s`): string =>
 export function hasParts({
   traces,
   observedOpen = [],
+  openLooks = [],
   headingChecks = [],
   markSightings = [],
 }: Station): string[] {
   const marks = markSightings.filter(({ mark }) => mark !== undefined).length;
+  const open = observedOpen.length + openLooks.length;
   const loose = markSightings.length - marks;
   return [
     traces.length > 0 && counted(traces.length, 'trace'),
-    observedOpen.length > 0 && counted(observedOpen.length, 'open range'),
+    open > 0 && counted(open, 'open range'),
     headingChecks.length > 0 && counted(headingChecks.length, 'heading check'),
     marks > 0 && counted(marks, 'mark'),
     loose > 0 && `${counted(loose, 'sighting')} in no trace yet`,

@@ -1,7 +1,6 @@
 import { useEffect, useState } from 'preact/hooks';
 import type { CheckFacts } from '../../../../app/capture/heading-takes.ts';
 import { takeCheck } from '../../../../app/capture/heading-takes.ts';
-import { stationOf } from '../../../../app/capture/station-edits.ts';
 import { headingMethod } from '../../../../core/pointing/heading-methods.ts';
 import type { HeadingMethodId } from '../../../../core/survey/survey.ts';
 import { faultOf, typedNumber, valueOf } from '../../../typed.ts';
@@ -72,8 +71,7 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
         valueOf(long) !== undefined && { shadowHeight: valueOf(tall), shadowLength: valueOf(long) }),
       ...(frame === 'grid' && { gridZone: utmZone(session.record.survey.site) }),
     };
-    const station = stationOf(session.record.survey, stationId);
-    const id = await takeCheck(session, station, facts, sitting.open.looked);
+    const id = await takeCheck(session, stationId, facts);
     if (id) setLast(id);
   };
   return (

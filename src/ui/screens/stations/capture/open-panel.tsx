@@ -18,7 +18,7 @@ const whole = (azimuth: number) => Math.round(fullCircle(azimuth)) % 360;
 export function OpenPanel({ sitting, gaps }: { sitting: Sitting; gaps: readonly Gap[] }) {
   const services = useApp();
   const { session, open } = sitting;
-  const looking = open.from.value !== null;
+  const looking = open.looking.value;
   const gap = useComputed(() => {
     const azimuth = session.live.value?.azimuth ?? null;
     return azimuth === null ? null : (gaps.find((one) => inGap(azimuth, one)) ?? null);
@@ -30,7 +30,7 @@ export function OpenPanel({ sitting, gaps }: { sitting: Sitting; gaps: readonly 
         <button
           type="button"
           class="what"
-          disabled={gap === null || isWide || looking}
+          disabled={gap === null || isWide || session.phase.value !== 'idle'}
           onClick={() => gap && void open.gap(gap[0], gap[1])}
         >
           {gap && !isWide
