@@ -13,7 +13,7 @@ const mayImport = {
 };
 const mayUse = {
   core: ['suncalc', 'geomagnetism', 'valibot'],
-  report: [],
+  report: ['jspdf'],
   app: ['@preact/signals-core', '@preact/signals', '@photostructure/tz-lookup', 'fflate'],
   sensors: [],
   storage: ['idb'],

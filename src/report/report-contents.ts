@@ -34,6 +34,7 @@ export function reportContents(report: ReportInput): ReportContents {
       page: words['frame.page'],
       letter: words['frame.letter'],
       evidence: words['frame.evidence'],
+      boxes: words['frame.boxes'],
     },
   };
 }

@@ -22,6 +22,8 @@ export interface ReportContents {
     page: (page: number, pages: number) => string;
     letter: string;
     evidence: string;
+    /** For a form whose typeface lacks letters. */
+    boxes: string;
   };
 }
 

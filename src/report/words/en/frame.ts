@@ -8,6 +8,8 @@ export const EN_FRAME = {
   'frame.letter': 'The letter',
   'frame.evidence': 'The evidence behind it',
   'frame.foot': (fingerprint: string) => `Fingerprint of the survey ${fingerprint}`,
+  'frame.boxes':
+    'A box in this file stands for a letter that its typeface lacks. The web page of this report shows the letter itself.',
   'frame.range': (low: string, high: string) => `${low} to ${high}`,
   'frame.year': 'Year',
 } as const;

@@ -1,0 +1,78 @@
+import type { jsPDF } from 'jspdf';
+import type { ReportContents } from '../../contents/report-contents.ts';
+import { outlineEntries, documentFacts } from './document-facts.ts';
+import { paginate } from './paginate.ts';
+import type { PdfFonts } from './pdf-fonts.ts';
+import { FACES } from './pdf-fonts.ts';
+import type { PageOf } from './contents-list.ts';
+import { paintFoot } from './page-foot.ts';
+import { reportSlugs } from './section-slugs.ts';
+import type { Setting } from './setting.ts';
+import { settingFor } from './setting.ts';
+import { Sheet } from './sheet.ts';
+import { space } from './slug.ts';
+import { STYLES } from './text-style.ts';
+import { textSlugs } from './text-slugs.ts';
+import type { DrawText } from './typesetter.ts';
+import { Typesetter } from './typesetter.ts';
+
+export interface PdfOptions {
+  /** Day the report is made, YYYY-MM-DD: the file's date, so that the same report is the same file. */
+  madeOn: string;
+  /** Draws what the typeface has no letters for; without it each such letter is a box, and the report says so. */
+  drawText?: DrawText;
+}
+
+/**
+ * A report as a PDF file on the paper chosen, with its typeface inside: pages with a running foot, bookmarks, a list of
+ * contents with links. The same contents make the same bytes.
+ * @throws RangeError where a font is no TrueType file.
+ */
+export async function pdfDocument(
+  contents: ReportContents,
+  fonts: PdfFonts,
+  options: PdfOptions,
+): Promise<Uint8Array> {
+  const { jsPDF: Document } = await import('jspdf');
+  const setter = new Typesetter(fonts, options.drawText);
+  const setting = settingFor(contents.paper, contents.firm.colour, setter);
+  const { width, height } = setting.paper;
+  const doc = new Document({
+    unit: 'pt',
+    format: [width, height],
+    compress: true,
+    precision: 3,
+    putOnlyUsedFonts: true,
+  });
+  for (const face of FACES) addFont(doc, face, fonts[face]);
+  documentFacts(doc, contents, options.madeOn);
+  const pages = layPages(contents, setting);
+  const sheet = new Sheet(doc, setter, height);
+  pages.placed.forEach((page, place) => {
+    if (place > 0) doc.addPage([width, height]);
+    for (const { slug, y } of page) slug.paint(sheet, setting.top + y);
+    paintFoot(sheet, contents, place + 1, pages.placed.length, setting);
+  });
+  outlineEntries(doc, contents, pages.pageOf);
+  return new Uint8Array(doc.output('arraybuffer'));
+}
+
+function layPages(contents: ReportContents, setting: Setting) {
+  const numbers = new Map<string, number>();
+  const pageOf: PageOf = (section) => numbers.get(section) ?? 1;
+  const slugs = reportSlugs(contents, pageOf, setting);
+  if (setting.setter.boxed)
+    slugs.push(space(10), ...textSlugs(contents.frame.boxes, STYLES.small, setting, { gap: 14 }));
+  const placed = paginate(slugs, setting.height);
+  placed.forEach((page, place) => {
+    for (const { slug } of page) if (slug.section !== undefined) numbers.set(slug.section, place + 1);
+  });
+  return { placed, pageOf };
+}
+
+function addFont(doc: jsPDF, face: string, bytes: Uint8Array): void {
+  let letters = '';
+  for (let i = 0; i < bytes.length; i += 8192) letters += String.fromCharCode(...bytes.subarray(i, i + 8192));
+  doc.addFileToVFS(`${face}.ttf`, letters);
+  doc.addFont(`${face}.ttf`, face, 'normal');
+}
