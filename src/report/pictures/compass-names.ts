@@ -1,11 +1,3 @@
-const NAMES = ['N', 'NE', 'E', 'SE', 'S', 'SW', 'W', 'NW'] as const;
-
-/** The eight compass points with their azimuths. */
-export const COMPASS_POINTS: readonly { name: string; azimuth: number }[] = NAMES.map((name, i) => ({
-  name,
-  azimuth: i * 45,
-}));
-
 const WORDS = [
   'north',
   'north-east',

@@ -1,5 +1,5 @@
 import type { Mark } from '../marks.ts';
-import { COMPASS_POINTS } from './compass-names.ts';
+import type { PictureWords } from './picture-words.ts';
 import type { SkyFrame } from './sky-frame.ts';
 import { xOf, yOf } from './sky-frame.ts';
 
@@ -21,7 +21,7 @@ export function elevationRules(frame: SkyFrame): Mark[] {
 const elevations = ({ top }: SkyFrame) => Array.from({ length: Math.floor(top / 10) + 1 }, (_, i) => i * 10);
 
 /** The horizon, ticks, degrees and compass names around the drawing. */
-export function horizonAxes(frame: SkyFrame, textSize: number): Mark[] {
+export function horizonAxes(frame: SkyFrame, textSize: number, words: PictureWords): Mark[] {
   const { left, right, above, below } = frame;
   const marks: Mark[] = [
     { kind: 'path', lines: [[left, above, left, below, right, below]], pen: { tone: 'ink', width: 1.6 } },
@@ -44,7 +44,8 @@ export function horizonAxes(frame: SkyFrame, textSize: number): Mark[] {
   }
   marks.push({ kind: 'path', lines: ticks, pen: { tone: 'ink', width: 1 } });
   const wide = hasDegrees(frame);
-  for (const { name, azimuth } of COMPASS_POINTS) {
+  for (const [point, name] of words.compass.entries()) {
+    const azimuth = point * 45;
     const x = xOf(frame, azimuth);
     if (x < left || x > right) continue;
     const [y, half] = [below + textSize + 7, textSize];

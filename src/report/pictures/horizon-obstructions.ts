@@ -4,6 +4,7 @@ import { textWidth } from '../marks.ts';
 import { hatchFor } from './hatches.ts';
 import type { Box, LabelPlaces } from './label-places.ts';
 import { boxAround } from './label-places.ts';
+import type { PictureWords } from './picture-words.ts';
 import type { SilhouettePart } from './silhouettes.ts';
 import { silhouette, turnsFrom } from './silhouettes.ts';
 import type { SkyFrame } from './sky-frame.ts';
@@ -150,10 +151,12 @@ export function obstructionNames(
   shapes: readonly ObstructionShape[],
   places: LabelPlaces,
   size: number,
+  words: PictureWords,
 ): Mark[] {
   return shapes.flatMap(({ name, parts, before }): Mark[] => {
     const widest = (frame.right - frame.left) * WIDEST_NAME;
-    const lines = twoLines(before ? `${name}, ${parts.length > 0 ? 'lower' : 'gone'}` : name, size, widest);
+    const imagined = parts.length > 0 ? words.lower(name) : words.gone(name);
+    const lines = twoLines(before ? imagined : name, size, widest);
     const width = Math.max(...lines.map((line) => textWidth(line, size, true)));
     const place = places.take(nameBoxes(frame, before ?? parts, width, size, lines.length));
     if (!place) return [];

@@ -3,6 +3,7 @@ import { textWidth } from '../marks.ts';
 import { contourLines } from './contours.ts';
 import type { LabelPlaces } from './label-places.ts';
 import { boxAround } from './label-places.ts';
+import type { PictureWords } from './picture-words.ts';
 import type { SkyFrame } from './sky-frame.ts';
 import { linesOf } from './sky-frame.ts';
 import type { SmoothDensity } from './smooth-density.ts';
@@ -59,9 +60,10 @@ export function hourLabels(
   places: LabelPlaces,
   size: number,
   hidden: Hidden,
+  words: PictureWords,
 ): Mark[] {
   return hours.flatMap(({ hour, path }): Mark[] => {
-    const text = `${hour}`;
+    const text = words.hour(hour);
     const width = textWidth(text, size) + 2;
     const spots = onSheet(frame, path)
       .flatMap(spotsOf)
@@ -91,6 +93,7 @@ export function contourMarks(
   places: LabelPlaces,
   size: number,
   hidden: Hidden,
+  words: PictureWords,
 ): { lines: Mark[]; numbers: Mark[] } {
   const lines: Mark[] = [];
   const numbers: Mark[] = [];
@@ -105,7 +108,7 @@ export function contourMarks(
     const tried = [0.25, 0.75, 0.15, 0.85, 0.4, 0.6, 0.05, 0.5].flatMap(
       (share) => spots[Math.floor(share * (spots.length - 1))] ?? [],
     );
-    const text = `${level}`;
+    const text = words.number(level);
     const width = textWidth(text, size, true);
     const place = places.take(tried.map(({ x, y }) => boxAround(x, y + size * 0.35, width, size)));
     if (place)

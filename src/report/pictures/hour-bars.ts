@@ -1,5 +1,6 @@
 import type { Line, Mark, Picture } from '../marks.ts';
-import { MONTH_NAMES } from './month-columns.ts';
+import type { PictureWords } from './picture-words.ts';
+import { ENGLISH } from './picture-words.ts';
 
 export interface HourBarsInput {
   /** kWh/m2 with nothing in the way, [month][hour]. */
@@ -21,7 +22,7 @@ export function hoursWithLight(access: HourBarsInput['access']): [first: number,
  * A ruled line a month and a bar an hour: the outline is as high as the light of the hour with nothing in the way, the ink in
  * it as high as what arrives.
  */
-export function hourBars({ unshaded, access, width }: HourBarsInput): Picture {
+export function hourBars({ unshaded, access, width }: HourBarsInput, words: PictureWords = ENGLISH): Picture {
   const size = 11;
   const [left, right, above, row] = [30, width - 9, size + 8, 24];
   const height = above + 12 * row + 4;
@@ -45,7 +46,7 @@ export function hourBars({ unshaded, access, width }: HourBarsInput): Picture {
       filled.push(bar(month, hour, whole * share));
     }),
   );
-  const rules = MONTH_NAMES.map((_, month): Line => [
+  const rules = words.months.map((_, month): Line => [
     left,
     above + (month + 1) * row,
     right,
@@ -55,11 +56,11 @@ export function hourBars({ unshaded, access, width }: HourBarsInput): Picture {
     { kind: 'path', lines: rules, pen: { tone: 'rule', width: 0.8 } },
     { kind: 'path', lines: filled, closed: true, fill: { tone: 'ink' } },
     { kind: 'path', lines: outlines, closed: true, pen: { tone: 'ink', width: 0.7 } },
-    ...MONTH_NAMES.map((name, month): Mark => ({
+    ...words.months.map((text, month): Mark => ({
       kind: 'text',
       x: left - 5,
       y: above + (month + 1) * row - 3,
-      text: name.slice(0, 3),
+      text,
       size,
       anchor: 'end',
     })),
@@ -68,7 +69,7 @@ export function hourBars({ unshaded, access, width }: HourBarsInput): Picture {
   for (let hour = first; hour <= last + 1; hour++)
     if (hour % every === 0) {
       const x = left + pitch * (hour - first);
-      marks.push({ kind: 'text', x, y: size, text: `${hour}`, size, anchor: 'middle' });
+      marks.push({ kind: 'text', x, y: size, text: words.hour(hour), size, anchor: 'middle' });
       marks.push({ kind: 'path', lines: [[x, size + 3, x, above]], pen: { tone: 'ink', width: 0.8 } });
     }
   return { width, height, marks };

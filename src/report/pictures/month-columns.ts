@@ -1,21 +1,8 @@
 import type { Line, Mark, Picture } from '../marks.ts';
 import { hatchFor } from './hatches.ts';
+import type { PictureWords } from './picture-words.ts';
+import { ENGLISH } from './picture-words.ts';
 import { roundStep } from './round-step.ts';
-
-export const MONTH_NAMES = [
-  'January',
-  'February',
-  'March',
-  'April',
-  'May',
-  'June',
-  'July',
-  'August',
-  'September',
-  'October',
-  'November',
-  'December',
-] as const;
 
 export interface MonthColumnsInput {
   /** kWh/m2, twelve each. */
@@ -27,10 +14,13 @@ export interface MonthColumnsInput {
 }
 
 /** A column a month: outline without obstructions, ink with them, hatched what an imagined change gives back. */
-export function monthColumns({ unshaded, measured, imagined, width, height }: MonthColumnsInput): Picture {
+export function monthColumns(
+  { unshaded, measured, imagined, width, height }: MonthColumnsInput,
+  words: PictureWords = ENGLISH,
+): Picture {
   const size = 11;
   const [left, right, above, below] = [30, width - 2, 10, height - size - 8];
-  const step = roundStep(Math.max(...unshaded, 1) / 4);
+  const step = roundStep(Math.max(...unshaded, 0.01) / 4);
   const top = Math.max(step, Math.ceil(Math.max(...unshaded) / step) * step);
   const yOf = (light: number) => below - (light / top) * (below - above);
   const pitch = (right - left) / 12;
@@ -43,7 +33,7 @@ export function monthColumns({ unshaded, measured, imagined, width, height }: Mo
     const y = yOf(light);
     if (light > 0)
       marks.push({ kind: 'path', lines: [[left, y, right, y]], pen: { tone: 'rule', width: 0.6 } });
-    marks.push({ kind: 'text', x: left - 5, y: y + 4, text: `${light}`, size, anchor: 'end' });
+    marks.push({ kind: 'text', x: left - 5, y: y + 4, text: words.number(light), size, anchor: 'end' });
   }
   const columns = (of: (month: number) => Line | null) => unshaded.flatMap((_, month) => [of(month) ?? []]);
   marks.push(
@@ -57,12 +47,12 @@ export function monthColumns({ unshaded, measured, imagined, width, height }: Mo
     },
     { kind: 'path', lines: [[left, below, right, below]], pen: { tone: 'ink', width: 1.6 } },
   );
-  MONTH_NAMES.forEach((name, month) =>
+  (pitch > 30 ? words.months : words.initials).forEach((text, month) =>
     marks.push({
       kind: 'text',
       x: left + pitch * (month + 0.5),
       y: below + size + 4,
-      text: pitch > 30 ? name.slice(0, 3) : name[0],
+      text,
       size,
       anchor: 'middle',
     }),

@@ -1,10 +1,16 @@
 import type { MonthlyShares } from '../../core/shading/assessment.ts';
 import type { Line, Picture } from '../marks.ts';
+import type { PictureWords } from './picture-words.ts';
+import { ENGLISH } from './picture-words.ts';
 
 const [PITCH, HEIGHT] = [7, 24];
 
 /** Twelve small ink bars on a line: the share of each month's light an obstruction takes; `full` fills the height. */
-export function monthTicks(monthly: MonthlyShares, full: number): Picture {
+export function monthTicks(
+  monthly: MonthlyShares,
+  full: number,
+  { months }: PictureWords = ENGLISH,
+): Picture {
   const size = 9;
   const bars = monthly.map((share, month): Line => {
     const [x, high] = [month * PITCH + 1, Math.min(1, (share ?? 0) / full) * HEIGHT];
@@ -17,8 +23,8 @@ export function monthTicks(monthly: MonthlyShares, full: number): Picture {
     marks: [
       { kind: 'path', lines: bars, closed: true, fill: { tone: 'ink' } },
       { kind: 'path', lines: [[0, HEIGHT, width, HEIGHT]], pen: { tone: 'ink', width: 1 } },
-      { kind: 'text', x: 0, y: HEIGHT + size + 2, text: 'Jan', size, tone: 'faint' },
-      { kind: 'text', x: width, y: HEIGHT + size + 2, text: 'Dec', size, anchor: 'end', tone: 'faint' },
+      { kind: 'text', x: 0, y: HEIGHT + size + 2, text: months[0], size, tone: 'faint' },
+      { kind: 'text', x: width, y: HEIGHT + size + 2, text: months[11], size, anchor: 'end', tone: 'faint' },
     ],
   };
 }

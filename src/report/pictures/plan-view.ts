@@ -2,6 +2,8 @@ import { RADIANS } from '../../core/angles/angles.ts';
 import type { Line, Mark, Picture } from '../marks.ts';
 import { hatchFor } from './hatches.ts';
 import type { ObstructionShape } from './horizon-obstructions.ts';
+import type { PictureWords } from './picture-words.ts';
+import { ENGLISH } from './picture-words.ts';
 import type { SkyPlace } from './sky-frame.ts';
 import type { DayLine } from './sun-lines.ts';
 
@@ -15,7 +17,10 @@ export interface PlanInput {
 }
 
 /** The sky from below as on a plan: north up, east to the right, the horizon as the rim, the zenith in the middle. */
-export function planView({ shapes, days, surfaceAzimuth, size }: PlanInput): Picture {
+export function planView(
+  { shapes, days, surfaceAzimuth, size }: PlanInput,
+  words: PictureWords = ENGLISH,
+): Picture {
   const middle = size / 2;
   const radius = middle - 16;
   const at = ({ azimuth, elevation }: SkyPlace): [number, number] => {
@@ -48,12 +53,8 @@ export function planView({ shapes, days, surfaceAzimuth, size }: PlanInput): Pic
       marks.push({ kind: 'path', lines: outlines(before), closed: true, pen: { ...pen, dash: [3, 2] } });
   }
   marks.push({ kind: 'path', lines: [ring(0)], closed: true, pen: { tone: 'ink', width: 1.6 } });
-  for (const [name, azimuth] of [
-    ['N', 0],
-    ['E', 90],
-    ['S', 180],
-    ['W', 270],
-  ] as const) {
+  for (const azimuth of [0, 90, 180, 270]) {
+    const name = words.compass[azimuth / 45];
     const r = radius + 9;
     const [x, y] = [middle + r * Math.sin(azimuth * RADIANS), middle - r * Math.cos(azimuth * RADIANS) + 4];
     marks.push({ kind: 'text', x, y, text: name, size: 11, anchor: 'middle', bold: true });

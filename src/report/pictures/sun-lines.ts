@@ -2,6 +2,8 @@ import { turnBetween } from '../../core/angles/angles.ts';
 import { solarPosition } from '../../core/solar-position/solar-position.ts';
 import { standardOffsetMinutes } from '../../core/solar-position/time-zone.ts';
 import type { Site } from '../../core/survey/survey.ts';
+import type { PictureWords } from './picture-words.ts';
+import { ENGLISH } from './picture-words.ts';
 import type { SkyPlace } from './sky-frame.ts';
 
 /** Where the sun goes on one day. */
@@ -21,15 +23,7 @@ const YEAR = 2025;
 const MINUTE_MS = 60_000;
 const DAY_MINUTES = 1440;
 /** The 21st of December to June; the later month passes almost the same way. The first named is drawn. */
-const DAYS = [
-  { month: 5, label: 'Jun' },
-  { month: 11, label: 'Dec' },
-  { month: 2, label: 'Mar Sep' },
-  { month: 3, label: 'Apr Aug' },
-  { month: 1, label: 'Feb Oct' },
-  { month: 4, label: 'May Jul' },
-  { month: 0, label: 'Jan Nov' },
-];
+const DAYS = [[5], [11], [2, 8], [3, 7], [1, 9], [4, 6], [0, 10]];
 /** Near the zenith the azimuth runs; points further apart than this get one between, degrees. */
 const WIDEST = 4;
 
@@ -43,13 +37,13 @@ function sunOver({ latitude, longitude, altitude }: Site, startMs: number): SunA
 }
 
 /** The sun's way on the 21st of each month, solstices first. */
-export function dayLines(site: Site): DayLine[] {
+export function dayLines(site: Site, { months }: PictureWords = ENGLISH): DayLine[] {
   // solar midnight to solar midnight, so that a day is one unbroken arc wherever the clocks stand
   const midnight = -site.longitude * 4;
-  return DAYS.map(({ month, label }) => {
-    const sun = sunOver(site, Date.UTC(YEAR, month, 21));
+  return DAYS.map((alike) => {
+    const sun = sunOver(site, Date.UTC(YEAR, alike[0], 21));
     const at = Array.from({ length: 145 }, (_, i) => midnight + i * 10);
-    return { label, path: partsUp(at, sun) };
+    return { label: alike.map((month) => months[month]).join(' '), path: partsUp(at, sun) };
   });
 }
 

@@ -11,6 +11,8 @@ import { isOutside, obstructionMarks, obstructionNames, obstructionShapes } from
 import type { Spot } from './horizon-sun.ts';
 import { contourMarks, dayLabels, hourLabels, sunLineMarks } from './horizon-sun.ts';
 import { LabelPlaces } from './label-places.ts';
+import type { PictureWords } from './picture-words.ts';
+import { ENGLISH } from './picture-words.ts';
 import type { SkyFrame } from './sky-frame.ts';
 import { obstructionsAt } from './silhouettes.ts';
 import { directionAt, linesOf } from './sky-frame.ts';
@@ -28,6 +30,8 @@ export interface HorizonInput {
   width: number;
   height: number;
   whole: boolean;
+  /** Without contours and their numbers. */
+  plain?: boolean;
 }
 
 export interface HorizonPicture extends Picture {
@@ -40,7 +44,7 @@ export interface HorizonPicture extends Picture {
  * The sky of one station unrolled: energy as printer's dots with numbered contours, the sun's ways by month and hour, and
  * what stands in front as hatched shapes.
  */
-export function unrolledHorizon(input: HorizonInput): HorizonPicture {
+export function unrolledHorizon(input: HorizonInput, words: PictureWords = ENGLISH): HorizonPicture {
   const { site, shade, density, days, hours, width, height } = input;
   const size = width < 560 ? 11 : 13;
   const paths = [...days, ...hours].flatMap(({ path }) => path);
@@ -56,12 +60,14 @@ export function unrolledHorizon(input: HorizonInput): HorizonPicture {
   const shownHours = hours.filter(({ hour }) => width >= 560 || hour % 2 === 0);
   const places = new LabelPlaces({ left: frame.left, top: 0, right: width, bottom: frame.below });
   const shapes = obstructionShapes(shade.profile, input.names, shade.imaginedProfile);
-  const names = obstructionNames(frame, shapes, places, size);
+  const names = obstructionNames(frame, shapes, places, size, words);
   const hidden = hiddenSpots(frame, shade.imaginedProfile ?? shade.profile);
-  const contours = contourMarks(frame, density, places, size, hidden);
+  const contours = input.plain
+    ? { lines: [], numbers: [] }
+    : contourMarks(frame, density, places, size, hidden, words);
   const months = dayLabels(frame, days, places, size, hidden);
-  const clock = hourLabels(frame, shownHours, places, size, hidden);
-  const unseen = unseenMarks(frame, shade.observed, places, size);
+  const clock = hourLabels(frame, shownHours, places, size, hidden, words);
+  const unseen = unseenMarks(frame, shade.observed, places, size, words);
   const sky: Mark[] = [
     ...elevationRules(frame),
     ...unseen.under,
@@ -78,7 +84,7 @@ export function unrolledHorizon(input: HorizonInput): HorizonPicture {
     height,
     frame,
     outside: shapes.filter((shape) => isOutside(frame, shape)).map(({ name }) => name),
-    marks: [{ kind: 'clip', ...box, marks: sky }, ...horizonAxes(frame, size), ...labels],
+    marks: [{ kind: 'clip', ...box, marks: sky }, ...horizonAxes(frame, size, words), ...labels],
   };
 }
 

@@ -5,6 +5,7 @@ import type { Mark } from '../marks.ts';
 import { textWidth } from '../marks.ts';
 import type { LabelPlaces } from './label-places.ts';
 import { boxAround } from './label-places.ts';
+import type { PictureWords } from './picture-words.ts';
 import type { SkyFrame } from './sky-frame.ts';
 import { xOfTurn } from './sky-frame.ts';
 
@@ -14,6 +15,7 @@ export function unseenMarks(
   observed: readonly AzimuthRange[],
   places: LabelPlaces,
   size: number,
+  { unseen }: PictureWords,
 ): { under: Mark[]; words: Mark[] } {
   const under: Mark[] = [];
   const words: Mark[] = [];
@@ -42,14 +44,20 @@ export function unseenMarks(
         },
         edge,
       );
-      words.push(...wordsIn(left, right, frame, places, size));
+      words.push(...wordsIn(unseen, left, right, frame, places, size));
     }
   }
   return { under, words };
 }
 
-function wordsIn(left: number, right: number, frame: SkyFrame, places: LabelPlaces, size: number): Mark[] {
-  const text = 'nobody looked here';
+function wordsIn(
+  text: string,
+  left: number,
+  right: number,
+  frame: SkyFrame,
+  places: LabelPlaces,
+  size: number,
+): Mark[] {
   const width = textWidth(text, size);
   if (right - left >= width + 4) {
     const middle = (left + right) / 2;

@@ -1,7 +1,7 @@
 import { useMemo } from 'preact/hooks';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
 import { hourBars, hoursWithLight } from '../../../report/pictures/hour-bars.ts';
-import { MONTH_NAMES } from '../../../report/pictures/month-columns.ts';
+import { MONTH_NAMES } from '../../../report/pictures/picture-words.ts';
 import { WideTable } from '../../components/wide-table.tsx';
 import { Drawing } from './drawing.tsx';
 import { standardTimeText } from './standard-time-text.ts';

@@ -1,6 +1,7 @@
 import { useMemo } from 'preact/hooks';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
-import { MONTH_NAMES, monthColumns } from '../../../report/pictures/month-columns.ts';
+import { monthColumns } from '../../../report/pictures/month-columns.ts';
+import { MONTH_NAMES } from '../../../report/pictures/picture-words.ts';
 import { Drawing } from './drawing.tsx';
 import { energy, percent } from './figures.ts';
 import { useWidth } from './use-width.ts';

@@ -4,7 +4,7 @@ import type { StationShade } from '../../../core/shading/station-shade.ts';
 import { obstructionKind } from '../../../core/survey/obstruction-kinds.ts';
 import type { Obstruction } from '../../../core/survey/survey.ts';
 import { hatchFor } from '../../../report/pictures/hatches.ts';
-import { MONTH_NAMES } from '../../../report/pictures/month-columns.ts';
+import { MONTH_NAMES } from '../../../report/pictures/picture-words.ts';
 import { monthTicks } from '../../../report/pictures/month-ticks.ts';
 import { Drawing } from './drawing.tsx';
 import { energy, listed, percent } from './figures.ts';

@@ -5,7 +5,7 @@ import type { SunVisit } from '../../../core/solar-position/when-sun-at.ts';
 import { datesWhenSunAt } from '../../../core/solar-position/when-sun-at.ts';
 import type { Site } from '../../../core/survey/survey.ts';
 import { compassWord } from '../../../report/pictures/compass-names.ts';
-import { MONTH_NAMES } from '../../../report/pictures/month-columns.ts';
+import { MONTH_NAMES } from '../../../report/pictures/picture-words.ts';
 import { obstructionsAt } from '../../../report/pictures/silhouettes.ts';
 import { clock, energy, listed, percent } from './figures.ts';
 
