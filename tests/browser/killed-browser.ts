@@ -7,6 +7,8 @@ export interface DoomedBrowser {
   page: Page;
   /** Ends all its processes at once, without a word to any of them. */
   kill: () => Promise<void>;
+  /** Ends it in peace. */
+  close: () => Promise<void>;
 }
 
 /** Processes of the browser on a folder, the first one first. */
@@ -24,6 +26,7 @@ export async function doomedBrowser(folder: string): Promise<DoomedBrowser> {
   context.setDefaultTimeout(20_000);
   const ended = new Promise<void>((resolve) => context.once('close', () => resolve()));
   return {
+    close: () => context.close(),
     page: context.pages()[0] ?? (await context.newPage()),
     kill: async () => {
       for (const id of processesOn(folder)) {
