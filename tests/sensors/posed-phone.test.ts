@@ -1,7 +1,8 @@
 import { fc, test } from '@fast-check/vitest';
 import { describe, expect } from 'vitest';
 import { turnBetween } from '../../src/core/angles/angles.ts';
-import { directionOf, sightVector } from '../../src/core/pointing/attitude.ts';
+import { directionOf } from '../../src/core/angles/vectors.ts';
+import { sightVector } from '../../src/core/pointing/attitude.ts';
 import { cameraAt, laidOn, topEdgeAt } from './posed-phone.ts';
 
 const azimuth = fc.double({ min: 0, max: 359.99, noNaN: true });

@@ -2,7 +2,8 @@ import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { PRACTICE_SITE, isPracticeSurvey } from '../../src/app/capture/practice-place.ts';
 import { magneticDeclination } from '../../src/core/pointing/declination.ts';
-import { directionOf, sightVector } from '../../src/core/pointing/attitude.ts';
+import { directionOf } from '../../src/core/angles/vectors.ts';
+import { sightVector } from '../../src/core/pointing/attitude.ts';
 import { steadiness } from '../../src/core/pointing/steadiness.ts';
 import { usableShadowHours } from '../../src/core/pointing/usable-shadow-hours.ts';
 import {

@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { turnBetween } from '../../src/core/angles/angles.ts';
-import { directionOf, sightVector } from '../../src/core/pointing/attitude.ts';
+import { directionOf } from '../../src/core/angles/vectors.ts';
+import { sightVector } from '../../src/core/pointing/attitude.ts';
 import { parseSurvey } from '../../src/core/survey/parse-survey.ts';
 import { randomSource } from '../../src/core/uncertainty/random-source.ts';
 import { devicePose } from './device-pose.ts';

@@ -1,4 +1,6 @@
 import { DEGREES, RADIANS, safeAsin, turnBetween } from '../angles/angles.ts';
+import type { Vector } from '../angles/vectors.ts';
+import { blended, cross, dot, length, unit, vectorOf } from '../angles/vectors.ts';
 import type { SkyPoint } from './horizon-edge.ts';
 
 /** A long line is laid as strips no longer than this, degrees, so that their straight sides keep its width. */
@@ -8,8 +10,6 @@ const LONGEST_STRIP = 5;
 const HAIR = 1e-5;
 /** A path that reaches the zenith stops this far short of it, so that it has an azimuth, degrees. */
 const SHORT_OF_ZENITH = 0.001;
-
-type Vector = readonly [number, number, number];
 
 /**
  * The strips of sky, each four corners, that a line of angular width [degrees] covers between neighbouring points:
@@ -40,7 +40,7 @@ function offTheZenith(corners: SkyPoint[]): SkyPoint[] {
 }
 
 function pathBetween(start: SkyPoint, end: SkyPoint, straight: boolean): Vector[] {
-  const [a, b] = [vector(belowZenith(start)), vector(belowZenith(end))];
+  const [a, b] = [vectorOf(belowZenith(start)), vectorOf(belowZenith(end))];
   const angle = Math.atan2(length(cross(a, b)), dot(a, b));
   const turn = turnBetween(start.azimuth, end.azimuth);
   const reach = straight
@@ -50,12 +50,12 @@ function pathBetween(start: SkyPoint, end: SkyPoint, straight: boolean): Vector[
   return Array.from({ length: pieces + 1 }, (_, k) => {
     const share = k / pieces;
     if (!straight)
-      return vector({
+      return vectorOf({
         azimuth: start.azimuth + share * turn,
         elevation: start.elevation + share * (end.elevation - start.elevation),
       });
     const [u, v] = [Math.sin((1 - share) * angle), Math.sin(share * angle)];
-    return unit([a[0] * u + b[0] * v, a[1] * u + b[1] * v, a[2] * u + b[2] * v]);
+    return unit(blended(a, u, b, v));
   });
 }
 
@@ -67,7 +67,7 @@ function stripAround(a: Vector, b: Vector, width: number): SkyPoint[] | null {
   const aside = (p: Vector, side: number): SkyPoint => {
     const s = Math.sin((side * width * RADIANS) / 2);
     const c = Math.cos((width * RADIANS) / 2);
-    return point([p[0] * c + n[0] * s, p[1] * c + n[1] * s, p[2] * c + n[2] * s]);
+    return point(blended(p, c, n, s));
   };
   return [aside(a, 1), aside(b, 1), aside(b, -1), aside(a, -1)];
 }
@@ -77,24 +77,8 @@ const belowZenith = ({ azimuth, elevation }: SkyPoint): SkyPoint => ({
   elevation: Math.min(elevation, 90 - SHORT_OF_ZENITH),
 });
 
-function vector({ azimuth, elevation }: SkyPoint): Vector {
-  const [a, e] = [azimuth * RADIANS, elevation * RADIANS];
-  return [Math.sin(a) * Math.cos(e), Math.cos(a) * Math.cos(e), Math.sin(e)];
-}
-
+/** Direction of a unit vector. */
 const point = ([east, north, up]: Vector): SkyPoint => ({
   azimuth: (Math.atan2(east, north) * DEGREES + 360) % 360,
   elevation: safeAsin(up) * DEGREES,
 });
-
-const dot = (a: Vector, b: Vector) => a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
-const cross = (a: Vector, b: Vector): Vector => [
-  a[1] * b[2] - a[2] * b[1],
-  a[2] * b[0] - a[0] * b[2],
-  a[0] * b[1] - a[1] * b[0],
-];
-const length = (a: Vector) => Math.sqrt(dot(a, a));
-const unit = (a: Vector): Vector => {
-  const size = length(a);
-  return [a[0] / size, a[1] / size, a[2] / size];
-};

@@ -1,6 +1,7 @@
 import type { ReadingSample, SightingAxis } from '../survey/survey.ts';
-import type { FrameDirection, Vector } from './attitude.ts';
-import { angleBetween, directionOf, scaled, sightVector } from './attitude.ts';
+import type { FrameDirection, Vector } from '../angles/vectors.ts';
+import { angleBetween, directionOf, scaled } from '../angles/vectors.ts';
+import { sightVector } from './attitude.ts';
 
 /** The mean of several pointings. */
 export interface AveragedDirection extends FrameDirection {

@@ -1,7 +1,8 @@
 import { DEGREES, RADIANS, fullCircle, turnBetween } from '../angles/angles.ts';
 import type { Problem } from '../survey/problem.ts';
 import type { Reading, Run, Site } from '../survey/survey.ts';
-import { attitude, directionOf } from './attitude.ts';
+import { directionOf } from '../angles/vectors.ts';
+import { attitude } from './attitude.ts';
 import { magneticDeclination } from './declination.ts';
 import type { OffsetSeen } from './heading-fit.ts';
 import { PLANNING } from './planning-values.ts';

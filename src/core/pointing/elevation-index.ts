@@ -1,6 +1,7 @@
 import type { Problem } from '../survey/problem.ts';
 import type { IndexCheck, Reading, SightingAxis, Survey } from '../survey/survey.ts';
-import { angleBetween, attitude, dot } from './attitude.ts';
+import { angleBetween, dot } from '../angles/vectors.ts';
+import { attitude } from './attitude.ts';
 import { groupedBy } from './grouped-by.ts';
 import { PLANNING } from './planning-values.ts';
 import type { PointedRun } from './pointed-survey.ts';

@@ -1,7 +1,8 @@
 import { DEGREES, RADIANS, fullCircle, safeAcos } from '../angles/angles.ts';
 import type { ReadingSample } from '../survey/survey.ts';
-import type { Vector } from './attitude.ts';
-import { attitude, dot, scaled } from './attitude.ts';
+import type { Vector } from '../angles/vectors.ts';
+import { dot, scaled } from '../angles/vectors.ts';
+import { attitude } from './attitude.ts';
 import type { AveragedDirection } from './average-direction.ts';
 import { meanDirection } from './average-direction.ts';
 import { PLANNING } from './planning-values.ts';

@@ -1,7 +1,7 @@
 import { RADIANS, turnBetween } from '../angles/angles.ts';
 import type { TraceEdge } from '../survey/survey.ts';
-import type { FrameDirection, Vector } from './attitude.ts';
-import { angleBetween, dot, scaled, vectorOf } from './attitude.ts';
+import type { FrameDirection, Vector } from '../angles/vectors.ts';
+import { angleBetween, dot, scaled, vectorOf } from '../angles/vectors.ts';
 
 /** A simplified sweep stays this near to the raw one, degrees, where nothing else is asked for. */
 export const SWEEP_TOLERANCE = 0.25;

@@ -1,6 +1,7 @@
 import type { ReadingSample, SightingAxis } from '../survey/survey.ts';
-import type { Vector } from './attitude.ts';
-import { angleBetween, sightVector } from './attitude.ts';
+import type { Vector } from '../angles/vectors.ts';
+import { angleBetween } from '../angles/vectors.ts';
+import { sightVector } from './attitude.ts';
 import type { AveragedDirection } from './average-direction.ts';
 import { meanDirection } from './average-direction.ts';
 

@@ -1,6 +1,7 @@
 import type { Reading, SightingAxis } from '../survey/survey.ts';
-import type { FrameDirection, Vector } from './attitude.ts';
-import { angleBetween, directionOf, sightVector } from './attitude.ts';
+import type { FrameDirection, Vector } from '../angles/vectors.ts';
+import { angleBetween, directionOf } from '../angles/vectors.ts';
+import { sightVector } from './attitude.ts';
 import { meanDirection } from './average-direction.ts';
 
 /** One row of a sweep in the frame of its run, and where it stands in the record. */

@@ -1,4 +1,6 @@
-import { RADIANS, turnBetween } from '../angles/angles.ts';
+import { turnBetween } from '../angles/angles.ts';
+import type { Vector } from '../angles/vectors.ts';
+import { cross, dot, vectorOf } from '../angles/vectors.ts';
 import type { TraceEdge } from './survey.ts';
 
 interface Direction {
@@ -98,29 +100,11 @@ function segmentsMeet(a: Point, b: Point, c: Point, d: Point): boolean {
   );
 }
 
-type Vector = readonly [east: number, north: number, up: number];
-
 function straightEdgesMeet(kept: number[], sightings: readonly Direction[]): EdgesMeet {
-  const corners = kept.map((k) => unitVector(sightings[k]));
+  const corners = kept.map((k) => vectorOf(sightings[k]));
   const corner = (i: number) => corners[i % corners.length];
   return (i, j) => arcsMeet(corner(i), corner(i + 1), corner(j), corner(j + 1));
 }
-
-function unitVector({ azimuth, elevation }: Direction): Vector {
-  const horizontal = Math.cos(elevation * RADIANS);
-  return [
-    horizontal * Math.sin(azimuth * RADIANS),
-    horizontal * Math.cos(azimuth * RADIANS),
-    Math.sin(elevation * RADIANS),
-  ];
-}
-
-const cross = (a: Vector, b: Vector): Vector => [
-  a[1] * b[2] - a[2] * b[1],
-  a[2] * b[0] - a[0] * b[2],
-  a[0] * b[1] - a[1] * b[0],
-];
-const dot = (a: Vector, b: Vector) => a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
 
 /** Whether the great-circle arcs ab and cd cross: the ends of each on different sides of the other, on one side of the globe. */
 function arcsMeet(a: Vector, b: Vector, c: Vector, d: Vector): boolean {

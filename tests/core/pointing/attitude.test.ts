@@ -2,16 +2,9 @@ import { readFileSync } from 'node:fs';
 import { fc, test as property } from '@fast-check/vitest';
 import { describe, expect, test } from 'vitest';
 import { fullCircle, turnBetween } from '../../../src/core/angles/angles.ts';
-import {
-  angleBetween,
-  attitude,
-  axisVector,
-  directionOf,
-  dot,
-  sightVector,
-  vectorOf,
-} from '../../../src/core/pointing/attitude.ts';
-import type { Vector } from '../../../src/core/pointing/attitude.ts';
+import { angleBetween, directionOf, dot, vectorOf } from '../../../src/core/angles/vectors.ts';
+import { attitude, axisVector, sightVector } from '../../../src/core/pointing/attitude.ts';
+import type { Vector } from '../../../src/core/angles/vectors.ts';
 import { cell, readTable } from '../../reference-values/published-table.ts';
 import { cameraAt, rounded, topEdgeAt } from './held-phone.ts';
 

@@ -1,6 +1,7 @@
 import { DEGREES, RADIANS, fullCircle } from '../../../src/core/angles/angles.ts';
-import type { DeviceAngles, Vector } from '../../../src/core/pointing/attitude.ts';
-import { vectorOf } from '../../../src/core/pointing/attitude.ts';
+import type { Vector } from '../../../src/core/angles/vectors.ts';
+import type { DeviceAngles } from '../../../src/core/pointing/attitude.ts';
+import { vectorOf } from '../../../src/core/angles/vectors.ts';
 
 const cross = (a: Vector, b: Vector): Vector => [
   a[1] * b[2] - a[2] * b[1],

@@ -1,6 +1,6 @@
 import { fc, test as property } from '@fast-check/vitest';
 import { describe, expect, test } from 'vitest';
-import { angleBetween, vectorOf } from '../../../src/core/pointing/attitude.ts';
+import { angleBetween, vectorOf } from '../../../src/core/angles/vectors.ts';
 import { averageDirection, meanDirection } from '../../../src/core/pointing/average-direction.ts';
 import type { EventSample } from '../../../src/core/pointing/steadiness.ts';
 import { steadiness } from '../../../src/core/pointing/steadiness.ts';

@@ -1,7 +1,7 @@
 import { fc, test as property } from '@fast-check/vitest';
 import { describe, expect, test } from 'vitest';
-import { angleBetween, vectorOf } from '../../../src/core/pointing/attitude.ts';
-import type { FrameDirection } from '../../../src/core/pointing/attitude.ts';
+import { angleBetween, vectorOf } from '../../../src/core/angles/vectors.ts';
+import type { FrameDirection } from '../../../src/core/angles/vectors.ts';
 import { simplifiedSweep } from '../../../src/core/pointing/simplified-sweep.ts';
 import { sweepPoints } from '../../../src/core/pointing/sweep-points.ts';
 import type { Reading, ReadingSample } from '../../../src/core/survey/survey.ts';
