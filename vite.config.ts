@@ -25,12 +25,22 @@ const contentPolicy: Plugin = {
 // all files of a worker, since loading them anew costs more than the tests; so no test may leave a module changed.
 const sharedWorkers = { isolate: false, maxWorkers: Math.max(2, availableParallelism()) };
 
+// The PDF library would load these to draw web pages and SVG; the report is painted without them.
+const EMPTY_MODULE = '\0empty-module';
+const withoutUnusedPackages: Plugin = {
+  name: 'noonmark-without-unused-packages',
+  enforce: 'pre',
+  resolveId: (id) => (['html2canvas', 'dompurify', 'canvg'].includes(id) ? EMPTY_MODULE : null),
+  load: (id) => (id === EMPTY_MODULE ? 'export default undefined;' : null),
+};
+
 export default defineConfig({
   oxc: jsx,
   build: { target: 'es2022', sourcemap: false },
   worker: { format: 'es' },
   plugins: [
     contentPolicy,
+    withoutUnusedPackages,
     VitePWA({
       strategies: 'injectManifest',
       srcDir: 'src/service-worker',
@@ -55,7 +65,7 @@ export default defineConfig({
         ],
       },
       injectManifest: {
-        globPatterns: ['**/*.{js,css,html,svg,png,json,bin}'],
+        globPatterns: ['**/*.{js,css,html,svg,png,json,bin,ttf}'],
         maximumFileSizeToCacheInBytes: 3_000_000,
       },
     }),

@@ -86,6 +86,7 @@ export const fullContents = (text: string, changes: Partial<ReportContents> = {}
     page: (page, pages) => `Page ${page} of ${pages}`,
     letter: 'The letter',
     evidence: 'The evidence',
+    boxes: 'A box stands for a letter.',
   },
   ...changes,
 });

@@ -6,7 +6,10 @@ import { hexText } from './sheet.ts';
 
 /** What a reader shows about the file: title, author, language, date. */
 export function documentFacts(doc: jsPDF, { title, firm, language }: ReportContents, madeOn: string): void {
-  doc.setDocumentProperties({ title: factText(title), author: factText(firm.name) });
+  doc.setDocumentProperties({
+    title: standIn(plainLetters(title)),
+    author: standIn(plainLetters(firm.name)),
+  });
   doc.setLanguage(language as Parameters<jsPDF['setLanguage']>[0]);
   doc.setCreationDate(`D:${madeOn.replaceAll('-', '')}120000+00'00'`);
   doc.setFileId(fileId(title + firm.name + madeOn));
@@ -21,19 +24,18 @@ export function outlineEntries(doc: jsPDF, { sections }: ReportContents, pageOf:
 }
 
 /**
- * As the library can write it. Text whose UTF-16 has a byte 13, which would be read as 10, goes as UTF-8 with its mark.
- * Ref: ISO 32000-2, 7.9.2.2.
+ * The library writes the bytes of UTF-16 into strings where a reader takes a byte 13 for 10. Title and author therefore
+ * go in as stand-ins of the length that they have in hexadecimal, and change places with it in the finished file.
  */
-function factText(text: string): string {
-  const plain = plainLetters(text);
-  const codes = Array.from({ length: plain.length }, (_, i) => plain.charCodeAt(i));
-  if (!codes.some((code) => (code & 0xff) === 0x0d || code >> 8 === 0x0d)) return plain;
-  return `\u00ef\u00bb\u00bf${utf8(plain)}`;
-}
+const standIn = (text: string) => '='.repeat(hexText(text).length - 2);
 
-/** Bytes of UTF-8, each as a character. */
-const utf8 = (text: string) =>
-  encodeURIComponent(text).replace(/%(..)/g, (_, hex: string) => String.fromCharCode(parseInt(hex, 16)));
+/** The finished file, one character for each byte, with title and author in it. */
+export function withFacts(file: string, { title, firm }: ReportContents): string {
+  return [['Title', title] as const, ['Author', firm.name] as const].reduce((written, [key, text]) => {
+    const plain = plainLetters(text);
+    return written.replace(`/${key} (${standIn(plain)})`, () => `/${key} ${hexText(plain)}`);
+  }, file);
+}
 
 /** Thirty-two hexadecimal digits of a text; FNV-1a with four starts. */
 function fileId(text: string): string {

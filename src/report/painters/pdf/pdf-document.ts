@@ -1,6 +1,6 @@
 import type { jsPDF } from 'jspdf';
 import type { ReportContents } from '../../contents/report-contents.ts';
-import { outlineEntries, documentFacts } from './document-facts.ts';
+import { documentFacts, outlineEntries, withFacts } from './document-facts.ts';
 import { paginate } from './paginate.ts';
 import type { PdfFonts } from './pdf-fonts.ts';
 import { FACES } from './pdf-fonts.ts';
@@ -54,7 +54,8 @@ export async function pdfDocument(
     paintFoot(sheet, contents, place + 1, pages.placed.length, setting);
   });
   outlineEntries(doc, contents, pages.pageOf);
-  return new Uint8Array(doc.output('arraybuffer'));
+  const file = withFacts(doc.output(), contents);
+  return Uint8Array.from(file, (byte) => byte.charCodeAt(0));
 }
 
 function layPages(contents: ReportContents, setting: Setting) {

@@ -1,6 +1,7 @@
 import type { jsPDF } from 'jspdf';
 import type { Tone } from '../../marks.ts';
 import { PRINT_PALETTE } from '../svg.ts';
+import { isReadable } from './image-bytes.ts';
 import type { Face } from './pdf-fonts.ts';
 import type { Run, Typesetter } from './typesetter.ts';
 import type { TextStyle } from './text-style.ts';
@@ -11,13 +12,6 @@ export type Ink = Tone | `#${string}`;
 export interface Rim {
   tone: Tone;
   width: number;
-}
-
-interface RasterImage {
-  type: 'PNG' | 'JPEG';
-  bytes: Uint8Array;
-  /** One and the same for the same picture, so that it is stored once. */
-  alias: string;
 }
 
 /** The page under the pen: points, x to the right and y down from the paper's upper left corner. */
@@ -72,17 +66,25 @@ export class Sheet {
     }
   }
 
+  /** The same bytes are stored once. False, and nothing painted, where they are no such picture. */
   image(
     bytes: Uint8Array,
-    type: RasterImage['type'],
+    type: 'PNG' | 'JPEG',
     x: number,
     y: number,
     width: number,
     height: number,
-  ): void {
+  ): boolean {
+    if (!isReadable(bytes, type)) return false;
     const alias = this.aliases.get(bytes) ?? `image-${this.images++}`;
     this.aliases.set(bytes, alias);
-    this.doc.addImage(bytes, type, x, y, width, height, alias, 'FAST');
+    try {
+      this.doc.addImage(bytes, type, x, y, width, height, alias, 'FAST');
+      return true;
+    } catch {
+      // a picture cut off in its middle; the rest of the report stands
+      return false;
+    }
   }
 
   link(x: number, y: number, width: number, height: number, pageNumber: number): void {
@@ -119,13 +121,22 @@ export class Sheet {
         return this.letters(run.text.replaceAll('\u00a0', ' '), x, y, face, size, tone, rim);
       case 'drawn': {
         const { png, width, height, baseline } = run.drawn;
-        this.spoken(run.text, x, y, size, () => this.image(png, 'PNG', x, y - baseline, width, height));
+        this.spoken(run, x, y, size, () => this.image(png, 'PNG', x, y - baseline, width, height));
         return;
       }
-      case 'box':
-        this.spoken(run.text, x, y, size, () =>
-          this.frame(x + size * 0.06, y - size * 0.68, size * 0.5, size * 0.7, size * 0.05, tone),
-        );
+      case 'boxes':
+        this.spoken(run, x, y, size, () => {
+          const step = run.width / run.count;
+          for (let i = 0; i < run.count; i++)
+            this.frame(
+              x + i * step + size * 0.06,
+              y - size * 0.68,
+              size * 0.5,
+              size * 0.7,
+              size * 0.05,
+              tone,
+            );
+        });
     }
   }
 
@@ -139,11 +150,16 @@ export class Sheet {
     this.doc.setTextColor(colourOf(tone)).text(text, x, y, { renderingMode: 'fill' });
   }
 
-  /** Marks what is painted as a text, so that it is found, copied and read aloud. */
-  private spoken(text: string, x: number, y: number, size: number, paint: () => void): void {
+  /** Marks what is painted as a text, so that it is found, copied and read aloud: a space lies under it, as wide. */
+  private spoken({ text, width }: Run, x: number, y: number, size: number, paint: () => void): void {
     const { write } = this.doc.internal as unknown as { write: (line: string) => void };
-    write(`/Span <</ActualText ${hexText(text)}>>> BDC`);
-    this.doc.setFont('regular', 'normal').setFontSize(size).text(' ', x, y, { renderingMode: 'invisible' });
+    const horizontalScale = width / this.setter.width(' ', { face: 'regular', size });
+    write(`/Span <</ActualText ${hexText(text)}>> BDC`);
+    this.doc.saveGraphicsState();
+    this.doc.setFont('regular', 'normal').setFontSize(size);
+    this.doc.text(' ', x, y, { renderingMode: 'invisible', horizontalScale });
+    // the stretching would go on to the next text
+    this.doc.restoreGraphicsState();
     paint();
     write('EMC');
   }

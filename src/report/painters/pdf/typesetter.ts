@@ -17,7 +17,7 @@ export type DrawText = (text: string, size: number, bold: boolean) => DrawnText 
 
 /** Neighbouring letters that are shown the same way: from the typeface, as a picture, or as a box for each. */
 export type Run = { text: string; width: number } & (
-  { kind: 'letters' } | { kind: 'drawn'; drawn: DrawnText } | { kind: 'box' }
+  { kind: 'letters' } | { kind: 'drawn'; drawn: DrawnText } | { kind: 'boxes'; count: number }
 );
 
 /** Width of a box that stands for a letter, with the space around it, as a share of the size. */
@@ -92,11 +92,18 @@ export class Typesetter {
   private lackingRuns(text: string, style: Style): Run[] {
     const drawn = this.drawn(text, style);
     if (drawn) return [{ kind: 'drawn', text, width: drawn.width, drawn }];
-    return this.letterClusters(text).map((cluster) => {
-      if (this.inFace(cluster, style.face)) return this.letters(cluster, style);
-      this.boxed = true;
-      return { kind: 'box', text: cluster, width: style.size * BOX_WIDTH };
-    });
+    const runs: Run[] = [];
+    for (const cluster of this.letterClusters(text)) {
+      const [known, last] = [this.inFace(cluster, style.face), runs.at(-1)];
+      if (known) runs.push(this.letters(cluster, style));
+      else if (last?.kind === 'boxes') {
+        last.text += cluster;
+        last.count++;
+        last.width += style.size * BOX_WIDTH;
+      } else runs.push({ kind: 'boxes', text: cluster, count: 1, width: style.size * BOX_WIDTH });
+      this.boxed ||= !known;
+    }
+    return runs;
   }
 
   private drawn(text: string, { face, size }: Style): DrawnText | null {

@@ -58,8 +58,7 @@ function paintPhoto(
   size: Size,
 ): void {
   const { width, height } = size;
-  if (image) {
-    sheet.image(image.bytes, image.type === 'image/png' ? 'PNG' : 'JPEG', x, y, width, height);
+  if (image && sheet.image(image.bytes, image.type === 'image/png' ? 'PNG' : 'JPEG', x, y, width, height)) {
     sheet.frame(x, y, width, height, 0.5, 'rule');
     return;
   }
