@@ -21,7 +21,7 @@ describe('an interval in words', () => {
 
   test('names what it mostly comes from and what would shrink it', () => {
     expect(spreadText(interval)).toBe(
-      'Most of the spread (72 %) is the heading; a heading check would bring the standard deviation from ±0.6 to ±0.3 points.',
+      'Most of the spread (72 %) is the heading of the azimuths; a heading check would bring the standard deviation from ±0.6 to ±0.3 points.',
     );
     expect(spreadText({ ...interval, sources: interval.sources.slice(1) })).toBe(
       'Most of the spread (28 %) is the climate’s share of diffuse light.',

@@ -1,6 +1,7 @@
 import type { PointedSurvey } from '../pointing/pointed-survey.ts';
 import type { Assessment } from '../shading/assessment.ts';
 import type { Survey } from '../survey/survey.ts';
+import type { CureId } from '../uncertainty/interval-source.ts';
 
 /** What kinds of things may be missing or weak. */
 export type OpenPointKindId =
@@ -44,6 +45,8 @@ export interface OpenPoint {
    */
   effect: number | null;
   cure: Cure;
+  /** What would shrink it, where the point is about one source of an interval. */
+  shrunkBy?: CureId;
 }
 
 /** A survey as its points are looked for. */

@@ -1,6 +1,6 @@
 import type { CureId, IntervalSourceId } from '../uncertainty/interval-source.ts';
 
-/** What an interval comes from, as a part of a sentence. */
+/** What an interval comes from, as a part of a sentence; the one place for these words, on screens and on the command line. */
 export const SOURCE_WORDS: Record<IntervalSourceId, string> = {
   heading: 'the heading of the azimuths',
   'elevation-index': 'the phone’s inclination',

@@ -29,7 +29,11 @@ describe('a wide interval', () => {
   test('is told by what can be cured and has no point of its own', async () => {
     const points = await withInterval(WIDE);
     expect(points).toHaveLength(1);
-    expect(points[0]).toMatchObject({ subject: 'South roof', cure: { at: 'site' } });
+    expect(points[0]).toMatchObject({
+      subject: 'South roof',
+      cure: { at: 'site' },
+      shrunkBy: 'measure-transmittance',
+    });
     expect(points[0].sentence).toBe(
       'Its yearly access is known to a range of 10.0 points, in part for what the trees let through. Measuring what the crowns let through would shrink it.',
     );

@@ -56,12 +56,13 @@ function wideSources(plane: PlaneAssessment): Wide[] {
 function pointOf({ plane, interval, source, effect, planes }: Wide): Omit<OpenPoint, 'kind'> {
   const others = planes.filter((name) => name !== plane.name);
   const also = others.length > 0 ? ` So it is with ${listed(others)}.` : '';
-  const cure = capital(CURE_WORDS[source.cure!]);
+  const shrunkBy = source.cure!;
   return {
     subject: plane.name,
-    sentence: `Its yearly access is known to a range of ${width(interval).toFixed(1)} points, in part for ${SOURCE_WORDS[source.source]}. ${cure} would shrink it.${also}`,
+    sentence: `Its yearly access is known to a range of ${width(interval).toFixed(1)} points, in part for ${SOURCE_WORDS[source.source]}. ${capital(CURE_WORDS[shrunkBy])} would shrink it.${also}`,
     effect,
     cure: cureOf(source, plane),
+    shrunkBy,
   };
 }
 
