@@ -1,7 +1,7 @@
-import { readFileSync } from 'node:fs';
 import { commands } from './command-table.ts';
 import type { Command, ExitCode, Terminal } from './command.ts';
 import { UsageError } from './command.ts';
+import { programVersion } from './program-version.ts';
 import { shownWords } from './shown-name.ts';
 import { typedOptions } from './typed-options.ts';
 
@@ -13,7 +13,7 @@ export async function runCommandLine(typed: string[], terminal: Terminal): Promi
     return 0;
   }
   if (name === '--version' || name === '-v') {
-    terminal.out(`${version()}\n`);
+    terminal.out(`${programVersion()}\n`);
     return 0;
   }
   const command = commands.find((row) => row.name === name);
@@ -49,11 +49,6 @@ async function runCommand(command: Command, typed: string[], terminal: Terminal)
   if (positionals.length > 1 && !command.usage.startsWith('FILE...'))
     throw new UsageError(`"${command.name}" takes one FILE, got ${positionals.length}.`);
   return command.run({ values, files: positionals, terminal });
-}
-
-function version(): string {
-  const text = readFileSync(new URL('../../package.json', import.meta.url), 'utf8');
-  return (JSON.parse(text) as { version: string }).version;
 }
 
 const usageOf = ({ name, usage }: Command) => `noonmark ${name} ${usage}`;

@@ -2,25 +2,14 @@ import { assessSurvey } from '../../core/assessment/assess-survey.ts';
 import type { Assessment } from '../../core/shading/assessment.ts';
 import { parseSurvey } from '../../core/survey/parse-survey.ts';
 import type { Problem } from '../../core/survey/problem.ts';
-import type { Survey, TranspositionId } from '../../core/survey/survey.ts';
-import { TRANSPOSITIONS } from '../../core/transposition/transposition-models.ts';
+import type { Survey } from '../../core/survey/survey.ts';
+import type { AssessChoice } from '../assess-choice.ts';
+import { ASSESS_OPTIONS, ASSESS_OPTIONS_HELP, assessChoice, chosenClimate } from '../assess-choice.ts';
 import { assessmentText } from '../assessment-text.ts';
-import { climateByOption, climateOfSurvey } from '../climate-choice.ts';
-import type { Command, CommandCall, Terminal } from '../command.ts';
-import { numberOption, textOption, UsageError, wordOption } from '../command.ts';
+import type { Command, Terminal } from '../command.ts';
 import { problemLines, warningLines } from '../problem-lines.ts';
 import { progressTeller } from '../progress.ts';
 import { readSurveyText } from '../read-file.ts';
-
-const MODELS = TRANSPOSITIONS.map(({ id }) => id);
-/** Whole minutes that divide an hour. */
-const STEPS = [1, 2, 3, 4, 5, 6, 10, 12, 15];
-
-interface AssessChoice {
-  climate?: string;
-  transposition?: TranspositionId;
-  stepMinutes?: number;
-}
 
 type Assessed =
   { file: string; problems: Problem[]; planes: [] } | ({ file: string; title: string } & Assessment);
@@ -30,11 +19,7 @@ export const assess: Command = {
   usage: 'FILE... [options]',
   summary: 'Annual shading loss of surveys: by plane, station, month, hour and obstruction.',
   help: `
-  --climate world|clear|FILE   where the sunlight comes from: the world grid, a clear sky, or a weather file
-                               (EPW, TMY3 CSV); without it, what the survey says. A weather file that a survey
-                               names is looked for beside the survey.
-  --transposition MODEL        ${MODELS.join(', ')}; without it, what the survey says
-  --step MINUTES               ${STEPS.join(', ')}
+${ASSESS_OPTIONS_HELP}
   --json                       { surveys: [ { file, problems?, climate, transposition, stepMinutes, warnings,
                                  planes: [ { id, orientationFactor, unshaded, solarAccess, stations } ] } ] }
                                irradiation in kWh/m2, shares 0 to 1, null for a month without sun;
@@ -48,13 +33,11 @@ export const assess: Command = {
 A file that cannot be used is told, the others are assessed, and the exit code is 1.
 Counted: light from the sun and the sky that obstructions block. Not counted: what obstructions reflect.`,
   options: {
-    climate: { type: 'string' },
-    transposition: { type: 'string' },
-    step: { type: 'string' },
+    ...ASSESS_OPTIONS,
     json: { type: 'boolean' },
   },
   async run(call) {
-    const choice = choiceOf(call);
+    const choice = assessChoice(call);
     const { terminal, values } = call;
     const surveys: Assessed[] = [];
     for (const file of call.files) {
@@ -70,17 +53,6 @@ Counted: light from the sun and the sky that obstructions block. Not counted: wh
     return surveys.some((assessed) => 'problems' in assessed) ? 1 : 0;
   },
 };
-
-function choiceOf(call: CommandCall): AssessChoice {
-  const stepMinutes = numberOption(call, 'step', 1, 15);
-  if (stepMinutes !== undefined && !STEPS.includes(stepMinutes))
-    throw new UsageError(`--step must be one of ${STEPS.join(', ')} minutes, got ${stepMinutes}`);
-  return {
-    climate: textOption(call, 'climate'),
-    transposition: wordOption(call, 'transposition', MODELS),
-    stepMinutes,
-  };
-}
 
 /** One file's unexpected error must not cost the others their results. */
 async function assessedOrFault(file: string, choice: AssessChoice, terminal: Terminal): Promise<Assessed> {
@@ -99,10 +71,7 @@ async function assessFile(file: string, choice: AssessChoice, terminal: Terminal
   const parsed = read.ok ? parseSurvey(read.value.text) : read;
   if (!parsed.ok) return { file, problems: parsed.problems, planes: [] };
   const survey: Survey = parsed.value;
-  const climate =
-    choice.climate === undefined
-      ? climateOfSurvey(survey.climate, survey.site, file)
-      : climateByOption(choice.climate, survey.site, survey.climate);
+  const climate = chosenClimate(choice, survey, file);
   if (!climate.ok) return { file, problems: climate.problems, planes: [] };
   const { transposition, stepMinutes } = choice;
   const assessment = await assessSurvey(survey, climate.value, {
