@@ -4,6 +4,7 @@ import { pointingOfSighting } from '../../core/pointing/reading-direction.ts';
 import type { Reading, Sighting, Station, Survey } from '../../core/survey/survey.ts';
 import type { RefusedWhy } from './capture-news.ts';
 import type { CaptureSession, Taking } from './capture-session.ts';
+import { withNotedMarks } from './marks.ts';
 import {
   inOrder,
   looseSightings,
@@ -27,6 +28,8 @@ const FURTHEST = 175;
 export class PointTrace {
   /** The trace that the next point goes to; null where it begins one. */
   readonly trace = signal<string | null>(null);
+  /** Id of the sighting taken last, which may be a mark. */
+  readonly last = signal<string | null>(null);
 
   constructor(
     private readonly session: CaptureSession,
@@ -40,7 +43,9 @@ export class PointTrace {
 
   /** Takes the next point. */
   async sight(choice: TraceChoice): Promise<void> {
-    await this.session.takeHeld((reading, survey) => this.taking(reading, survey, choice));
+    const id = this.session.services.newId();
+    const taken = await this.session.takeHeld((reading, survey) => this.taking(id, reading, survey, choice));
+    if (taken) this.last.value = id;
     const trace = this.traceNow(this.session.record.survey);
     if (choice.way === 'ridge' && trace && trace.sightings.length >= 2) this.trace.value = null;
   }
@@ -89,8 +94,13 @@ export class PointTrace {
     return traces.find(({ id }) => id === this.trace.value) ?? null;
   }
 
-  private taking(reading: Reading, survey: Survey, choice: TraceChoice): Taking | RefusedWhy {
-    const sighting: Sighting = { id: this.session.services.newId(), reading: reading.id };
+  private taking(
+    sightingId: string,
+    reading: Reading,
+    survey: Survey,
+    choice: TraceChoice,
+  ): Taking | RefusedWhy {
+    const sighting: Sighting = { id: sightingId, reading: reading.id };
     const trace = this.traceNow(survey);
     const waiting = this.waiting(survey);
     const last = (trace?.sightings ?? waiting).at(-1);
@@ -129,11 +139,9 @@ export class PointTrace {
     choice: TraceChoice,
     id: string,
   ): Station {
-    const without = withoutOwnSightings(
-      station,
-      points.map((point) => point.id),
-    );
-    return withTrace(without, { id, obstruction, ...traceFields(choice), sightings: inOrder(points) });
+    const { points: marked, noted } = withNotedMarks(station, points);
+    const without = withoutOwnSightings(station, [...points.map((point) => point.id), ...noted]);
+    return withTrace(without, { id, obstruction, ...traceFields(choice), sightings: inOrder(marked) });
   }
 }
 

@@ -1,7 +1,9 @@
+import { signal } from '@preact/signals-core';
 import type { Reading, Run, Sighting, Survey } from '../../core/survey/survey.ts';
 import type { CaptureSession } from './capture-session.ts';
 import { rawReading } from './raw-reading.ts';
 import type { SensorSample } from './sensor-interfaces.ts';
+import { sampleRow } from './sensor-interfaces.ts';
 import {
   looseSightings,
   stationOf,
@@ -10,7 +12,7 @@ import {
   withTrace,
   withoutOwnSightings,
 } from './station-edits.ts';
-import { sweepSightings } from './swept-sightings.ts';
+import { marksInSweep, sweepSightings, withMarksIn } from './swept-sightings.ts';
 import { SweepStream } from './sweep-stream.ts';
 import type { TraceChoice } from './trace-choice.ts';
 import { FEWEST, traceFields } from './trace-choice.ts';
@@ -24,6 +26,8 @@ export class SweepTake {
   private chunks: string[] = [];
   private failed = false;
   private lastRun: Run | null = null;
+  /** Id of the mark noted last in a sweep. */
+  readonly lastMark = signal<string | null>(null);
 
   constructor(
     private readonly session: CaptureSession,
@@ -46,6 +50,8 @@ export class SweepTake {
     this.stream = new SweepStream(this.session.services.newId(), this.session.axis.value);
     this.chunks = [];
     this.failed = false;
+    this.lastMark.value = null;
+    this.session.news.value = null;
     this.session.onBreak = () => void this.end();
     this.lastRun = null;
     this.session.watchSamples((sample, run) => {
@@ -53,6 +59,18 @@ export class SweepTake {
       const chunk = this.stream?.push(sample);
       if (chunk) void this.store(chunk, run);
     });
+  }
+
+  /** Notes where the phone points now as a mark of that name; the stream up to it is stored at once. */
+  async noteMark(mark: string): Promise<void> {
+    const { stream, session, lastRun: run } = this;
+    const chunk = stream?.cut();
+    if (!stream || !run || !chunk) return;
+    const id = session.services.newId();
+    const [sampleAt] = sampleRow(chunk[chunk.length - 1], Math.round(chunk[0].timeMs));
+    if (!(await this.store(chunk, run, stream, { id, sampleAt, mark }))) return;
+    this.lastMark.value = id;
+    session.tell({ what: 'mark', name: mark });
   }
 
   /** Ends the sweep and waits until all of it is stored. False where there is nothing to make a trace of. */
@@ -82,29 +100,32 @@ export class SweepTake {
     const sweep = this.unfinished();
     const { obstruction } = choice;
     if (!sweep || obstruction === null) return false;
-    const swept = sweepSightings(readingsOf(session.record.survey, sweep), session.services.newId);
+    const chunks = readingsOf(session.record.survey, sweep);
+    const marks = marksInSweep(stationOf(session.record.survey, stationId), sweep);
+    const swept = sweepSightings(chunks, session.services.newId);
     if (swept.sightings.length < FEWEST[choice.shape]) {
       await this.drop();
       return session.refuse('too-short') !== null;
     }
-    const without = (survey: Survey) =>
-      withStation(survey, stationId, (station) => withoutOwnSightings(station, [sweep.id]));
+    const sightings = withMarksIn(swept.sightings, marks, chunks);
+    const without = (ids: string[]) => (survey: Survey) =>
+      withStation(survey, stationId, (station) => withoutOwnSightings(station, ids));
     const fullCircle = swept.fullCircle && choice.shape === 'skyline';
     return session.act({
       edit: (survey) =>
-        withStation(without(survey), stationId, (station) =>
+        withStation(without([sweep.id, ...marks.map(({ id }) => id)])(survey), stationId, (station) =>
           withTrace(station, {
             id: session.services.newId(),
             obstruction,
             ...traceFields({ ...choice, way: 'sweep' }),
             ...(fullCircle && { fullCircle }),
-            sightings: swept.sightings,
+            sightings,
           }),
         ),
-      back: without,
+      back: without([sweep.id]),
       code: 'entry-added',
       title: name,
-      news: { what: 'trace', name, count: swept.sightings.length },
+      news: { what: 'trace', name, count: sightings.length },
     });
   }
 
@@ -118,21 +139,30 @@ export class SweepTake {
     );
   }
 
-  private async store(chunk: readonly SensorSample[], run: Run, stream = this.stream): Promise<void> {
-    if (!stream) return;
+  private async store(
+    chunk: readonly SensorSample[],
+    run: Run,
+    stream = this.stream,
+    mark?: Pick<Sighting, 'id' | 'sampleAt' | 'mark'>,
+  ): Promise<boolean> {
+    if (!stream) return false;
     const { session, stationId } = this;
     const id = session.services.newId();
     this.chunks = [...this.chunks, id];
     const sighting: Sighting = { id: stream.sightingId, readings: this.chunks };
     const reading: Reading = rawReading(id, run.id, stream.axis, chunk);
     const stored = await session.record.addReading(run, reading, (survey) =>
-      withStation(survey, stationId, (station) => withOwnSighting(station, sighting)),
+      withStation(survey, stationId, (station) => {
+        const swept = withOwnSighting(station, sighting);
+        return mark ? withOwnSighting(swept, { ...mark, reading: id }) : swept;
+      }),
     );
     if (stored) session.countStored();
     else {
       this.failed = true;
       void this.end();
     }
+    return stored;
   }
 }
 

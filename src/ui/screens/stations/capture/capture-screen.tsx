@@ -1,4 +1,5 @@
 import { useMemo } from 'preact/hooks';
+import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import type { Station } from '../../../../core/survey/survey.ts';
 import { navigate } from '../../../router.ts';
 import type { SectionProps } from '../../../section.ts';
@@ -9,12 +10,12 @@ import { SittingView } from './sitting-view.tsx';
 import { isOn, StartCard } from './start-card.tsx';
 import { useCapture } from './use-capture.ts';
 
-/** Sighting from a station with the phone. */
-export function CaptureScreen(props: SectionProps & { station: Station }) {
-  const { services, surveyId, station } = props;
+/** Sighting from a station with the phone. `start`: what somebody came for, as the address has it. */
+export function CaptureScreen(props: SectionProps & { station: Station; start?: string }) {
+  const { services, surveyId, station, start } = props;
   const capture = useCapture(services, props.survey);
   const { session } = capture;
-  const sitting = useMemo(() => session && new Sitting(session, station.id), [session, station.id]);
+  const sitting = useMemo(() => session && sittingFor(session, station.id, start), [session, station.id]);
   const practised = session?.orientation.recording ? 'Practice' : null;
   return (
     <FullScreen
@@ -29,4 +30,12 @@ export function CaptureScreen(props: SectionProps & { station: Station }) {
       )}
     </FullScreen>
   );
+}
+
+function sittingFor(session: CaptureSession, stationId: string, start: string | undefined): Sitting {
+  const sitting = new Sitting(session, stationId);
+  if (start === 'mark') sitting.task.value = 'mark';
+  if (start === 'check' || start === 'faces') sitting.task.value = 'check';
+  if (start === 'faces') sitting.checkWay.value = 'two-face';
+  return sitting;
 }

@@ -1,19 +1,11 @@
 import { useState } from 'preact/hooks';
 import { takeMark } from '../../../../app/capture/heading-takes.ts';
+import { marksOf } from '../../../../app/capture/marks.ts';
 import { undoLast } from '../../../../app/capture/undo-last.ts';
-import type { Survey } from '../../../../core/survey/survey.ts';
 import { useApp } from '../../../app-context.ts';
 import { closureWords } from '../heading-words.ts';
 import type { Sitting } from './sitting.ts';
 import { Thumb } from './thumb.tsx';
-
-/** Names of marks sighted anywhere in the survey. */
-export function marksOf({ stations }: Survey): string[] {
-  const names = stations.flatMap(({ traces, markSightings = [] }) =>
-    [...traces.flatMap(({ sightings }) => sightings), ...markSightings].flatMap(({ mark }) => mark ?? []),
-  );
-  return [...new Set(names)];
-}
 
 /** Sighting a recognisable point by name; sighted again, it closes the horizon. */
 export function MarkPanel({ sitting }: { sitting: Sitting }) {

@@ -1,9 +1,13 @@
+import type { StoredNews } from '../../../../app/capture/capture-news.ts';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import { newsWords } from './capture-words.ts';
 
+/** What is told while the phone is turned. */
+const DURING = new Set<StoredNews['what']>(['open-start', 'mark']);
+
 /** What goes on; null where nothing does. */
 function phaseWords({ phase, news }: CaptureSession): string | null {
-  if (phase.value !== 'sweeping' || (news.value?.kind === 'stored' && news.value.what === 'open-start'))
+  if (phase.value !== 'sweeping' || (news.value?.kind === 'stored' && DURING.has(news.value.what)))
     return null;
   return 'Follow the edge, slowly.';
 }

@@ -1,6 +1,8 @@
 import { useState } from 'preact/hooks';
 import { undoLast } from '../../../../app/capture/undo-last.ts';
 import { useApp } from '../../../app-context.ts';
+import { freeMarkName } from '../../../../app/capture/marks.ts';
+import { markable, MarkRow } from './mark-row.tsx';
 import { ObstructionSheet } from './obstruction-sheet.tsx';
 import type { Sitting } from './sitting.ts';
 import { Switches, Thumb } from './thumb.tsx';
@@ -15,6 +17,7 @@ const WAYS = [
 export function TracePanel({ sitting }: { sitting: Sitting }) {
   const services = useApp();
   const [sheet, setSheet] = useState<'before' | 'after' | null>(null);
+  const [naming, setNaming] = useState(false);
   const { session, sweep, points } = sitting;
   const choice = sitting.choice.value;
   const survey = session.record.survey;
@@ -24,12 +27,19 @@ export function TracePanel({ sitting }: { sitting: Sitting }) {
   const atWork = points.trace.value !== null || waiting.length > 0;
   const name = sitting.nameOf(choice.obstruction);
 
+  const point = markable(sitting);
+  const mark = () => {
+    if (sweeping) void sweep.noteMark(freeMarkName(survey));
+    setNaming(sweeping || !naming);
+  };
   const endSweep = async () => {
     if (!(await sweep.end())) return;
     if (choice.obstruction === null) setSheet('after');
     else if (await sweep.finish(choice, name)) sitting.traced();
   };
   const sight = async () => {
+    setNaming(false);
+    sweep.lastMark.value = null;
     await points.sight(choice);
     if (choice.way !== 'ridge') return;
     if (choice.obstruction === null && points.enough(choice)) setSheet('after');
@@ -72,6 +82,14 @@ export function TracePanel({ sitting }: { sitting: Sitting }) {
         </button>
         <button
           type="button"
+          disabled={!sweeping && point === null}
+          aria-expanded={naming && point !== null}
+          onClick={mark}
+        >
+          {sweeping ? 'Mark here' : 'A mark?'}
+        </button>
+        <button
+          type="button"
           disabled={sweeping}
           onClick={() => void undoLast(services, session)}
           aria-label="Undo the last"
@@ -79,13 +97,17 @@ export function TracePanel({ sitting }: { sitting: Sitting }) {
           Undo
         </button>
       </div>
-      <Switches
-        label="How it is traced"
-        value={choice.way}
-        options={WAYS}
-        disabled={sweeping || atWork}
-        onChoose={(way) => sitting.choose({ way })}
-      />
+      {naming && point !== null ? (
+        <MarkRow sitting={sitting} id={point} onDone={() => setNaming(false)} />
+      ) : (
+        <Switches
+          label="How it is traced"
+          value={choice.way}
+          options={WAYS}
+          disabled={sweeping || atWork}
+          onChoose={(way) => sitting.choose({ way })}
+        />
+      )}
       {unfinished ? (
         <div class="thumbs">
           <button type="button" class="thumb" onClick={() => void sweep.drop()}>
@@ -99,7 +121,11 @@ export function TracePanel({ sitting }: { sitting: Sitting }) {
         <Thumb
           session={session}
           label={sweeping ? 'End sweep' : 'Start sweep'}
-          onPress={() => (sweeping ? void endSweep() : sweep.begin())}
+          onPress={() => {
+            setNaming(false);
+            if (sweeping) void endSweep();
+            else sweep.begin();
+          }}
         />
       ) : (
         <div class="thumbs">
