@@ -18,10 +18,11 @@ const LANGUAGE_IDS = LANGUAGES.map(({ id }) => id);
 
 export const report: Command = {
   name: 'report',
-  usage: 'FILE --html [options]',
+  usage: 'FILE --html|--pdf [options]',
   summary: 'The report of a survey: a letter for the house, with the evidence behind it.',
   help: `
   --html                       one page that needs nothing beside it, to read, send and print
+  --pdf                        the same as a PDF file, with its typeface inside; letters that it lacks are boxes
   --csv                        every figure as a table: quantity, plane, station, obstruction, period, value,
                                low, high, unit, ids, and what it is compared with; unrounded, decimal points
   --json                       the same on standard output (or in --out): { format: "noonmark-figures",
@@ -30,7 +31,7 @@ export const report: Command = {
                                null in a month without sun; period is "year", "month 06", "month 06 hour 13"
                                (local standard time) or "year azimuth 20 to 41.5"
   --out FILE                   where to; for one form at a time. Without it beside the survey, as
-                               NAME-report.html and NAME-figures.csv
+                               NAME-report.html, NAME-report.pdf, NAME-figures.csv
   --replace                    writes over a former report of the same name; any other file is left as it is
   --language LANGUAGE          ${LANGUAGE_IDS.join(', ')}
   --units metric|us            metric where it is left out
@@ -46,6 +47,7 @@ The report names the fingerprint of the survey; "check" tells that of a file.
 Nothing is written where a file cannot be used; exit code 1 then, with what is wrong and where.`,
   options: {
     html: { type: 'boolean' },
+    pdf: { type: 'boolean' },
     csv: { type: 'boolean' },
     json: { type: 'boolean' },
     out: { type: 'string' },

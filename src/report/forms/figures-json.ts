@@ -19,7 +19,11 @@ export interface FiguresDocument {
   figures: FigureRow[];
 }
 
-export function figuresDocument(report: ReportInput): FiguresDocument {
+/** The figures of a report as JSON: a `FiguresDocument`. */
+export const figuresJson = (report: ReportInput): string =>
+  `${JSON.stringify(figuresDocument(report), null, 1)}\n`;
+
+function figuresDocument(report: ReportInput): FiguresDocument {
   const { survey, assessment, fingerprint, madeOn, version } = report;
   const { source, name, reference } = assessment.climate;
   return {
