@@ -1,15 +1,13 @@
-import type { jsPDF } from 'jspdf';
 import type { ReportContents } from '../../contents/report-contents.ts';
 import { documentFacts, outlineEntries, withFacts } from './document-facts.ts';
 import { paginate } from './paginate.ts';
 import type { PdfFonts } from './pdf-fonts.ts';
-import { FACES } from './pdf-fonts.ts';
 import type { PageOf } from './contents-list.ts';
 import { paintFoot } from './page-foot.ts';
 import { reportSlugs } from './section-slugs.ts';
 import type { Setting } from './setting.ts';
 import { settingFor } from './setting.ts';
-import { Sheet } from './sheet.ts';
+import { openSheet } from './open-sheet.ts';
 import { space } from './slug.ts';
 import { STYLES } from './text-style.ts';
 import { textSlugs } from './text-slugs.ts';
@@ -33,21 +31,13 @@ export async function pdfDocument(
   fonts: PdfFonts,
   options: PdfOptions,
 ): Promise<Uint8Array> {
-  const { jsPDF: Document } = await import('jspdf');
   const setter = new Typesetter(fonts, options.drawText);
   const setting = settingFor(contents.paper, contents.firm.colour, setter);
   const { width, height } = setting.paper;
-  const doc = new Document({
-    unit: 'pt',
-    format: [width, height],
-    compress: true,
-    precision: 3,
-    putOnlyUsedFonts: true,
-  });
-  for (const face of FACES) addFont(doc, face, fonts[face]);
+  const sheet = await openSheet(fonts, setter, setting.paper);
+  const { doc } = sheet;
   documentFacts(doc, contents, options.madeOn);
   const pages = layPages(contents, setting);
-  const sheet = new Sheet(doc, setter, height);
   pages.placed.forEach((page, place) => {
     if (place > 0) doc.addPage([width, height]);
     for (const { slug, y } of page) slug.paint(sheet, setting.top + y);
@@ -55,7 +45,7 @@ export async function pdfDocument(
   });
   outlineEntries(doc, contents, pages.pageOf);
   const file = withFacts(doc.output(), contents);
-  return Uint8Array.from(file, (byte) => byte.charCodeAt(0));
+  return Uint8Array.from({ length: file.length }, (_, i) => file.charCodeAt(i));
 }
 
 function layPages(contents: ReportContents, setting: Setting) {
@@ -69,11 +59,4 @@ function layPages(contents: ReportContents, setting: Setting) {
     for (const { slug } of page) if (slug.section !== undefined) numbers.set(slug.section, place + 1);
   });
   return { placed, pageOf };
-}
-
-function addFont(doc: jsPDF, face: string, bytes: Uint8Array): void {
-  let letters = '';
-  for (let i = 0; i < bytes.length; i += 8192) letters += String.fromCharCode(...bytes.subarray(i, i + 8192));
-  doc.addFileToVFS(`${face}.ttf`, letters);
-  doc.addFont(`${face}.ttf`, face, 'normal');
 }
