@@ -37,6 +37,13 @@ export function cameraAt(azimuth: number, elevation: number): DeviceAngles {
   return anglesOf({ x, y: cross(z, x), z });
 }
 
+/** The same held upside down. */
+export function cameraTurnedOver(azimuth: number, elevation: number): DeviceAngles {
+  const z = minus(vectorOf({ azimuth, elevation }));
+  const x = minus(rightOf(azimuth));
+  return anglesOf({ x, y: cross(z, x), z });
+}
+
 /** A phone whose top edge points there, screen up. */
 export function topEdgeAt(azimuth: number, elevation: number): DeviceAngles {
   const y = vectorOf({ azimuth, elevation });

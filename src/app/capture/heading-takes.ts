@@ -11,20 +11,20 @@ const withCheck = (survey: Survey, stationId: string, check: HeadingCheck): Surv
     headingChecks: [...(station.headingChecks ?? []), { ...check, order: nextOrder(station.headingChecks) }],
   }));
 
-/** Takes a heading check; gives its id. It corrects all that its run sighted and found open, earlier too. */
+/** Takes a heading check. It corrects all that its run sighted and found open, earlier too. */
 export async function takeCheck(
   session: CaptureSession,
   stationId: string,
   facts: CheckFacts,
-): Promise<string | null> {
+): Promise<{ id: string; reading: Reading } | null> {
   const id = session.services.newId();
-  const taken = await session.takeHeld((reading) => ({
+  const reading = await session.takeHeld((reading) => ({
     edit: (survey) => withCheck(survey, stationId, { ...facts, id, reading: reading.id }),
     code: 'entry-added',
     title: 'Heading check',
     news: { what: 'check' },
   }));
-  return taken && id;
+  return reading && { id, reading };
 }
 
 /** Sights a mark by name. Sighted again in the same run, it closes the horizon; in another, it ties the two. */
@@ -40,21 +40,22 @@ export async function takeMark(session: CaptureSession, stationId: string, mark:
   }));
 }
 
-/** Stores the two readings of a mark, the phone turned upside down between them. */
+/** Stores the two readings of a mark, the phone turned upside down between them; gives the check's id. */
 export async function storeFaces(
   session: CaptureSession,
   stationId: string,
   upright: Reading,
   turned: Reading,
-): Promise<void> {
-  await session.act({
+): Promise<string | null> {
+  const id = session.services.newId();
+  const stored = await session.act({
     edit: (survey) =>
       withStation(survey, stationId, (station) => ({
         ...station,
         indexChecks: [
           ...(station.indexChecks ?? []),
           {
-            id: session.services.newId(),
+            id,
             order: nextOrder(station.indexChecks),
             upright: upright.id,
             turned: turned.id,
@@ -65,4 +66,5 @@ export async function storeFaces(
     title: 'Two-face check',
     news: { what: 'face-turned' },
   });
+  return stored ? id : null;
 }

@@ -31,11 +31,12 @@ export function CheckPanel({ sitting }: { sitting: Sitting }) {
   useEffect(() => {
     // a shadow is laid along the phone's edge: nobody needs to look towards the sun, nor the camera
     const before = session.axis.value;
+    sitting.sightingAxis = before;
     if (way === 'sun-shadow') session.axis.value = 'top-edge';
     return () => {
       session.axis.value = before;
     };
-  }, [way, session]);
+  }, [way, session, sitting]);
   return (
     <>
       <Switches
@@ -44,6 +45,7 @@ export function CheckPanel({ sitting }: { sitting: Sitting }) {
         options={WAYS}
         onChoose={(wanted) => (sitting.checkWay.value = wanted)}
       />
+      <CheckResult sitting={sitting} />
       {way === 'two-face' ? <FacesPanel sitting={sitting} /> : <MethodPanel sitting={sitting} method={way} />}
     </>
   );
@@ -55,7 +57,6 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
   const [mark, setMark] = useState('');
   const [bearing, setBearing] = useState('');
   const [frame, setFrame] = useState<(typeof FRAMES)[number]['value']>('true');
-  const [last, setLast] = useState<string | null>(null);
   const [height, setHeight] = useState('');
   const [length, setLength] = useState('');
   const metres = { least: 0.01, most: 1000, unit: ' m', optional: true };
@@ -71,12 +72,11 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
         valueOf(long) !== undefined && { shadowHeight: valueOf(tall), shadowLength: valueOf(long) }),
       ...(frame === 'grid' && { gridZone: utmZone(session.record.survey.site) }),
     };
-    const id = await takeCheck(session, stationId, facts);
-    if (id) setLast(id);
+    const taken = await takeCheck(session, stationId, facts);
+    if (taken) sitting.checked(taken, facts.mark ?? '');
   };
   return (
     <>
-      <CheckResult sitting={sitting} id={last} />
       {caution && (
         <p class="banner">
           <strong>{caution}</strong>
@@ -145,7 +145,8 @@ function Measured(props: { label: string; value: string; onInput: (value: string
 }
 
 /** What the last check found, and what speaks against it. */
-function CheckResult({ sitting, id }: { sitting: Sitting; id: string | null }) {
+function CheckResult({ sitting }: { sitting: Sitting }) {
+  const id = sitting.lastCheck.value;
   const pointed = sitting.session.pointed.value;
   const found = pointed?.runs.flatMap(({ checks }) => checks).find(({ check }) => check === id);
   if (!pointed || !found) return null;

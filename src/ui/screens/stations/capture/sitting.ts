@@ -1,10 +1,11 @@
 import { signal } from '@preact/signals';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
+import { FacesTake } from '../../../../app/capture/faces-take.ts';
 import { OpenTake } from '../../../../app/capture/open-take.ts';
 import { PointTrace } from '../../../../app/capture/point-trace.ts';
 import { SweepTake } from '../../../../app/capture/sweep-take.ts';
 import type { TraceChoice } from '../../../../app/capture/trace-choice.ts';
-import type { HeadingMethodId } from '../../../../core/survey/survey.ts';
+import type { HeadingMethodId, Reading, SightingAxis } from '../../../../core/survey/survey.ts';
 
 /** The way of a heading check, or the test of the phone's own inclination. */
 export type CheckWay = HeadingMethodId | 'two-face';
@@ -26,6 +27,11 @@ export class Sitting {
   readonly sweep: SweepTake;
   readonly points: PointTrace;
   readonly open: OpenTake;
+  readonly faces: FacesTake;
+  /** The heading check taken last. */
+  readonly lastCheck = signal<string | null>(null);
+  /** What things are sighted with, whatever a shadow is laid along. */
+  sightingAxis: SightingAxis;
 
   constructor(
     readonly session: CaptureSession,
@@ -34,11 +40,22 @@ export class Sitting {
     this.sweep = new SweepTake(session, stationId);
     this.points = new PointTrace(session, stationId);
     this.open = new OpenTake(session, stationId);
+    this.faces = new FacesTake(session, stationId);
+    this.sightingAxis = session.axis.peek();
   }
 
   /** Whether the shadow of the sun is laid along the phone's edge: nobody needs a picture then. */
   get byShadow(): boolean {
     return this.task.value === 'check' && this.checkWay.value === 'sun-shadow';
+  }
+
+  /** After a heading check: on to the two-face check, where this phone has none yet. */
+  checked({ id, reading }: { id: string; reading: Reading }, mark: string): void {
+    this.lastCheck.value = id;
+    const axis = reading.axis ?? 'camera';
+    const isOfMark = mark !== '' && axis === this.sightingAxis;
+    if (this.faces.leadOn(this.sightingAxis, isOfMark ? reading : null, mark))
+      this.checkWay.value = 'two-face';
   }
 
   choose(part: Partial<TraceChoice>): void {
