@@ -42,9 +42,17 @@ export class Speech {
 
   /** kWh/m2, or kWh to the square foot. */
   irradiation(kwhPerSquareMetre: number): string {
-    const isUs = this.choices.units === 'us';
-    const value = isUs ? kwhPerSquareMetre * SQUARE_FOOT : kwhPerSquareMetre;
-    return `${this.number(value, value < 10 ? 1 : 0)}${THIN}kWh/${isUs ? 'ft²' : 'm²'}`;
+    const value = this.irradiationNumber(kwhPerSquareMetre);
+    return `${this.number(value, value < 10 ? 1 : 0)}${THIN}${this.irradiationUnit}`;
+  }
+
+  /** The same in the chosen unit, for axes and tables that name the unit once. */
+  irradiationNumber(kwhPerSquareMetre: number): number {
+    return this.choices.units === 'us' ? kwhPerSquareMetre * SQUARE_FOOT : kwhPerSquareMetre;
+  }
+
+  get irradiationUnit(): string {
+    return `kWh/${this.choices.units === 'us' ? 'ft²' : 'm²'}`;
   }
 
   /** Degrees; whole ones by default. */
@@ -94,6 +102,12 @@ export class Speech {
   /** Minutes after midnight as the clock shows them. */
   clock(minutes: number): string {
     return this.date(minutes * 60_000, { timeStyle: 'short', timeZone: 'UTC' });
+  }
+
+  /** An hour of the day for an axis: "7", or "7 AM" where the day has twice twelve. */
+  hour(hour: number): string {
+    const format = new Intl.DateTimeFormat(this.tag, { hour: 'numeric', timeZone: 'UTC' });
+    return format.resolvedOptions().hour12 ? format.format(hour * 3_600_000) : String(hour);
   }
 
   month(month: number, style: 'long' | 'short' | 'narrow' = 'long'): string {

@@ -1,4 +1,3 @@
-import { atAGlance } from './at-a-glance.ts';
 import { compared } from './compared.ts';
 import { fieldBook } from './evidence/field-book.ts';
 import { headingEvidence } from './evidence/heading-evidence.ts';
@@ -9,9 +8,27 @@ import { photoPages } from './evidence/photo-pages.ts';
 import { planesAndStations } from './evidence/planes-and-stations.ts';
 import { programmeTable } from './evidence/programme-table.ts';
 import { siteFacts } from './evidence/site-facts.ts';
+import { atAGlance } from './letter/at-a-glance.ts';
+import { cautions } from './letter/cautions.ts';
+import { howItMayChange } from './letter/how-it-may-change.ts';
+import { howSure } from './letter/how-sure.ts';
+import { monthByMonth } from './letter/month-by-month.ts';
+import { sunAndRoof } from './letter/sun-and-roof.ts';
+import { whatCouldBeDone } from './letter/what-could-be-done.ts';
+import { whatToExpect } from './letter/what-to-expect.ts';
 import type { SectionKind } from './section-kind.ts';
 
-const LETTER: readonly SectionKind[] = [atAGlance, compared];
+const LETTER: readonly SectionKind[] = [
+  atAGlance,
+  sunAndRoof,
+  monthByMonth,
+  whatCouldBeDone,
+  whatToExpect,
+  howItMayChange,
+  compared,
+  howSure,
+  cautions,
+];
 
 const EVIDENCE: readonly SectionKind[] = [
   programmeTable,

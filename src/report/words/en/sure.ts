@@ -1,0 +1,40 @@
+/** The range, where it comes from, and what nobody could see. */
+export const EN_SURE = {
+  'sure.heading': 'How sure are we?',
+  'sure.answer': (low: string, high: string, roof: string) =>
+    `We expect that ${low} to ${high} of its sunlight reaches ${roof}.`,
+  'sure.answer-same': (access: string, roof: string) =>
+    `We expect that ${access} of its sunlight reaches ${roof}, give or take less than one in a hundred.`,
+  'sure.times': 'Such a range should hold the truth 95 times in 100.',
+  'sure.answer-none': 'No range was worked out for this report.',
+  'sure.why': 'What makes it less than certain, the largest part first:',
+  'sure.source-heading': 'Which way the phone pointed. A compass is never quite right.',
+  'sure.source-elevation-index': 'How level the phone takes level to be.',
+  'sure.source-pointing': 'The hand that aims. It shakes a little.',
+  'sure.source-gaps': 'The shape of things between the points that were aimed at.',
+  'sure.source-unseen': 'Parts of the sky that nobody looked at.',
+  'sure.source-transmittance': 'How much light the trees let through.',
+  'sure.source-diffuse-share': 'How much of the light comes from the whole sky and not from the sun.',
+  'sure.cures': 'What would make it more certain:',
+  'sure.cure-heading-check': 'Check the compass by the shadow of a thing, or by a mark whose place is known.',
+  'sure.cure-second-heading-check': 'Check the compass a second time.',
+  'sure.cure-known-bearing': 'Check one direction on a map.',
+  'sure.cure-two-face-check': 'Aim at one mark twice, with the phone upright and turned over.',
+  'sure.cure-sight-again': 'Aim at each point four times.',
+  'sure.cure-more-sightings': 'Aim at twice as many points along each edge.',
+  'sure.cure-look': 'Look at the parts of the sky that are still missing.',
+  'sure.cure-measure-transmittance': 'Measure how much light the trees let through.',
+  'sure.cure-weather-file': 'Use the records of a weather station close by.',
+  'sure.unseen': 'What nobody could see',
+  'sure.unseen-note': 'We counted these parts of the sky as open. The range allows for shade there.',
+  'sure.unseen-from': (roof: string, station: string, share: string, places: string) =>
+    `${roof}, seen from “${station}”: ${share} of its light comes from parts that nobody looked at. They lie ${places}.`,
+  'sure.unseen-place': (where: string, share: string) => `${where} (${share})`,
+  'sure.unseen-least':
+    'Where a roof has more than one measured place, this is the one from which the least was seen.',
+  'sure.toward': (point: string) => `toward the ${point}`,
+  'sure.between': (from: string, to: string) => `from ${from} round to ${to}`,
+  'sure.all-around': 'all around',
+  'sure.all-seen': 'Every part of the sky that counts was looked at.',
+  'sure.unmeasured': (roofs: string) => `Not measured, so not known: ${roofs}.`,
+} as const;
