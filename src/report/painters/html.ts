@@ -12,9 +12,7 @@ const CONTENT_POLICY =
  * prints ink on white on the paper chosen.
  */
 export function htmlPage(contents: ReportContents): string {
-  const { language, title, sections, foot, frame } = contents;
-  const part = (wanted: Part) => sections.filter((section) => section.part === wanted);
-  const [letter, evidence] = [part('letter'), part('evidence')];
+  const { language, title } = contents;
   return `<!doctype html>
 <html lang="${plainMarkup(language)}">
 <head>
@@ -28,7 +26,17 @@ export function htmlPage(contents: ReportContents): string {
 </style>
 </head>
 <body>
-${headMarkup(contents)}
+${htmlBody(contents)}</body>
+</html>
+`;
+}
+
+/** What stands in the page, without its style. */
+export function htmlBody(contents: ReportContents): string {
+  const { sections, foot, frame } = contents;
+  const part = (wanted: Part) => sections.filter((section) => section.part === wanted);
+  const [letter, evidence] = [part('letter'), part('evidence')];
+  return `${headMarkup(contents)}
 <main>
 <div>
 ${letter.slice(0, 1).map(sectionMarkup).join('')}
@@ -38,8 +46,6 @@ ${letter.slice(1).map(sectionMarkup).join('\n')}
 ${evidence.length > 0 ? evidenceMarkup(frame.evidence, evidence) : ''}
 </main>
 <footer><p>${wordsMarkup(foot)}</p></footer>
-</body>
-</html>
 `;
 }
 

@@ -5,7 +5,7 @@ import { svgText } from '../svg.ts';
 import { base64 } from './base64.ts';
 import { plainMarkup, wordsMarkup } from './markup-text.ts';
 
-/** The page's own inks, so that pictures turn with its paper. */
+/** The inks of the frame a picture stands in: the style sheet has them. */
 const PAGE_PALETTE: Palette = {
   ink: 'var(--ink)',
   faint: 'var(--faint)',
@@ -17,6 +17,8 @@ const PAGE_PALETTE: Palette = {
 
 /** From this many columns on a table is set smaller on paper. */
 const MANY_COLUMNS = 8;
+/** Up to this many rows a table is kept whole on paper: the months of a year with their sum. */
+const FEW_ROWS = 14;
 
 /** Blocks of one section as markup; `id` is the section's and goes before the ids inside it. */
 export function blocksMarkup(blocks: readonly Block[], id: string): string {
@@ -74,14 +76,10 @@ function pictureMarkup(picture: Picture, caption: string, alternative: string, i
     idPrefix: id,
     palette: PAGE_PALETTE,
     font: 'var(--plain)',
-    attributes: `role="img" aria-label="${plainMarkup(alternative)}"`,
+    // a small picture is not blown up to the width of the page
+    attributes: `role="img" aria-label="${plainMarkup(alternative)}" style="max-width:${Math.round(picture.width * 1.25)}px"`,
   });
-  // a picture made for a wide sheet keeps its words readable on a phone and is moved inside its frame
-  const wide = picture.width > 480 && picture.width > picture.height;
-  const frame = wide
-    ? `<div class="scroll picture wide" role="group" tabindex="0" aria-labelledby="${id}">${svg}</div>`
-    : `<div class="picture">${svg}</div>`;
-  return `<figure>${frame}<figcaption id="${id}">${wordsMarkup(caption)}</figcaption></figure>`;
+  return `<figure><div class="picture">${svg}</div><figcaption>${wordsMarkup(caption)}</figcaption></figure>`;
 }
 
 function tableMarkup({ caption, columns, rows, sums }: Table, id: string): string {
@@ -97,9 +95,12 @@ function tableMarkup({ caption, columns, rows, sums }: Table, id: string): strin
   const heads = columns.map(({ head }, column) =>
     head === '' ? `<td${number(column)}></td>` : `<th scope="col"${number(column)}>${wordsMarkup(head)}</th>`,
   );
-  const many = columns.length >= MANY_COLUMNS ? ' class="many"' : '';
+  const classes = [
+    ...(columns.length >= MANY_COLUMNS ? ['many'] : []),
+    ...(rows.length + (sums?.length ?? 0) <= FEW_ROWS ? ['short'] : []),
+  ];
   return (
-    `<div class="scroll" role="group" tabindex="0" aria-labelledby="${id}"><table${many}>` +
+    `<div class="scroll" role="group" tabindex="0" aria-labelledby="${id}"><table class="${classes.join(' ')}">` +
     `<caption id="${id}">${wordsMarkup(caption)}</caption><thead><tr>${heads.join('')}</tr></thead>` +
     `<tbody>${rows.map(row).join('')}</tbody>` +
     (sums && sums.length > 0 ? `<tbody class="sums">${sums.map(row).join('')}</tbody>` : '') +

@@ -1,12 +1,16 @@
 import type { ReportContents } from '../../contents/report-contents.ts';
 import { styleString } from './markup-text.ts';
 
-/** Paper and ink on a screen; `print` is always ink on white. */
+/**
+ * Paper and ink on a screen; print is always ink on white. After dark a picture stays ink on a slip of paper, since the words
+ * about it speak of what is black.
+ */
 const INKS = `
 :root{color-scheme:light;--paper:#fbf8f0;--sheet:#f1ecdf;--ink:#14120d;--faint:#4d483c;--rule:#c4baa3;--firm:var(--ink);
 --serif:ui-serif,'Iowan Old Style','Palatino Linotype',Palatino,'Book Antiqua','Noto Serif','DejaVu Serif',serif;
 --plain:system-ui,'Segoe UI',Roboto,'Noto Sans',sans-serif}
-@media screen and (prefers-color-scheme:dark){:root{color-scheme:dark;--paper:#14120d;--sheet:#211e17;--ink:#f6f1e3;--faint:#c9c1ad;--rule:#4a4436}}
+@media screen and (prefers-color-scheme:dark){:root{color-scheme:dark;--paper:#14120d;--sheet:#211e17;--ink:#f6f1e3;--faint:#c9c1ad;--rule:#4a4436}
+.picture{--paper:#ebe5d6;--sheet:#ddd5c1;--ink:#14120d;--faint:#453f33;--rule:#a99f88;padding:.75rem}}
 @media print{:root{--paper:#fff;--sheet:#fff;--ink:#000;--faint:#33302a;--rule:#9c937d}}`;
 
 const TYPE = `
@@ -63,7 +67,8 @@ main>div:first-child>section:first-of-type{margin-top:1.75rem}
 @media (min-width:37.51em){.figures>div+div{border-left:1px solid var(--rule);padding-left:1.25rem}}
 figure{margin-top:1.5rem}
 figcaption{margin-top:.5rem;max-width:38rem}
-.picture svg{display:block;max-width:100%;height:auto;margin:0 auto}
+.picture{background:var(--paper)}
+.picture svg{display:block;width:100%;height:auto;margin:0 auto}
 .scroll{overflow-x:auto;overscroll-behavior-x:contain}
 table{border-collapse:collapse;width:100%;border-bottom:2px solid var(--ink);font-size:.9375rem;line-height:1.4;overflow-wrap:break-word}
 caption{text-align:left;padding-bottom:.5rem;caption-side:top}
@@ -76,6 +81,7 @@ td{min-width:2.5rem;max-width:22rem}
 tbody tr+tr{border-top:1px solid var(--rule)}
 .number{text-align:right;white-space:nowrap}
 thead .number{white-space:normal}
+.number+:not(.number){padding-left:1rem}
 .sums{border-top:1px solid var(--ink)}
 .sums th,.sums td{font-weight:600}
 .many,.many thead th{font-size:.875rem}
@@ -85,7 +91,7 @@ thead .number{white-space:normal}
 .pairs>div+div{border-top:1px solid var(--rule)}
 .pairs dt{color:var(--faint)}
 @media (max-width:30em){.pairs>div{grid-template-columns:1fr}}
-.caution{border:2px solid var(--ink);padding:.875rem 1.125rem 1rem;max-width:42rem}
+.caution{border:2px solid var(--ink);padding:.875rem 1.125rem 1rem}
 .caution h3{margin-top:0}
 .caution ul{margin-top:.5rem}
 .photos{display:grid;grid-template-columns:repeat(auto-fill,minmax(min(100%,17rem),1fr));gap:1.25rem}
@@ -94,9 +100,9 @@ thead .number{white-space:normal}
 .missing{margin:0;border:1px dashed var(--faint);padding:2rem 1rem;text-align:center}
 footer{margin-top:4rem;border-top:1px solid var(--ink);padding-top:.75rem;font-size:.875rem;color:var(--faint)}`;
 
-/** On a phone wide pictures keep their words legible; on a desk the list of contents stands in the margin. */
+/** On a phone pictures take the whole width; on a desk the list of contents stands in the margin. */
 const SIZES = `
-@media screen and (max-width:37.5em){.picture.wide svg{max-width:none;width:max(100%,34rem)}h1{font-size:1.75rem}h2{font-size:1.375rem}.answer{font-size:1.25rem}}
+@media screen and (max-width:37.5em){.picture{margin:0 -1rem}h1{font-size:1.75rem}h2{font-size:1.375rem}.answer{font-size:1.25rem}}
 @media screen and (min-width:72em){
 body{max-width:65rem;padding:3rem 0 5rem 19rem}
 nav{position:fixed;top:3rem;left:max(1.5rem,calc(50vw - 32.5rem));width:15rem;margin:0;max-height:calc(100vh - 6rem);overflow-y:auto;font-size:.9375rem;line-height:1.35}}`;
@@ -123,9 +129,9 @@ section{margin-top:18pt;padding-top:7pt}
 .starts-page{break-before:page;margin-top:0}
 .part+.starts-page{break-before:auto}
 main>div:first-child>.starts-page:first-child{break-before:auto}
-h2,h3,.part,caption,.figures dt{break-after:avoid}
+h2,h3,.part,.answer,caption,.figures dt,p:has(+figure),p:has(+.scroll){break-after:avoid}
 p,li,dd{orphans:3;widows:3}
-.answer,figure,.figures,.figures>div,tr,.pairs>div,.caution,.photos figure{break-inside:avoid}
+.answer,figure,.short,.figures,.figures>div,tr,.pairs>div,.caution,.photos figure{break-inside:avoid}
 figcaption,caption{break-before:avoid}
 .scroll{overflow:visible}
 thead{display:table-header-group}
