@@ -5,6 +5,7 @@ import type { AppServices, SampleSurvey } from './app/app-services.ts';
 import { offerUpdates } from './app/update-flow.ts';
 import { backupDatabase } from './storage/backup-database.ts';
 import { Connection } from './storage/connection.ts';
+import { draftDatabase } from './storage/draft-database.ts';
 import { photoDatabase } from './storage/photo-database.ts';
 import { sha256Of } from './storage/sha256-of.ts';
 import { surveyDatabase } from './storage/survey-database.ts';
@@ -64,6 +65,7 @@ const services: AppServices = {
   weather: weatherDatabase(connection, now),
   photos: photoDatabase(connection, now),
   backup: backupDatabase({ connection, checker, now }),
+  drafts: draftDatabase(connection),
   hash: sha256Of,
   location: deviceLocation,
   assess: new AssessOnWorker(

@@ -4,6 +4,7 @@ import type { AppState } from './app-state.ts';
 import type { AssessClient } from './assess-client.ts';
 import type { CaptureDevices } from './capture/sensor-interfaces.ts';
 import type { BackupStore } from './backup/backup-store.ts';
+import type { DraftStore } from './draft-store.ts';
 import type { LocationSource } from './location-source.ts';
 import type { PhotoStore } from './photo-store.ts';
 import type { SurveyStore } from './survey-store.ts';
@@ -24,6 +25,7 @@ export interface AppServices {
   weather: WeatherStore;
   photos: PhotoStore;
   backup: BackupStore;
+  drafts: DraftStore;
   location: LocationSource;
   assess: AssessClient;
   /** What a capture needs of the device; loaded when the first one is opened. */

@@ -29,6 +29,9 @@ const UPGRADES: ((database: Database) => void)[] = [
     database.createObjectStore('history', { keyPath: ['survey', 'number'] });
     database.createObjectStore('photos', { keyPath: 'sha256' });
   },
+  (database) => {
+    database.createObjectStore('drafts', { keyPath: ['survey', 'form'] });
+  },
 ];
 
 /** Opens the database, bringing its stores up to this version. */

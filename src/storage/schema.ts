@@ -2,11 +2,12 @@ import type { DBSchema } from 'idb';
 import type { JsonValue } from '../core/survey/json-value.ts';
 import type { Stamp } from '../core/sync-protocol/stamp.ts';
 import type { FieldChange } from '../core/survey/field-changes.ts';
+import type { FormDraft } from '../app/draft-store.ts';
 import type { Step, SurveySummary } from '../app/survey-store.ts';
 import type { WeatherFileSummary } from '../app/weather-store.ts';
 
 export const DATABASE_NAME = 'noonmark';
-export const DATABASE_VERSION = 2;
+export const DATABASE_VERSION = 3;
 
 /** One line of the list, kept beside the fields it is drawn from, in the same transaction. */
 export interface SurveyRow extends SurveySummary {
@@ -67,4 +68,6 @@ export interface NoonmarkSchema extends DBSchema {
   /** Apart from the list, so that listing reads no megabytes. */
   'weather-bytes': { key: string; value: { sha256: string; contents: ArrayBuffer } };
   device: { key: DeviceRow['name']; value: DeviceRow };
+  /** Forms half typed; of this device alone. */
+  drafts: { key: [survey: string, form: string]; value: FormDraft };
 }

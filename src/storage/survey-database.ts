@@ -1,7 +1,8 @@
 import { AppError } from '../app/app-error.ts';
 import type { Step, StoredSurvey, SurveyStore, SurveySummary } from '../app/survey-store.ts';
 import { fieldsOf, type FieldChange } from '../core/survey/field-changes.ts';
-import type { Parsed, Problem } from '../core/survey/problem.ts';
+import { problemInWords } from '../core/survey/path-words.ts';
+import type { Parsed } from '../core/survey/problem.ts';
 import type { Survey } from '../core/survey/survey.ts';
 import type { Connection } from './connection.ts';
 import { stampOfAct } from './device-stamps.ts';
@@ -25,8 +26,6 @@ async function rowOf(transaction: Writing, id: string): Promise<SurveyRow> {
   if (!row) throw new AppError('survey-missing', id);
   return row;
 }
-
-const problemText = ({ path, message }: Problem): string => `${path}: ${message}`;
 
 /** The line of the list in a row: all but what is kept for merging. */
 function lineOf(row: SurveyRow): SurveySummary {
@@ -71,7 +70,8 @@ export function surveyDatabase({ connection, checker, now, newId }: SurveyDataba
   ) {
     const document = await storedDocument(transaction, id);
     const parsed = check?.(document);
-    if (parsed && !parsed.ok) throw new AppError('change-refused', problemText(parsed.problems[0]));
+    if (parsed && !parsed.ok)
+      throw new AppError('change-refused', problemInWords(parsed.problems[0], document));
     await putLine(transaction, id, document, row);
   }
 
@@ -148,6 +148,7 @@ export function surveyDatabase({ connection, checker, now, newId }: SurveyDataba
           transaction.objectStore('fields').delete(keysOf(id)),
           transaction.objectStore('readings').delete(keysOf(id)),
           transaction.objectStore('history').delete(keysOf(id)),
+          transaction.objectStore('drafts').delete(keysOf(id)),
           transaction.objectStore('surveys').delete(id),
           transaction.objectStore('erased').put({ id, stamp }),
         ]);

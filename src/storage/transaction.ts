@@ -5,7 +5,7 @@ import type { NoonmarkSchema } from './schema.ts';
 type Stores = StoreNames<NoonmarkSchema>[];
 type WritingTo<S extends Stores> = IDBPTransaction<NoonmarkSchema, S, 'readwrite'>;
 
-const SURVEY_STORES = ['surveys', 'fields', 'readings', 'history', 'erased', 'device'] as const;
+const SURVEY_STORES = ['surveys', 'fields', 'readings', 'history', 'erased', 'device', 'drafts'] as const;
 type SurveyStores = (typeof SURVEY_STORES)[number][];
 
 export type Reading = IDBPTransaction<NoonmarkSchema, SurveyStores, 'readonly'>;

@@ -72,13 +72,13 @@ describe('the roof', () => {
       [0, 4],
     ];
     for (const [place, [x, y]] of corners.entries()) {
-      await page.getByLabel(`Corner ${place + 1}, metres along the eave`).fill(String(x));
-      await page.getByLabel(`Corner ${place + 1}, metres up the slope`).fill(String(y));
+      await page.getByLabel(`Corner ${place + 1}, along the eave`).fill(String(x));
+      await page.getByLabel(`Corner ${place + 1}, up the slope`).fill(String(y));
     }
     await page.getByRole('button', { name: 'Add the plane' }).click();
     await page.getByText('Put the corners in order around the edge').waitFor();
-    await page.getByLabel('Corner 2, metres up the slope').fill('0');
-    await page.getByLabel('Corner 3, metres up the slope').fill('4');
+    await page.getByLabel('Corner 2, up the slope').fill('0');
+    await page.getByLabel('Corner 3, up the slope').fill('4');
     await page.getByRole('button', { name: 'Add the plane' }).click();
     await isStored(page);
     const wall = (await stored(page)).planes.at(-1);

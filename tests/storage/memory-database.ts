@@ -3,6 +3,7 @@ import { IDBFactory } from 'fake-indexeddb';
 import { surveyFromJson } from '../../src/core/survey/parse-survey.ts';
 import { Connection, type ConnectionReport } from '../../src/storage/connection.ts';
 import { backupDatabase } from '../../src/storage/backup-database.ts';
+import { draftDatabase } from '../../src/storage/draft-database.ts';
 import { photoDatabase } from '../../src/storage/photo-database.ts';
 import { sha256Of } from '../../src/storage/sha256-of.ts';
 import { surveyDatabase } from '../../src/storage/survey-database.ts';
@@ -27,6 +28,7 @@ export function tab(report: ConnectionReport = () => undefined) {
     weather: weatherDatabase(connection, now),
     photos: photoDatabase(connection, now),
     backup: backupDatabase({ connection, checker, now }),
+    drafts: draftDatabase(connection),
     hash: sha256Of,
     now,
     setClock: (ms: number) => (timeMs = ms),

@@ -24,7 +24,9 @@ export type OpenPointKindId =
 
 /** Where a point is put right. */
 export type Cure = { words: string } & (
-  | { at: 'site' | 'roof' | 'light' | 'new-station' }
+  | { at: 'site' | 'roof' | 'light' }
+  /** `plane`: the one that it shall stand on. */
+  | { at: 'new-station'; plane: string }
   | { at: 'plane'; plane: string }
   /** `sight`: with the phone; `edit`: its place and planes; `book`: its field book. */
   | { at: 'station'; station: string; act: 'sight' | 'edit' | 'book' }

@@ -27,6 +27,27 @@ interface LengthPart {
  * unit is in `unit`; after feet it is inches. Over 0, at most 10000 m.
  */
 export function parseLength(text: string, unit: LengthUnit): Parsed<number> {
+  const read = metresOf(text, unit);
+  if (!read.ok || (read.value > 0 && read.value <= 10_000)) return read;
+  return refused('A length is over 0 and at most 10000 m. Correct the number or its unit.');
+}
+
+/**
+ * Reads a place along an axis, in metres, written as a length is but with a sign where it lies the other way: `-1.2`,
+ * `-3' 6"`, `0`. A number without a unit is in `unit`. From -1000 to 1000 m.
+ */
+export function parseOffset(text: string, unit: LengthUnit): Parsed<number> {
+  const [, sign, size] = /^\s*([-−–+]?)\s*(.*)$/s.exec(text)!;
+  const read = metresOf(size, unit);
+  if (!read.ok) return read;
+  if (read.value > 1000)
+    return refused('A place lies within 1000 m of its starting point. Correct the number or its unit.');
+  const value = sign === '' || sign === '+' ? read.value : -read.value || 0;
+  return { ok: true, value, warnings: [] };
+}
+
+/** The metres of a length, to the micrometre. */
+function metresOf(text: string, unit: LengthUnit): Parsed<number> {
   const parts = partsOf(text);
   if (!parts) return refused(`“${text.trim()}” is not understood. Write a length as 12.5 m, or as 41' 6".`);
   const [first, second] = parts;
@@ -35,8 +56,6 @@ export function parseLength(text: string, unit: LengthUnit): Parsed<number> {
     return refused('Only feet and inches are written as two numbers. Give one number with its unit.');
   if (second && second.value >= 12) return refused('Inches after feet go up to 12. Correct them.');
   const metres = first.value * firstUnit + (second ? second.value * INCH : 0);
-  if (!(metres > 0 && metres <= 10_000))
-    return refused('A length is over 0 and at most 10000 m. Correct the number or its unit.');
   return { ok: true, value: Math.round(metres * 1e6) / 1e6, warnings: [] };
 }
 
@@ -52,6 +71,7 @@ function partsOf(text: string): LengthPart[] | null {
     .replace(/½/g, ' 1/2')
     .replace(/¼/g, ' 1/4')
     .replace(/¾/g, ' 3/4');
+  if (rest.endsWith('-')) return null;
   const parts: LengthPart[] = [];
   while (rest !== '' && parts.length < 3) {
     const match = PART.exec(rest);
@@ -79,5 +99,5 @@ function partOf([, whole, numerator, denominator, under, word]: RegExpExecArray)
 export function feetDoubt(metres: number, most: number): string | null {
   const asFeet = metres * FOOT;
   if (!(metres > most && asFeet <= most)) return null;
-  return `${metres.toFixed(1)} m is more than usual. If that was ${metres.toFixed(1)} feet, it is ${asFeet.toFixed(1)} m.`;
+  return `${metres.toFixed(1)} m is more than usual. Were feet meant? If that was ${metres.toFixed(1)} feet, it is ${asFeet.toFixed(1)} m.`;
 }

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { draftOf, planeOfDraft, type PlaneDraft } from '../../../src/ui/screens/roof/plane-draft.ts';
+import { draftIn, draftOf, planeOfDraft, type PlaneDraft } from '../../../src/ui/screens/roof/plane-draft.ts';
 import type { RoofPlane } from '../../../src/core/survey/survey.ts';
 
 const TURNS = { true: 0, grid: 1.25, magnetic: -13.4 };
@@ -10,7 +10,7 @@ const typed = (
 ) =>
   planeOfDraft(
     { ...draftOf(before, unit), ...change },
-    { before, id: 'new', order: 3, unit, turns: TURNS, taken: [] },
+    { before, id: 'new', order: 3, turns: TURNS, taken: [] },
   );
 
 const KNOWN: RoofPlane = {
@@ -51,6 +51,43 @@ describe('a typed plane', () => {
     ],
   ])('%o becomes %o', (change, plane) => {
     expect(typed(change).plane).toMatchObject({ id: 'new', order: 3, ...plane });
+  });
+
+  it('keeps its outline and its place to the digit when the unit is changed and changed back', () => {
+    const outlined: RoofPlane = {
+      id: 'dormer',
+      name: 'Dormer',
+      surfaceTilt: 40,
+      surfaceAzimuth: 90,
+      outline: [
+        { x: 0, y: 0 },
+        { x: 3.21, y: 0 },
+        { x: 1.605, y: 2.345678 },
+      ],
+      corner: { east: -4.2, north: 0, up: 3.1234567 },
+    };
+    const inFeet = draftIn(draftOf(outlined, 'metres'), 'feet', outlined);
+    expect(inFeet.corners[1]).toMatchObject({ x: `10' 6 3/8"`, y: `0"` });
+    expect(inFeet.east).toBe(`-13' 9 3/8"`);
+    expect(typed(inFeet, outlined).plane).toEqual(outlined);
+    expect(typed(draftIn(inFeet, 'metres', outlined), outlined).plane).toEqual(outlined);
+  });
+
+  it('takes corners and its place in feet and inches', () => {
+    const corners = [
+      [`0`, `0`],
+      [`10'`, `0`],
+      [`5' 6"`, `8 ft`],
+    ].map(([x, y], key) => ({ key, x, y }));
+    const place = { placed: true, east: `-3' 6"`, northward: '0', up: `10'` };
+    const { plane } = typed(
+      { tilt: '30', bearing: '180', shape: 'polygon', corners, ...place },
+      null,
+      'feet',
+    );
+    // The foot is 0.3048 m, the inch 0.0254 m (international yard and pound agreement, 1959).
+    expect(plane?.outline?.[2]).toEqual({ x: 1.6764, y: 2.4384 });
+    expect(plane?.corner).toEqual({ east: -1.0668, north: 0, up: 3.048 });
   });
 
   it('drops its width when it is given corners', () => {

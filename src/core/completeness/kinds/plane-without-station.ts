@@ -9,10 +9,10 @@ export const planeWithoutStation: OpenPointKind = {
   find: ({ survey }) =>
     ordered(survey.planes)
       .filter((plane) => stationsOf(survey, plane).length === 0)
-      .map(({ name }) => ({
+      .map(({ id, name }) => ({
         subject: name,
         sentence: 'Nothing is known of what stands around it, so it has no solar access.',
         effect: null,
-        cure: { at: 'new-station', words: 'Add a station that speaks for it' },
+        cure: { at: 'new-station', plane: id, words: 'Add a station that speaks for it' },
       })),
 };

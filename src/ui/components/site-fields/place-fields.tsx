@@ -1,14 +1,13 @@
 import { placeText } from '../../value-text.ts';
 import { TextField } from '../form/text-field.tsx';
+import { altitudeHint } from './altitude.ts';
 import { DeclinationLine } from './declination-line.tsx';
 import type { PlaceDraft } from './use-place.ts';
 import { ZoneField } from './zone-field.tsx';
-import { numberOf } from '../../typed.ts';
 
 /** Where the site is: from the device or typed, with its time zone and the declination there. */
 export function PlaceFields({ place, nowMs, asked }: { place: PlaceDraft; nowMs: number; asked: boolean }) {
   const { coordinates, altitude } = place;
-  const height = numberOf(altitude);
   const missing =
     asked && place.text.trim() === '' ? 'The place is needed: from this device, or typed.' : null;
   return (
@@ -38,12 +37,8 @@ export function PlaceFields({ place, nowMs, asked }: { place: PlaceDraft; nowMs:
             keys="numbers"
             value={altitude}
             onInput={place.setAltitude}
-            fault={
-              altitude.trim() === '' || (height !== null && height >= -430 && height <= 9000)
-                ? null
-                : 'A number from -430 to 9000 is needed, or nothing.'
-            }
-            hint="Optional; within 100 m is enough."
+            fault={place.altitudeFault}
+            hint={altitudeHint(altitude) ?? 'Optional; within 100 m is enough. Feet with ft behind them.'}
           />
           <DeclinationLine {...coordinates} timeMs={nowMs} />
         </>

@@ -5,7 +5,8 @@ import type { Coordinates } from '../../../core/angles/place.ts';
 import { parseCoordinates } from '../../../core/pointing/coordinates.ts';
 import { isTimeZone, utcOffsetMinutes } from '../../../core/solar-position/time-zone.ts';
 import type { Site } from '../../../core/survey/survey.ts';
-import { numberOf } from '../../typed.ts';
+import { faultOf } from '../../typed.ts';
+import { typedAltitude } from './altitude.ts';
 import { accuracyText, LOCATION_FAULTS } from './location-messages.ts';
 
 const deviceZone = () => Intl.DateTimeFormat().resolvedOptions().timeZone;
@@ -18,6 +19,26 @@ const FOUND = {
 /** Clocks that far apart hint at a wrong place or a wrong sign. */
 const CLOCKS_APART_MINUTES = 180;
 
+/** What is typed or found of a place. */
+export interface PlaceTexts {
+  coordinates: string;
+  altitude: string;
+  zone: string;
+  zoneFrom: keyof typeof FOUND;
+  /** Metres, where the device found the place; null where it was typed. */
+  accuracy: number | null;
+}
+
+/** The texts that show a site; for a new one, empty. */
+export const placeTexts = (site?: Site): PlaceTexts => ({
+  coordinates: site ? `${site.latitude}, ${site.longitude}` : '',
+  altitude: site?.altitude === undefined ? '' : String(site.altitude),
+  zone: site?.timeZone ?? '',
+  // A zone that is stored was settled once and does not follow the coordinates.
+  zoneFrom: site ? 'hand' : 'place',
+  accuracy: null,
+});
+
 /** A place being typed or found: its texts, what they mean, and what is wrong with them. */
 export interface PlaceDraft {
   coordinates: Coordinates | null;
@@ -28,6 +49,7 @@ export interface PlaceDraft {
   told: string | null;
   altitude: string;
   setAltitude: (text: string) => void;
+  altitudeFault: string | null;
   zone: string;
   setZone: (zone: string) => void;
   zoneFound: string;
@@ -40,18 +62,17 @@ export interface PlaceDraft {
 export function usePlace(
   { location }: Pick<AppServices, 'location'>,
   nowMs: number,
+  texts: PlaceTexts,
+  change: (part: Partial<PlaceTexts>) => void,
   before?: Site,
 ): PlaceDraft {
-  const [text, setText] = useState(before ? `${before.latitude}, ${before.longitude}` : '');
-  const [altitude, setAltitude] = useState(before?.altitude === undefined ? '' : String(before.altitude));
-  const [zone, setZone] = useState(before?.timeZone ?? '');
-  const [zoneFrom, setZoneFrom] = useState<keyof typeof FOUND>('hand');
-  const [accuracy, setAccuracy] = useState<number | null>(null);
+  const { zone, accuracy } = texts;
   const [refusal, setRefusal] = useState<string | null>(null);
   const [locating, setLocating] = useState(false);
-  const byHand = useRef(before !== undefined);
+  const byHand = useRef(false);
+  byHand.current = texts.zoneFrom === 'hand';
 
-  const parsed = parseCoordinates(text);
+  const parsed = parseCoordinates(texts.coordinates);
   const coordinates = parsed.ok ? parsed.value : null;
   const { latitude, longitude } = coordinates ?? {};
 
@@ -60,8 +81,7 @@ export function usePlace(
     let wanted = true;
     void zoneAt(latitude, longitude).then((found) => {
       if (!wanted || byHand.current) return;
-      setZone(found ?? deviceZone());
-      setZoneFrom(found === null ? 'device' : 'place');
+      change({ zone: found ?? deviceZone(), zoneFrom: found === null ? 'device' : 'place' });
     });
     return () => {
       wanted = false;
@@ -69,8 +89,7 @@ export function usePlace(
   }, [latitude, longitude]);
 
   const typed = (value: string) => {
-    setText(value);
-    setAccuracy(null);
+    change({ coordinates: value, accuracy: null });
     setRefusal(null);
   };
   const locate = async () => {
@@ -80,37 +99,38 @@ export function usePlace(
     setLocating(false);
     if (!outcome.ok) return setRefusal(LOCATION_FAULTS[outcome.why]);
     const { position } = outcome;
-    setText(`${position.latitude.toFixed(6)}, ${position.longitude.toFixed(6)}`);
-    setAccuracy(position.accuracy);
-    if (position.altitude !== null) setAltitude(String(Math.round(position.altitude)));
+    change({
+      coordinates: `${position.latitude.toFixed(6)}, ${position.longitude.toFixed(6)}`,
+      accuracy: position.accuracy,
+      ...(position.altitude !== null && { altitude: String(Math.round(position.altitude)) }),
+    });
   };
 
-  const height = altitude.trim() === '' ? undefined : numberOf(altitude);
-  const heightIsRight = height === undefined || (height !== null && height >= -430 && height <= 9000);
-  const zoneIsRight = isTimeZone(zone);
+  const altitude = typedAltitude(texts.altitude);
   return {
     coordinates,
-    text,
+    text: texts.coordinates,
     setText: typed,
-    fault: refusal ?? (text.trim() !== '' && !parsed.ok ? parsed.problems[0].message : null),
+    fault: refusal ?? (texts.coordinates.trim() !== '' && !parsed.ok ? parsed.problems[0].message : null),
     told:
       oddity(zone, nowMs, before) ??
       (parsed.ok ? parsed.warnings[0]?.message : undefined) ??
       (accuracy === null ? null : accuracyText(accuracy)),
-    altitude,
-    setAltitude,
+    altitude: texts.altitude,
+    setAltitude: (text) => change({ altitude: text }),
+    altitudeFault: faultOf(altitude),
     zone,
-    setZone: (name) => {
-      byHand.current = true;
-      setZoneFrom('hand');
-      setZone(name);
-    },
-    zoneFound: FOUND[zoneFrom],
+    setZone: (name) => change({ zone: name, zoneFrom: 'hand' }),
+    zoneFound: FOUND[texts.zoneFrom],
     locate: () => void locate(),
     locating,
     site:
-      coordinates && zoneIsRight && heightIsRight
-        ? { ...coordinates, ...(height !== undefined && { altitude: height }), timeZone: zone }
+      coordinates && isTimeZone(zone) && 'value' in altitude
+        ? {
+            ...coordinates,
+            ...(altitude.value !== undefined && { altitude: altitude.value }),
+            timeZone: zone,
+          }
         : null,
   };
 }

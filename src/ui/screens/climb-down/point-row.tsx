@@ -7,7 +7,7 @@ export function PointRow({ surveyId, point }: { surveyId: string; point: OpenPoi
   const { kind, subject, sentence, cure } = point;
   return (
     <li>
-      <a class="open-point" href={curePath(surveyId, cure)}>
+      <a class="open-point" href={curePath(surveyId, point)}>
         <Effect point={point} />
         <span class="open-point-words">
           <strong>

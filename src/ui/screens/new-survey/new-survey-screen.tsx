@@ -4,10 +4,11 @@ import { refreshList } from '../../../app/actions/refresh-list.ts';
 import type { AppServices } from '../../../app/app-services.ts';
 import { attempt } from '../../../app/attempt.ts';
 import { Form } from '../../components/form/form.tsx';
+import { useDraft } from '../../components/form/use-draft.ts';
 import { TextField } from '../../components/form/text-field.tsx';
 import { ScreenHeading } from '../../components/screen-heading.tsx';
 import { PlaceFields } from '../../components/site-fields/place-fields.tsx';
-import { usePlace } from '../../components/site-fields/use-place.ts';
+import { placeTexts, usePlace } from '../../components/site-fields/use-place.ts';
 import { navigate } from '../../router.ts';
 import { surveyPath } from '../../survey-path.ts';
 
@@ -15,10 +16,15 @@ import { surveyPath } from '../../survey-path.ts';
 export function NewSurveyScreen({ services }: { services: AppServices }) {
   const { state } = services;
   const nowMs = useMemo(() => services.now(), [services]);
-  const place = usePlace(services, nowMs);
-  const [title, setTitle] = useState('');
-  const [address, setAddress] = useState('');
-  const [notes, setNotes] = useState('');
+  const draft = useDraft({ survey: '', form: 'new-survey', label: 'New survey', over: null }, () => ({
+    ...placeTexts(),
+    title: '',
+    address: '',
+    notes: '',
+  }));
+  const { change } = draft;
+  const { title, address, notes } = draft.typed;
+  const place = usePlace(services, nowMs, draft.typed, change);
   const [asked, setAsked] = useState(false);
   useEffect(() => void attempt(state, () => refreshList(services)), [services, state]);
 
@@ -36,20 +42,32 @@ export function NewSurveyScreen({ services }: { services: AppServices }) {
   return (
     <div class="stack">
       <ScreenHeading title="New survey" />
-      <Form label="New survey" action="Start the survey" onSubmit={start} onCancel={() => navigate('/')}>
+      <Form
+        label="New survey"
+        action="Start the survey"
+        onSubmit={start}
+        onCancel={() => navigate('/')}
+        draft={draft.state}
+      >
         <PlaceFields place={place} nowMs={nowMs} asked={asked} />
         <TextField
           label="Title"
           value={title}
-          onInput={setTitle}
+          onInput={(text) => change({ title: text })}
           maxLength={200}
           hint={`Without one: ${proposedTitle(address, day, taken)}`}
         />
-        <TextField label="Address" value={address} onInput={setAddress} maxLength={500} hint="Optional." />
+        <TextField
+          label="Address"
+          value={address}
+          onInput={(text) => change({ address: text })}
+          maxLength={500}
+          hint="Optional."
+        />
         <TextField
           label="Notes"
           value={notes}
-          onInput={setNotes}
+          onInput={(text) => change({ notes: text })}
           lines={3}
           maxLength={20_000}
           hint="Optional."

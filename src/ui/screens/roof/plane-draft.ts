@@ -4,8 +4,8 @@ import { fullCircle } from '../../../core/angles/angles.ts';
 import { polygonCrossing } from '../../../core/survey/outline-crossing.ts';
 import { planeName, type PlaneSort } from '../../../core/survey/plane-name.ts';
 import type { PlanePoint, RoofPlane } from '../../../core/survey/survey.ts';
-import { lengthInput, typedLength } from '../../length-text.ts';
-import { faultOf, numberOf, typedNumber, valueOf, type Typed } from '../../typed.ts';
+import { inUnit, lengthInput, offsetInput, typedLength, typedOffset } from '../../length-text.ts';
+import { faultOf, typedNumber, valueOf, type Typed } from '../../typed.ts';
 
 export interface CornerDraft {
   key: number;
@@ -15,6 +15,8 @@ export interface CornerDraft {
 
 /** A plane as it is typed. */
 export interface PlaneDraft {
+  /** In which its lengths are typed. */
+  unit: LengthUnit;
   sort: PlaneSort;
   name: string;
   tilt: string;
@@ -45,7 +47,9 @@ export const emptyCorners = (): CornerDraft[] => [0, 1, 2, 3].map((key) => ({ ke
 /** The texts that show a plane; for a new one, empty. */
 export function draftOf(plane: RoofPlane | null, unit: LengthUnit): PlaneDraft {
   const length = (metres: number | undefined) => lengthInput(metres, unit);
+  const offset = (metres: number | undefined) => offsetInput(metres, unit);
   return {
+    unit,
     sort: plane ? sortOf(plane) : 'pitched',
     name: plane?.name ?? '',
     tilt: text(plane?.surfaceTilt),
@@ -57,12 +61,12 @@ export function draftOf(plane: RoofPlane | null, unit: LengthUnit): PlaneDraft {
     width: length(plane?.width),
     slopeLength: length(plane?.slopeLength),
     corners: plane?.outline
-      ? plane.outline.map(({ x, y }, key) => ({ key, x: text(x), y: text(y) }))
+      ? plane.outline.map(({ x, y }, key) => ({ key, x: offset(x), y: offset(y) }))
       : emptyCorners(),
     placed: plane?.corner !== undefined,
-    east: text(plane?.corner?.east),
-    northward: text(plane?.corner?.north),
-    up: text(plane?.corner?.up),
+    east: offset(plane?.corner?.east),
+    northward: offset(plane?.corner?.north),
+    up: offset(plane?.corner?.up),
   };
 }
 
@@ -90,23 +94,43 @@ export function typedFacing(draft: PlaneDraft, turns: NorthTurns, stored?: numbe
   return { value: plain ? value % 360 : tenths(fullCircle(facing)) % 360 };
 }
 
-/** A place in a plane or in the site's frame, metres. */
-function typedMetres(typed: string): Typed<number> {
-  const value = numberOf(typed);
-  return value !== null && Math.abs(value) <= 1000
-    ? { value }
-    : { fault: 'Metres from -1000 to 1000 are needed.' };
+/** The same plane with its lengths written in another unit. */
+export function draftIn(draft: PlaneDraft, unit: LengthUnit, stored: RoofPlane | null): PlaneDraft {
+  const again = (typed: string, metres?: number) => inUnit(typed, draft.unit, unit, metres);
+  const { corner, outline } = stored ?? {};
+  return {
+    ...draft,
+    unit,
+    width: again(draft.width, stored?.width),
+    slopeLength: again(draft.slopeLength, stored?.slopeLength),
+    corners: draft.corners.map(({ key, x, y }) => ({
+      key,
+      x: again(x, outline?.[key]?.x),
+      y: again(y, outline?.[key]?.y),
+    })),
+    east: again(draft.east, corner?.east),
+    northward: again(draft.northward, corner?.north),
+    up: again(draft.up, corner?.up),
+  };
 }
 
-export function typedOutline(corners: readonly CornerDraft[]): Typed<PlanePoint[]> {
+/** The corners of an outline. Those of a stored one have its places as keys. */
+export function typedOutline(
+  corners: readonly CornerDraft[],
+  unit: LengthUnit,
+  stored: readonly PlanePoint[] = [],
+): Typed<PlanePoint[]> {
   const used = corners.filter(({ x, y }) => x.trim() !== '' || y.trim() !== '');
   if (used.length < 3) return { fault: 'An outline needs at least three corners.' };
   const points: PlanePoint[] = [];
-  for (const [place, corner] of used.entries()) {
-    const [x, y] = [typedMetres(corner.x), typedMetres(corner.y)];
-    if ('fault' in x || 'fault' in y)
-      return { fault: `Corner ${place + 1} needs two numbers: metres along the eave and up the slope.` };
-    points.push({ x: x.value, y: y.value });
+  for (const [place, { key, x, y }] of used.entries()) {
+    const typed = [typedOffset(x, unit, stored[key]?.x), typedOffset(y, unit, stored[key]?.y)];
+    const fault = typed.map(faultOf).find((one) => one !== null);
+    if (fault) return { fault: `Corner ${place + 1}: ${fault}` };
+    const [along, up] = typed.map(valueOf);
+    if (along === undefined || up === undefined)
+      return { fault: `Corner ${place + 1} needs two lengths: along the eave and up the slope.` };
+    points.push({ x: along, y: up });
   }
   const crossing = polygonCrossing(points);
   if (crossing)
@@ -116,12 +140,21 @@ export function typedOutline(corners: readonly CornerDraft[]): Typed<PlanePoint[
   return { value: points };
 }
 
-function typedCorner({ placed, east, northward, up }: PlaneDraft): Typed<RoofPlane['corner']> {
+function typedCorner(
+  { placed, unit, east, northward, up }: PlaneDraft,
+  stored: RoofPlane['corner'],
+): Typed<RoofPlane['corner']> {
   if (!placed) return { value: undefined };
-  const typed = [east, northward, up].map(typedMetres);
+  const typed = [
+    typedOffset(east, unit, stored?.east),
+    typedOffset(northward, unit, stored?.north),
+    typedOffset(up, unit, stored?.up),
+  ];
   const fault = typed.map(faultOf).find((one) => one !== null);
   if (fault) return { fault };
-  const [e, n, u] = typed.map((one) => valueOf(one) ?? 0);
+  const [e, n, u] = typed.map(valueOf);
+  if (e === undefined || n === undefined || u === undefined)
+    return { fault: 'All three are needed: how far east, north and up.' };
   return { value: { east: e, north: n, up: u } };
 }
 
@@ -141,20 +174,20 @@ export function planeOfDraft(
     before: RoofPlane | null;
     id: string;
     order?: number;
-    unit: LengthUnit;
     turns: NorthTurns;
     taken: string[];
   },
 ): { plane: RoofPlane | null; faults: PlaneFaults } {
-  const { before, unit } = given;
+  const { before } = given;
+  const { unit } = draft;
   const isPolygon = draft.shape === 'polygon';
   const tilt = typedTilt(draft.tilt);
   const facing = typedFacing(draft, given.turns, before?.surfaceAzimuth);
   const none: Typed<undefined> = { value: undefined };
   const width = isPolygon ? none : typedLength(draft.width, unit, before?.width);
   const slopeLength = isPolygon ? none : typedLength(draft.slopeLength, unit, before?.slopeLength);
-  const outline = isPolygon ? typedOutline(draft.corners) : none;
-  const corner = typedCorner(draft);
+  const outline = isPolygon ? typedOutline(draft.corners, unit, before?.outline) : none;
+  const corner = typedCorner(draft, before?.corner);
   const faults: PlaneFaults = {
     tilt: faultOf(tilt),
     bearing: faultOf(facing),

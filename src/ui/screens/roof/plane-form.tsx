@@ -2,21 +2,29 @@ import { useMemo, useState } from 'preact/hooks';
 import { magneticDeclination } from '../../../core/pointing/declination.ts';
 import { gridConvergence } from '../../../core/pointing/grid-convergence.ts';
 import { centralMeridian, utmZoneNumber } from '../../../core/pointing/utm.ts';
+import type { JsonValue } from '../../../core/survey/json-value.ts';
 import type { PlaneSort } from '../../../core/survey/plane-name.ts';
 import { planeName } from '../../../core/survey/plane-name.ts';
 import type { RoofPlane, Site, Survey } from '../../../core/survey/survey.ts';
 import { ChoiceField } from '../../components/form/choice-field.tsx';
 import { Form } from '../../components/form/form.tsx';
+import { useDraft } from '../../components/form/use-draft.ts';
 import { TextField } from '../../components/form/text-field.tsx';
 import { LengthField } from '../../components/lengths/length-field.tsx';
 import { UnitChoice } from '../../components/lengths/unit-choice.tsx';
 import { lengthUnit } from '../../device/length-unit.ts';
-import { lengthInput, typedLength } from '../../length-text.ts';
 import { valueOf } from '../../typed.ts';
 import { degreesText } from '../../value-text.ts';
 import { AzimuthFields } from './azimuth-fields.tsx';
 import { OutlineEditor } from './outline-editor.tsx';
-import { draftOf, planeOfDraft, typedTilt, type NorthTurns, type PlaneDraft } from './plane-draft.ts';
+import {
+  draftIn,
+  draftOf,
+  planeOfDraft,
+  typedTilt,
+  type NorthTurns,
+  type PlaneDraft,
+} from './plane-draft.ts';
 
 /** Longer roofs are rare; beyond, feet may have been typed as metres. */
 const USUAL_METRES = 40;
@@ -39,16 +47,18 @@ function northTurns({ latitude, longitude, altitude }: Site, timeMs: number): No
 
 function PlaceFieldset(props: {
   draft: PlaneDraft;
+  stored: RoofPlane['corner'];
   fault: string | null;
   onChange: (c: Partial<PlaneDraft>) => void;
 }) {
-  const { draft, fault, onChange } = props;
-  const metres = (key: 'east' | 'northward' | 'up', label: string) => (
-    <TextField
+  const { draft, stored, fault, onChange } = props;
+  const length = (key: 'east' | 'northward' | 'up', label: string, stored?: number) => (
+    <LengthField
       label={label}
-      unit="metres"
-      keys="numbers"
       value={draft[key]}
+      signed
+      stored={stored}
+      usual={USUAL_METRES}
       onInput={(value) => onChange({ [key]: value })}
     />
   );
@@ -65,15 +75,18 @@ function PlaceFieldset(props: {
       </label>
       {draft.placed && (
         <div class="pair">
-          {metres('east', 'East')}
-          {metres('northward', 'North')}
-          {metres('up', 'Up')}
+          {length('east', 'East', stored?.east)}
+          {length('northward', 'North', stored?.north)}
+          {length('up', 'Up', stored?.up)}
         </div>
       )}
       {fault && draft.placed && <p class="field-fault small">{fault}</p>}
     </fieldset>
   );
 }
+
+/** Name of the form of a plane, or of a new one. */
+export const planeForm = (plane: RoofPlane | null): string => `plane/${plane?.id ?? 'new'}`;
 
 /** Typing a roof plane: tilt and azimuth in whatever way they are known, size, and place. */
 export function PlaneForm(props: {
@@ -88,25 +101,21 @@ export function PlaneForm(props: {
 }) {
   const { survey, plane } = props;
   const unit = lengthUnit.value;
-  const [draft, setDraft] = useState(() => draftOf(plane, unit));
-  const [shownIn, setShownIn] = useState(unit);
+  const kept = useDraft(
+    {
+      survey: survey.id,
+      form: planeForm(plane),
+      label: plane ? `Change ${plane.name}` : 'New roof plane',
+      over: (plane ?? null) as JsonValue,
+    },
+    () => draftOf(plane, unit),
+  );
+  const { typed: draft, change } = kept;
   const [asked, setAsked] = useState(false);
   const turns = useMemo(() => northTurns(survey.site, props.nowMs), [survey.site, props.nowMs]);
-  const change = (part: Partial<PlaneDraft>) => setDraft((now) => ({ ...now, ...part }));
-  if (shownIn !== unit) {
-    // The same lengths, written in the unit just chosen.
-    const again = (text: string, stored?: number) => {
-      const metres = valueOf(typedLength(text, shownIn, stored));
-      return metres === undefined ? text : lengthInput(metres, unit);
-    };
-    setShownIn(unit);
-    change({
-      width: again(draft.width, plane?.width),
-      slopeLength: again(draft.slopeLength, plane?.slopeLength),
-    });
-  }
+  if (draft.unit !== unit) kept.restate(draftIn(draft, unit, plane));
   const taken = survey.planes.filter((other) => other !== plane).map(({ name }) => name);
-  const given = { before: plane, id: props.newId, order: props.order, unit, turns, taken };
+  const given = { before: plane, id: props.newId, order: props.order, turns, taken };
   const { plane: drafted, faults } = planeOfDraft(draft, given);
   const told = <T,>(fault: T, text: string): T | null => (asked || text.trim() !== '' ? fault : null);
   const tilt = valueOf(typedTilt(draft.tilt));
@@ -120,6 +129,7 @@ export function PlaneForm(props: {
       action={plane ? 'Save the plane' : 'Add the plane'}
       onSubmit={save}
       onCancel={props.onCancel}
+      draft={kept.state}
     >
       {!plane && (
         <ChoiceField
@@ -157,37 +167,41 @@ export function PlaneForm(props: {
           ]}
           onChoose={(shape) => change({ shape })}
         />
+        <UnitChoice />
         {draft.shape === 'polygon' ? (
           <OutlineEditor
             corners={draft.corners}
+            unit={unit}
             fault={asked ? faults.outline : null}
             onChange={(corners) => change({ corners })}
           />
         ) : (
-          <>
-            <UnitChoice />
-            <div class="pair">
-              <LengthField
-                label="Width along the eave"
-                value={draft.width}
-                stored={plane?.width}
-                usual={USUAL_METRES}
-                onInput={(width) => change({ width })}
-                hint="By tape; can come later."
-              />
-              <LengthField
-                label={draft.sort === 'wall' ? 'Height' : 'Length up the slope'}
-                value={draft.slopeLength}
-                stored={plane?.slopeLength}
-                usual={USUAL_METRES}
-                onInput={(slopeLength) => change({ slopeLength })}
-                hint="By tape; can come later."
-              />
-            </div>
-          </>
+          <div class="pair">
+            <LengthField
+              label="Width along the eave"
+              value={draft.width}
+              stored={plane?.width}
+              usual={USUAL_METRES}
+              onInput={(width) => change({ width })}
+              hint="By tape; can come later."
+            />
+            <LengthField
+              label={draft.sort === 'wall' ? 'Height' : 'Length up the slope'}
+              value={draft.slopeLength}
+              stored={plane?.slopeLength}
+              usual={USUAL_METRES}
+              onInput={(slopeLength) => change({ slopeLength })}
+              hint="By tape; can come later."
+            />
+          </div>
         )}
       </fieldset>
-      <PlaceFieldset draft={draft} fault={asked ? faults.corner : null} onChange={change} />
+      <PlaceFieldset
+        draft={draft}
+        stored={plane?.corner}
+        fault={asked ? faults.corner : null}
+        onChange={change}
+      />
       <TextField
         label="Name"
         value={draft.name}

@@ -3,7 +3,7 @@ import { PhotoStrip } from '../../components/photos/photo-strip.tsx';
 import { lengthUnit } from '../../device/length-unit.ts';
 import { lengthText } from '../../length-text.ts';
 import { degreesText } from '../../value-text.ts';
-import { measurePath } from '../stations/station-path.ts';
+import { measurePath, newStationPath } from '../stations/station-path.ts';
 
 function sizeOf({ width, slopeLength, outline }: RoofPlane): string {
   if (outline) return `outline of ${outline.length} corners`;
@@ -47,6 +47,13 @@ export function PlaneRow(props: {
           aria-label={`Measure ${name} with the phone`}
         >
           Measure with the phone
+        </a>
+        <a
+          class="button"
+          href={newStationPath(props.survey.id, plane.id)}
+          aria-label={`Add a station on ${name}`}
+        >
+          Add a station
         </a>
         <button type="button" aria-label={`Duplicate ${name}`} onClick={props.onDuplicate}>
           Duplicate

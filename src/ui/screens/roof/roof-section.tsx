@@ -7,11 +7,12 @@ import { withoutPlane } from '../../../core/survey/removed-entries.ts';
 import type { RoofPlane } from '../../../core/survey/survey.ts';
 import { copyTitle } from '../../../app/actions/duplicate-survey.ts';
 import { EditHeading } from '../../components/edit-heading.tsx';
+import { UnfinishedForms } from '../../components/form/unfinished-forms.tsx';
 import { focusHeading } from '../../components/screen-heading.tsx';
 import { roofPlan } from '../../../report/pictures/roof-plan.ts';
 import type { SectionProps } from '../../section.ts';
 import { Drawing } from '../shade/drawing.tsx';
-import { PlaneForm } from './plane-form.tsx';
+import { PlaneForm, planeForm } from './plane-form.tsx';
 import { PlaneRow } from './plane-row.tsx';
 import { RoofCaution } from './roof-caution.tsx';
 import './roof.css';
@@ -63,6 +64,13 @@ export function RoofSection({ survey, services }: SectionProps) {
     if (await store(withoutPlane(survey, id), 'entry-deleted', name)) focusHeading();
   };
 
+  /** What goes on with a form that was typed into and not saved. */
+  const opens = (form: string): (() => void) | null => {
+    if (form === planeForm(null)) return () => setEdited({ plane: null, newId: services.newId() });
+    const plane = survey.planes.find((one) => planeForm(one) === form);
+    return plane ? () => setEdited({ plane, newId: plane.id }) : null;
+  };
+
   if (edited)
     return (
       <div class="stack">
@@ -80,6 +88,7 @@ export function RoofSection({ survey, services }: SectionProps) {
     );
   return (
     <div class="stack">
+      <UnfinishedForms survey={survey.id} opens={opens} />
       <h2>Roof planes</h2>
       {plan && (
         <div class="roof-plan">

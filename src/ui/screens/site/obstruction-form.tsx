@@ -1,13 +1,15 @@
 import { useState } from 'preact/hooks';
 import { obstructionKinds } from '../../../core/survey/obstruction-kinds.ts';
+import type { JsonValue } from '../../../core/survey/json-value.ts';
 import type { Obstruction, ObstructionKind } from '../../../core/survey/survey.ts';
 import { ChoiceField } from '../../components/form/choice-field.tsx';
 import { Form } from '../../components/form/form.tsx';
+import { useDraft } from '../../components/form/use-draft.ts';
 import { TextField } from '../../components/form/text-field.tsx';
 import { LengthField } from '../../components/lengths/length-field.tsx';
 import { UnitChoice } from '../../components/lengths/unit-choice.tsx';
 import { lengthUnit } from '../../device/length-unit.ts';
-import { lengthInput, typedLength } from '../../length-text.ts';
+import { inUnit, lengthInput, typedLength } from '../../length-text.ts';
 import { valueOf } from '../../typed.ts';
 import { transmittanceDraft, typedTransmittance } from './transmittance-draft.ts';
 import { TransmittanceFields } from './transmittance-fields.tsx';
@@ -26,8 +28,13 @@ function proposedName(kind: ObstructionKind, taken: readonly string[]): string {
   }
 }
 
+/** Name of the form of an obstruction, or of a new one. */
+export const obstructionForm = (obstruction: Obstruction | null): string =>
+  `obstruction/${obstruction?.id ?? 'new'}`;
+
 /** Typing an obstruction: what it is, how far it stands, what passes through it. */
 export function ObstructionForm(props: {
+  surveyId: string;
   /** Null for a new one. */
   obstruction: Obstruction | null;
   newId: string;
@@ -39,10 +46,25 @@ export function ObstructionForm(props: {
 }) {
   const { obstruction: before, latitude } = props;
   const unit = lengthUnit.value;
-  const [name, setName] = useState(before?.name ?? '');
-  const [kind, setKind] = useState<ObstructionKind>(before?.kind ?? 'deciduous-tree');
-  const [distance, setDistance] = useState(lengthInput(before?.distance, unit));
-  const [shares, setShares] = useState(() => transmittanceDraft(before, latitude));
+  const draft = useDraft(
+    {
+      survey: props.surveyId,
+      form: obstructionForm(before),
+      label: before ? `Change ${before.name}` : 'New obstruction',
+      over: (before ?? null) as JsonValue,
+    },
+    () => ({
+      unit,
+      name: before?.name ?? '',
+      kind: before?.kind ?? 'deciduous-tree',
+      distance: lengthInput(before?.distance, unit),
+      shares: transmittanceDraft(before, latitude),
+    }),
+  );
+  const { change } = draft;
+  const { name, kind, distance, shares } = draft.typed;
+  if (draft.typed.unit !== unit)
+    draft.restate({ unit, distance: inUnit(distance, draft.typed.unit, unit, before?.distance) });
   const [asked, setAsked] = useState(false);
   const typedDistance = typedLength(distance, unit, before?.distance);
   const transmittance = typedTransmittance(shares);
@@ -66,12 +88,18 @@ export function ObstructionForm(props: {
       action={before ? 'Save the obstruction' : 'Add the obstruction'}
       onSubmit={save}
       onCancel={props.onCancel}
+      draft={draft.state}
     >
-      <ChoiceField label="Kind" value={kind} options={kindOptions} onChoose={setKind} />
+      <ChoiceField
+        label="Kind"
+        value={kind}
+        options={kindOptions}
+        onChoose={(chosen) => change({ kind: chosen })}
+      />
       <TextField
         label="Name"
         value={name}
-        onInput={setName}
+        onInput={(text) => change({ name: text })}
         maxLength={200}
         hint={`So that it is known again from another station. Without one: ${fallback}`}
       />
@@ -81,7 +109,7 @@ export function ObstructionForm(props: {
         value={distance}
         stored={before?.distance}
         usual={USUAL_METRES}
-        onInput={setDistance}
+        onInput={(text) => change({ distance: text })}
         hint="Along the ground, by tape. Unknown counts as far."
       />
       <TransmittanceFields
@@ -89,7 +117,7 @@ export function ObstructionForm(props: {
         latitude={latitude}
         draft={shares}
         asked={asked}
-        onChange={setShares}
+        onChange={(typed) => change({ shares: typed })}
       />
     </Form>
   );

@@ -1,16 +1,25 @@
 import { useState } from 'preact/hooks';
 import type { AppServices } from '../../../app/app-services.ts';
+import type { JsonValue } from '../../../core/survey/json-value.ts';
 import type { Survey } from '../../../core/survey/survey.ts';
 import { Form } from '../../components/form/form.tsx';
+import { useDraft } from '../../components/form/use-draft.ts';
 import { TextField } from '../../components/form/text-field.tsx';
 import { PlaceFields } from '../../components/site-fields/place-fields.tsx';
-import { usePlace } from '../../components/site-fields/use-place.ts';
+import { placeTexts, usePlace } from '../../components/site-fields/use-place.ts';
 import { faultOf, typedNumber, valueOf } from '../../typed.ts';
 
 const DAY = /^\d{4}-\d{2}-\d{2}$/;
 
 /** An empty text stands for nothing at all. */
 const orNothing = (text: string): string | undefined => text.trim() || undefined;
+
+/** Name of this form. */
+export const SITE_FORM = 'site';
+
+/** What this form changes, as it is stored. */
+const storedOf = ({ site, notes, surveyedOn }: Survey) =>
+  ({ site, notes, surveyedOn }) as unknown as JsonValue;
 
 /** Changing where the site is and what is known of the visit. */
 export function SiteForm(props: {
@@ -22,11 +31,19 @@ export function SiteForm(props: {
 }) {
   const { survey, services, nowMs } = props;
   const { site } = survey;
-  const place = usePlace(services, nowMs, site);
-  const [address, setAddress] = useState(site.address ?? '');
-  const [notes, setNotes] = useState(survey.notes ?? '');
-  const [day, setDay] = useState(survey.surveyedOn ?? '');
-  const [albedo, setAlbedo] = useState(site.albedo === undefined ? '' : String(site.albedo * 100));
+  const draft = useDraft(
+    { survey: survey.id, form: SITE_FORM, label: 'Change the site', over: storedOf(survey) },
+    () => ({
+      ...placeTexts(site),
+      address: site.address ?? '',
+      notes: survey.notes ?? '',
+      day: survey.surveyedOn ?? '',
+      albedo: site.albedo === undefined ? '' : String(Math.round(site.albedo * 1e6) / 1e4),
+    }),
+  );
+  const { change } = draft;
+  const { address, notes, day, albedo } = draft.typed;
+  const place = usePlace(services, nowMs, draft.typed, change, site);
   const [asked, setAsked] = useState(false);
   const reflects = typedNumber(albedo, { least: 0, most: 100, unit: ' %', optional: true });
   const dayFault =
@@ -52,13 +69,18 @@ export function SiteForm(props: {
     return props.onSave(after);
   };
   return (
-    <Form label="Site" action="Save the site" onSubmit={save} onCancel={props.onCancel}>
+    <Form label="Site" action="Save the site" onSubmit={save} onCancel={props.onCancel} draft={draft.state}>
       <PlaceFields place={place} nowMs={nowMs} asked={asked} />
-      <TextField label="Address" value={address} onInput={setAddress} maxLength={500} />
+      <TextField
+        label="Address"
+        value={address}
+        onInput={(text) => change({ address: text })}
+        maxLength={500}
+      />
       <TextField
         label="Day of the visit"
         value={day}
-        onInput={setDay}
+        onInput={(text) => change({ day: text })}
         fault={dayFault}
         hint="Such as 2026-05-14."
       />
@@ -67,11 +89,17 @@ export function SiteForm(props: {
         unit="%"
         keys="numbers"
         value={albedo}
-        onInput={setAlbedo}
+        onInput={(text) => change({ albedo: text })}
         fault={faultOf(reflects)}
         hint="20 % for grass and soil where nothing is given; fresh snow about 80 %, light gravel about 30 %."
       />
-      <TextField label="Notes" value={notes} onInput={setNotes} lines={4} maxLength={20_000} />
+      <TextField
+        label="Notes"
+        value={notes}
+        onInput={(text) => change({ notes: text })}
+        lines={4}
+        maxLength={20_000}
+      />
     </Form>
   );
 }

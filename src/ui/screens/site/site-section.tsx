@@ -3,20 +3,22 @@ import { changeSurvey } from '../../../app/actions/change-survey.ts';
 import { attempt } from '../../../app/attempt.ts';
 import { nextOrder } from '../../../app/capture/station-edits.ts';
 import type { StepCode } from '../../../app/survey-store.ts';
+import { factGroups } from '../../../core/survey/site-fact-groups.ts';
 import { withoutObstruction } from '../../../core/survey/removed-entries.ts';
 import type { FactGroup } from '../../../core/survey/site-facts-general.ts';
 import type { Obstruction, Survey } from '../../../core/survey/survey.ts';
 import { EditHeading } from '../../components/edit-heading.tsx';
 import { PhotoSpace } from '../../components/photos/photo-space.tsx';
 import { PhotoStrip } from '../../components/photos/photo-strip.tsx';
+import { UnfinishedForms } from '../../components/form/unfinished-forms.tsx';
 import { focusHeading } from '../../components/screen-heading.tsx';
 import type { SectionProps } from '../../section.ts';
 import { Caution } from './facts/cautions.tsx';
-import { FactForm } from './facts/fact-form.tsx';
+import { FactForm, factForm } from './facts/fact-form.tsx';
 import { FactGroups } from './facts/fact-groups.tsx';
-import { ObstructionForm } from './obstruction-form.tsx';
+import { ObstructionForm, obstructionForm } from './obstruction-form.tsx';
 import { ObstructionList } from './obstruction-list.tsx';
-import { SiteForm } from './site-form.tsx';
+import { SiteForm, SITE_FORM } from './site-form.tsx';
 import { SiteSummary } from './site-summary.tsx';
 import './site.css';
 
@@ -53,6 +55,17 @@ export function SiteSection({ survey, services }: SectionProps) {
     if (await store(withoutObstruction(survey, id), 'entry-deleted', name)) focusHeading();
   };
 
+  /** What goes on with a form that was typed into and not saved. */
+  const opens = (form: string): (() => void) | null => {
+    if (form === SITE_FORM) return () => setEditing({ what: 'site' });
+    const group = factGroups(survey.site).find((one) => factForm(one) === form);
+    if (group) return () => setEditing({ what: 'facts', group });
+    if (form === obstructionForm(null))
+      return () => setEditing({ what: 'obstruction', obstruction: null, newId: services.newId() });
+    const obstruction = survey.obstructions.find((one) => obstructionForm(one) === form);
+    return obstruction ? () => setEditing({ what: 'obstruction', obstruction, newId: obstruction.id }) : null;
+  };
+
   if (editing?.what === 'site')
     return (
       <div class="stack">
@@ -87,6 +100,7 @@ export function SiteSection({ survey, services }: SectionProps) {
           {editing.obstruction ? `Change ${editing.obstruction.name}` : 'New obstruction'}
         </EditHeading>
         <ObstructionForm
+          surveyId={survey.id}
           obstruction={editing.obstruction}
           newId={editing.newId}
           order={nextOrder(survey.obstructions)}
@@ -99,6 +113,7 @@ export function SiteSection({ survey, services }: SectionProps) {
     );
   return (
     <div class="stack">
+      <UnfinishedForms survey={survey.id} opens={opens} />
       <h2>Site</h2>
       <SiteSummary survey={survey} />
       <div class="form-actions">

@@ -1,11 +1,13 @@
 import { ordered } from '../../../core/survey/order.ts';
 import type { Station, Survey } from '../../../core/survey/survey.ts';
 import { AllStations } from '../../components/field-book/all-stations.tsx';
+import { UnfinishedForms } from '../../components/form/unfinished-forms.tsx';
+import { navigate } from '../../router.ts';
 import type { SectionProps } from '../../section.ts';
 import { percentText } from '../../value-text.ts';
 import { startPractice } from './practice.ts';
 import { hasParts, placeWords, servedNames } from './station-facts.ts';
-import { measurePath, newStationPath, stationPath } from './station-path.ts';
+import { editStationPath, measurePath, newStationPath, stationForm, stationPath } from './station-path.ts';
 import { useAssessment } from './use-assessment.ts';
 
 type Figures = ReturnType<typeof useAssessment>;
@@ -43,8 +45,15 @@ function Row(props: { station: Station; survey: Survey; surveyId: string; figure
 export function StationList({ surveyId, survey, services }: SectionProps) {
   const figures = useAssessment(services, survey);
   const stations = ordered(survey.stations);
+  /** What goes on with a form that was typed into and not saved. */
+  const opens = (form: string): (() => void) | null => {
+    if (form === stationForm(null)) return () => navigate(newStationPath(surveyId));
+    const station = stations.find((one) => stationForm(one) === form);
+    return station ? () => navigate(editStationPath(surveyId, station.id)) : null;
+  };
   return (
     <div class="stack">
+      <UnfinishedForms survey={surveyId} opens={opens} />
       <h2>Stations</h2>
       {stations.length === 0 ? (
         <p>

@@ -1,8 +1,10 @@
 import { useState } from 'preact/hooks';
+import type { JsonValue } from '../../../../core/survey/json-value.ts';
 import { withFacts } from '../../../../core/survey/site-fact-groups.ts';
 import type { FactGroup } from '../../../../core/survey/site-facts-general.ts';
 import type { SiteFact, Survey } from '../../../../core/survey/survey.ts';
 import { Form } from '../../../components/form/form.tsx';
+import { useDraft } from '../../../components/form/use-draft.ts';
 import { TextField } from '../../../components/form/text-field.tsx';
 import { addOwnChoice } from '../../../device/own-choices.ts';
 import { FactField } from './fact-field.tsx';
@@ -15,6 +17,9 @@ const cleaned = (answers: string[]): string[] => answers.map((text) => text.trim
 /** Ids of the surveyor's own facts begin so, with the group they stand in. */
 export const ownPrefix = (group: FactGroup): string => `own-${group.id}-`;
 
+/** Name of the form of a group. */
+export const factForm = (group: FactGroup): string => `facts/${group.id}`;
+
 /** Answering the facts of one group, and adding one of one's own. */
 export function FactForm(props: {
   survey: Survey;
@@ -26,14 +31,23 @@ export function FactForm(props: {
   const { survey, group } = props;
   const factOf = (id: string) => survey.facts?.find((fact) => fact.id === id);
   const own = (survey.facts ?? []).filter(({ id }) => id.startsWith(ownPrefix(group)));
-  const [answers, setAnswers] = useState<Record<string, string[]>>(() =>
-    Object.fromEntries(group.rows.map(({ id }) => [id, listOf(factOf(id)?.value)])),
+  const ids = new Set([...group.rows, ...own].map(({ id }) => id));
+  const draft = useDraft(
+    {
+      survey: survey.id,
+      form: factForm(group),
+      label: group.label,
+      over: (survey.facts ?? []).filter(({ id }) => ids.has(id)) as unknown as JsonValue,
+    },
+    () => ({
+      answers: Object.fromEntries(group.rows.map(({ id }) => [id, listOf(factOf(id)?.value)])),
+      ownAnswers: Object.fromEntries(own.map(({ id, value }) => [id, listOf(value).join(', ')])),
+      label: '',
+      value: '',
+    }),
   );
-  const [ownAnswers, setOwnAnswers] = useState<Record<string, string>>(() =>
-    Object.fromEntries(own.map(({ id, value }) => [id, listOf(value).join(', ')])),
-  );
-  const [label, setLabel] = useState('');
-  const [value, setValue] = useState('');
+  const { change } = draft;
+  const { answers, ownAnswers, label, value } = draft.typed;
   const [asked, setAsked] = useState(false);
   const labelFault = value.trim() !== '' && label.trim() === '' ? 'Say what it is.' : null;
 
@@ -57,13 +71,13 @@ export function FactForm(props: {
     return true;
   };
   return (
-    <Form label={group.label} action="Save" onSubmit={save} onCancel={props.onCancel}>
+    <Form label={group.label} action="Save" onSubmit={save} onCancel={props.onCancel} draft={draft.state}>
       {group.rows.map((row) => (
         <FactField
           key={row.id}
           row={row}
           value={answers[row.id] ?? []}
-          onChange={(given) => setAnswers((now) => ({ ...now, [row.id]: given }))}
+          onChange={(given) => change({ answers: { ...answers, [row.id]: given } })}
         />
       ))}
       {own.map(({ id, label: known }) => (
@@ -72,7 +86,7 @@ export function FactForm(props: {
           label={known ?? id}
           value={ownAnswers[id] ?? ''}
           maxLength={5000}
-          onInput={(text) => setOwnAnswers((now) => ({ ...now, [id]: text }))}
+          onInput={(text) => change({ ownAnswers: { ...ownAnswers, [id]: text } })}
         />
       ))}
       <fieldset class="fields">
@@ -81,10 +95,16 @@ export function FactForm(props: {
           label="What it is"
           value={label}
           maxLength={200}
-          onInput={setLabel}
+          onInput={(text) => change({ label: text })}
           fault={asked ? labelFault : null}
         />
-        <TextField label="Answer" value={value} maxLength={5000} lines={2} onInput={setValue} />
+        <TextField
+          label="Answer"
+          value={value}
+          maxLength={5000}
+          lines={2}
+          onInput={(text) => change({ value: text })}
+        />
       </fieldset>
     </Form>
   );

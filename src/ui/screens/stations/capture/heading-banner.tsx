@@ -1,8 +1,21 @@
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import { takeCompass } from '../../../../app/capture/compass-take.ts';
 
+const CHECK_LATER = {
+  words: 'Sightings are kept, and one heading check in this sitting gives all of them their north.',
+  action: 'Heading check',
+};
+
 /** What stands between the figures and north, and what to do. */
-export function HeadingBanner({ session, onCheck }: { session: CaptureSession; onCheck: () => void }) {
+export function HeadingBanner({
+  session,
+  onCheck,
+  withoutCompass = CHECK_LATER,
+}: {
+  session: CaptureSession;
+  onCheck: () => void;
+  withoutCompass?: { words: string; action: string };
+}) {
   const sensor = session.sensor.value;
   // pointed anew after each take, which is when the heading may have come
   const heading = session.pointed.value && session.runNow?.heading;
@@ -34,11 +47,10 @@ export function HeadingBanner({ session, onCheck }: { session: CaptureSession; o
   return (
     <div class="banner">
       <p>
-        <strong>This phone has no compass.</strong> Sightings are kept, and one heading check in this sitting
-        gives all of them their north.
+        <strong>This phone has no compass.</strong> {withoutCompass.words}
       </p>
       <button type="button" onClick={onCheck}>
-        Heading check
+        {withoutCompass.action}
       </button>
     </div>
   );

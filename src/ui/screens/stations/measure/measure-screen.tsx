@@ -34,6 +34,12 @@ const HOW: Record<Way, string> = {
   fall: 'Stand in line with a verge and sight along it, up or down the slope.',
 };
 
+/** An edge sighted in a sitting of its own, without a compass, stays without north. */
+const TYPE_INSTEAD = {
+  words: 'An edge sighted here would have no north. Type the bearing of the eave from a plan or a map.',
+  action: 'Type the bearing',
+};
+
 /** Tilt and facing of a plane by the phone. */
 export function MeasureScreen(props: SectionProps & { plane: RoofPlane }) {
   const { services, surveyId, plane } = props;
@@ -61,7 +67,7 @@ export function MeasureScreen(props: SectionProps & { plane: RoofPlane }) {
 }
 
 function Measuring(props: SectionProps & { plane: RoofPlane; capture: Capture; session: CaptureSession }) {
-  const { services, plane, capture, session } = props;
+  const { services, surveyId, plane, capture, session } = props;
   const [way, setWay] = useState<Way>('flat');
   const laid = way === 'flat' || way === 'edge';
   useEffect(() => {
@@ -87,7 +93,11 @@ function Measuring(props: SectionProps & { plane: RoofPlane; capture: Capture; s
       <div class="sitting-hand">
         {!laid && (
           <>
-            <HeadingBanner session={session} onCheck={() => undefined} />
+            <HeadingBanner
+              session={session}
+              onCheck={() => navigate(surveyPath(surveyId, 'roof'))}
+              withoutCompass={TYPE_INSTEAD}
+            />
             <p class="small">Never by the compass on metal: keep the phone off the roofing.</p>
           </>
         )}
