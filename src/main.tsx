@@ -2,10 +2,12 @@ import { render } from 'preact';
 import { AppError } from './app/app-error.ts';
 import { appState } from './app/app-state.ts';
 import type { AppServices, SampleSurvey } from './app/app-services.ts';
+import { seeChange } from './app/actions/see-change.ts';
 import { offerUpdates } from './app/update-flow.ts';
 import { backupDatabase } from './storage/backup-database.ts';
 import { Connection } from './storage/connection.ts';
 import { draftDatabase } from './storage/draft-database.ts';
+import { OtherTabs, toldStore } from './storage/other-tabs.ts';
 import { photoDatabase } from './storage/photo-database.ts';
 import { sha256Of } from './storage/sha256-of.ts';
 import { surveyDatabase } from './storage/survey-database.ts';
@@ -54,14 +56,10 @@ async function keepStorage(): Promise<void> {
 const checker = async () => (await parser()).surveyFromJson;
 const state = appState();
 const connection = new Connection((report) => (state.database.value = report));
+const otherTabs = new OtherTabs();
 const services: AppServices = {
   state,
-  store: surveyDatabase({
-    connection,
-    checker,
-    now,
-    newId,
-  }),
+  store: toldStore(surveyDatabase({ connection, checker, now, newId }), (id) => otherTabs.tell(id)),
   weather: weatherDatabase(connection, now),
   photos: photoDatabase(connection, now),
   backup: backupDatabase({ connection, checker, now }),
@@ -109,6 +107,7 @@ async function startServiceWorker(): Promise<void> {
   });
 }
 
+otherTabs.listen((id) => void seeChange(services, id).catch(() => undefined)); // what is shown stays, as stored before
 startPaper();
 startRouter();
 startInstallOffer();

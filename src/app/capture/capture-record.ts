@@ -72,6 +72,7 @@ export class CaptureRecord {
     const done = this.queue.then(async () => {
       try {
         await write();
+        this.services.state.trouble.value = null; // such as a full device that has room again
         return true;
       } catch (error) {
         const { code, cause } = asAppError(error);
