@@ -54,13 +54,13 @@ export class MovedRegions {
       const from = turn > 0 ? this.cornerAzimuth[i] : this.cornerAzimuth[i] + turn;
       const above = top === 0 || top > 0 === turn > 0;
       const [first, last] = turn > 0 ? [e1, e2] : [e2, e1];
-      if (edgeStraight[edge]) this.layStraight(region, above, from, Math.abs(turn), first, last, stray[edge]);
-      else this.layDrawn(region, above, from, Math.abs(turn), first, last, stray[edge]);
+      const line = edgeStraight[edge] ? greatCircle(from, Math.abs(turn), first, last) : null;
+      this.layEdge(region, above, from, Math.abs(turn), first, last, stray[edge], line);
     }
   }
 
-  /** Elevation linear in azimuth, with the middle astray by a parabola. */
-  private layDrawn(
+  /** Without a line: elevation linear in azimuth. The middle is astray by a parabola. */
+  private layEdge(
     region: number,
     above: boolean,
     from: number,
@@ -68,52 +68,54 @@ export class MovedRegions {
     e1: number,
     e2: number,
     stray: number,
+    line: GreatCircle | null,
   ): void {
     if (turn < 1e-9) return;
-    const start = from - 360 * Math.floor(from / 360);
+    const start = inCircle(from);
     const end = start + turn;
-    for (let column = (start / DRAW_COLUMN_WIDTH) | 0; column * DRAW_COLUMN_WIDTH < end; column++) {
-      const low = Math.max(start, column * DRAW_COLUMN_WIDTH);
-      const high = Math.min(end, (column + 1) * DRAW_COLUMN_WIDTH);
-      const u = ((low + high) / 2 - start) / turn;
-      const elevation = e1 + u * (e2 - e1 + 4 * (1 - u) * stray);
-      this.columns.add(column, region, above, (high - low) / DRAW_COLUMN_WIDTH, elevation);
-    }
-  }
-
-  /** A great circle: tan e = a·sin(azimuth) + b·cos(azimuth), see `edgesBetween`. */
-  private layStraight(
-    region: number,
-    above: boolean,
-    from: number,
-    turn: number,
-    e1: number,
-    e2: number,
-    stray: number,
-  ): void {
-    if (turn < 1e-9) return;
-    const start = from - 360 * Math.floor(from / 360);
-    const end = start + turn;
-    const [t1, t2] = [tangent(e1), tangent(e2)];
-    const sine = Math.sin(turn * RADIANS);
-    const [startRad, endRad] = [start * RADIANS, end * RADIANS];
-    const a = (t2 * Math.cos(startRad) - t1 * Math.cos(endRad)) / sine;
-    const b = (t1 * Math.sin(endRad) - t2 * Math.sin(startRad)) / sine;
     for (let column = (start / DRAW_COLUMN_WIDTH) | 0; column * DRAW_COLUMN_WIDTH < end; column++) {
       const low = Math.max(start, column * DRAW_COLUMN_WIDTH);
       const high = Math.min(end, (column + 1) * DRAW_COLUMN_WIDTH);
       const width = (high - low) / DRAW_COLUMN_WIDTH;
       const middle = (low + high) / 2;
-      const c = column % DRAW_COLUMNS;
-      const slope =
-        width === 1
-          ? a * COLUMN_SINE[c] + b * COLUMN_COSINE[c]
-          : a * Math.sin(middle * RADIANS) + b * Math.cos(middle * RADIANS);
       const u = (middle - start) / turn;
-      this.columns.add(column, region, above, width, Math.atan(slope) * DEGREES + 4 * u * (1 - u) * stray);
+      const elevation = line
+        ? elevationOn(line, middle, width === 1 ? column % DRAW_COLUMNS : -1) + 4 * u * (1 - u) * stray
+        : e1 + u * (e2 - e1 + 4 * (1 - u) * stray);
+      this.columns.add(column, region, above, width, elevation);
     }
   }
 }
+
+/** tan e = a·sin(azimuth) + b·cos(azimuth), see `edgesBetween`. */
+interface GreatCircle {
+  a: number;
+  b: number;
+}
+
+/** Null for two ends in one azimuth. */
+function greatCircle(from: number, turn: number, e1: number, e2: number): GreatCircle | null {
+  if (turn < 1e-9) return null;
+  const start = inCircle(from);
+  const [t1, t2] = [tangent(e1), tangent(e2)];
+  const sine = Math.sin(turn * RADIANS);
+  const [startRad, endRad] = [start * RADIANS, (start + turn) * RADIANS];
+  return {
+    a: (t2 * Math.cos(startRad) - t1 * Math.cos(endRad)) / sine,
+    b: (t1 * Math.sin(endRad) - t2 * Math.sin(startRad)) / sine,
+  };
+}
+
+/** Elevation at an azimuth, degrees; `column` where that is the middle of a whole one, else -1. */
+function elevationOn({ a, b }: GreatCircle, azimuth: number, column: number): number {
+  const slope =
+    column >= 0
+      ? a * COLUMN_SINE[column] + b * COLUMN_COSINE[column]
+      : a * Math.sin(azimuth * RADIANS) + b * Math.cos(azimuth * RADIANS);
+  return Math.atan(slope) * DEGREES;
+}
+
+const inCircle = (azimuth: number) => azimuth - 360 * Math.floor(azimuth / 360);
 
 function middleRad(column: number): number {
   return (column + 0.5) * DRAW_COLUMN_WIDTH * RADIANS;
