@@ -59,27 +59,25 @@ function wordsIn(
   size: number,
 ): Mark[] {
   const width = textWidth(text, size);
+  const words = (x: number, y: number, turn?: number): Mark => ({
+    kind: 'text',
+    x,
+    y,
+    text,
+    size,
+    anchor: 'middle',
+    italic: true,
+    rim: true,
+    tone: 'faint',
+    turn,
+  });
   if (right - left >= width + 4) {
     const middle = (left + right) / 2;
     const spots = [0.3, 0.5, 0.7, 0.1].map((share) =>
       boxAround(middle, frame.above + size + share * (frame.below - frame.above - 2 * size), width, size),
     );
     const place = places.take(spots);
-    return place
-      ? [
-          {
-            kind: 'text',
-            x: place.x,
-            y: place.y,
-            text,
-            size,
-            anchor: 'middle',
-            italic: true,
-            rim: true,
-            tone: 'faint',
-          },
-        ]
-      : [];
+    return place ? [words(place.x, place.y)] : [];
   }
   if (right - left < size * 1.3 || frame.below - frame.above < width) return [];
   const x = (left + right) / 2 + size * 0.35;
@@ -87,20 +85,5 @@ function wordsIn(
   const place = places.take([
     { left: x - size, right: x + size * 0.3, top: y - width / 2, bottom: y + width / 2 },
   ]);
-  return place
-    ? [
-        {
-          kind: 'text',
-          x,
-          y,
-          text,
-          size,
-          anchor: 'middle',
-          italic: true,
-          rim: true,
-          tone: 'faint',
-          turn: -90,
-        },
-      ]
-    : [];
+  return place ? [words(x, y, -90)] : [];
 }
