@@ -10,6 +10,7 @@ import type { Sighting, Station, Survey, Trace } from '../../../core/survey/surv
 import { useApp } from '../../app-context.ts';
 import { degreesText } from '../../value-text.ts';
 import { PhotoStrip } from '../photos/photo-strip.tsx';
+import { ColumnHeads } from '../column-heads.tsx';
 import { WideTable } from '../wide-table.tsx';
 import { BookDialog } from './book-dialog.tsx';
 import type { BookEdit } from './book-edit.ts';
@@ -150,20 +151,7 @@ function Book(props: { station: Station; survey: Survey; onEdit: (edit: BookEdit
     });
   return (
     <WideTable label={`Sightings from ${station.name}`}>
-      <thead>
-        <tr>
-          <th scope="col" class="number">
-            No.
-          </th>
-          <th scope="col" class="number">
-            Azimuth
-          </th>
-          <th scope="col" class="number">
-            Elevation
-          </th>
-          <th scope="col">Remarks</th>
-        </tr>
-      </thead>
+      <ColumnHeads heads={[{ number: 'No.' }, { number: 'Azimuth' }, { number: 'Elevation' }, 'Remarks']} />
       {ordered(station.traces).map((trace) => (
         <SightingRows
           key={trace.id}

@@ -1,6 +1,16 @@
 import { useId } from 'preact/hooks';
 import type { CheckRow, SelfCheckGroup } from '../../../core/self-check/check-row.ts';
 import { shownRow } from '../../../core/self-check/shown-row.ts';
+import { ColumnHeads } from '../../components/column-heads.tsx';
+
+const HEADS = [
+  'What',
+  { number: 'Published' },
+  { number: 'Computed here' },
+  { number: 'Difference' },
+  { number: 'Allowed' },
+  'Result',
+];
 
 /** One source: what it prints, what this device computes, row by row. */
 export function CheckGroup({ group }: { group: SelfCheckGroup }) {
@@ -15,24 +25,7 @@ export function CheckGroup({ group }: { group: SelfCheckGroup }) {
       </p>
       <div class="scroll-x" role="region" aria-labelledby={headingId} tabIndex={0}>
         <table>
-          <thead>
-            <tr>
-              <th scope="col">What</th>
-              <th scope="col" class="number">
-                Published
-              </th>
-              <th scope="col" class="number">
-                Computed here
-              </th>
-              <th scope="col" class="number">
-                Difference
-              </th>
-              <th scope="col" class="number">
-                Allowed
-              </th>
-              <th scope="col">Result</th>
-            </tr>
-          </thead>
+          <ColumnHeads heads={HEADS} />
           <tbody>
             {group.rows.map((row) => (
               <ValueRow key={`${row.name} ${row.quantity}`} row={row} />

@@ -2,6 +2,7 @@ import { useMemo } from 'preact/hooks';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
 import { hourBars, hoursWithLight } from '../../../report/pictures/hour-bars.ts';
 import { MONTH_NAMES } from '../../../report/pictures/picture-words.ts';
+import { ColumnHeads } from '../../components/column-heads.tsx';
 import { WideTable } from '../../components/wide-table.tsx';
 import { Drawing } from './drawing.tsx';
 import { standardTimeText } from './standard-time-text.ts';
@@ -30,16 +31,7 @@ export function HourTable({ shade, timeZone }: { shade: StationShade; timeZone: 
       <details>
         <summary>Values</summary>
         <WideTable label="Solar access by month and hour, percent">
-          <thead>
-            <tr>
-              <th scope="col">%</th>
-              {columns.map((hour) => (
-                <th key={hour} scope="col" class="number">
-                  {hour}–{hour + 1}
-                </th>
-              ))}
-            </tr>
-          </thead>
+          <ColumnHeads heads={['%', ...columns.map((hour) => ({ number: `${hour}–${hour + 1}` }))]} />
           <tbody>
             {MONTH_NAMES.map((name, month) => (
               <tr key={name}>

@@ -2,9 +2,12 @@ import { useMemo } from 'preact/hooks';
 import type { StationShade } from '../../../core/shading/station-shade.ts';
 import { monthColumns } from '../../../report/pictures/month-columns.ts';
 import { MONTH_NAMES } from '../../../report/pictures/picture-words.ts';
+import { ColumnHeads } from '../../components/column-heads.tsx';
 import { Drawing } from './drawing.tsx';
 import { energy, percent } from './figures.ts';
 import { useWidth } from './use-width.ts';
+
+const HEADS = ['Month', { number: 'Open' }, { number: 'Arrives' }, { number: 'Share' }];
 
 /** Light month by month, with and without what stands in the way. */
 export function MonthView({ shade }: { shade: StationShade }) {
@@ -34,25 +37,7 @@ export function MonthView({ shade }: { shade: StationShade }) {
         <summary>Values</summary>
         <table>
           <caption class="visually-hidden">Light on the plane by month, kWh/m²</caption>
-          <thead>
-            <tr>
-              <th scope="col">Month</th>
-              <th scope="col" class="number">
-                Open
-              </th>
-              <th scope="col" class="number">
-                Arrives
-              </th>
-              <th scope="col" class="number">
-                Share
-              </th>
-              {imagined && (
-                <th scope="col" class="number">
-                  Imagined
-                </th>
-              )}
-            </tr>
-          </thead>
+          <ColumnHeads heads={imagined ? [...HEADS, { number: 'Imagined' }] : HEADS} />
           <tbody>
             {MONTH_NAMES.map((name, month) => (
               <tr key={name}>

@@ -1,9 +1,9 @@
 import type { ImportResult } from '../../../app/app-state.ts';
 import { useApp } from '../../app-context.ts';
 import { ProblemList } from '../../components/problem-list.tsx';
-import { ERROR_MESSAGES } from '../../messages.ts';
 import { surveyPath } from '../../survey-path.ts';
 import { FileReport } from './file-report.tsx';
+import { NotDone } from './not-done.tsx';
 
 function Outcome({ result }: { result: ImportResult }) {
   switch (result.outcome) {
@@ -28,14 +28,8 @@ function Outcome({ result }: { result: ImportResult }) {
           <ProblemList problems={result.problems} />
         </>
       );
-    case 'failed': {
-      const { what, remedy } = ERROR_MESSAGES[result.code];
-      return (
-        <p>
-          Not imported. {what} {remedy}
-        </p>
-      );
-    }
+    case 'failed':
+      return <NotDone what="Not imported." code={result.code} />;
     case 'left-out':
       return <p>Left out; the survey on this device is unchanged.</p>;
   }

@@ -4,6 +4,7 @@ import { ProblemList } from '../../components/problem-list.tsx';
 import { ERROR_MESSAGES } from '../../messages.ts';
 import { surveyPath } from '../../survey-path.ts';
 import { FileReport } from './file-report.tsx';
+import { NotDone } from './not-done.tsx';
 
 const OUTCOMES = {
   added: 'is restored.',
@@ -46,14 +47,8 @@ function Outcome({ result }: { result: RestoreResult }) {
           <ProblemList problems={result.problems} />
         </>
       );
-    case 'failed': {
-      const { what, remedy } = ERROR_MESSAGES[result.code];
-      return (
-        <p>
-          Not restored. {what} {remedy}
-        </p>
-      );
-    }
+    case 'failed':
+      return <NotDone what="Not restored." code={result.code} />;
   }
 }
 
