@@ -22,6 +22,8 @@ export interface Routine {
 
 export const CHECKED: Routine = { shadow: 1, twoFace: false };
 export const UNCHECKED: Routine = { shadow: 0, twoFace: false };
+/** What the app asks for: a heading check, and this phone turned over on one mark. */
+export const ROUTINE: Routine = { shadow: 1, twoFace: true };
 /** A heading check at the beginning and at the end, and the phone turned over. */
 export const CAREFUL: Routine = { shadow: 2, twoFace: true };
 

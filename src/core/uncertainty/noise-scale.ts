@@ -1,58 +1,53 @@
-import { turnBetween } from '../angles/angles.ts';
-import type { PointedRun, PointedSurvey } from '../pointing/pointed-survey.ts';
-import { PLANNING } from '../pointing/planning-values.ts';
-import { REPEATS } from './planning-values.ts';
+import type { PointedSurvey } from '../pointing/pointed-survey.ts';
+import { NOISE } from './planning-values.ts';
+import type { RandomSource } from './random-source.ts';
+import type { Repeat } from './repeats.ts';
+import { repeatsOf } from './repeats.ts';
+
+/** Scales that are weighed against each other: even steps of their logarithm, five standard deviations and more each way. */
+const STEPS = 121;
+const LOG_REACH = 3;
 
 /**
- * How much worse than planned this survey was pointed, by its own repeats: a mark sighted again, a compass held against a
- * check, checks against each other, an inclination that turning the phone over found. 1 where they agree as well as planned
- * or better; the planned deviations of all its runs are multiplied by it. A survey that repeats nothing cannot show it.
+ * How much worse than planned a survey was pointed, `count` times: the planned deviations of all its runs are multiplied by
+ * it, draw by draw. What is believed beforehand, a factor of two either way, is weighed by the survey's own repeats; few
+ * repeats leave it wide, so that draws have the heavy tails of a deviation that is not known (as Student's t has). A
+ * survey that repeats nothing shows nothing of it, and is drawn as planned: 1.
+ * Ref: Gelman and others (2013), Bayesian Data Analysis, 3rd ed., chapters 2 (normal data, unknown scale) and 3 (grids).
  */
-export function noiseScale({ runs }: Pick<PointedSurvey, 'runs'>): number {
-  const squares = [...runs.flatMap(repeatsOf), ...turnedOver(runs)].map(
-    (ratio) => Math.min(REPEATS.farthest, Math.abs(ratio)) ** 2,
+export function noiseScales(
+  pointed: Pick<PointedSurvey, 'runs'>,
+  random: RandomSource,
+  count: number,
+): Float64Array {
+  const repeats = repeatsOf(pointed);
+  if (repeats.length === 0) return new Float64Array(count).fill(1);
+  const weights = Array.from({ length: STEPS }, (_, k) => posterior(Math.exp(logScale(k)), repeats));
+  const whole = weights.reduce((sum, weight) => sum + weight, 0);
+  return Float64Array.from({ length: count }, () =>
+    Math.max(NOISE.least, Math.exp(logScale(stepAt(weights, whole * random.uniform())))),
   );
-  const sum = squares.reduce((total, square) => total + square, REPEATS.asPlanned);
-  return Math.max(1, Math.sqrt(sum / (REPEATS.asPlanned + squares.length)));
 }
 
-/** Differences between repeats, in planned standard deviations. */
-const repeatsOf = (run: PointedRun): number[] => [
-  ...closingOf(run),
-  ...compassAgainstChecks(run),
-  ...checksAgainstEachOther(run),
-];
+const logScale = (step: number) => LOG_REACH * ((2 * step) / (STEPS - 1) - 1);
 
-/** A mark sighted again: a compass frame stays, any other turns as time goes on. */
-function closingOf({ closure, heading }: PointedRun): number[] {
-  if (!closure) return [];
-  const twice = PLANNING.pointing * Math.SQRT2;
-  const turns = heading !== null && heading.ratePerMinute !== 0;
-  const turned = turns ? PLANNING.yawDriftPerMinute * closure.minutes : 0;
-  return [closure.elevation / twice, closure.azimuth / Math.hypot(twice, turned)];
+/** Belief in a scale, per step of its logarithm and up to a common factor. */
+function posterior(scale: number, repeats: readonly Repeat[]): number {
+  const before = Math.exp(-((Math.log(scale) / NOISE.logDeviation) ** 2) / 2);
+  return repeats.reduce((belief, repeat) => belief * likelihood(repeat, scale), before);
 }
 
-const compassAgainstChecks = ({ checks }: PointedRun): number[] =>
-  checks.flatMap(({ againstCompass, standardDeviation }) =>
-    againstCompass === null ? [] : [againstCompass / Math.hypot(PLANNING.compass, standardDeviation)],
-  );
-
-function checksAgainstEachOther({ checks, heading }: PointedRun): number[] {
-  const { ratePerMinute = 0, ratePerMinuteDeviation = 0 } = heading ?? {};
-  const good = checks.filter(({ offset }) => offset !== null);
-  return good.slice(1).map((check, i) => {
-    const before = good[i];
-    const minutes = (check.takenAtMs - before.takenAtMs) / 60_000;
-    const moved = turnBetween(before.offset!, check.offset!) - ratePerMinute * minutes;
-    const drift = ratePerMinuteDeviation * minutes;
-    return moved / Math.hypot(check.standardDeviation, before.standardDeviation, drift);
-  });
+/** Density of a difference where everything is `scale` times as planned; of outliers, even over their reach. */
+function likelihood({ difference, outliers }: Repeat, scale: number): number {
+  const size = Math.min(NOISE.farthest, Math.abs(difference));
+  const usual = Math.exp(-((size / scale) ** 2) / 2) / (scale * Math.sqrt(2 * Math.PI));
+  if (!outliers) return usual;
+  const { share, reach } = outliers;
+  return (1 - share) * usual + (size <= reach ? share / (2 * reach) : 0);
 }
 
-/** Inclinations that turning over found; runs of one phone share one, which counts once. */
-function turnedOver(runs: readonly PointedRun[]): number[] {
-  const found = runs.flatMap(({ index }) =>
-    Object.values(index).flatMap(({ source, value }) => (source === 'two-face' ? [value] : [])),
-  );
-  return [...new Set(found)].map((value) => value / PLANNING.elevationIndex);
+function stepAt(weights: readonly number[], target: number): number {
+  let step = 0;
+  for (let sum = weights[0]; sum < target && step < weights.length - 1; sum += weights[step]) step++;
+  return step;
 }

@@ -25,10 +25,11 @@ export const STRAIGHT_STRAY = 0.03;
 export const BULGE = { radius: 20, most: 6 };
 
 /**
- * How much a survey's own repeats weigh against what is planned of pointing: as much as so many repeats that came out as
- * planned. A repeat further out than `farthest` deviations counts as that far.
+ * How much worse than planned a survey may have been pointed: before its own repeats are looked at, a factor of two either
+ * way (the deviation of its logarithm, ln 2). Repeats that agree do not prove a steadier hand than `least`. A repeat
+ * further out than `farthest` planned deviations counts as that far.
  */
-export const REPEATS = { asPlanned: 1, farthest: 4 };
+export const NOISE = { logDeviation: Math.LN2, least: 0.8, farthest: 5 };
 
 /**
  * Sky that nobody looked at is cut into patches no wider than `patch`, degrees. In each one stands, apart from the others:

@@ -136,7 +136,7 @@ export class StationDraws {
       const drawn = run === null ? undefined : survey.runs.get(run);
       azimuth[k] = drawn ? drawn.heading[i] + drawn.rate[i] * minutes : survey.typed.heading[i];
       elevation[k] = drawn ? drawn.index[axis][i] : survey.typed.index[i];
-      const own = drawn ? scale * survey.noise : scale;
+      const own = drawn ? scale * survey.noise[i] : scale;
       azimuth[k] += own * across * normal();
       elevation[k] += own * upward * normal();
     }

@@ -2,7 +2,7 @@ import { PLANNING } from '../pointing/planning-values.ts';
 import type { PointedRun, PointedSurvey, RunHeading } from '../pointing/pointed-survey.ts';
 import type { SightingAxis } from '../survey/survey.ts';
 import type { IntervalSourceId } from './interval-source.ts';
-import { noiseScale } from './noise-scale.ts';
+import { noiseScales } from './noise-scale.ts';
 import { CHECKED_HEADING, LEFT_AFTER } from './planning-values.ts';
 import { randomSource } from './random-source.ts';
 
@@ -10,8 +10,8 @@ import { randomSource } from './random-source.ts';
 export interface SurveyDraws {
   readonly seed: string;
   readonly count: number;
-  /** How much worse than planned the survey was pointed; in all that is drawn for its runs. */
-  readonly noise: number;
+  /** How much worse than planned the survey was pointed, 1 for as planned; in all that is drawn for its runs. */
+  readonly noise: Float64Array;
   readonly runs: ReadonlyMap<string, RunDraws>;
   readonly typed: { heading: Float64Array; index: Float64Array };
   /** Normal, of standard deviation 1. */
@@ -40,7 +40,7 @@ export function surveyDraws(
 ): SurveyDraws {
   const runs = new Map<string, RunDraws>();
   const byId = new Map(pointed.runs.map((run) => [run.id, run]));
-  const noise = noiseScale(pointed);
+  const noise = noiseScales(pointed, randomSource(seed, 'noise'), count);
   for (const run of pointed.runs) drawRun(run, byId, runs, { seed, count, noise, cured });
   const normals = (name: string, deviation: number) => {
     const random = randomSource(seed, name);
@@ -73,7 +73,7 @@ export function surveyDraws(
 interface RunDrawing {
   seed: string;
   count: number;
-  noise: number;
+  noise: Float64Array;
   cured?: IntervalSourceId;
 }
 
@@ -105,7 +105,7 @@ function drawRun(
     const random = randomSource(seed, 'index', run.id, axis);
     const { standardDeviation } = index[axis];
     const deviation = cured === 'elevation-index' ? curedIndex(standardDeviation) : standardDeviation;
-    for (let i = 0; i < count; i++) draws.index[axis][i] = noise * deviation * random.normal();
+    for (let i = 0; i < count; i++) draws.index[axis][i] = noise[i] * deviation * random.normal();
   }
 }
 
@@ -121,8 +121,8 @@ function drawHeading(
   for (let i = 0; i < draws.heading.length; i++) {
     const [usual, rate, chance, far] = [random.normal(), random.normal(), random.uniform(), random.uniform()];
     const isOutlier = outliers !== null && chance < outliers.share;
-    draws.heading[i] = isOutlier ? outliers.reach * (2 * far - 1) : noise * deviation * usual;
-    draws.rate[i] = noise * heading.ratePerMinuteDeviation * rate;
+    draws.heading[i] = isOutlier ? outliers.reach * (2 * far - 1) : noise[i] * deviation * usual;
+    draws.rate[i] = noise[i] * heading.ratePerMinuteDeviation * rate;
   }
 }
 
