@@ -14,6 +14,8 @@ const THIN = ' ';
 export class Speech {
   readonly words: Catalogue;
   readonly tag: string;
+  private readonly dateFormats = new Map<string, Intl.DateTimeFormat>();
+  private readonly numberFormats = new Map<string, Intl.NumberFormat>();
 
   constructor(readonly choices: Pick<ReportChoices, 'language' | 'units'>) {
     const language: Language = LANGUAGES.find(({ id }) => id === choices.language)!;
@@ -25,19 +27,12 @@ export class Speech {
     forms[new Intl.PluralRules(this.tag).select(count)] ?? forms.other;
 
   number(value: number, decimals = 0): string {
-    return new Intl.NumberFormat(this.tag, {
-      minimumFractionDigits: decimals,
-      maximumFractionDigits: decimals,
-    }).format(value);
+    return this.numbers(decimals).format(value);
   }
 
   /** A share as percent. */
   percent(share: number, decimals = 0): string {
-    return new Intl.NumberFormat(this.tag, {
-      style: 'percent',
-      minimumFractionDigits: decimals,
-      maximumFractionDigits: decimals,
-    }).format(share);
+    return this.numbers(decimals, 'percent').format(share);
   }
 
   /** kWh/m2, or kWh to the square foot. */
@@ -106,7 +101,7 @@ export class Speech {
 
   /** An hour of the day for an axis: "7", or "7 AM" where the day has twice twelve. */
   hour(hour: number): string {
-    const format = new Intl.DateTimeFormat(this.tag, { hour: 'numeric', timeZone: 'UTC' });
+    const format = this.dates({ hour: 'numeric', timeZone: 'UTC' });
     return format.resolvedOptions().hour12 ? format.format(hour * 3_600_000) : String(hour);
   }
 
@@ -123,6 +118,30 @@ export class Speech {
   }
 
   private date(timeMs: number, options: Intl.DateTimeFormatOptions): string {
-    return new Intl.DateTimeFormat(this.tag, options).format(timeMs);
+    return this.dates(options).format(timeMs);
   }
+
+  private dates(options: Intl.DateTimeFormatOptions): Intl.DateTimeFormat {
+    return kept(this.dateFormats, JSON.stringify(options), () => new Intl.DateTimeFormat(this.tag, options));
+  }
+
+  private numbers(decimals: number, style: 'decimal' | 'percent' = 'decimal'): Intl.NumberFormat {
+    return kept(
+      this.numberFormats,
+      `${style} ${decimals}`,
+      () =>
+        new Intl.NumberFormat(this.tag, {
+          style,
+          minimumFractionDigits: decimals,
+          maximumFractionDigits: decimals,
+        }),
+    );
+  }
+}
+
+/** Formats are slow to make and asked for thousands of times. */
+function kept<T>(made: Map<string, T>, key: string, make: () => T): T {
+  const known = made.get(key) ?? make();
+  made.set(key, known);
+  return known;
 }

@@ -20,29 +20,47 @@ export function smoothDensity({ cell, columns, rows, irradiation }: SkyDensity):
     Math.exp(-(((i - reach) * cell) ** 2) / (2 * SPREAD ** 2)),
   );
   const whole = weights.reduce((sum, weight) => sum + weight, 0);
-  const perPatch = (10 / cell) ** 2;
-  const along = new Float32Array(columns * rows);
+  const perPatch = (10 / cell) ** 2 / whole ** 2;
+  const along = spreadAlong(irradiation, columns, rows, weights);
   const values = new Float32Array(columns * rows);
   let highest = 0;
-  for (let row = 0; row < rows; row++)
+  for (let row = 0; row < rows; row++) {
+    const sums = new Float64Array(columns);
+    weights.forEach((weight, k) => {
+      const other = row + k - reach;
+      const turned = other < 0 ? -1 - other : other >= rows ? 2 * rows - 1 - other : other;
+      for (let column = 0; column < columns; column++)
+        sums[column] += weight * along[turned * columns + column];
+    });
     for (let column = 0; column < columns; column++) {
-      let sum = 0;
-      for (let k = -reach; k <= reach; k++)
-        sum += weights[k + reach] * irradiation[row * columns + ((column + k + columns) % columns)];
-      along[row * columns + column] = (sum / whole) * perPatch;
-    }
-  for (let row = 0; row < rows; row++)
-    for (let column = 0; column < columns; column++) {
-      let sum = 0;
-      for (let k = -reach; k <= reach; k++) {
-        const other = row + k < 0 ? -1 - row - k : row + k >= rows ? 2 * rows - 1 - row - k : row + k;
-        sum += weights[k + reach] * along[other * columns + column];
-      }
-      const value = sum / whole;
+      const value = sums[column] * perPatch;
       values[row * columns + column] = value;
       if (value > highest) highest = value;
     }
+  }
   return { columns, rows, cell, values, highest };
+}
+
+/** Sums over the neighbours along each row, around the horizon. */
+function spreadAlong(
+  irradiation: ArrayLike<number>,
+  columns: number,
+  rows: number,
+  weights: readonly number[],
+): Float64Array {
+  const reach = (weights.length - 1) / 2;
+  const along = new Float64Array(columns * rows);
+  const round = new Float64Array(columns + 2 * reach);
+  for (let row = 0; row < rows; row++) {
+    for (let i = 0; i < round.length; i++)
+      round[i] = irradiation[row * columns + ((i - reach + columns) % columns)];
+    for (let column = 0; column < columns; column++) {
+      let sum = 0;
+      for (let k = 0; k < weights.length; k++) sum += weights[k] * round[column + k];
+      along[row * columns + column] = sum;
+    }
+  }
+  return along;
 }
 
 /** Value at a direction, linear between cell centres. */

@@ -1,20 +1,17 @@
 import type { ObstructionShading, StationAssessment } from '../../../core/shading/assessment.ts';
 import type { ObstructionTimes } from '../../../core/shading/shade-times.ts';
 import { obstructionKind } from '../../../core/survey/obstruction-kinds.ts';
-import { rangesBetween } from '../../../core/angles/azimuth-ranges.ts';
 import { obstructionsById } from '../../../core/survey/served-planes.ts';
 import type { Block, Table } from '../../contents/report-contents.ts';
-import { smoothDensity } from '../../pictures/smooth-density.ts';
-import { dayLines, hourLines } from '../../pictures/sun-lines.ts';
-import { unrolledHorizon } from '../../pictures/unrolled-horizon.ts';
 import type { ReportInput } from '../../report-input.ts';
 import { shownText } from '../../shown-text.ts';
 import type { Speech } from '../../speech.ts';
 import type { SectionKind } from '../section-kind.ts';
-import { pictureWords } from './picture-words.ts';
 import type { MeasuredRoof } from './roofs.ts';
 import { measuredRoofs, NOTICEABLE, obstructionNames } from './roofs.ts';
 import { hoursCell, shadeSentences } from './shade-sentences.ts';
+import type { SunOverSite } from './sun-picture.ts';
+import { sunOverSite, sunPicture } from './sun-picture.ts';
 
 /** What stands in the way of each roof, drawn and told by days and hours, from its darkest station. */
 export const sunAndRoof: SectionKind = {
@@ -24,11 +21,15 @@ export const sunAndRoof: SectionKind = {
   write: (report, speech) => {
     const roofs = measuredRoofs(report);
     if (roofs.length === 0) return null;
+    const sun = sunOverSite(report, speech);
     return {
       heading: speech.words['sun.heading'],
       blocks: [
         answerBlock(roofs, report, speech),
-        ...roofs.flatMap((roof) => roofBlocks(roof, roofs.length, report, speech)),
+        ...roofs.flatMap((roof) => [
+          ...(roofs.length > 1 ? [{ kind: 'subheading' as const, text: roof.name }] : []),
+          ...roofBlocks(roof, sun, report, speech),
+        ]),
       ],
     };
   },
@@ -37,7 +38,6 @@ export const sunAndRoof: SectionKind = {
 /** So many obstructions are told one by one; a table has room for fewer. */
 const MOST_TOLD = 6;
 const MOST_COLUMNS = 4;
-const PICTURE = { width: 640, height: 290 };
 
 /** One obstruction that takes a noticeable part, with when it does. */
 interface Shader {
@@ -61,27 +61,23 @@ function shadersOf(roof: MeasuredRoof): Shader[] {
 function answerBlock(roofs: readonly MeasuredRoof[], report: ReportInput, speech: Speech): Block {
   const { words } = speech;
   const nameOf = obstructionNames(report);
-  const worst = roofs
-    .flatMap((roof) =>
-      shadersOf(roof)
-        .slice(0, 1)
-        .map(({ row }) => ({ roof, row })),
-    )
+  const all = roofs.flatMap((roof) => shadersOf(roof).map((shader) => ({ roof, ...shader })));
+  const worst = all
+    .filter(({ times }) => times.stretches.length > 0)
     .sort((a, b) => b.row.lossIfAlone - a.row.lossIfAlone)[0];
-  const text = worst ? words['sun.answer'](nameOf(worst.row.id), worst.roof.name) : words['sun.answer-clear'];
-  return { kind: 'answer', text };
+  if (worst) return { kind: 'answer', text: words['sun.answer'](nameOf(worst.row.id), worst.roof.name) };
+  return { kind: 'answer', text: words[all.length > 0 ? 'sun.answer-sky' : 'sun.answer-clear'] };
 }
 
-function roofBlocks(roof: MeasuredRoof, count: number, report: ReportInput, speech: Speech): Block[] {
+function roofBlocks(roof: MeasuredRoof, sun: SunOverSite, report: ReportInput, speech: Speech): Block[] {
   const { words } = speech;
   const station = stationOf(roof);
   const from = roof.plane.stations.length > 1 ? 'sun.from-lowest' : 'sun.from-only';
   const shaders = shadersOf(roof);
   const shading = shaders.filter(({ times }) => times.stretches.length > 0);
   return [
-    ...(count > 1 ? [{ kind: 'subheading' as const, text: roof.name }] : []),
     { kind: 'paragraph', text: words[from](shownText(station.name)) },
-    pictureBlock(roof, report, speech),
+    sunPicture(roof, sun, report, speech),
     ...sentenceBlocks(roof, shaders, report, speech),
     ...(shading.length > 0
       ? [
@@ -90,39 +86,6 @@ function roofBlocks(roof: MeasuredRoof, count: number, report: ReportInput, spee
         ]
       : []),
   ];
-}
-
-function pictureBlock(roof: MeasuredRoof, report: ReportInput, speech: Speech): Block {
-  const { words } = speech;
-  const { site, obstructions } = report.survey;
-  const nameOf = obstructionNames(report);
-  const inPicture = pictureWords(speech);
-  const { shade } = roof.evidence.stations.find(({ id }) => id === roof.evidence.lowest!.id)!;
-  const picture = unrolledHorizon(
-    {
-      site,
-      shade,
-      density: smoothDensity(shade.density),
-      days: dayLines(site, inPicture),
-      hours: hourLines(site),
-      names: new Map(obstructions.map(({ id }) => [id, nameOf(id)])),
-      ...PICTURE,
-      whole: false,
-      plain: true,
-    },
-    inPicture,
-  );
-  const seen = shade.profile.obstructionIds.map(nameOf);
-  const hasRings = rangesBetween(shade.observed).length > 0;
-  return {
-    kind: 'picture',
-    picture,
-    caption: hasRings ? `${words['sun.caption']} ${words['sun.caption-rings']}` : words['sun.caption'],
-    alternative:
-      seen.length > 0
-        ? words['sun.alternative'](roof.name, speech.list(seen))
-        : words['sun.alternative-open'](roof.name),
-  };
 }
 
 function sentenceBlocks(

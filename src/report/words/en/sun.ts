@@ -3,6 +3,7 @@ export const EN_SUN = {
   'sun.heading': 'What stands in the way, and when?',
   'sun.answer': (obstruction: string, roof: string) => `${obstruction} shades ${roof} the most.`,
   'sun.answer-clear': 'Nothing that counts stands in the way of the sun.',
+  'sun.answer-sky': 'Some things hide a part of the bright sky, but none of them the sun.',
   'sun.from-lowest': (station: string) =>
     `The picture shows the sky from “${station}”. This is the measured place with the least sun on this roof.`,
   'sun.from-only': (station: string) => `The picture shows the sky from “${station}”.`,
