@@ -1,4 +1,4 @@
-import type { CameraStart } from '../app/capture/sensor-interfaces.ts';
+import type { CameraStart, CameraView, GrabbedPicture } from '../app/capture/sensor-interfaces.ts';
 
 /** Enough to see an edge by; more only warms the phone. */
 const VIDEO: MediaTrackConstraints = {
@@ -27,10 +27,15 @@ export async function openRearCamera(): Promise<CameraStart> {
   }
 }
 
-function viewOf(stream: MediaStream) {
+const QUALITY = 0.82;
+
+function viewOf(stream: MediaStream): CameraView {
+  let shown: HTMLVideoElement | null = null;
   return {
+    grab: () => (shown ? pictureIn(shown) : Promise.resolve(null)),
     showIn(video: object) {
       if (!(video instanceof HTMLVideoElement)) return;
+      shown = video;
       video.srcObject = stream;
       // A browser may hold back what plays by itself; the cross-hair then stands on a still picture.
       void video.play().catch(() => undefined);
@@ -39,4 +44,18 @@ function viewOf(stream: MediaStream) {
       for (const track of stream.getTracks()) track.stop();
     },
   };
+}
+
+/** What a video shows at this instant, as JPEG. */
+async function pictureIn(video: HTMLVideoElement): Promise<GrabbedPicture | null> {
+  const { videoWidth: width, videoHeight: height } = video;
+  if (width === 0 || height === 0) return null;
+  const canvas = document.createElement('canvas');
+  canvas.width = width;
+  canvas.height = height;
+  const context = canvas.getContext('2d');
+  if (!context) return null;
+  context.drawImage(video, 0, 0);
+  const blob = await new Promise<Blob | null>((resolve) => canvas.toBlob(resolve, 'image/jpeg', QUALITY));
+  return blob && { contents: await blob.arrayBuffer(), type: blob.type, width, height };
 }

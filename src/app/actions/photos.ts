@@ -14,6 +14,9 @@ export interface TakenPicture {
   takenAtMs: number;
 }
 
+/** A picture with what is noted of it. */
+type NewPhoto = TakenPicture & Pick<Photo, 'id' | 'of' | 'sha256' | 'reading'>;
+
 /** The photos of one thing, in their order. */
 export const photosOf = (survey: Survey, { kind, id }: PhotoSubject): Photo[] =>
   (survey.photos ?? []).filter(({ of }) => of.kind === kind && of.id === id);
@@ -26,21 +29,52 @@ export async function addPhotos(
   name: string,
   pictures: readonly TakenPicture[],
 ): Promise<void> {
-  const photos = [...(survey.photos ?? [])];
-  for (const { contents, type, width, height, takenAtMs } of pictures) {
-    const sha256 = await services.photos.keep({ contents, type });
-    photos.push({
-      id: services.newId(),
-      order: nextOrder(photos),
-      of: subject,
-      takenAt: new Date(takenAtMs).toISOString(),
-      width,
-      height,
-      bytes: contents.byteLength,
-      sha256,
-    });
+  let after = survey;
+  for (const picture of pictures) {
+    const sha256 = await keepPicture(services, picture);
+    after = withPhoto(after, { ...picture, id: services.newId(), of: subject, sha256 });
   }
-  await changeSurvey(services, survey, { ...survey, photos }, 'entry-added', `Photo of ${name}`);
+  await changeSurvey(services, survey, after, 'entry-added', `Photo of ${name}`);
+}
+
+/** Keeps a picture; gives its hash. */
+export const keepPicture = (
+  { photos }: Pick<Needs, 'photos'>,
+  { contents, type }: Pick<TakenPicture, 'contents' | 'type'>,
+): Promise<string> => photos.keep({ contents, type });
+
+/** The survey with a photo after the others. */
+export function withPhoto(
+  survey: Survey,
+  { contents, takenAtMs, width, height, ...photo }: NewPhoto,
+): Survey {
+  const { id, of, sha256, reading } = photo;
+  const row: Photo = {
+    id,
+    order: nextOrder(survey.photos),
+    of,
+    takenAt: new Date(takenAtMs).toISOString(),
+    ...(reading !== undefined && { reading }),
+    width,
+    height,
+    bytes: contents.byteLength,
+    sha256,
+  };
+  return { ...survey, photos: [...(survey.photos ?? []), row] };
+}
+
+/** Notes the raw reading of where the camera looked, in place of what was typed. */
+export async function aimPhotoByReading(
+  services: Needs,
+  survey: Survey,
+  photo: Photo,
+  name: string,
+  reading: string,
+): Promise<void> {
+  const photos = survey.photos?.map((other) =>
+    other.id === photo.id ? { ...other, azimuth: undefined, reading } : other,
+  );
+  await changeSurvey(services, survey, { ...survey, photos }, 'entry-changed', `Photo of ${name}`);
 }
 
 /** Notes where the camera looked; undefined takes that away. */

@@ -25,6 +25,7 @@ export type StoredWhat =
   | 'placing'
   | 'edge'
   | 'sweep'
+  | 'photo'
   | 'undone';
 
 export type RefusedWhy =
@@ -42,6 +43,8 @@ export type RefusedWhy =
   | 'no-north'
   /** Half the horizon lies between two neighbouring points. */
   | 'too-far-apart'
+  /** The camera gave no picture. */
+  | 'no-picture'
   /** The phone is not flat enough for its compass. */
   | 'not-flat'
   | 'nothing-to-undo';

@@ -49,6 +49,7 @@ export class CaptureSession {
   lies = false;
   private inHand = true;
   private run: Run | null = null;
+  private lastSample: SensorSample | null = null;
   private pointedRun: PointedRun | null = null;
   private held: { hold: Hold; done: (samples: readonly SensorSample[] | null) => void } | null = null;
   private watcher: Watcher | null = null;
@@ -110,6 +111,13 @@ export class CaptureSession {
         : this.refuse(wasFrozen ? 'frozen' : 'broken');
     const reading = rawReading(this.services.newId(), run.id, axis, samples);
     return this.storeReading(run, reading);
+  }
+
+  /** Stores how the camera looks at this instant, moving or not; null where it could not be, which has been told. */
+  async readNow(): Promise<Reading | null> {
+    const { run, lastSample } = this;
+    if (!run || !lastSample) return this.refuse('broken');
+    return this.storeReading(run, rawReading(this.services.newId(), run.id, 'camera', [lastSample]));
   }
 
   /** A hold and one act on the survey with its reading. */
@@ -176,6 +184,7 @@ export class CaptureSession {
 
   private onSample(sample: SensorSample): void {
     const run = (this.run ??= this.newRun(sample));
+    this.lastSample = sample;
     this.live.value = livePointing(sample, this.axis.value, this.pointedRun);
     const apart = this.watch.apart(sample);
     if (apart !== null && apart > MOST_WANDER) this.disturbed.value = true;
@@ -201,6 +210,7 @@ export class CaptureSession {
   private breakOff(): void {
     this.held?.done(null);
     this.run = null;
+    this.lastSample = null;
     this.pointedRun = null;
     this.disturbed.value = false;
     this.watch = new CompassWatch();

@@ -52,10 +52,20 @@ export interface OrientationSensor {
   readonly recording: Recording | null;
 }
 
+/** A picture as it is kept. */
+export interface GrabbedPicture {
+  contents: ArrayBuffer;
+  type: string;
+  width: number;
+  height: number;
+}
+
 /** A view through the rear camera. */
 export interface CameraView {
   /** Shows it in a video element. */
   showIn(video: object): void;
+  /** The picture it shows at this instant; null where it shows none. */
+  grab(): Promise<GrabbedPicture | null>;
   close(): void;
 }
 

@@ -8,6 +8,8 @@ import { faultOf, typedNumber } from '../../typed.ts';
 import { Dialog } from '../dialog.tsx';
 import { Form } from '../form/form.tsx';
 import { TextField } from '../form/text-field.tsx';
+import { AimWithPhone } from './aim-with-phone.tsx';
+import { directionText, photoDirection } from './photo-direction.ts';
 import { usePicture } from './thumbnail.tsx';
 
 function takenText(takenAt: string, timeZone: string): string {
@@ -21,6 +23,7 @@ export function PhotoDialog(props: { survey: Survey; photo: Photo; name: string;
   const address = usePicture(photo.sha256, true);
   const before = photo.azimuth === undefined ? '' : String(photo.azimuth);
   const [azimuth, setAzimuth] = useState(before);
+  const direction = photoDirection(photo, survey);
   const typed = typedNumber(azimuth, { least: 0, most: 360, unit: '°', optional: true });
   const act = async (work: () => Promise<void>) => {
     const done = await attempt(services.state, work);
@@ -47,6 +50,19 @@ export function PhotoDialog(props: { survey: Survey; photo: Photo; name: string;
         Taken {takenText(photo.takenAt, survey.site.timeZone)}. {photo.width} × {photo.height} dots,{' '}
         {sizeText(photo.bytes)}.
       </p>
+      {direction && (
+        <p>
+          The camera looked towards <strong>{directionText(direction)}</strong>
+          {photo.azimuth === undefined ? ', read with the phone.' : ', as typed.'}
+        </p>
+      )}
+      {!direction && photo.reading !== undefined && (
+        <p class="small">
+          Where the camera looked was read, but nothing ties that reading to north yet. One heading check in
+          that sitting does.
+        </p>
+      )}
+      <AimWithPhone survey={survey} photo={photo} name={name} onDone={onDone} />
       <Form label="Photo" action="Done" onSubmit={save}>
         <TextField
           label="The camera looked towards"
@@ -55,7 +71,7 @@ export function PhotoDialog(props: { survey: Survey; photo: Photo; name: string;
           value={azimuth}
           onInput={setAzimuth}
           fault={faultOf(typed)}
-          hint="Optional."
+          hint="Optional. What is typed stands over what the phone read."
         />
       </Form>
       <div class="form-actions">

@@ -2,12 +2,18 @@ import { useRef, useState } from 'preact/hooks';
 import { addPhotos, photosOf, type TakenPicture } from '../../../app/actions/photos.ts';
 import { attempt } from '../../../app/attempt.ts';
 import { ordered } from '../../../core/survey/order.ts';
-import type { PhotoSubject, Survey } from '../../../core/survey/survey.ts';
+import type { Photo, PhotoSubject, Survey } from '../../../core/survey/survey.ts';
 import { useApp } from '../../app-context.ts';
 import { PICTURE_FAULTS, pictureOf } from '../../device/picture-of.ts';
+import { photoDirection } from './photo-direction.ts';
 import { PhotoDialog } from './photo-dialog.tsx';
 import { Thumbnail } from './thumbnail.tsx';
 import './photos.css';
+
+const directionOf = (photo: Photo, survey: Survey): string | null => {
+  const direction = photoDirection(photo, survey);
+  return direction && `${Math.round(direction.azimuth) % 360}°`;
+};
 
 /** The photos of one thing, and the camera to take another. */
 export function PhotoStrip(props: {
@@ -48,6 +54,7 @@ export function PhotoStrip(props: {
           key={photo.id}
           photo={photo}
           label={`Photo ${place + 1} of ${name}`}
+          direction={directionOf(photo, survey)}
           onOpen={() => setOpen(photo.id)}
         />
       ))}

@@ -27,7 +27,14 @@ export function usePicture(sha256: string, wanted: boolean): string | null {
 }
 
 /** A small picture to touch; read from the device only once it comes into view. */
-export function Thumbnail({ photo, label, onOpen }: { photo: Photo; label: string; onOpen: () => void }) {
+export function Thumbnail(props: {
+  photo: Photo;
+  label: string;
+  /** Where the camera looked; null where that is not known. */
+  direction: string | null;
+  onOpen: () => void;
+}) {
+  const { photo, label, direction, onOpen } = props;
   const button = useRef<HTMLButtonElement>(null);
   const [seen, setSeen] = useState(false);
   useEffect(() => {
@@ -40,8 +47,15 @@ export function Thumbnail({ photo, label, onOpen }: { photo: Photo; label: strin
   }, []);
   const address = usePicture(photo.sha256, seen);
   return (
-    <button ref={button} type="button" class="thumbnail" aria-label={label} onClick={onOpen}>
+    <button
+      ref={button}
+      type="button"
+      class="thumbnail"
+      aria-label={direction === null ? label : `${label}, towards ${direction}`}
+      onClick={onOpen}
+    >
       {address === '' ? 'not here' : address && <img src={address} alt="" />}
+      {direction !== null && <span class="thumbnail-direction">{direction}</span>}
     </button>
   );
 }

@@ -18,6 +18,7 @@ const STORED: Record<StoredNews['what'], (news: StoredNews) => string> = {
   'face-turned': () => 'Both faces stored.',
   placing: ({ name }) => `Placing on ${name} stored.`,
   edge: ({ name }) => `Sighting along ${name} stored.`,
+  photo: ({ name }) => `Photo of ${name} stored, with its direction.`,
   undone: ({ name }) => `Taken back: ${name}.`,
 };
 
@@ -32,6 +33,7 @@ const REFUSED: Record<RefusedWhy, (degrees?: number) => string> = {
   'no-north': () => 'Not taken: nothing ties the phone to north yet. Take a heading check first.',
   'too-far-apart': () =>
     'Not taken as part of this trace: half the horizon lies between. Sight a point in between first.',
+  'no-picture': () => 'Not taken: the camera gave no picture. Tap again.',
   'not-flat': () => 'Not taken: lay the phone flat in your hand, screen up, and tap again.',
   'nothing-to-undo': () => 'Nothing to take back.',
 };

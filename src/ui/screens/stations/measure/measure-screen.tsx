@@ -1,5 +1,6 @@
 import { useEffect, useState } from 'preact/hooks';
 import { takeEdge, takePlacing } from '../../../../app/capture/plane-takes.ts';
+import { takePhoto } from '../../../../app/capture/photo-take.ts';
 import { undoLast } from '../../../../app/capture/undo-last.ts';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import type { RoofPlane } from '../../../../core/survey/survey.ts';
@@ -84,7 +85,15 @@ function Measuring(props: SectionProps & { plane: RoofPlane; capture: Capture; s
           <LiveTilt session={session} held={way} />
         ) : (
           <>
-            {!recording && <SightView capture={capture} session={session} />}
+            {!recording && (
+              <SightView
+                capture={capture}
+                session={session}
+                onPhoto={(view) =>
+                  void takePhoto(services, session, view, { kind: 'plane', id: plane.id }, plane.name)
+                }
+              />
+            )}
             <Figures session={session} />
           </>
         )}
