@@ -1,4 +1,5 @@
 import { render } from 'preact';
+import { version } from '../package.json';
 import { AppError } from './app/app-error.ts';
 import { appState } from './app/app-state.ts';
 import type { AppServices, SampleSurvey } from './app/app-services.ts';
@@ -9,6 +10,7 @@ import { Connection } from './storage/connection.ts';
 import { draftDatabase } from './storage/draft-database.ts';
 import { OtherTabs, toldStore } from './storage/other-tabs.ts';
 import { photoDatabase } from './storage/photo-database.ts';
+import { reportSettingsDatabase } from './storage/report-settings-database.ts';
 import { sha256Of } from './storage/sha256-of.ts';
 import { surveyDatabase } from './storage/survey-database.ts';
 import { deviceLocation } from './sensors/location.ts';
@@ -64,6 +66,7 @@ const services: AppServices = {
   photos: photoDatabase(connection, now),
   backup: backupDatabase({ connection, checker, now }),
   drafts: draftDatabase(connection),
+  reportSettings: reportSettingsDatabase(connection),
   hash: sha256Of,
   location: deviceLocation,
   assess: new AssessOnWorker(
@@ -73,6 +76,7 @@ const services: AppServices = {
     const { captureDevices } = await import('./sensors/capture-devices.ts');
     return captureDevices(practiceRecordings);
   },
+  version,
   samples,
   parse: async (text) => (await parser()).parseSurvey(text),
   newId,

@@ -28,6 +28,7 @@ export const APP_ERROR_CODES = [
   'import-running',
   /** A part of the app did not load. */
   'part-missing',
+  'report-not-written',
   /** None of the above; the cause says what. */
   'unexpected',
 ] as const;

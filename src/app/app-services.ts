@@ -7,6 +7,7 @@ import type { BackupStore } from './backup/backup-store.ts';
 import type { DraftStore } from './draft-store.ts';
 import type { LocationSource } from './location-source.ts';
 import type { PhotoStore } from './photo-store.ts';
+import type { ReportSettingsStore } from './report-settings.ts';
 import type { SurveyStore } from './survey-store.ts';
 import type { WeatherStore } from './weather-store.ts';
 
@@ -25,11 +26,14 @@ export interface AppServices {
   weather: WeatherStore;
   photos: PhotoStore;
   backup: BackupStore;
+  reportSettings: ReportSettingsStore;
   drafts: DraftStore;
   location: LocationSource;
   assess: AssessClient;
   /** What a capture needs of the device; loaded when the first one is opened. */
   capture: () => Promise<CaptureDevices>;
+  /** Of the program. */
+  version: string;
   samples: SampleSurvey[];
   parse: (text: string) => Promise<Parsed<Survey>>;
   newId: () => string;

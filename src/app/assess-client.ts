@@ -1,5 +1,6 @@
 import type { Assessment } from '../core/shading/assessment.ts';
 import type { StationSoFar } from '../core/assessment/station-so-far.ts';
+import type { SurveyEvidence } from '../core/assessment/survey-evidence.ts';
 import type {
   AssessRequest,
   Outcome,
@@ -26,6 +27,12 @@ export interface AssessClient {
     onProgress: ProgressListener,
     signal: CancelSignal,
   ): Promise<Outcome<Assessment>>;
+  /** The same with what a report shows besides the figures. */
+  evidence(
+    request: AssessRequest,
+    onProgress: ProgressListener,
+    signal: CancelSignal,
+  ): Promise<Outcome<SurveyEvidence>>;
   /** One station over one plane, measured and with changes imagined. */
   shade(
     request: AssessRequest,

@@ -3,6 +3,7 @@ import type { JsonValue } from '../core/survey/json-value.ts';
 import type { Stamp } from '../core/sync-protocol/stamp.ts';
 import type { FieldChange } from '../core/survey/field-changes.ts';
 import type { FormDraft } from '../app/draft-store.ts';
+import type { ReportSettings } from '../app/report-settings.ts';
 import type { Step, SurveySummary } from '../app/survey-store.ts';
 import type { WeatherFileSummary } from '../app/weather-store.ts';
 
@@ -53,7 +54,10 @@ export interface PhotoRow {
 }
 
 /** What this device remembers of itself. */
-export type DeviceRow = { name: 'device'; id: string } | { name: 'last-stamp'; stamp: Stamp };
+export type DeviceRow =
+  | { name: 'device'; id: string }
+  | { name: 'last-stamp'; stamp: Stamp }
+  | { name: 'report-settings'; settings: ReportSettings };
 
 /** The stores of the database, in one description. */
 export interface NoonmarkSchema extends DBSchema {

@@ -65,6 +65,11 @@ export const ERROR_MESSAGES: Record<AppErrorCode, Message> = {
     what: 'Other files are being imported just now.',
     remedy: 'Wait until their report is shown, then give these again.',
   },
+  'report-not-written': {
+    what: 'The report could not be written as that file. The survey is safe.',
+    remedy:
+      'Save it as a web page, which prints too. If this device is short of memory, close other apps and try again.',
+  },
   'part-missing': {
     what: 'A part of Noonmark could not be loaded.',
     remedy: 'Reload the page. If a new version came in meanwhile, that brings it up.',

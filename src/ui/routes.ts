@@ -23,6 +23,11 @@ export const SURVEY_SECTIONS: SurveySection[] = [
     load: async () => (await import('./screens/shade/shade-section.tsx')).ShadeSection,
   },
   {
+    path: 'report',
+    label: 'Report',
+    load: async () => (await import('./screens/report/report-section.tsx')).ReportSection,
+  },
+  {
     path: 'climb-down',
     label: 'To do',
     load: async () => (await import('./screens/climb-down/climb-down-section.tsx')).ClimbDownSection,

@@ -10,6 +10,7 @@ import type {
   WeatherFileFacts,
 } from '../core/shading/calculation.ts';
 import type { StationSoFar } from '../core/assessment/station-so-far.ts';
+import type { SurveyEvidence } from '../core/assessment/survey-evidence.ts';
 import type { StationShade } from '../core/shading/station-shade.ts';
 import type { Progress, ShadeEngine } from './shade-engine.ts';
 
@@ -45,6 +46,14 @@ export class AssessOnWorker {
 
   assess(request: AssessRequest, onProgress: Progress, signal: CancelSignal): Promise<Outcome<Assessment>> {
     return this.ask(request, signal, (engine, ticket) => engine.assess(ticket, proxy(onProgress)));
+  }
+
+  evidence(
+    request: AssessRequest,
+    onProgress: Progress,
+    signal: CancelSignal,
+  ): Promise<Outcome<SurveyEvidence>> {
+    return this.ask(request, signal, (engine, ticket) => engine.evidence(ticket, proxy(onProgress)));
   }
 
   shade(

@@ -2,7 +2,10 @@ import { pointedDirections, stationHorizon } from '../core/horizon/station-horiz
 import type { Climate } from '../core/irradiance/climate.ts';
 import { parseWeatherFile } from '../core/irradiance/weather-file.ts';
 import type { SiteLight } from '../core/shading/site-light.ts';
+import type { AssessOptions } from '../core/assessment/assess-survey.ts';
 import { assessSurvey } from '../core/assessment/assess-survey.ts';
+import type { SurveyEvidence } from '../core/assessment/survey-evidence.ts';
+import { surveyEvidence } from '../core/assessment/survey-evidence.ts';
 import type { StationSoFar } from '../core/assessment/station-so-far.ts';
 import { stationSoFar } from '../core/assessment/station-so-far.ts';
 import { obstructionsById } from '../core/survey/served-planes.ts';
@@ -65,12 +68,25 @@ export class ShadeEngine {
   }
 
   assess(ticket: number, onProgress: Progress): Promise<Outcome<Assessment>> {
+    return this.yearly(ticket, onProgress, assessSurvey);
+  }
+
+  evidence(ticket: number, onProgress: Progress): Promise<Outcome<SurveyEvidence>> {
+    return this.yearly(ticket, onProgress, surveyEvidence);
+  }
+
+  /** A calculation over all planes and stations that tells how far it is. */
+  private yearly<T>(
+    ticket: number,
+    onProgress: Progress,
+    calculate: (survey: Survey, climate: Climate, options: AssessOptions) => Promise<T>,
+  ): Promise<Outcome<T>> {
     return this.answer(ticket, async (held) => {
       const { request } = held;
       onProgress(0, 'The sun and the sky of a year');
       await this.lookUp(ticket);
       const { climate, light } = await this.lightOf(held);
-      return assessSurvey(request.survey, climate, {
+      return calculate(request.survey, climate, {
         transposition: request.transposition,
         stepMinutes: request.stepMinutes,
         light,

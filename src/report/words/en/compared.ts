@@ -1,6 +1,7 @@
 /** Two results side by side. */
 export const EN_COMPARED = {
   'compared.heading': 'What is different?',
+  'compared.without': (obstruction: string) => `Without: ${obstruction}`,
   'compared.more': (roof: string, now: string, other: string, name: string) =>
     `${roof} gets ${now} of its sunlight here. In “${name}” it gets ${other}. That is more sunlight here.`,
   'compared.less': (roof: string, now: string, other: string, name: string) =>

@@ -18,8 +18,8 @@ const orNothing = (text: string): string | undefined => text.trim() || undefined
 export const SITE_FORM = 'site';
 
 /** What this form changes, as it is stored. */
-const storedOf = ({ site, notes, surveyedOn }: Survey) =>
-  ({ site, notes, surveyedOn }) as unknown as JsonValue;
+const storedOf = ({ site, notes, surveyedOn, surveyor }: Survey) =>
+  ({ site, notes, surveyedOn, surveyor }) as unknown as JsonValue;
 
 /** Changing where the site is and what is known of the visit. */
 export function SiteForm(props: {
@@ -38,11 +38,12 @@ export function SiteForm(props: {
       address: site.address ?? '',
       notes: survey.notes ?? '',
       day: survey.surveyedOn ?? '',
+      surveyor: survey.surveyor ?? '',
       albedo: site.albedo === undefined ? '' : String(Math.round(site.albedo * 1e6) / 1e4),
     }),
   );
   const { change } = draft;
-  const { address, notes, day, albedo } = draft.typed;
+  const { address, notes, day, surveyor, albedo } = draft.typed;
   const place = usePlace(services, nowMs, draft.typed, change, site);
   const [asked, setAsked] = useState(false);
   const reflects = typedNumber(albedo, { least: 0, most: 100, unit: ' %', optional: true });
@@ -57,6 +58,7 @@ export function SiteForm(props: {
     const after: Survey = {
       ...survey,
       surveyedOn: orNothing(day),
+      surveyor: orNothing(surveyor),
       notes: orNothing(notes),
       site: {
         ...site,
@@ -83,6 +85,13 @@ export function SiteForm(props: {
         onInput={(text) => change({ day: text })}
         fault={dayFault}
         hint="Such as 2026-05-14."
+      />
+      <TextField
+        label="Surveyor"
+        value={surveyor}
+        onInput={(text) => change({ surveyor: text })}
+        maxLength={200}
+        hint="Who took the sightings; the report names them."
       />
       <TextField
         label="Light the ground reflects"

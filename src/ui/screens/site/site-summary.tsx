@@ -12,7 +12,7 @@ function climateText(climate: ClimateChoice): string {
   }
 }
 
-function factsOf({ site, climate, surveyedOn, notes }: Survey): [term: string, value: string][] {
+function factsOf({ site, climate, surveyedOn, surveyor, notes }: Survey): [term: string, value: string][] {
   const facts: [string, string | undefined][] = [
     ['Address', site.address],
     ['Position', placeText(site.latitude, site.longitude)],
@@ -21,6 +21,7 @@ function factsOf({ site, climate, surveyedOn, notes }: Survey): [term: string, v
     ['Ground reflects', percentText(site.albedo ?? 0.2)],
     ['Climate', climateText(climate)],
     ['Day of visit', surveyedOn && dayText(surveyedOn)],
+    ['Surveyor', surveyor],
     ['Notes', notes],
   ];
   return facts.filter((fact): fact is [string, string] => Boolean(fact[1]));
