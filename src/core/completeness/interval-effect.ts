@@ -4,6 +4,9 @@ import type { IntervalSourceId } from '../uncertainty/interval-source.ts';
 /** Standard deviations either way that hold 95 of 100 draws. */
 const EITHER_WAY = 1.96;
 
+/** Less than this is not worth a sentence, percentage points. */
+const LEAST_NARROWED = 0.1;
+
 /** A 95 % interval from end to end, percentage points. */
 export const width = ({ low, high }: AccessInterval): number => 100 * (high - low);
 
@@ -40,4 +43,18 @@ export function stationEffects(
   return stations.flatMap(({ id, solarAccess: { interval } }) =>
     interval ? [{ station: id, effect: sourceEffect(interval, source) / stations.length }] : [],
   );
+}
+
+/** What the cure of one source would make of the interval that it narrows most, as a sentence; null where it narrows none. */
+export function narrowing(assessment: Assessment | null, source: IntervalSourceId): string | null {
+  const narrowed = (assessment?.planes ?? []).flatMap(({ name, solarAccess }) => {
+    const interval = solarAccess?.interval;
+    const after = interval?.sources.find((one) => one.source === source)?.standardDeviationAfter ?? null;
+    if (!interval || after === null || !(interval.standardDeviation > 0)) return [];
+    const before = width(interval);
+    return [{ name, before, after: before * (after / interval.standardDeviation) }];
+  });
+  const [most] = narrowed.sort((a, b) => b.before - b.after - (a.before - a.after));
+  if (!most || most.before - most.after < LEAST_NARROWED) return null;
+  return `It would narrow the range of the yearly access from ${most.before.toFixed(1)} to ${most.after.toFixed(1)} points (${most.name}).`;
 }

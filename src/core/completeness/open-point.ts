@@ -13,6 +13,7 @@ export type OpenPointKindId =
   | 'broken-trace'
   | 'unseen-sky'
   | 'no-heading-check'
+  | 'no-two-face-check'
   | 'doubtful-check'
   | 'disturbed-compass'
   | 'wide-interval'

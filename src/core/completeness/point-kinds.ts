@@ -6,6 +6,7 @@ import { largeClosure } from './kinds/large-closure.ts';
 import { noClosure } from './kinds/no-closure.ts';
 import { noHeadingCheck } from './kinds/no-heading-check.ts';
 import { noPlane } from './kinds/no-plane.ts';
+import { noTwoFaceCheck } from './kinds/no-two-face-check.ts';
 import { planeWithoutStation } from './kinds/plane-without-station.ts';
 import { runRefused } from './kinds/run-refused.ts';
 import { stationEmpty } from './kinds/station-empty.ts';
@@ -26,6 +27,7 @@ export const OPEN_POINT_KINDS: readonly OpenPointKind[] = [
   stationEmpty,
   unseenSky,
   noHeadingCheck,
+  noTwoFaceCheck,
   doubtfulCheck,
   disturbedCompass,
   stationServesNothing,

@@ -2,7 +2,7 @@ import { describe, expect, test } from 'vitest';
 import { magneticDeclination } from '../../../src/core/pointing/declination.ts';
 import type { Survey } from '../../../src/core/survey/survey.ts';
 import { SITE, START_MS, VirtualSurvey } from '../pointing/virtual-run.ts';
-import { ofKind, pointsOf, SOUTH } from './found-points.ts';
+import { assessed, ofKind, pointsOf, SOUTH } from './found-points.ts';
 
 const { declination } = magneticDeclination({ ...SITE, timeMs: START_MS });
 
@@ -53,6 +53,47 @@ describe('the heading of a run', () => {
     expect(points.map(({ sentence }) => sentence)).toEqual([
       expect.stringContaining('the check of another sitting'),
     ]);
+  });
+});
+
+describe('the phone’s own inclination', () => {
+  const turned = (survey: WallSurvey, run: string) => {
+    const mark = { minutes: 4, azimuth: 20, elevation: 5 };
+    const faces = [0, 180].map((roll) => survey.read(run, { ...mark, roll }));
+    survey.station('A').indexChecks = [{ id: 'faces', upright: faces[0], turned: faces[1] }];
+    return survey;
+  };
+
+  test('that was not tested is told, by what it may cost and what turning the phone over would save', async () => {
+    const survey = magnetic().wall('r').shadow('r', 5).made();
+    const [point] = ofKind(await pointsOf(survey), 'no-two-face-check');
+    expect(point.effect).toBeGreaterThan(0.5);
+    expect(point.sentence).toContain('up to 1.4° either way');
+    const [before, after] = /from ([\d.]+) to ([\d.]+) points \(South roof\)/
+      .exec(point.sentence)!
+      .slice(1)
+      .map(Number);
+    const interval = (await assessed(turned(magnetic().wall('r').shadow('r', 5), 'r').made())).planes[0]
+      .solarAccess!.interval!;
+    expect(before - after).toBeGreaterThan(0.5);
+    expect(after).toBeCloseTo(100 * (interval.high - interval.low), 0);
+    expect(point.cure).toMatchObject({ at: 'run', run: 'r', station: 'A' });
+  });
+
+  test('is told once for all sittings of a phone, at the last of them, and not once it was turned over in any', async () => {
+    const sat = () => magnetic().run('s', 'magnetic', { north: -declination }).wall('r').wall('s', 10);
+    const points = ofKind(await pointsOf(sat().made()), 'no-two-face-check');
+    expect(points.map(({ cure }) => cure)).toEqual([expect.objectContaining({ run: 's' })]);
+    expect(await kinds(turned(sat(), 's').made())).not.toContain('no-two-face-check');
+  });
+
+  test('is told of each phone for itself', async () => {
+    const other = magnetic().run('s', 'magnetic', { north: -declination }, 'another phone');
+    const points = ofKind(
+      await pointsOf(turned(other.wall('r').wall('s', 10), 's').made()),
+      'no-two-face-check',
+    );
+    expect(points.map(({ cure }) => cure)).toEqual([expect.objectContaining({ run: 'r' })]);
   });
 });
 

@@ -10,7 +10,7 @@ const WIDE = 4;
 const LEAST = 0.5;
 
 /** What has a kind of point of its own. */
-const OWN_KIND: readonly (CureId | null)[] = ['look', 'heading-check', null];
+const OWN_KIND: readonly (CureId | null)[] = ['look', 'heading-check', 'two-face-check', null];
 
 export const wideInterval: OpenPointKind = {
   id: 'wide-interval',
