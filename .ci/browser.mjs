@@ -1,24 +1,27 @@
-// The browser that the browser tests drive.
+// The browser that the browser tests drive, and the tools they read PDF files with.
 import { spawnSync } from 'node:child_process';
 import { existsSync } from 'node:fs';
 
 const BROWSER = process.env.CHROMIUM ?? '/usr/bin/chromium';
-const PACKAGES = ['chromium', 'fonts-dejavu-core'];
+const PDF_READER = '/usr/bin/pdftotext';
+const PACKAGES = ['chromium', 'fonts-dejavu-core', 'poppler-utils'];
 const INSTALL = `apt-get update && apt-get install -y --no-install-recommends ${PACKAGES.join(' ')}`;
 
 const mayInstall = () => process.getuid?.() === 0 && existsSync('/etc/debian_version');
 
-/** Whether the browser is there; as root on Debian it is installed where it is missing. */
+const missing = () => [BROWSER, PDF_READER].filter((path) => !existsSync(path));
+
+/** Whether browser and PDF tools are there; as root on Debian they are installed where one is missing. */
 export function ensureBrowser() {
-  if (existsSync(BROWSER)) return true;
+  if (missing().length === 0) return true;
   if (!mayInstall()) {
-    process.stdout.write(`chromium is missing at ${BROWSER}. Install it with:\n  sudo sh -c '${INSTALL}'\n`);
+    process.stdout.write(`missing: ${missing().join(', ')}. Install with:\n  sudo sh -c '${INSTALL}'\n`);
     return false;
   }
-  process.stdout.write('Installing chromium ...\n');
+  process.stdout.write(`Installing ${PACKAGES.join(', ')} ...\n`);
   const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' };
   spawnSync('sh', ['-c', `${INSTALL} >&2`], { stdio: 'inherit', env });
-  if (existsSync(BROWSER)) return true;
-  process.stdout.write(`chromium could not be installed with: ${INSTALL}\n`);
+  if (missing().length === 0) return true;
+  process.stdout.write(`${missing().join(', ')} could not be installed with: ${INSTALL}\n`);
   return false;
 }

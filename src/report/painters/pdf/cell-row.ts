@@ -15,7 +15,7 @@ export interface Cell {
   low?: boolean;
 }
 
-interface RowLook {
+export interface RowLook {
   above: number;
   below: number;
   /** Rules around it; `y` is the top of the piece painted. */

@@ -9,6 +9,8 @@ import { wrapText } from './wrap-text.ts';
 const BETWEEN = 24;
 const NUMBER_WIDTH = 22;
 const ROW_GAP = 3.5;
+/** A heading longer than this is cut in the list; it stands whole over its section. */
+const MOST_LINES = 3;
 
 /** Page of a section, counted from 1. */
 export type PageOf = (section: string) => number;
@@ -56,7 +58,7 @@ function contentsColumn(
   const entry = STYLES.contentsEntry;
   const rows = sections.map(({ id, heading }) => ({
     id,
-    lines: wrapText(heading, width - NUMBER_WIDTH, entry, setter),
+    lines: wrapText(heading, width - NUMBER_WIDTH, entry, setter).slice(0, MOST_LINES),
   }));
   const heights = rows.map(({ lines }) => lines.length * entry.leading + 2 * ROW_GAP);
   const paint = (sheet: Sheet, top: number) => {

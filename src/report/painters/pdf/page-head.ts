@@ -1,8 +1,10 @@
 import type { ReportContents } from '../../contents/report-contents.ts';
+import type { Cell, RowLook } from './cell-row.ts';
+import { rowSlugs } from './cell-row.ts';
 import type { Setting } from './setting.ts';
 import type { Slug } from './slug.ts';
 import { STYLES } from './text-style.ts';
-import { baseOf, textSlugs } from './text-slugs.ts';
+import { textSlugs } from './text-slugs.ts';
 import { wrapText } from './wrap-text.ts';
 
 /** The head of page one: whose report it is, its title, and what it is about. */
@@ -27,28 +29,20 @@ function firmSlugs(name: string, lines: readonly string[], setting: Setting): Sl
   if (name === '' && lines.length === 0) return [];
   const { left, width, setter } = setting;
   const half = width * 0.48;
-  const names = wrapText(name, half, STYLES.firm, setter);
-  const others = lines.flatMap((line) => wrapText(line, half, STYLES.firmLines, setter));
-  const height = Math.max(names.length * STYLES.firm.leading, others.length * STYLES.firmLines.leading);
-  return [
+  const cells: Cell[] = [
+    { lines: wrapText(name, half, STYLES.firm, setter), style: STYLES.firm, x: left, width: half },
     {
-      height: height + 9,
-      paint: (sheet, y) => {
-        names.forEach((line, i) =>
-          sheet.text(line, left, y + i * STYLES.firm.leading + baseOf(STYLES.firm), STYLES.firm),
-        );
-        others.forEach((line, i) =>
-          sheet.text(
-            line,
-            left + width - setter.width(line, STYLES.firmLines),
-            y + i * STYLES.firmLines.leading + baseOf(STYLES.firmLines),
-            STYLES.firmLines,
-          ),
-        );
-        sheet.rule(left, y + height + 8, width, 0.7, 'ink');
-      },
+      lines: lines.flatMap((line) => wrapText(line, half, STYLES.firmLines, setter)),
+      style: STYLES.firmLines,
+      x: left + width - half,
+      width: half,
+      right: true,
     },
   ];
+  const rules: RowLook['rules'] = (sheet, y, height, _first, last) => {
+    if (last) sheet.rule(left, y + height - 1, width, 0.7, 'ink');
+  };
+  return rowSlugs(cells, { above: 0, below: 9, rules }, setting.height);
 }
 
 const BETWEEN = '   ·   ';

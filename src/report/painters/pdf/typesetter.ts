@@ -23,6 +23,9 @@ export type Run = { text: string; width: number } & (
 /** Width of a box that stands for a letter, with the space around it, as a share of the size. */
 export const BOX_WIDTH = 0.62;
 
+/** Latin, Greek and Cyrillic: no letter of these joins another. */
+const EACH_A_LETTER = /^[\u0020-\u024f\u0370-\u0482\u048a-\u052f]*$/;
+
 type Style = Pick<TextStyle, 'face' | 'size'>;
 
 /** Cuts text into runs that can be painted, none of them losing a letter. */
@@ -59,6 +62,7 @@ export class Typesetter {
 
   /** What a reader takes for one letter each. */
   letterClusters(text: string): string[] {
+    if (EACH_A_LETTER.test(text)) return text.split('');
     return Array.from(this.clusters.segment(text), ({ segment }) => segment);
   }
 

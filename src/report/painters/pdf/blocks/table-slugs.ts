@@ -15,6 +15,9 @@ const LEADING = 1.36;
 /** Between columns, in points for each point of type. */
 const BETWEEN = 1.25;
 
+/** Heads that take more than this share of a page stand only once. */
+const HIGHEST_REPEATED = 0.3;
+
 interface TableSetting {
   setting: Setting;
   table: Table;
@@ -28,10 +31,12 @@ export function tableSlugs(table: Table, setting: Setting): Slug[] {
   if (table.columns.length === 0) return textSlugs(table.caption, STYLES.caption, setting, { gap: 12 });
   const fitted = fitTable(table, setting);
   const heads = headSlugs(fitted);
+  const headHeight = heads.reduce((sum, { height }) => sum + height, 0);
+  const repeat = headHeight <= setting.height * HIGHEST_REPEATED ? heads : [];
   const [rows, sums] = [table.rows, table.sums ?? []].map((some, kind) =>
     some.flatMap((row, place) =>
       rowSlugsOf(row, fitted, kind === 1, place === 0 && (kind === 0 || table.rows.length === 0)).map(
-        (slug) => ({ ...slug, repeat: heads }),
+        (slug) => ({ ...slug, repeat }),
       ),
     ),
   );
