@@ -42,6 +42,11 @@ export const PLAIN_SCREENS: PlainScreen[] = [
     load: async () => (await import('./screens/new-survey/new-survey-screen.tsx')).NewSurveyScreen,
   },
   {
+    path: '/firm-lists',
+    label: 'Firm’s lists',
+    load: async () => (await import('./screens/firm-lists/firm-lists-screen.tsx')).FirmListsScreen,
+  },
+  {
     path: '/self-check',
     label: 'Self-check',
     load: async () => (await import('./screens/self-check/self-check-screen.tsx')).SelfCheckScreen,

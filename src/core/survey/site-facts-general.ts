@@ -3,6 +3,8 @@ export interface FactRow {
   id: string;
   label: string;
   choices: readonly string[];
+  /** What is shown for some of the answers in place of what is recorded. */
+  labels?: Readonly<Record<string, string>>;
   /** Several answers may hold at once. */
   several?: boolean;
   hint?: string;

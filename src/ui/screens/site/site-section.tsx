@@ -3,7 +3,6 @@ import { changeSurvey } from '../../../app/actions/change-survey.ts';
 import { attempt } from '../../../app/attempt.ts';
 import { nextOrder } from '../../../app/capture/station-edits.ts';
 import type { StepCode } from '../../../app/survey-store.ts';
-import { factGroups } from '../../../core/survey/site-fact-groups.ts';
 import { withoutObstruction } from '../../../core/survey/removed-entries.ts';
 import type { FactGroup } from '../../../core/survey/site-facts-general.ts';
 import type { Obstruction, Survey } from '../../../core/survey/survey.ts';
@@ -16,6 +15,7 @@ import type { SectionProps } from '../../section.ts';
 import { Caution } from './facts/cautions.tsx';
 import { FactForm, factForm } from './facts/fact-form.tsx';
 import { FactGroups } from './facts/fact-groups.tsx';
+import { firmGroups } from './facts/firm-groups.ts';
 import { ObstructionForm, obstructionForm } from './obstruction-form.tsx';
 import { ObstructionList } from './obstruction-list.tsx';
 import { SiteForm, SITE_FORM } from './site-form.tsx';
@@ -58,7 +58,7 @@ export function SiteSection({ survey, services }: SectionProps) {
   /** What goes on with a form that was typed into and not saved. */
   const opens = (form: string): (() => void) | null => {
     if (form === SITE_FORM) return () => setEditing({ what: 'site' });
-    const group = factGroups(survey.site).find((one) => factForm(one) === form);
+    const group = firmGroups(survey.site).find((one) => factForm(one) === form);
     if (group) return () => setEditing({ what: 'facts', group });
     if (form === obstructionForm(null))
       return () => setEditing({ what: 'obstruction', obstruction: null, newId: services.newId() });

@@ -7,6 +7,8 @@ const OTHER = ' other';
 
 interface FactFieldProps {
   row: FactRow;
+  /** What the survey has: it can be chosen again even where no list has it. */
+  stored: readonly string[];
   value: string[];
   onChange: (value: string[]) => void;
 }
@@ -23,13 +25,19 @@ function OwnAnswers({ id, own }: { id: string; own: string[] }) {
   );
 }
 
+/** The answers to choose from: the list's, those written on this device, and those of this survey; each once. */
+const listedFor = ({ choices }: FactRow, own: readonly string[], stored: readonly string[]): string[] => [
+  ...new Set([...choices, ...own, ...stored]),
+];
+
 /** One answer from a list, or one's own. */
-function OneAnswer({ row, value, onChange }: FactFieldProps) {
+function OneAnswer({ row, stored, value, onChange }: FactFieldProps) {
   const id = useId();
   const own = ownChoices.value[row.id] ?? [];
-  const listed = [...row.choices, ...own.filter((answer) => !row.choices.includes(answer))];
+  const listed = listedFor(row, own, stored);
   const answer = value[0] ?? '';
-  const [writing, setWriting] = useState(answer !== '' && !listed.includes(answer));
+  const [choseOther, setWriting] = useState(false);
+  const writing = choseOther || (answer !== '' && !listed.includes(answer));
   return (
     <div class="field">
       <label for={id}>{row.label}</label>
@@ -44,7 +52,9 @@ function OneAnswer({ row, value, onChange }: FactFieldProps) {
       >
         <option value="">Not looked at</option>
         {listed.map((choice) => (
-          <option key={choice}>{choice}</option>
+          <option key={choice} value={choice}>
+            {row.labels?.[choice] ?? choice}
+          </option>
         ))}
         <option value={OTHER}>Something else…</option>
       </select>
@@ -66,9 +76,9 @@ function OneAnswer({ row, value, onChange }: FactFieldProps) {
 }
 
 /** Several answers, ticked, and one's own. */
-function SeveralAnswers({ row, value, onChange }: FactFieldProps) {
+function SeveralAnswers({ row, stored, value, onChange }: FactFieldProps) {
   const own = ownChoices.value[row.id] ?? [];
-  const listed = [...row.choices, ...own.filter((answer) => !row.choices.includes(answer))];
+  const listed = listedFor(row, own, stored);
   const written = value.find((answer) => !listed.includes(answer)) ?? '';
   const ticked = value.filter((answer) => listed.includes(answer));
   const put = (answers: string[], text: string) => onChange(text === '' ? answers : [...answers, text]);
@@ -87,7 +97,7 @@ function SeveralAnswers({ row, value, onChange }: FactFieldProps) {
               )
             }
           />
-          {choice}
+          {row.labels?.[choice] ?? choice}
         </label>
       ))}
       <TextField

@@ -67,7 +67,8 @@ export function FactForm(props: {
     if (!(await props.onSave({ ...survey, facts }))) return false;
     for (const row of group.rows)
       for (const answer of cleaned(answers[row.id] ?? []))
-        if (!row.choices.includes(answer)) addOwnChoice(row.id, answer);
+        if (!row.choices.includes(answer) && !listOf(factOf(row.id)?.value).includes(answer))
+          addOwnChoice(row.id, answer);
     return true;
   };
   return (
@@ -76,6 +77,7 @@ export function FactForm(props: {
         <FactField
           key={row.id}
           row={row}
+          stored={listOf(factOf(row.id)?.value)}
           value={answers[row.id] ?? []}
           onChange={(given) => change({ answers: { ...answers, [row.id]: given } })}
         />

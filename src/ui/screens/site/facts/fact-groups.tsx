@@ -1,21 +1,32 @@
 import { ELECTRICAL_LISTS } from '../../../../core/survey/site-facts-electrical.ts';
-import { electricalList, factGroups, factText } from '../../../../core/survey/site-fact-groups.ts';
-import type { FactGroup } from '../../../../core/survey/site-facts-general.ts';
+import { electricalList, factText } from '../../../../core/survey/site-fact-groups.ts';
+import type { FactGroup, FactRow } from '../../../../core/survey/site-facts-general.ts';
 import type { Survey } from '../../../../core/survey/survey.ts';
 import { ChoiceField } from '../../../components/form/choice-field.tsx';
 import { PhotoStrip } from '../../../components/photos/photo-strip.tsx';
 import { ownPrefix } from './fact-form.tsx';
+import { firmGroups } from './firm-groups.ts';
+
+/** An answer as the firm's list shows it; without the list, as it is recorded. */
+function shownText({ facts }: Survey, id: string, labels: FactRow['labels'] = {}): string {
+  const value = facts?.find((fact) => fact.id === id)?.value;
+  if (value === undefined) return '';
+  return (Array.isArray(value) ? value : [value]).map((one) => labels[one] ?? one).join(', ');
+}
 
 function Answers({ survey, group }: { survey: Survey; group: FactGroup }) {
   const own = (survey.facts ?? []).filter(({ id }) => id.startsWith(ownPrefix(group)));
-  const rows = [...group.rows, ...own.map(({ id, label }) => ({ id, label: label ?? id }))];
+  const rows: Pick<FactRow, 'id' | 'label' | 'labels'>[] = [
+    ...group.rows,
+    ...own.map(({ id, label }) => ({ id, label: label ?? id })),
+  ];
   return (
     <dl class="facts">
-      {rows.map(({ id, label }) => (
+      {rows.map(({ id, label, labels }) => (
         <div key={id}>
           <dt>{label}</dt>
           <dd>
-            {factText(survey.facts, id) || <span class="faint">not looked at</span>}
+            {shownText(survey, id, labels) || <span class="faint">not looked at</span>}
             <PhotoStrip survey={survey} subject={{ kind: 'fact', id }} name={label} small />
           </dd>
         </div>
@@ -31,7 +42,7 @@ export function FactGroups(props: {
   onCountry: (country: string) => void;
 }) {
   const { survey } = props;
-  const groups = factGroups(survey.site);
+  const groups = firmGroups(survey.site);
   return (
     <>
       {groups.map((group) => {
@@ -50,6 +61,9 @@ export function FactGroups(props: {
                   onChoose={props.onCountry}
                 />
               )}
+              <p class="small">
+                What is offered can be changed: <a href="/firm-lists">Firm’s lists</a>.
+              </p>
               <Answers survey={survey} group={group} />
               <div class="form-actions">
                 <button
