@@ -1,12 +1,13 @@
-import { useRef, useState } from 'preact/hooks';
+import { useState } from 'preact/hooks';
 import { obstructionKinds } from '../../../core/survey/obstruction-kinds.ts';
 import { ordered } from '../../../core/survey/order.ts';
 import type { Obstruction, ObstructionKind, Survey, Trace, TraceShape } from '../../../core/survey/survey.ts';
 import { ChoiceField } from '../form/choice-field.tsx';
 import { Form } from '../form/form.tsx';
 import { TextField } from '../form/text-field.tsx';
+import { TypedRows } from '../typed-rows/typed-rows.tsx';
 import { TapedElevation } from './taped-elevation.tsx';
-import { emptyTrace, traceOfDraft, type PointDraft, type TraceDraft } from './trace-draft.ts';
+import { emptyTrace, traceOfDraft, type TraceDraft } from './trace-draft.ts';
 
 const NEW = 'new';
 
@@ -16,76 +17,10 @@ const SHAPES: { value: TraceShape; label: string }[] = [
   { value: 'line', label: 'Line: a mast or a wire' },
 ];
 
-function PointTable(props: {
-  points: PointDraft[];
-  fault: boolean;
-  onChange: (points: PointDraft[]) => void;
-}) {
-  const { points, onChange } = props;
-  const table = useRef<HTMLTableElement>(null);
-  const add = () => {
-    const key = Math.max(-1, ...points.map((point) => point.key)) + 1;
-    onChange([...points, { key, azimuth: '', elevation: '' }]);
-    requestAnimationFrame(() =>
-      table.current?.querySelector<HTMLInputElement>('tbody tr:last-child input')?.focus(),
-    );
-  };
-  const input = (point: PointDraft, place: number, angle: 'azimuth' | 'elevation') => (
-    <input
-      type="text"
-      inputMode="decimal"
-      autocomplete="off"
-      aria-label={`Sighting ${place + 1}, ${angle}`}
-      aria-invalid={props.fault ? true : undefined}
-      value={point[angle]}
-      onInput={({ currentTarget }) =>
-        onChange(
-          points.map((one) => (one.key === point.key ? { ...one, [angle]: currentTarget.value } : one)),
-        )
-      }
-    />
-  );
-  return (
-    <>
-      <table ref={table} class="point-table">
-        <thead>
-          <tr>
-            <th scope="col">No.</th>
-            <th scope="col">Azimuth (°)</th>
-            <th scope="col">Elevation (°)</th>
-            <th scope="col">
-              <span class="visually-hidden">Remove</span>
-            </th>
-          </tr>
-        </thead>
-        <tbody>
-          {points.map((point, place) => (
-            <tr key={point.key}>
-              <th scope="row">{place + 1}</th>
-              <td>{input(point, place, 'azimuth')}</td>
-              <td>{input(point, place, 'elevation')}</td>
-              <td>
-                <button
-                  type="button"
-                  aria-label={`Remove sighting ${place + 1}`}
-                  disabled={points.length <= 1}
-                  onClick={() => onChange(points.filter(({ key }) => key !== point.key))}
-                >
-                  ×
-                </button>
-              </td>
-            </tr>
-          ))}
-        </tbody>
-      </table>
-      <div>
-        <button type="button" onClick={add}>
-          Add a row
-        </button>
-      </div>
-    </>
-  );
-}
+const COLUMNS = [
+  { field: 'azimuth', head: 'Azimuth (°)', spoken: 'azimuth' },
+  { field: 'elevation', head: 'Elevation (°)', spoken: 'elevation' },
+] as const;
 
 /** Typing a trace: of which obstruction, of what shape, and its sightings one under the other. */
 export function TraceForm(props: {
@@ -183,12 +118,16 @@ export function TraceForm(props: {
       <p class="faint small">
         From left to right; azimuths from true north: to a compass bearing add the declination, east as plus.
       </p>
-      <PointTable points={draft.points} fault={fault !== null} onChange={(points) => change({ points })} />
-      {fault && (
-        <p class="field-fault small" role="alert">
-          {fault}
-        </p>
-      )}
+      <TypedRows
+        rows={draft.points}
+        columns={COLUMNS}
+        head="No."
+        one="sighting"
+        add="Add a row"
+        fewest={1}
+        fault={fault}
+        onChange={(points) => change({ points })}
+      />
       <TapedElevation instrumentHeight={props.instrumentHeight} onFound={putElevation} />
     </Form>
   );
