@@ -1,6 +1,6 @@
 import type { Part, ReportContents, Section } from '../contents/report-contents.ts';
 import { blocksMarkup } from './html/blocks-markup.ts';
-import { plainMarkup, wordsMarkup } from './html/markup-text.ts';
+import { plainMarkup, wordsMarkup } from './markup-text.ts';
 import { pageStyle } from './html/page-style.ts';
 
 /** Nothing is fetched and nothing runs, whatever stands in the page. */

@@ -1,4 +1,5 @@
 import type { DotsMark, Fill, Hatch, Mark, PathMark, Pen, Picture, TextMark, Tone } from '../marks.ts';
+import { plainMarkup } from './markup-text.ts';
 
 export type Palette = Record<Tone, string>;
 
@@ -26,7 +27,7 @@ export function svgText(picture: Picture, options: SvgOptions): string {
   const painter = new SvgPainter(options);
   const body = picture.marks.map((mark) => painter.mark(mark)).join('');
   const { width, height } = picture;
-  const font = escaped(options.font ?? 'sans-serif');
+  const font = plainMarkup(options.font ?? 'sans-serif');
   return (
     `<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 ${number(width)} ${number(height)}" width="${number(width)}" ` +
     `height="${number(height)}" font-family="${font}" ${options.attributes ?? ''}>` +
@@ -79,7 +80,7 @@ class SvgPainter {
     const slant = italic ? ' font-style="italic"' : '';
     const about = turn ? ` transform="rotate(${number(turn)} ${number(x)} ${number(y)})"` : '';
     const place = `x="${number(x)}" y="${number(y)}" font-size="${number(size)}" text-anchor="${anchor}"${weight}${slant}${about}`;
-    const word = escaped(text);
+    const word = plainMarkup(text);
     const under = rim
       ? `<text ${place} fill="none" stroke="${this.palette.paper}" stroke-width="${number(size * 0.32)}" stroke-linejoin="round" aria-hidden="true">${word}</text>`
       : '';
@@ -130,8 +131,3 @@ function lineText(line: readonly number[], closed: boolean): string {
 
 /** To a hundredth, without trailing zeros. */
 const number = (value: number): string => String(Math.round(value * 100) / 100);
-
-const ENTITIES: Record<string, string> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;' };
-// control characters are not allowed in XML at all
-const escaped = (text: string) =>
-  text.replace(/[&<>"]/g, (c) => ENTITIES[c]).replace(/[\x00-\x08\x0b\x0c\x0e-\x1f]/g, '');

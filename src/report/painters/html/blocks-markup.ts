@@ -3,7 +3,7 @@ import type { Picture } from '../../marks.ts';
 import type { Palette } from '../svg.ts';
 import { svgText } from '../svg.ts';
 import { base64 } from './base64.ts';
-import { plainMarkup, wordsMarkup } from './markup-text.ts';
+import { plainMarkup, wordsMarkup } from '../markup-text.ts';
 
 /** The inks of the frame a picture stands in: the style sheet has them. */
 const PAGE_PALETTE: Palette = {

@@ -1,5 +1,5 @@
 import type { ReportContents } from '../../contents/report-contents.ts';
-import { styleString } from './markup-text.ts';
+import { styleString } from '../markup-text.ts';
 
 /**
  * Paper and ink on a screen; print is always ink on white. After dark a picture stays ink on a slip of paper, since the words

@@ -10,7 +10,7 @@ const ENTITIES: Record<string, string> = {
 const UNFIT =
   /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u061c\u200e\u200f\u202a-\u202e\u2066-\u2069\ufeff\ufffe\uffff]|[\ud800-\udbff](?![\udc00-\udfff])|(?<![\ud800-\udbff])[\udc00-\udfff]/g;
 
-/** Plain text as the text of an attribute or of the page's title. */
+/** Plain text as text of HTML or SVG, in an attribute too. */
 export const plainMarkup = (text: string): string =>
   text.replace(UNFIT, '').replace(/[&<>"']/g, (letter) => ENTITIES[letter]);
 
