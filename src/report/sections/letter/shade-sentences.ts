@@ -63,7 +63,8 @@ function partText(spans: readonly ClockSpan[], speech: Speech): string {
       const { word } = PARTS.findLast((part) => hour >= part.from)!;
       minutes.set(word, (minutes.get(word) ?? 0) + 1);
     }
-  const named = [...minutes].filter(([, count]) => count >= LEAST_PART * whole).map(([word]) => word);
+  const inOrder = PARTS.slice(1).map(({ word }) => word);
+  const named = inOrder.filter((word) => (minutes.get(word) ?? 0) >= LEAST_PART * Math.max(1, whole));
   const { words } = speech;
   return named.length > 3 || named.length === 0
     ? words['sun.at-changing-hours']

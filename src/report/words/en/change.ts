@@ -9,7 +9,7 @@ export const EN_CHANGE = {
   'change.more': (share: string) => `${share} more`,
   'change.no-more': 'no more',
   'change.no-distance': (trees: string) =>
-    `How far away these stand was not measured: ${trees}. So we cannot say what their growth would take. Count on some more shade each year.`,
+    `The distance to ${trees} was not measured. So we cannot say what growth would take. Count on some more shade each year.`,
   'change.buildings':
     'A new house or a new floor next door can bring shade. Ask your town or council what may be built there.',
   'change.own-trees': (side: string) =>

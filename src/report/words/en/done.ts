@@ -2,7 +2,7 @@
 export const EN_DONE = {
   'done.heading': 'What could be done about the shade?',
   'done.answer': (obstruction: string, gain: string, roof: string) =>
-    `Of all that could change, ${obstruction} takes the most. Without it, ${gain} of the year’s sunlight would come back to ${roof}.`,
+    `On ${roof}, the largest gain would come without ${obstruction}: ${gain} of the year’s sunlight.`,
   'done.answer-together': (obstructions: string, gain: string, roof: string) =>
     `One alone would not help much. Without ${obstructions}, ${gain} of the year’s sunlight would come back to ${roof}.`,
   'done.answer-nothing': 'Nothing that could be changed here would bring much more sun.',
@@ -22,7 +22,7 @@ export const EN_DONE = {
   'done.together': (obstructions: string, gain: string) =>
     `With ${obstructions} all gone, ${gain} of the year’s sunlight would come back.`,
   'done.no-distance': (obstruction: string) =>
-    `How far away ${obstruction} stands was not measured. So we cannot say what a trim would bring.`,
+    `The distance to ${obstruction} was not measured. So we cannot say what a trim would bring.`,
   'done.stays': (obstructions: string) => `We take it that this will stay: ${obstructions}.`,
   'done.place': (roof: string, best: string, most: string, lowest: string, least: string) =>
     `On ${roof} the place counts. At “${best}”, ${most} of the sunlight arrives. At “${lowest}” it is ${least}. Panels do better where more arrives.`,

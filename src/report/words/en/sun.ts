@@ -1,7 +1,7 @@
 /** What stands in the way, and when its shade falls. */
 export const EN_SUN = {
   'sun.heading': 'What stands in the way, and when?',
-  'sun.answer': (obstruction: string, roof: string) => `${obstruction} shades ${roof} the most.`,
+  'sun.answer': (obstruction: string, roof: string) => `The most shade on ${roof} comes from ${obstruction}.`,
   'sun.answer-clear': 'Nothing that counts stands in the way of the sun.',
   'sun.answer-sky': 'Some things hide a part of the bright sky, but none of them the sun.',
   'sun.from-lowest': (station: string) =>
@@ -15,8 +15,8 @@ export const EN_SUN = {
   'sun.alternative-open': (roof: string) =>
     `The sky before ${roof}, with the way of the sun through the year. Nothing is in front of it.`,
   'sun.shades': (obstruction: string, roof: string, when: string, part: string) =>
-    `${obstruction} shades ${roof} ${when}, ${part}.`,
-  'sun.longest': (day: string, hours: string) => `Its shade lasts longest about ${day}: ${hours}.`,
+    `Shade from ${obstruction} falls on ${roof} ${when}, ${part}.`,
+  'sun.longest': (day: string, hours: string) => `It lasts longest about ${day}: ${hours}.`,
   'sun.all-year': 'all year',
   'sun.from-to': (from: string, to: string) => `from ${from} to ${to}`,
   'sun.on': (day: string) => `about ${day}`,
@@ -32,7 +32,7 @@ export const EN_SUN = {
   'sun.in-the-evening': 'in the evening',
   'sun.at-changing-hours': 'at changing hours',
   'sun.never-the-sun': (obstruction: string) =>
-    `${obstruction} hides a part of the bright sky, but never the sun.`,
+    `Behind ${obstruction} lies a part of the bright sky, but never the sun.`,
   'sun.little': (names: string) => `Almost nothing is lost to ${names}.`,
   'sun.leaves': 'Trees let some light through, and bare trees let more through. This is counted.',
   'sun.table-caption': (roof: string) => `${roof}: hours of shade on the 21st of each month`,

@@ -28,7 +28,7 @@ export const EN_SURE = {
   'sure.unseen': 'What nobody could see',
   'sure.unseen-note': 'We counted these parts of the sky as open. The range allows for shade there.',
   'sure.unseen-from': (roof: string, station: string, share: string, places: string) =>
-    `${roof}, seen from “${station}”: ${share} of its light comes from parts that nobody looked at. They lie ${places}.`,
+    `${roof}: as seen from “${station}”, ${share} of its light comes from parts that nobody looked at. They lie ${places}.`,
   'sure.unseen-place': (where: string, share: string) => `${where} (${share})`,
   'sure.unseen-least':
     'Where a roof has more than one measured place, this is the one from which the least was seen.',
