@@ -91,7 +91,7 @@ export default defineConfig({
           include: ['tests/browser/**/*.test.ts'],
           globalSetup: ['tests/browser/build-once.ts'],
           environment: 'node',
-          testTimeout: 120_000,
+          testTimeout: 240_000,
           hookTimeout: 180_000,
           ...sharedWorkers,
           sequence: { groupOrder: 1 },

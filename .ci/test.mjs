@@ -1,5 +1,6 @@
-// npm test: every check, one after the other. A failing check does not hide the later ones.
-import { spawnSync } from 'node:child_process';
+// npm test: every check. A failing check does not hide the others. Checks that need one core run side by side, and each
+// is told as a whole once it has ended.
+import { spawn } from 'node:child_process';
 import { existsSync, mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -10,52 +11,67 @@ const tool = (path) => `${root}node_modules/${path}`;
 const vitest = (project) => ({ name: `vitest ${project}`, counts: true, args: vitestArgs(project) });
 const vitestArgs = (project) => [tool('vitest/vitest.mjs'), 'run', '--project', project];
 
-const steps = [
-  { name: 'prettier', args: [tool('prettier/bin/prettier.cjs'), '--check', 'src', 'tests', '.ci'] },
+const sideBySide = [
   {
     name: 'eslint',
     args: [tool('eslint/bin/eslint.js'), '-c', 'src/eslint.config.js', '--max-warnings=0', 'src', 'tests'],
   },
+  { name: 'prettier', args: [tool('prettier/bin/prettier.cjs'), '--check', 'src', 'tests', '.ci'] },
   { name: 'tsc', args: [tool('typescript/bin/tsc'), '-b', 'src', 'tests'] },
-  vitest('unit'),
   { name: 'vite build', args: [tool('vite/bin/vite.js'), 'build', '--logLevel', 'warn'], production: true },
-  { ...vitest('browser'), needsBrowser: true },
 ];
+const oneByOne = [vitest('unit'), { ...vitest('browser'), needsBrowser: true }];
+
+/** Runs a command to its end; gives its exit code, and what it said where that is not shown at once. */
+function ended(args, env, shown) {
+  return new Promise((resolve) => {
+    const stdio = shown ? 'inherit' : ['ignore', 'pipe', 'pipe'];
+    const child = spawn(process.execPath, args, { cwd: root, stdio, env });
+    let said = '';
+    for (const stream of [child.stdout, child.stderr])
+      stream?.setEncoding('utf8').on('data', (text) => (said += text));
+    child.on('error', (error) => resolve({ status: 1, said: `${said}${error.message}\n` }));
+    child.on('close', (status) => resolve({ status, said }));
+  });
+}
 
 /** Passed and failed of one step: its tests where it counts them, else the step itself. */
-function run(step) {
-  if (step.needsBrowser && !ensureBrowser()) return { passed: 0, failed: 1 };
+async function outcome(step, shown) {
+  if (step.needsBrowser && !ensureBrowser()) return { passed: 0, failed: 1, said: '' };
   const folder = mkdtempSync(join(tmpdir(), 'noonmark-test-'));
   const results = join(folder, 'results.json');
   const counting = step.counts
     ? ['--reporter=default', '--reporter=json', `--outputFile.json=${results}`]
     : [];
-  const { status } = spawnSync(process.execPath, [...step.args, ...counting], {
-    cwd: root,
-    stdio: 'inherit',
-    env: step.production ? { ...process.env, NODE_ENV: 'production' } : process.env,
-  });
+  const env = step.production ? { ...process.env, NODE_ENV: 'production' } : process.env;
+  const { status, said } = await ended([...step.args, ...counting], env, shown);
   const counted = existsSync(results) ? JSON.parse(readFileSync(results, 'utf8')) : null;
   rmSync(folder, { recursive: true, force: true });
-  const failed = counted?.numFailedTests ?? 0;
+  if (!counted) return status === 0 ? { passed: 1, failed: 0, said } : { passed: 0, failed: 1, said };
+  const failed = counted.numFailedTests;
   // a file that cannot be loaded or an error between tests fails the run without a failed test
-  if (counted) return { passed: counted.numPassedTests, failed: failed === 0 && status !== 0 ? 1 : failed };
-  return status === 0 ? { passed: 1, failed: 0 } : { passed: 0, failed: 1 };
+  return { passed: counted.numPassedTests, failed: failed === 0 && status !== 0 ? 1 : failed, said };
 }
 
-ensurePackages();
 const total = { passed: 0, failed: 0 };
 const failing = [];
-for (const step of steps) {
-  process.stdout.write(`\n== ${step.name}\n`);
+
+/** Runs a step and tells what came of it; `shown`: its words as they come. */
+async function run(step, shown) {
+  if (shown) process.stdout.write(`\n== ${step.name}\n`);
   const started = Date.now();
-  const { passed, failed } = run(step);
+  const { passed, failed, said } = await outcome(step, shown);
   total.passed += passed;
   total.failed += failed;
   if (failed > 0) failing.push(step.name);
   const seconds = ((Date.now() - started) / 1000).toFixed(1);
+  if (!shown) process.stdout.write(`\n== ${step.name}\n${said}`);
   process.stdout.write(`== ${step.name}: ${failed > 0 ? 'FAILED' : 'ok'} in ${seconds} s\n`);
 }
+
+ensurePackages();
+await Promise.all(sideBySide.map((step) => run(step, false)));
+for (const step of oneByOne) await run(step, true);
 if (failing.length > 0) process.stdout.write(`\nFailed: ${failing.join(', ')}\n`);
 process.stdout.write(`\n${total.passed} passed, ${total.failed} failed\n`);
 process.exitCode = total.failed > 0 ? 1 : 0;
