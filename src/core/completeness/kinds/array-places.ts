@@ -34,7 +34,7 @@ export const arrayPlaces: OpenPointKind = {
           subject: plane.name,
           sentence: `Not sighted: ${listed(missing)}. What stands near shades one end of an array and not the other.`,
           effect: null,
-          cure: { at: 'new-station', words: 'Add a station' },
+          cure: { at: 'new-station', plane: plane.id, words: 'Add a station' },
         },
       ];
     }),
