@@ -7,11 +7,14 @@ import { randomSource } from '../../src/core/uncertainty/random-source.ts';
 import { devicePose } from './device-pose.ts';
 import type { PhoneNoise } from './phone-noise.ts';
 import { DOUBLED, HEAVY_TAILED, PLANNED } from './phone-noise.ts';
+import type { Errors } from './campaign.ts';
 import { coverageOf, errorsOf, shareWithin } from './campaign.ts';
 import { measuredAccess } from './outcome.ts';
 import { SCENES } from './scenes.ts';
+import type { SceneLight } from './true-light.ts';
 import { annualAccess, sceneLight } from './true-light.ts';
-import { CAREFUL, CHECKED, UNCHECKED, virtualSurvey } from './virtual-survey.ts';
+import type { Routine } from './virtual-survey.ts';
+import { CAREFUL, ROUTINE, SHADOW_ONLY, UNCHECKED, virtualSurvey } from './virtual-survey.ts';
 
 /** A phone and a hand without any error; the compass without one too. */
 const PERFECT: PhoneNoise = {
@@ -94,7 +97,7 @@ describe('the scenes', () => {
           PERFECT,
           randomSource('perfect', String(i)),
           `p${i}`,
-          CHECKED,
+          ROUTINE,
         );
         const rough = light.scene.features.some(({ sightedEvery }) => sightedEvery > 0);
         expect(100 * Math.abs(measuredAccess(light, survey)! - truth)).toBeLessThan(rough ? 1 : 0.1);
@@ -103,44 +106,51 @@ describe('the scenes', () => {
   );
 });
 
-/** A sample of what `run-all.ts` does in full. */
+/** A sample of what `run-all.ts` does in full, with the routine that the app asks for. */
 describe('annual access within two points of the truth in 95 of 100 surveys', () => {
-  const SURVEYS = 50;
+  const SURVEYS = 80;
+  const known = new Map<string, Errors>();
+  const errorsWith = (routine: Routine, light: SceneLight): Errors => {
+    const key = JSON.stringify([routine, light.scene.name]);
+    const errors =
+      known.get(key) ?? errorsOf(light, { name: 'gate', noise: PLANNED, routine, surveys: SURVEYS });
+    known.set(key, errors);
+    return errors;
+  };
+  const sizesWith = (routine: Routine) => lights.flatMap((light) => errorsWith(routine, light).sizes);
 
   test.each(lights.map((light) => [light.scene.name, light] as const))(
-    'with heading checks and the phone turned over: %s',
+    'with a heading check and the phone turned over: %s',
     (_, light) => {
-      const errors = errorsOf(light, { name: 'gate', noise: PLANNED, routine: CAREFUL, surveys: SURVEYS });
+      const errors = errorsWith(ROUTINE, light);
       expect(errors.refused).toBeLessThan(SURVEYS / 20);
       expect(shareWithin(errors, 2)).toBeGreaterThan(0.95 - margin(0.95, SURVEYS));
     },
   );
 
+  test('so too over all scenes', () => {
+    const sizes = sizesWith(ROUTINE);
+    expect(shareWithin({ sizes }, 2)).toBeGreaterThan(0.97);
+  });
+
   test('with a heading check alone, over all scenes', () => {
-    const trial = { name: 'gate', noise: PLANNED, routine: CHECKED, surveys: SURVEYS };
-    const sizes = lights.flatMap((light) => errorsOf(light, trial).sizes);
+    const sizes = sizesWith(SHADOW_ONLY);
     expect(shareWithin({ sizes }, 2)).toBeGreaterThan(0.95 - margin(0.95, sizes.length));
   });
 
-  test('a heading check helps where it is needed', () => {
-    const far = (routine: typeof CHECKED) =>
-      lights
-        .flatMap(
-          (light) => errorsOf(light, { name: 'gate', noise: PLANNED, routine, surveys: SURVEYS }).sizes,
-        )
-        .filter((size) => size > 2).length;
-    expect(far(CHECKED)).toBeLessThan(0.8 * far(UNCHECKED));
-    expect(far(CAREFUL)).toBeLessThan(0.5 * far(CHECKED));
+  test('a heading check helps where it is needed, and turning the phone over where that does not', () => {
+    const far = (routine: Routine) => sizesWith(routine).filter((size) => size > 2).length;
+    expect(far(SHADOW_ONLY)).toBeLessThan(0.8 * far(UNCHECKED));
+    expect(far(ROUTINE)).toBeLessThan(0.5 * far(SHADOW_ONLY));
   });
 });
 
 describe('the truth in the 95 % interval', () => {
-  const SURVEYS = 20;
+  const SURVEYS = 26;
   const DRAWS = 120;
-  const pooled = (noise: PhoneNoise, routine = CHECKED) => {
-    const each = lights.map((light) =>
-      coverageOf(light, { name: 'gate', noise, routine, surveys: SURVEYS }, DRAWS),
-    );
+  const pooled = (noise: PhoneNoise) => {
+    const trial = { name: 'gate', noise, routine: ROUTINE, surveys: SURVEYS };
+    const each = lights.map((light) => coverageOf(light, trial, DRAWS));
     const count = each.reduce((sum, one) => sum + one.count, 0);
     return {
       count,
@@ -148,12 +158,12 @@ describe('the truth in the 95 % interval', () => {
       width: each.reduce((sum, one) => sum + one.meanWidth, 0) / each.length,
     };
   };
+  const planned = once(() => pooled(PLANNED));
 
-  test('93 to 97 times in 100, and wider where the noise is twice what was planned', () => {
-    const { share, count, width } = pooled(PLANNED);
+  test('93 to 97 times in 100', () => {
+    const { share, count } = planned();
     expect(share).toBeGreaterThan(0.93 - margin(0.93, count));
     expect(share).toBeLessThan(0.97 + margin(0.97, count));
-    expect(pooled(DOUBLED).width).toBeGreaterThan(1.1 * width);
   });
 
   test('88 times in 100 or more with errors of heavy tails', () => {
@@ -161,8 +171,14 @@ describe('the truth in the 95 % interval', () => {
     expect(share).toBeGreaterThan(0.88 - margin(0.88, count));
   });
 
-  test('88 times in 100 or more with twice the noise, where the survey repeats enough to show it', () => {
-    const { share, count } = pooled(DOUBLED, CAREFUL);
+  test('88 times in 100 or more with twice the noise, which the survey’s own repeats show', () => {
+    const { share, count, width } = pooled(DOUBLED);
     expect(share).toBeGreaterThan(0.88 - margin(0.88, count));
+    expect(width).toBeGreaterThan(1.1 * planned().width);
   });
 });
+
+function once<T>(make: () => T): () => T {
+  let made: { value: T } | null = null;
+  return () => (made ??= { value: make() }).value;
+}

@@ -20,8 +20,8 @@ export interface Routine {
   twoFace: boolean;
 }
 
-export const CHECKED: Routine = { shadow: 1, twoFace: false };
 export const UNCHECKED: Routine = { shadow: 0, twoFace: false };
+export const SHADOW_ONLY: Routine = { shadow: 1, twoFace: false };
 /** What the app asks for: a heading check, and this phone turned over on one mark. */
 export const ROUTINE: Routine = { shadow: 1, twoFace: true };
 /** A heading check at the beginning and at the end, and the phone turned over. */
@@ -37,7 +37,7 @@ export function virtualSurvey(
   noise: PhoneNoise,
   random: RandomSource,
   name: string,
-  routine: Routine = CHECKED,
+  routine: Routine = ROUTINE,
 ): Survey {
   const phone = new VirtualPhone(scene, noise, random);
   const gap = random.uniform() < noise.gapShare ? gapIn(random) : null;
