@@ -79,7 +79,7 @@ describe.each(LOOKS)('sighting on $name', ({ context }) => {
     await expectGood(page);
     await page.getByRole('button', { name: 'With the camera' }).tap();
     await page.locator('.sight video').waitFor();
-    await page.getByText('Unseen in the sun’s band').waitFor();
+    await page.getByText(/^Unseen: /).waitFor();
     await expect.poll(() => page.locator('.huge').first().innerText()).toMatch(/^15[23]\.\d°$/);
     await expectGood(page);
     await way(page, 'Straight edge');

@@ -10,10 +10,10 @@ export function marksOf({ stations }: Pick<Survey, 'stations'>): string[] {
   return [...new Set(names)];
 }
 
-/** A name for one more mark: `Mark` and the next number that is free. */
+/** A name for one more mark: `M` and the next number that is free. */
 export function freeMarkName(survey: Pick<Survey, 'stations'>): string {
   const taken = new Set(marksOf(survey));
-  for (let number = 1; ; number++) if (!taken.has(`Mark ${number}`)) return `Mark ${number}`;
+  for (let number = 1; ; number++) if (!taken.has(`M${number}`)) return `M${number}`;
 }
 
 /** The mark that a sighting of a station has been given; null for none, and for a sighting that is not there. */

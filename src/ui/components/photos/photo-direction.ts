@@ -21,5 +21,5 @@ export function photoDirection(photo: Photo, survey: Survey): PhotoAzimuth | nul
 /** In whole degrees, with how sure it is where the phone read it. */
 export function directionText({ azimuth, standardDeviation }: PhotoAzimuth): string {
   const degrees = `${Math.round(azimuth) % 360}°`;
-  return standardDeviation === null ? degrees : `${degrees} ± ${Math.ceil(2 * standardDeviation)}°`;
+  return standardDeviation === null ? degrees : `${degrees}\u00a0±\u00a0${Math.ceil(2 * standardDeviation)}°`;
 }

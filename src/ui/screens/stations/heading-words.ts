@@ -6,7 +6,8 @@ export const signed = (value: number, digits = 1): string =>
   `${value < 0 ? '−' : '+'}${Math.abs(value).toFixed(digits)}°`;
 
 /** Twice the standard deviation: true in 95 of 100. */
-export const within = (deviation: number): string => `± ${(2 * deviation).toFixed(deviation < 5 ? 1 : 0)}°`;
+export const within = (deviation: number): string =>
+  `±\u00a0${(2 * deviation).toFixed(deviation < 5 ? 1 : 0)}°`;
 
 const SOURCES: Record<NonNullable<PointedRun['heading']>['source'], string> = {
   check: 'Heading by its own check',

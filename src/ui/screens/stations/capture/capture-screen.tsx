@@ -5,13 +5,16 @@ import { navigate } from '../../../router.ts';
 import type { SectionProps } from '../../../section.ts';
 import { stationPath } from '../station-path.ts';
 import { FullScreen } from './full-screen.tsx';
+import { PhotoButton } from './photo-button.tsx';
 import { Sitting } from './sitting.ts';
 import { SittingView } from './sitting-view.tsx';
 import { isOn, StartCard } from './start-card.tsx';
 import { useCapture } from './use-capture.ts';
 
+type Props = SectionProps & { station: Station; start?: string };
+
 /** Sighting from a station with the phone. `start`: what somebody came for, as the address has it. */
-export function CaptureScreen(props: SectionProps & { station: Station; start?: string }) {
+export function CaptureScreen(props: Props) {
   const { services, surveyId, station, start } = props;
   const capture = useCapture(services, props.survey);
   const { session } = capture;
@@ -21,6 +24,10 @@ export function CaptureScreen(props: SectionProps & { station: Station; start?: 
     <FullScreen
       title={station.name}
       mark={practised}
+      action={
+        isOn(session) &&
+        sitting && <PhotoButton capture={capture} session={session} {...subjectOf(sitting, props)} />
+      }
       onLeave={() => navigate(stationPath(surveyId, station.id))}
     >
       {isOn(session) && sitting ? (
@@ -30,6 +37,15 @@ export function CaptureScreen(props: SectionProps & { station: Station; start?: 
       )}
     </FullScreen>
   );
+}
+
+/** What a photo taken now is of: the obstruction in hand, else the station. */
+function subjectOf({ task, choice }: Sitting, { survey, station }: Pick<Props, 'survey' | 'station'>) {
+  const traced = task.value === 'trace' ? choice.value.obstruction : null;
+  const obstruction = survey.obstructions.find(({ id }) => id === traced);
+  const kind = obstruction ? ('obstruction' as const) : ('station' as const);
+  const { id, name } = obstruction ?? station;
+  return { subject: { kind, id }, name };
 }
 
 function sittingFor(session: CaptureSession, stationId: string, start: string | undefined): Sitting {

@@ -22,6 +22,8 @@ export function FullScreen(props: {
   title: string;
   onLeave: () => void;
   mark?: string | null;
+  /** One more thing to touch, at the end of the head. */
+  action?: ComponentChildren;
   children: ComponentChildren;
 }) {
   const dialog = useRef<HTMLDialogElement>(null);
@@ -47,6 +49,7 @@ export function FullScreen(props: {
         </button>
         <h2>{props.title}</h2>
         {props.mark && <strong class="practice-mark">{props.mark}</strong>}
+        {props.action}
       </header>
       <div role="alert">
         <Trouble />

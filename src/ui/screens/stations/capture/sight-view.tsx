@@ -1,17 +1,10 @@
 import { useEffect, useRef } from 'preact/hooks';
-import type { CameraView } from '../../../../app/capture/sensor-interfaces.ts';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import { NO_CAMERA } from './capture-words.ts';
 import type { Capture } from './use-capture.ts';
 
 /** What is sighted: through the camera with a cross-hair, or a reminder to sight along the top edge. */
-export function SightView(props: {
-  capture: Capture;
-  session: CaptureSession;
-  /** Takes what the cross-hair stands on as a photo. */
-  onPhoto?: (view: CameraView) => void;
-}) {
-  const { capture, session, onPhoto } = props;
+export function SightView({ capture, session }: { capture: Capture; session: CaptureSession }) {
   const video = useRef<HTMLVideoElement>(null);
   const { camera, noCamera } = capture;
   const byCamera = session.axis.value === 'camera' && camera !== null;
@@ -33,16 +26,6 @@ export function SightView(props: {
             <circle class="rim" r="1.6" />
             <circle class="dot" r="1.2" />
           </svg>
-          {onPhoto && (
-            <button
-              type="button"
-              class="sight-photo"
-              disabled={session.phase.value !== 'idle'}
-              onClick={() => onPhoto(camera)}
-            >
-              Photo
-            </button>
-          )}
         </>
       ) : (
         <TopEdge noCamera={noCamera} />

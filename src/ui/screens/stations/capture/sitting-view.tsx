@@ -1,6 +1,4 @@
 import { useEffect, useMemo, useState } from 'preact/hooks';
-import { takePhoto } from '../../../../app/capture/photo-take.ts';
-import type { CameraView } from '../../../../app/capture/sensor-interfaces.ts';
 import { liveSurvey, sweptDirections, type LiveSweep } from '../../../../app/capture/live-survey.ts';
 import type { AzimuthRange } from '../../../../core/angles/azimuth-ranges.ts';
 import { rangesBetween } from '../../../../core/angles/azimuth-ranges.ts';
@@ -35,12 +33,6 @@ type Props = SectionProps & { station: Station; capture: Capture; sitting: Sitti
 const planeOf = ({ survey, station }: Props): RoofPlane | null =>
   survey.planes.find(({ id }) => station.serves.includes(id)) ?? survey.planes[0] ?? null;
 
-/** What a photo taken now is of: the obstruction in hand, else the station. */
-function subjectOf({ sitting, station, survey }: Props): { id: string; name: string } {
-  const traced = sitting.task.value === 'trace' ? sitting.choice.value.obstruction : null;
-  return survey.obstructions.find(({ id }) => id === traced) ?? station;
-}
-
 /** A sitting at work: picture, figures, strip, and the panel of the task in hand. */
 export function SittingView(props: Props) {
   const { capture, sitting, survey } = props;
@@ -49,18 +41,11 @@ export function SittingView(props: Props) {
   const plane = planeOf(props);
   const { strip, gaps } = useStrip(props, plane);
   const { recording } = session.orientation;
-  const photo = (view: CameraView) => {
-    const { id, name } = subjectOf(props);
-    const kind = id === props.station.id ? 'station' : 'obstruction';
-    return takePhoto(props.services, session, view, { kind, id }, name);
-  };
   return (
     <div class="sitting">
       <div class="sitting-scene" role="group" aria-label="What the phone says" tabIndex={0}>
         {recording && <RecordingBar recording={recording} />}
-        {!recording && !sitting.byShadow && (
-          <SightView capture={capture} session={session} onPhoto={(view) => void photo(view)} />
-        )}
+        {!recording && !sitting.byShadow && <SightView capture={capture} session={session} />}
         <Figures session={session} />
         {plane && task !== 'check' && (
           <HorizonStrip session={session} latitude={survey.site.latitude} plane={plane.name} {...strip} />
@@ -76,7 +61,10 @@ export function SittingView(props: Props) {
           value={task}
           options={TASKS}
           disabled={session.phase.value === 'sweeping'}
-          onChoose={(wanted) => (sitting.task.value = wanted)}
+          onChoose={(wanted) => {
+            session.news.value = null;
+            sitting.task.value = wanted;
+          }}
         />
         {task === 'trace' && <TracePanel sitting={sitting} />}
         {task === 'open' && <OpenPanel sitting={sitting} gaps={gaps} />}

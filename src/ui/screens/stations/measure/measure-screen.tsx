@@ -1,6 +1,5 @@
 import { useEffect, useState } from 'preact/hooks';
 import { takeEdge, takePlacing } from '../../../../app/capture/plane-takes.ts';
-import { takePhoto } from '../../../../app/capture/photo-take.ts';
 import { undoLast } from '../../../../app/capture/undo-last.ts';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import type { RoofPlane } from '../../../../core/survey/survey.ts';
@@ -11,6 +10,7 @@ import { Figures } from '../capture/figures.tsx';
 import { FullScreen } from '../capture/full-screen.tsx';
 import { HeadingBanner } from '../capture/heading-banner.tsx';
 import { NewsLine } from '../capture/news-line.tsx';
+import { PhotoButton } from '../capture/photo-button.tsx';
 import { RecordingBar } from '../capture/recording-bar.tsx';
 import { SightView } from '../capture/sight-view.tsx';
 import { isOn, StartCard } from '../capture/start-card.tsx';
@@ -50,6 +50,16 @@ export function MeasureScreen(props: SectionProps & { plane: RoofPlane }) {
     <FullScreen
       title={plane.name}
       mark={session?.orientation.recording ? 'Practice' : null}
+      action={
+        isOn(session) && (
+          <PhotoButton
+            capture={capture}
+            session={session}
+            subject={{ kind: 'plane', id: plane.id }}
+            name={plane.name}
+          />
+        )
+      }
       onLeave={() => navigate(surveyPath(surveyId, 'stations'))}
     >
       {isOn(session) ? (
@@ -85,15 +95,7 @@ function Measuring(props: SectionProps & { plane: RoofPlane; capture: Capture; s
           <LiveTilt session={session} held={way} />
         ) : (
           <>
-            {!recording && (
-              <SightView
-                capture={capture}
-                session={session}
-                onPhoto={(view) =>
-                  void takePhoto(services, session, view, { kind: 'plane', id: plane.id }, plane.name)
-                }
-              />
-            )}
+            {!recording && <SightView capture={capture} session={session} />}
             <Figures session={session} />
           </>
         )}

@@ -15,7 +15,7 @@ export function AccessLine({ live: { found, fault, stale }, plane }: { live: Liv
   return (
     <dl class={`live-access ${stale ? 'is-stale' : ''}`} aria-label={plane}>
       <div>
-        <dt>{stale ? 'Access a moment ago' : 'Access'}</dt>
+        <dt>{stale ? 'A moment ago' : 'Access'}</dt>
         <dd>{percentText(found.access)}</dd>
       </div>
       <div>

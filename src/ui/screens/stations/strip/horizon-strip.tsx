@@ -12,7 +12,8 @@ import { AccessLine } from './access-line.tsx';
 import { unseenInBand } from './unseen-in-band.ts';
 import type { LiveAccess } from './use-live-access.ts';
 
-const HEIGHT = 112;
+/** As high as the style makes its box, dots. */
+const HEIGHT = 84;
 
 interface Props {
   session: CaptureSession;
