@@ -84,7 +84,7 @@ function entriesOn(path: string, document: unknown): Entry[] {
 /** The number of an entry as tables show it, from 1: lists are shown by the order of their entries. */
 function numberIn(list: unknown, index: number): number {
   if (!Array.isArray(list) || !list.every(isRecord)) return index + 1;
-  const place = ordered(list as { order?: number }[]).indexOf(list[index] as { order?: number });
+  const place = ordered(list as { order?: number }[]).indexOf(list[index]);
   return (place < 0 ? index : place) + 1;
 }
 
