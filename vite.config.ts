@@ -21,9 +21,21 @@ const contentPolicy: Plugin = {
   ],
 };
 
-// All cores, and at least two files at a time: browser tests wait more than they compute. Modules are loaded once for
-// all files of a worker, since loading them anew costs more than the tests; so no test may leave a module changed.
-const sharedWorkers = { isolate: false, maxWorkers: Math.max(2, availableParallelism()) };
+// All cores, and at least two files at a time: browser tests wait more than they compute.
+const maxWorkers = Math.max(2, availableParallelism());
+// Modules are loaded once for all files of a worker, since loading them anew costs more than the tests.
+const sharedWorkers = { isolate: false, maxWorkers };
+// Files that put a mock in the place of a module, which all later files of the worker would get too.
+const MOCKED = 'tests/**/*.mocked.test.ts';
+
+const unitTest = {
+  environment: 'node',
+  testTimeout: 60_000,
+  hookTimeout: 60_000,
+  maxWorkers,
+  unstubGlobals: true,
+  sequence: { groupOrder: 0 },
+} as const;
 
 // The PDF library would load these to draw web pages and SVG; the report is painted without them.
 const EMPTY_MODULE = '\0empty-module';
@@ -77,13 +89,14 @@ export default defineConfig({
         test: {
           name: 'unit',
           include: ['tests/**/*.test.{ts,tsx}'],
-          exclude: ['tests/browser/**'],
-          environment: 'node',
-          testTimeout: 60_000,
-          hookTimeout: 60_000,
+          exclude: ['tests/browser/**', MOCKED],
+          ...unitTest,
           ...sharedWorkers,
-          sequence: { groupOrder: 0 },
         },
+      },
+      {
+        oxc: jsx,
+        test: { name: 'unit-mocked', include: [MOCKED], ...unitTest },
       },
       {
         test: {

@@ -8,8 +8,11 @@ import { ensureBrowser } from './browser.mjs';
 import { ensurePackages, root } from './packages.mjs';
 
 const tool = (path) => `${root}node_modules/${path}`;
-const vitest = (project) => ({ name: `vitest ${project}`, counts: true, args: vitestArgs(project) });
-const vitestArgs = (project) => [tool('vitest/vitest.mjs'), 'run', '--project', project];
+const vitest = (name, projects = name) => ({
+  name: `vitest ${name}`,
+  counts: true,
+  args: [tool('vitest/vitest.mjs'), 'run', '--project', projects],
+});
 
 const sideBySide = [
   {
@@ -20,7 +23,7 @@ const sideBySide = [
   { name: 'tsc', args: [tool('typescript/bin/tsc'), '-b', 'src', 'tests'] },
   { name: 'vite build', args: [tool('vite/bin/vite.js'), 'build', '--logLevel', 'warn'], production: true },
 ];
-const oneByOne = [vitest('unit'), { ...vitest('browser'), needsBrowser: true }];
+const oneByOne = [vitest('unit', 'unit*'), { ...vitest('browser'), needsBrowser: true }];
 
 /** Runs a command to its end; gives its exit code, and what it said where that is not shown at once. */
 function ended(args, env, shown) {
