@@ -12,6 +12,9 @@ const ROW_GAP = 3.5;
 /** A heading longer than this is cut in the list; it stands whole over its section. */
 const MOST_LINES = 3;
 
+/** The list among the sections that pages are known of; no section has a space in its name. */
+export const CONTENTS_LIST = 'contents list';
+
 /** Page of a section, counted from 1. */
 export type PageOf = (section: string) => number;
 
@@ -31,6 +34,7 @@ export function contentsSlugs(contents: ReportContents, pageOf: PageOf, setting:
       height: 7,
       gap: 26,
       keep: true,
+      section: CONTENTS_LIST,
       paint: (sheet, y) => sheet.rule(setting.left, y, setting.width, 1.4, 'ink'),
     },
     ...textSlugs(frame.contents, STYLES.contentsHead, setting, { keep: true }),

@@ -3,12 +3,12 @@ import { documentFacts, outlineEntries, withFacts } from './document-facts.ts';
 import { paginate } from './paginate.ts';
 import type { PdfFonts } from './pdf-fonts.ts';
 import type { PageOf } from './contents-list.ts';
+import { CONTENTS_LIST } from './contents-list.ts';
 import { paintFoot } from './page-foot.ts';
 import { reportSlugs } from './section-slugs.ts';
 import type { Setting } from './setting.ts';
 import { settingFor } from './setting.ts';
 import { openSheet } from './open-sheet.ts';
-import { space } from './slug.ts';
 import { STYLES } from './text-style.ts';
 import { textSlugs } from './text-slugs.ts';
 import type { DrawText } from './typesetter.ts';
@@ -51,12 +51,16 @@ export async function pdfDocument(
 function layPages(contents: ReportContents, setting: Setting) {
   const numbers = new Map<string, number>();
   const pageOf: PageOf = (section) => numbers.get(section) ?? 1;
-  const slugs = reportSlugs(contents, pageOf, setting);
-  if (setting.setter.boxed)
-    slugs.push(space(10), ...textSlugs(contents.frame.boxes, STYLES.small, setting, { gap: 14 }));
-  const placed = paginate(slugs, setting.height);
-  placed.forEach((page, place) => {
-    for (const { slug } of page) if (slug.section !== undefined) numbers.set(slug.section, place + 1);
-  });
-  return { placed, pageOf };
+  const lay = (joined: boolean) => {
+    const slugs = reportSlugs(contents, pageOf, setting, joined);
+    if (setting.setter.boxed)
+      slugs.push(...textSlugs(contents.frame.boxes, STYLES.small, setting, { gap: 24 }));
+    const placed = paginate(slugs, setting.height);
+    placed.forEach((page, place) => {
+      for (const { slug } of page) if (slug.section !== undefined) numbers.set(slug.section, place + 1);
+    });
+    return placed;
+  };
+  const placed = lay(false);
+  return { placed: pageOf(CONTENTS_LIST) > 1 ? lay(true) : placed, pageOf };
 }

@@ -1,4 +1,4 @@
-import type { ReportContents, Section } from '../../contents/report-contents.ts';
+import type { Block, ReportContents, Section } from '../../contents/report-contents.ts';
 import { blockSlugs } from './blocks/block-slugs.ts';
 import type { PageOf } from './contents-list.ts';
 import { contentsSlugs } from './contents-list.ts';
@@ -11,8 +11,16 @@ import { textSlugs } from './text-slugs.ts';
 /** Fewer sections than this are found without a list of them. */
 const FEWEST_LISTED = 3;
 
-/** The whole report as slugs: head, first section, list of contents, the other sections. */
-export function reportSlugs(contents: ReportContents, pageOf: PageOf, setting: Setting): Slug[] {
+/**
+ * The whole report as slugs: head, first section, list of contents, the other sections. Where the list has a page of its
+ * own, `joined` sets the section after it on that page too.
+ */
+export function reportSlugs(
+  contents: ReportContents,
+  pageOf: PageOf,
+  setting: Setting,
+  joined = false,
+): Slug[] {
   const { sections } = contents;
   const list = sections.length >= FEWEST_LISTED ? contentsSlugs(contents, pageOf, setting) : [];
   const firstEvidence = sections.findIndex(({ part }) => part === 'evidence');
@@ -20,7 +28,7 @@ export function reportSlugs(contents: ReportContents, pageOf: PageOf, setting: S
     ...headSlugs(contents, setting),
     ...sections.flatMap((section, place) => [
       ...(place === firstEvidence ? partSlugs(contents.frame.evidence, place > 0, setting) : []),
-      ...sectionSlugs(section, place > 0 && place !== firstEvidence, setting),
+      ...sectionSlugs(section, place > (joined ? 1 : 0) && place !== firstEvidence, setting),
       ...(place === 0 ? list : []),
     ]),
   ];
@@ -48,6 +56,15 @@ function sectionSlugs(section: Section, mayStartPage: boolean, setting: Setting)
     startsPage: mayStartPage && startsPage,
     paint: (sheet, y) => sheet.rule(setting.left, y + 0.35, setting.width, 0.7, 'ink'),
   };
-  const body = blocks.flatMap((block) => blockSlugs(block, setting));
+  const body = blocks.flatMap((block, place) => ledIn(blockSlugs(block, setting), block, blocks[place + 1]));
   return [rule, ...textSlugs(heading, STYLES.heading, setting, { keep: body.length > 0 }), ...body];
+}
+
+/** More lines than this stand on their own. */
+const MOST_LEADING = 4;
+
+/** A few lines that lead to a picture or a table stay with it. */
+function ledIn(slugs: Slug[], block: Block, next: Block | undefined): Slug[] {
+  const leads = block.kind === 'paragraph' && (next?.kind === 'picture' || next?.kind === 'table');
+  return leads && slugs.length <= MOST_LEADING ? slugs.map((slug) => ({ ...slug, keep: true })) : slugs;
 }

@@ -15,6 +15,3 @@ export interface Slug {
   /** `y` is the top of the slug from the top of the page. */
   paint: (sheet: Sheet, y: number) => void;
 }
-
-/** Empty space that may go at the end of a page. */
-export const space = (height: number): Slug => ({ height, paint: () => undefined });

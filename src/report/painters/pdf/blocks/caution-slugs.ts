@@ -8,6 +8,9 @@ const INSET = 13;
 const PADDING = 9;
 const THICKNESS = 1.4;
 
+/** A higher frame than this share of a page may be cut. */
+const HIGHEST_WHOLE = 0.4;
+
 /** A warning in a frame of ink; a frame that runs over a page stays open there. */
 export function cautionSlugs(heading: string, items: readonly string[], setting: Setting): Slug[] {
   const inner = { ...setting, left: setting.left + INSET, width: setting.width - 2 * INSET };
@@ -25,7 +28,9 @@ export function cautionSlugs(heading: string, items: readonly string[], setting:
     ...text,
     edge(PADDING, PADDING - THICKNESS / 2, false),
   ];
-  if (text.length > 0) text.at(-1)!.keep = true;
+  const height = pieces.reduce((sum, piece) => sum + piece.height + (piece.gap ?? 0), 0);
+  const whole = height <= setting.height * HIGHEST_WHOLE;
+  for (const piece of whole ? pieces.slice(0, -1) : text.slice(-1)) piece.keep = true;
   return pieces.map((piece, place) => sided(piece, place === 0 ? 14 : 0, setting));
 }
 

@@ -41,6 +41,8 @@ export function tableSlugs(table: Table, setting: Setting): Slug[] {
     ),
   );
   const body = [...rows, ...sums];
+  // no row stands alone at the foot or the head of a page
+  for (const row of [rows[0], rows.at(-2)]) if (row) row.keep = true;
   // sums stand with the last row they sum up
   if (rows.length > 0 && sums.length > 0) rows.at(-1)!.keep = true;
   return [
