@@ -25,38 +25,70 @@ export interface RoofBarsInput {
 }
 
 const SIZE = 12;
-const BAR = 17;
-const ROW = BAR + SIZE * 1.5 + 12;
+const BAR = 16;
+/** More bars than this have their names beside them, so that a page holds them. */
+const MOST_UNDER_NAMES = 3;
+const WIDEST_NAME = 0.34;
+
+interface Layout {
+  /** Room for the names, which stand over the bars where it is null. */
+  names: number | null;
+  left: number;
+  right: number;
+  row: number;
+  xOf: (light: number) => number;
+}
 
 /**
  * A bar for each plane, as long as its light with nothing in the way: ink for what arrives, hatched for what shade takes, a
  * whisker for the range. A plane that nobody measured is an empty, broken outline.
  */
 export function roofBars({ bars, axis, width }: RoofBarsInput, words: PictureWords = ENGLISH): Picture {
-  const values = Math.max(0, ...bars.map(({ value }) => textWidth(value, SIZE, true)));
-  const [left, right] = [1, Math.max(width / 2, width - values - 12)];
   const most = Math.max(0.01, ...bars.map(({ unshaded }) => unshaded));
-  const xOf = (light: number) => left + (light / most) * (right - left);
-  const foot = bars.length * ROW;
+  const layout = layoutOf(bars, most, width);
+  const foot = bars.length * layout.row;
+  const under = foot + 2 * SIZE + 12;
   return {
     width,
-    height: foot + 2 * SIZE + 16,
+    height: under + 4,
     marks: [
-      ...bars.flatMap((bar, i) => barMarks(bar, i * ROW, width, xOf)),
-      ...axisMarks(most, xOf, foot, right, words),
-      { kind: 'text', x: left, y: foot + 2 * SIZE + 12, text: axis, size: SIZE - 1, tone: 'faint' },
+      ...bars.flatMap((bar, i) => barMarks(bar, i * layout.row, width, layout)),
+      ...axisMarks(most, foot, layout, words),
+      { kind: 'text', x: layout.left, y: under, text: axis, size: SIZE - 1, tone: 'faint' },
     ],
   };
 }
 
-function barMarks(bar: RoofBar, above: number, width: number, xOf: (light: number) => number): Mark[] {
+function layoutOf(bars: readonly RoofBar[], most: number, width: number): Layout {
+  const widest = (texts: string[]) => Math.max(0, ...texts.map((text) => textWidth(text, SIZE, true)));
+  const values = widest(bars.map(({ value }) => value));
+  const names =
+    bars.length > MOST_UNDER_NAMES
+      ? Math.min(WIDEST_NAME * width, widest(bars.map(({ name }) => name)))
+      : null;
+  const left = names === null ? 1 : names + 10;
+  const right = Math.max(left + width / 4, width - values - 12);
+  return {
+    names,
+    left,
+    right,
+    row: names === null ? BAR + SIZE * 2.5 : BAR + 9,
+    xOf: (light) => left + (light / most) * (right - left),
+  };
+}
+
+function barMarks(bar: RoofBar, above: number, width: number, { names, xOf }: Layout): Mark[] {
   const { name, unshaded, access, interval, value } = bar;
-  const [top, bottom] = [above + SIZE * 1.5, above + SIZE * 1.5 + BAR];
+  const top = above + (names === null ? SIZE * 1.5 : 2);
+  const bottom = top + BAR;
   const box = (from: number, to: number): Line => [from, top, to, top, to, bottom, from, bottom];
   const [start, end] = [xOf(0), xOf(unshaded)];
+  const text = shortened(name, names ?? width);
   const marks: Mark[] = [
-    { kind: 'text', x: start, y: above + SIZE, text: shortened(name, width), size: SIZE, bold: true },
-    { kind: 'text', x: end + 6, y: bottom - 4, text: value, size: SIZE, bold: true },
+    names === null
+      ? { kind: 'text', x: start, y: above + SIZE, text, size: SIZE, bold: true }
+      : { kind: 'text', x: names, y: bottom - 4, text, size: SIZE, bold: true, anchor: 'end' },
+    { kind: 'text', x: end + 6, y: bottom - 4, text: shortened(value, width / 3), size: SIZE, bold: true },
   ];
   const outline = { kind: 'path' as const, lines: [box(start, end)], closed: true };
   if (access === null) return [...marks, { ...outline, pen: { tone: 'ink', width: 1, dash: [4, 3] } }];
@@ -84,13 +116,7 @@ function whisker(low: number, high: number, top: number): Mark[] {
   ];
 }
 
-function axisMarks(
-  most: number,
-  xOf: (light: number) => number,
-  foot: number,
-  right: number,
-  words: PictureWords,
-): Mark[] {
+function axisMarks(most: number, foot: number, { xOf, right }: Layout, words: PictureWords): Mark[] {
   const step = roundStep(most / 4);
   const ticks: number[] = [];
   for (let light = 0; light <= most * (1 + 1e-9); light += step) ticks.push(light);

@@ -117,6 +117,15 @@ describe('bars of the roofs', () => {
     expect(textsOf(picture.marks)).toContain('not measured');
   });
 
+  test('six roofs take no more room than a page has beside the figures', () => {
+    const picture = draw(Array.from({ length: 6 }, (_, i) => bar({ name: `Roof ${i}` })));
+    expect(picture.height / picture.width).toBeLessThan(0.32);
+    expect(textsOf(picture.marks)).toEqual(expect.arrayContaining(['Roof 0', 'Roof 5']));
+    const [ink] = widths(picture, isInk);
+    const [hatched] = widths(picture, isHatched);
+    expect(ink / (ink + hatched)).toBeCloseTo(0.75, 9);
+  });
+
   test('stays on its sheet: six roofs, names and values without end, no light at all', () => {
     const long = bar({ name: 'x'.repeat(300), value: 'nicht gemessen '.repeat(3) });
     for (const picture of [

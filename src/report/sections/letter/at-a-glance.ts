@@ -1,3 +1,4 @@
+import type { AccessInterval } from '../../../core/shading/assessment.ts';
 import type { Block, KeyFigure } from '../../contents/report-contents.ts';
 import { roofBars } from '../../pictures/roof-bars.ts';
 import type { ReportInput } from '../../report-input.ts';
@@ -25,7 +26,7 @@ function glanceBlocks(report: ReportInput, speech: Speech): Block[] {
   if (roofs.length === 0) return [{ kind: 'answer', text: words['glance.no-roof'] }];
   const sunniest = [...measured].sort((a, b) => lightOf(b) - lightOf(a))[0];
   const blocks: Block[] = [{ kind: 'answer', text: answerOf(roofs, sunniest, speech) }];
-  if (roofs.length > 1) blocks.push({ kind: 'list', items: roofs.map((roof) => sentenceOf(roof, speech)) });
+  if (roofs.length > 1) blocks.push({ kind: 'list', items: roofs.map((roof) => lineOf(roof, speech)) });
   if (!sunniest) return blocks;
   if (roofs.length > 1) blocks.push({ kind: 'subheading', text: words['glance.figures-of'](sunniest.name) });
   blocks.push({ kind: 'key-figures', figures: keyFigures(sunniest, isClearSky(report), speech) });
@@ -57,6 +58,14 @@ function sentenceOf({ name, plane: { solarAccess } }: Roof, speech: Speech): str
     : words['glance.answer'](name, speech.percent(solarAccess.annual));
 }
 
+/** One of several, in a line. */
+function lineOf(roof: Roof, speech: Speech): string {
+  const { solarAccess } = roof.plane;
+  return solarAccess
+    ? speech.words['glance.each'](roof.name, speech.percent(solarAccess.annual))
+    : sentenceOf(roof, speech);
+}
+
 function keyFigures(
   { access: { annual, interval }, plane: { orientationFactor, unshaded } }: MeasuredRoof,
   clearSky: boolean,
@@ -69,7 +78,7 @@ function keyFigures(
     {
       label: words['glance.access'],
       value: percent(annual),
-      range: rangeText(interval, speech, percent),
+      range: percentRange(interval, speech),
       note: words['glance.access-note'],
     },
     {
@@ -87,6 +96,13 @@ function keyFigures(
   ];
 }
 
+/** With a decimal where the ends would look the same without. */
+function percentRange(interval: AccessInterval | undefined, speech: Speech): string | null {
+  const [whole, finer] = [0, 1].map((decimals) => (share: number) => speech.percent(share, decimals));
+  const isNarrow = interval && whole(interval.low) === whole(interval.high);
+  return rangeText(interval, speech, isNarrow ? finer : whole);
+}
+
 function pictureBlock(roofs: readonly Roof[], speech: Speech): Block {
   const { words } = speech;
   const bars = roofs.map(({ name, plane: { unshaded, solarAccess } }) => ({
@@ -101,6 +117,6 @@ function pictureBlock(roofs: readonly Roof[], speech: Speech): Block {
     kind: 'picture',
     picture: roofBars({ bars, axis, width: PICTURE_WIDTH }, pictureWords(speech)),
     caption: words['glance.picture-caption'],
-    alternative: roofs.map((roof) => sentenceOf(roof, speech)).join(' '),
+    alternative: roofs.map((roof) => lineOf(roof, speech)).join(' '),
   };
 }

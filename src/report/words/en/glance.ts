@@ -6,6 +6,7 @@ export const EN_GLANCE = {
   'glance.answer': (roof: string, access: string) =>
     `${roof} gets ${access} of the sunlight it would get with nothing in the way.`,
   'glance.answer-clear': (roof: string) => `${roof} lies open. Almost nothing takes sunlight from it.`,
+  'glance.each': (roof: string, access: string) => `${roof}: ${access} of its sunlight arrives.`,
   'glance.unknown': (roof: string) =>
     `Nobody has measured from ${roof} yet. So how much sun it gets is not known.`,
   'glance.no-roof': 'No roof has been measured yet.',
