@@ -20,6 +20,9 @@ import type { Survey } from '../../src/core/survey/survey.ts';
 import { accessInterval, drawAccess, drawnSurvey } from '../../src/core/uncertainty/access-interval.ts';
 import { uncertainStation } from '../../src/core/uncertainty/uncertain-station.ts';
 import { weatherText } from '../reference-values/weather-text.ts';
+import { surveyEvidence } from '../../src/core/assessment/survey-evidence.ts';
+import { htmlPage } from '../../src/report/painters/html.ts';
+import { reportContents } from '../../src/report/report-contents.ts';
 import { exactness } from './exactness.ts';
 import { assessMemory } from './memory.ts';
 import { builtSizes } from './sizes.ts';
@@ -62,6 +65,24 @@ function drawInterval(sources: boolean) {
   return accessInterval([drawAccess(map, uncertain, 0.94, drawn)], drawn);
 }
 
+const evidence = await surveyEvidence(survey, world());
+
+/** The report of the whole survey as a page, from its results. */
+const reportPage = () =>
+  htmlPage(
+    reportContents({
+      ...evidence,
+      survey,
+      fingerprint: '0'.repeat(64),
+      madeOn: '2026-06-02',
+      version: '0',
+      photos: new Map(),
+      firm: { name: '', lines: [], colour: null },
+      choices: { language: 'en', units: 'metric', paper: 'a4', thresholds: {} },
+      compared: null,
+    }),
+  );
+
 const times = medians(
   {
     t0: () => {
@@ -84,6 +105,7 @@ const times = medians(
     },
     draws: () => drawInterval(false),
     drawsAndSources: () => drawInterval(true),
+    report: reportPage,
   },
   ROUNDS,
 );
@@ -98,6 +120,7 @@ const results = {
     ratio('the same from its traces', times.profilesFromTraces / FURTHER, null),
     ratio('1,000 Monte Carlo draws for one station', times.draws, 0.3),
     ratio('the same with its ranked sources', times.drawsAndSources, null),
+    ratio('the report: contents and page, from the results', times.report, 0.3),
   ],
   exactness: exactness(map, world(), site),
   assessMemoryMB: { value: assessMemory(SURVEY), bar: 200 },
