@@ -1,8 +1,12 @@
+/** Letters and signs that nothing is to be done to; most texts have no others. */
+const FIT = /^[\u0020-\u007e\u00a0-\u00ac\u00ae-\u024f\u2012-\u2027]*$/;
+
 /**
  * Text made fit for setting: composed letters, no control marks, one kind of space that breaks and one that does not, and
  * no half of a letter.
  */
 export function plainLetters(text: string): string {
+  if (FIT.test(text)) return text;
   return text
     .replace(/[\t\n\v\f\r]/g, ' ')
     .replace(/[\u0000-\u001f\u007f-\u009f\u00ad\u200b\u200e\u200f\u2028-\u202e\u2060-\u2069\ufeff]/g, '')
