@@ -104,6 +104,27 @@ describe('a form that was not saved', () => {
   });
 });
 
+describe('a trace half typed', () => {
+  it('is there again when the form of its station is opened again', async () => {
+    const page = await openedAt('Stations');
+    const dialog = page.getByRole('dialog');
+    await page.getByRole('button', { name: 'Type a trace' }).click();
+    await dialog.getByLabel('Sighting 1, azimuth').fill('60');
+    await dialog.getByLabel('Sighting 1, elevation').fill('20');
+    await kept(page, '"elevation":"20"');
+    await page.reload();
+    await page.getByRole('button', { name: 'Type a trace' }).click();
+    await isBack(page);
+    expect(await dialog.getByLabel('Sighting 1, azimuth').inputValue()).toBe('60');
+    await dialog.getByLabel('Sighting 2, azimuth').fill('80');
+    await dialog.getByLabel('Sighting 2, elevation').fill('25');
+    await dialog.getByRole('button', { name: 'Add the trace' }).click();
+    await page.getByText('“Trace of Maple in the street” is added.').waitFor();
+    await page.getByRole('button', { name: 'Type a trace' }).click();
+    expect(await dialog.getByLabel('Sighting 1, azimuth').inputValue()).toBe('');
+  });
+});
+
 describe('a browser that is killed', () => {
   it('has what was typed into the new-survey and the station form', async () => {
     const folder = mkdtempSync(join(tmpdir(), 'noonmark-drafts-'));

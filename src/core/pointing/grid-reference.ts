@@ -1,7 +1,15 @@
 import { toCentimetre, type Coordinates } from '../angles/place.ts';
 import type { Parsed } from '../survey/problem.ts';
 import { parseGridSquare } from './grid-square.ts';
-import { bandLatitudes, placeOfUtm, utmBand, utmZoneNumber, UTM_BANDS, type UtmPlace } from './utm.ts';
+import {
+  bandLatitudes,
+  placeOfUtm,
+  utmBand,
+  utmZoneNumber,
+  UTM_BANDS,
+  UTM_LATITUDES,
+  type UtmPlace,
+} from './utm.ts';
 
 const NUMBER = String.raw`(-?\d+(?:\.\d+)?)`;
 const EAST_NORTH = new RegExp(
@@ -116,12 +124,14 @@ function hemisphereOf(letter: string, northing: number): UtmPlace['hemisphere'] 
     : 'south';
 }
 
-/** Rounding at the edge of a band, degrees. */
+/** Rounding at the edge of a band or of the grid, degrees. */
 const EDGE = 1e-6;
 
 function located(place: UtmPlace, letter: string): Parsed<Coordinates> {
   const { latitude, longitude } = placeOfUtm(place);
-  const band = utmBand(latitude);
+  const { least: southmost, most: northmost } = UTM_LATITUDES;
+  const isAtEdge = latitude >= southmost - EDGE && latitude <= northmost + EDGE;
+  const band = isAtEdge ? utmBand(Math.min(Math.max(latitude, southmost), northmost)) : null;
   if (band === null) return refused(POLES);
   const isBand = !'+-NS'.includes(letter) && UTM_BANDS.includes(letter);
   const { least, most } = bandLatitudes(isBand ? letter : band);

@@ -82,6 +82,14 @@ describe('a place in metres of the UTM grid', () => {
     ['UPS north 2000000 2100000', /UPS/],
   ])('is refused with why: %s', (text, reason) => expect(why(text)).toMatch(reason));
 
+  it('at the edges of the grid and of a band is not turned away for its last figure', () => {
+    for (const latitude of [-80, -72, 84]) {
+      const place = utmOf(latitude, 20);
+      const text = `${place.zone} ${place.hemisphere} ${place.easting.toFixed(3)} ${place.northing.toFixed(3)}`;
+      expect(read(text).value.latitude).toBeCloseTo(latitude, 6);
+    }
+  });
+
   property.prop([
     fc.double({ min: -80, max: 83.99, noNaN: true }),
     fc.double({ min: -180, max: 179.99, noNaN: true }),

@@ -83,6 +83,7 @@ export function BookDialog(props: { station: Station; survey: Survey; edit: Book
           <TraceForm
             {...shared}
             survey={survey}
+            station={station}
             order={nextOrder(station.traces)}
             obstructionOrder={nextOrder(survey.obstructions)}
             newId={services.newId}

@@ -1,9 +1,17 @@
 import { useState } from 'preact/hooks';
 import { obstructionKinds } from '../../../core/survey/obstruction-kinds.ts';
 import { ordered } from '../../../core/survey/order.ts';
-import type { Obstruction, ObstructionKind, Survey, Trace, TraceShape } from '../../../core/survey/survey.ts';
+import type {
+  Obstruction,
+  ObstructionKind,
+  Station,
+  Survey,
+  Trace,
+  TraceShape,
+} from '../../../core/survey/survey.ts';
 import { ChoiceField } from '../form/choice-field.tsx';
 import { Form } from '../form/form.tsx';
+import { useDraft } from '../form/use-draft.ts';
 import { TextField } from '../form/text-field.tsx';
 import { TypedRows } from '../typed-rows/typed-rows.tsx';
 import { TapedElevation } from './taped-elevation.tsx';
@@ -22,9 +30,18 @@ const COLUMNS = [
   { field: 'elevation', head: 'Elevation (°)', spoken: 'elevation' },
 ] as const;
 
+/** What is typed into the form. */
+interface FormTexts {
+  obstruction: string;
+  kind: ObstructionKind;
+  name: string;
+  draft: TraceDraft;
+}
+
 /** Typing a trace: of which obstruction, of what shape, and its sightings one under the other. */
 export function TraceForm(props: {
   survey: Survey;
+  station: Pick<Station, 'id' | 'name'>;
   order: number;
   obstructionOrder: number;
   instrumentHeight?: number;
@@ -34,13 +51,26 @@ export function TraceForm(props: {
 }) {
   const { survey, newId } = props;
   const known = ordered(survey.obstructions);
-  const [obstruction, setObstruction] = useState(known[0]?.id ?? NEW);
-  const [kind, setKind] = useState<ObstructionKind>('deciduous-tree');
-  const [name, setName] = useState('');
-  const [draft, setDraft] = useState<TraceDraft>(emptyTrace);
+  const kept = useDraft<FormTexts>(
+    {
+      survey: survey.id,
+      form: `trace/${props.station.id}`,
+      label: `Typed trace from ${props.station.name}`,
+      over: null,
+    },
+    () => ({
+      obstruction: known[0]?.id ?? NEW,
+      kind: 'deciduous-tree',
+      name: '',
+      draft: emptyTrace(),
+    }),
+  );
+  const { kind, name, draft } = kept.typed;
+  // An obstruction that was deleted after the trace was half typed is another one.
+  const obstruction = known.some(({ id }) => id === kept.typed.obstruction) ? kept.typed.obstruction : NEW;
   const [fault, setFault] = useState<string | null>(null);
   const change = (part: Partial<TraceDraft>) => {
-    setDraft((now) => ({ ...now, ...part }));
+    kept.change({ draft: { ...draft, ...part } });
     setFault(null);
   };
   const save = () => {
@@ -59,7 +89,13 @@ export function TraceForm(props: {
     lastEmpty &&
     change({ points: draft.points.map((one) => (one.key === lastEmpty.key ? { ...one, elevation } : one)) });
   return (
-    <Form label="Typed trace" action="Add the trace" onSubmit={save} onCancel={props.onCancel}>
+    <Form
+      label="Typed trace"
+      action="Add the trace"
+      onSubmit={save}
+      onCancel={props.onCancel}
+      draft={kept.state}
+    >
       <ChoiceField
         label="Obstruction"
         value={obstruction}
@@ -67,7 +103,7 @@ export function TraceForm(props: {
           ...known.map(({ id, name: label }) => ({ value: id, label })),
           { value: NEW, label: 'Another one' },
         ]}
-        onChoose={setObstruction}
+        onChoose={(id) => kept.change({ obstruction: id })}
       />
       {obstruction === NEW && (
         <div class="pair">
@@ -75,9 +111,14 @@ export function TraceForm(props: {
             label="Kind"
             value={kind}
             options={obstructionKinds.map((row) => ({ value: row.kind, label: row.name }))}
-            onChoose={setKind}
+            onChoose={(chosen) => kept.change({ kind: chosen })}
           />
-          <TextField label="Name" value={name} onInput={setName} maxLength={200} />
+          <TextField
+            label="Name"
+            value={name}
+            onInput={(text) => kept.change({ name: text })}
+            maxLength={200}
+          />
         </div>
       )}
       <ChoiceField
