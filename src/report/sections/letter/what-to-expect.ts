@@ -46,7 +46,7 @@ function lightTable(roofs: readonly MeasuredRoof[], { survey }: ReportInput, spe
     caption: words['expect.caption'],
     columns: [
       { head: words['expect.roof'] },
-      { head: words['expect.light'], number: true },
+      { head: words['expect.light'](speech.irradiationUnit), number: true },
       { head: words['expect.range'], number: true },
       { head: words['expect.size'], number: true },
       { head: words['expect.whole'], number: true },
@@ -55,9 +55,11 @@ function lightTable(roofs: readonly MeasuredRoof[], { survey }: ReportInput, spe
     rows: roofs.map(({ name, plane, access: { annual, interval } }) => {
       const area = planeArea(drawn.get(plane.id) ?? {});
       const unknown = words['expect.not-known'];
-      const light = (share: number) => speech.irradiation(share * plane.unshaded.annual);
-      const whole = (share: number) =>
-        words['expect.kwh'](speech.number(roughly(share * plane.unshaded.annual * (area ?? 0))));
+      const light = (share: number) => {
+        const amount = speech.irradiationNumber(share * plane.unshaded.annual);
+        return speech.number(amount, amount < 10 ? 1 : 0);
+      };
+      const whole = (share: number) => speech.number(roughly(share * plane.unshaded.annual * (area ?? 0)));
       return [
         name,
         light(annual),
