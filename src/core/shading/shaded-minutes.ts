@@ -31,11 +31,13 @@ export function shadedMinutes(track: SunTrack, facing: PlaneFacing, profile: Hor
   const blockedBy = blockers(profile);
   const shift = solarMidnight(track);
   const { stepMinutes, east, north, up, elevation } = track;
+  const top = profile.high.reduce((most, high) => Math.max(most, high), 0) + SAG;
   for (let day = 0; day < TRACK_DAYS; day++)
     for (let minute = 0; minute < DAY_MINUTES; minute++) {
       const ofYear = (day * DAY_MINUTES + shift + minute + YEAR_MINUTES) % YEAR_MINUTES;
       const step = Math.floor(ofYear / stepMinutes);
-      if (elevation[step] <= 0 && elevation[step + 1] <= 0) {
+      const [start, end] = [elevation[step], elevation[step + 1]];
+      if ((start <= 0 && end <= 0) || (start > top && end > top)) {
         minute += stepMinutes - 1 - (ofYear % stepMinutes);
         continue;
       }
@@ -53,6 +55,9 @@ function extend(spans: DaySpans, minute: number): void {
   if (last > 0 && spans[last] >= minute) spans[last] = minute + 1;
   else spans.push(minute, minute + 1);
 }
+
+/** The sun between two boundaries is not lower than both by more than this, degrees. */
+const SAG = 0.1;
 
 const NOTHING: readonly number[] = [];
 
