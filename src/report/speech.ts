@@ -8,7 +8,7 @@ import type { Plural } from './words/plural.ts';
 const FOOT = 0.3048;
 const SQUARE_FOOT = FOOT * FOOT;
 /** Between a number and its unit, so that a line does not break there. */
-const THIN = ' ';
+const THIN = '\u00a0';
 
 /** Writes numbers, days and units in one language and one system of units. */
 export class Speech {

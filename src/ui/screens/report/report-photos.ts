@@ -4,7 +4,7 @@ import type { PhotoImage } from '../../../report/contents/report-contents.ts';
 
 /** Longer side of a picture in a report, dots; at most so many bytes, so that six go in a mail. */
 const LONGEST_SIDE = 1000;
-const MOST_BYTES = 160_000;
+const MOST_BYTES = 130_000;
 const QUALITIES = [0.78, 0.66, 0.54, 0.42];
 
 /** The pictures of a survey's photos, made small enough for a report; what is not on this device is left out. */
