@@ -20,10 +20,12 @@ import type { Survey } from '../../src/core/survey/survey.ts';
 import { accessInterval, drawAccess, drawnSurvey } from '../../src/core/uncertainty/access-interval.ts';
 import { uncertainStation } from '../../src/core/uncertainty/uncertain-station.ts';
 import { weatherText } from '../reference-values/weather-text.ts';
+import { withBuiltApp } from './built-app.ts';
 import { surveyEvidence } from '../../src/core/assessment/survey-evidence.ts';
 import { htmlPage } from '../../src/report/painters/html.ts';
 import { reportContents } from '../../src/report/report-contents.ts';
 import { exactness } from './exactness.ts';
+import { frameTimes, frameWords } from './frames.ts';
 import { assessMemory } from './memory.ts';
 import { builtSizes } from './sizes.ts';
 import { medians } from './timing.ts';
@@ -110,6 +112,11 @@ const times = medians(
   ROUNDS,
 );
 
+const built = await withBuiltApp(async (folder) => ({
+  sizes: builtSizes(folder),
+  frames: await frameTimes(folder),
+}));
+
 const results = {
   t0Ms: times.t0,
   stepMinutes: DEFAULT_STEP_MINUTES,
@@ -124,7 +131,8 @@ const results = {
   ],
   exactness: exactness(map, world(), site),
   assessMemoryMB: { value: assessMemory(SURVEY), bar: 200 },
-  gzippedKB: { ...builtSizes(), bars: { firstScreen: 90, precache: 600 } },
+  gzippedKB: { ...built.sizes, bars: { firstScreen: 90, precache: 600 } },
+  frames: built.frames,
 };
 
 if (process.argv.includes('--json')) console.log(JSON.stringify(results, null, 2));
@@ -141,6 +149,7 @@ function print({
   exactness: rows,
   assessMemoryMB,
   gzippedKB,
+  frames,
 }: typeof results): void {
   console.log(`T0, the library's positions for every minute of a year: ${t0Ms.toFixed(0)} ms`);
   console.log(`Steps of ${stepMinutes} minutes\n`);
@@ -163,6 +172,7 @@ function print({
     `JavaScript for the first screen, gzipped: ${firstScreen.toFixed(1)} kB (bar ${bars.firstScreen})`,
   );
   console.log(`Whole offline app, gzipped: ${precache.toFixed(1)} kB (bar ${bars.precache})`);
+  console.log(`\n${frameWords(frames)}`);
 }
 
 function surveyOf(text: string): Survey {

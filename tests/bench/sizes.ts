@@ -1,24 +1,13 @@
-import { execFileSync } from 'node:child_process';
-import { mkdtempSync, readFileSync, readdirSync, rmSync } from 'node:fs';
-import { tmpdir } from 'node:os';
+import { readFileSync, readdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { gzipSync } from 'node:zlib';
 
-/** Gzipped bytes of what a browser must fetch, kB of 1,000 bytes. */
-export function builtSizes(): { firstScreen: number; precache: number } {
-  const folder = mkdtempSync(join(tmpdir(), 'noonmark-sizes-'));
-  try {
-    execFileSync('npx', ['vite', 'build', '--outDir', folder, '--emptyOutDir', '--logLevel', 'silent'], {
-      env: { ...process.env, NODE_ENV: 'production' },
-      stdio: ['ignore', 'ignore', 'inherit'],
-    });
-    const kilobytes = (files: string[]) =>
-      files.reduce((sum, file) => sum + gzipSync(readFileSync(join(folder, file)), { level: 9 }).length, 0) /
-      1000;
-    return { firstScreen: kilobytes(firstScripts(folder)), precache: kilobytes(precached(folder)) };
-  } finally {
-    rmSync(folder, { recursive: true, force: true });
-  }
+/** Gzipped bytes of what a browser must fetch of a built app, kB of 1,000 bytes. */
+export function builtSizes(folder: string): { firstScreen: number; precache: number } {
+  const kilobytes = (files: string[]) =>
+    files.reduce((sum, file) => sum + gzipSync(readFileSync(join(folder, file)), { level: 9 }).length, 0) /
+    1000;
+  return { firstScreen: kilobytes(firstScripts(folder)), precache: kilobytes(precached(folder)) };
 }
 
 /** Scripts that index.html names and what they import at once, dynamic imports left out. */

@@ -161,7 +161,7 @@ function dispatchWithCompass(given: DeviceAngles & { turn: number }): void {
 }
 
 /** W3C: the turns about z, x and y one after the other. */
-function quaternion({ alpha, beta, gamma }: DeviceAngles) {
+export function quaternion({ alpha, beta, gamma }: DeviceAngles) {
   const half = [beta, gamma, alpha].map((angle) => (angle * RADIANS) / 2);
   const [cx, cy, cz] = half.map(Math.cos);
   const [sx, sy, sz] = half.map(Math.sin);

@@ -15,11 +15,14 @@ import { traceFields } from './trace-choice.ts';
 
 /** A sweep at work, of an obstruction that may not be named yet. */
 export interface LiveSweep {
-  samples: readonly SensorSample[];
+  /** Where it has gone so far. */
+  swept: readonly SweptDirection[];
   axis: SightingAxis;
   run: PointedRun;
   choice: TraceChoice;
 }
+
+export type SweptDirection = SightingDirection & { timeMs: number };
 
 /** A survey and where its sightings point. */
 export interface LiveSurvey {
@@ -65,11 +68,11 @@ const entryOf = (sighting: PointedSighting | undefined): [string, PointedSightin
   sighting ? [[sighting.id, sighting]] : [];
 
 /** Where the sweep has gone so far, in true directions. */
-export function sweptDirections({
-  samples,
-  axis,
-  run,
-}: Omit<LiveSweep, 'choice'>): (SightingDirection & { timeMs: number })[] {
+export function sweptDirections(
+  samples: readonly SensorSample[],
+  axis: SightingAxis,
+  run: PointedRun,
+): SweptDirection[] {
   const { heading } = run;
   if (!heading || samples.length === 0) return [];
   const { points } = sweepPoints([rawReading('live', run.id, axis, samples)]);
@@ -82,7 +85,7 @@ export function sweptDirections({
 
 /** The sweep at work as it would be pointed once stored. */
 function sweptSightings(sweep: LiveSweep, station: string): PointedSighting[] {
-  return sweptDirections(sweep).map(({ timeMs, ...direction }, order) => ({
+  return sweep.swept.map(({ timeMs, ...direction }, order) => ({
     id: `live ${order}`,
     path: '',
     station,

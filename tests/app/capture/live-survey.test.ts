@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { liveSurvey } from '../../../src/app/capture/live-survey.ts';
+import { liveSurvey, sweptDirections } from '../../../src/app/capture/live-survey.ts';
 import { SweepTake } from '../../../src/app/capture/sweep-take.ts';
 import type { TraceChoice } from '../../../src/app/capture/trace-choice.ts';
 import { clearSkyClimate } from '../../../src/core/irradiance/clear-sky-climate.ts';
@@ -29,7 +29,9 @@ describe('the live figures', () => {
     sensor.give(edge, 20);
     sweep.begin();
     sensor.give(edge, 8000);
-    const at = { samples: [...sweep.samples], axis: 'camera', run: session.runNow!, choice } as const;
+    const run = session.runNow!;
+    const swept = sweptDirections(sweep.samples, 'camera', run);
+    const at = { swept, axis: 'camera', run, choice } as const;
     const during = liveSurvey(await stored(), 'A', session.pointed.value!, at);
     const live = figures(during.survey, during.pointed);
     expect(during.survey.readings).toEqual([]);

@@ -87,8 +87,14 @@ function useLiveSweep(sitting: Sitting): LiveSweep | null {
     if (!sweeping) return setLive(null);
     const look = () => {
       const run = session.runNow;
+      const axis = session.axis.value;
       if (run)
-        setLive({ samples: [...sweep.samples], axis: session.axis.value, run, choice: sitting.choice.value });
+        setLive({
+          swept: sweptDirections(sweep.samples, axis, run),
+          axis,
+          run,
+          choice: sitting.choice.value,
+        });
     };
     const timer = setInterval(look, LOOK_MS);
     return () => clearInterval(timer);
@@ -97,6 +103,7 @@ function useLiveSweep(sitting: Sitting): LiveSweep | null {
 }
 
 const NOTHING: readonly AzimuthRange[] = [];
+const NOWHERE: LiveSweep['swept'] = [];
 
 function useStrip(props: Props, plane: RoofPlane | null) {
   const { services, survey, station, sitting } = props;
@@ -116,7 +123,6 @@ function useStrip(props: Props, plane: RoofPlane | null) {
     () => (plane ? sunBand(survey.site.latitude, plane.surfaceTilt, plane.surfaceAzimuth) : []),
     [survey.site.latitude, plane?.surfaceTilt, plane?.surfaceAzimuth],
   );
-  const swept = useMemo(() => (sweep ? sweptDirections(sweep) : []), [sweep]);
   const gaps = useMemo(() => rangesBetween(observed), [observed]);
-  return { gaps, strip: { band, live, observed, sweep: swept } };
+  return { gaps, strip: { band, live, observed, sweep: sweep?.swept ?? NOWHERE } };
 }

@@ -2,8 +2,8 @@ import { useSignalEffect } from '@preact/signals';
 import { useMemo, useRef } from 'preact/hooks';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import type { AzimuthRange } from '../../../../core/angles/azimuth-ranges.ts';
-import type { SkyPlace } from '../../../../report/pictures/sky-frame.ts';
-import { xOf, yOf } from '../../../../report/pictures/sky-frame.ts';
+import type { SkyFrame, SkyPlace } from '../../../../report/pictures/sky-frame.ts';
+import { linesOf, xOf, yOf } from '../../../../report/pictures/sky-frame.ts';
 import { Drawing } from '../../shade/drawing.tsx';
 import { useWidth } from '../../shade/use-width.ts';
 import type { BandColumn } from './sun-band.ts';
@@ -30,13 +30,14 @@ export function HorizonStrip({ session, latitude, band, live, observed, sweep, p
   const [box, width] = useWidth<HTMLDivElement>();
   const profile = live.found?.profile ?? null;
   const picture = useMemo(
-    () => width > 0 && stripPicture({ latitude, band, profile, observed, sweep, width, height: HEIGHT }),
-    [latitude, band, profile, observed, sweep, width],
+    () => width > 0 && stripPicture({ latitude, band, profile, observed, width, height: HEIGHT }),
+    [latitude, band, profile, observed, width],
   );
   return (
     <figure class="strip">
       <div ref={box} class="strip-box">
         {picture && <Drawing picture={picture} id="strip" label="The horizon unrolled" />}
+        {picture && <SweepLine frame={picture.frame} sweep={sweep} width={width} />}
         {picture && <Pointer session={session} frame={picture.frame} />}
       </div>
       <figcaption>
@@ -44,6 +45,19 @@ export function HorizonStrip({ session, latitude, band, live, observed, sweep, p
         {live.found && <p class="small">{unseenInBand(live.found.unseen)}</p>}
       </figcaption>
     </figure>
+  );
+}
+
+/** The sweep at work, over the picture: it grows several times a second, the picture only as figures come. */
+function SweepLine(props: { frame: SkyFrame; sweep: readonly SkyPlace[]; width: number }) {
+  const { frame, sweep, width } = props;
+  const path = linesOf(frame, sweep)
+    .map((line) => `M${line.map((at) => at.toFixed(1)).join(' ')}`)
+    .join('');
+  return (
+    <svg class="strip-sweep" width={width} height={HEIGHT} aria-hidden="true">
+      <path d={path} />
+    </svg>
   );
 }
 

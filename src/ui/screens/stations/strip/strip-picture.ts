@@ -3,8 +3,8 @@ import type { AzimuthRange } from '../../../../core/angles/azimuth-ranges.ts';
 import { isBetween, rangesBetween } from '../../../../core/angles/azimuth-ranges.ts';
 import type { Line, Mark, Picture } from '../../../../report/marks.ts';
 import { obstructionMarks, obstructionShapes } from '../../../../report/pictures/horizon-obstructions.ts';
-import type { SkyFrame, SkyPlace } from '../../../../report/pictures/sky-frame.ts';
-import { linesOf, xOfTurn, yOf } from '../../../../report/pictures/sky-frame.ts';
+import type { SkyFrame } from '../../../../report/pictures/sky-frame.ts';
+import { xOfTurn, yOf } from '../../../../report/pictures/sky-frame.ts';
 import { turnBetween } from '../../../../core/angles/angles.ts';
 import { COLUMN, type BandColumn } from './sun-band.ts';
 
@@ -13,8 +13,6 @@ export interface StripInput {
   band: readonly BandColumn[];
   profile: HorizonProfile | null;
   observed: readonly AzimuthRange[];
-  /** The sweep at work. */
-  sweep: readonly SkyPlace[];
   width: number;
   height: number;
 }
@@ -35,9 +33,9 @@ export function stripFrame({ latitude, band, profile, width, height }: StripInpu
   };
 }
 
-/** The sun's band, with rings where nobody looked yet; what is traced; the sweep at work. */
+/** The sun's band, with rings where nobody looked yet, and what is traced. */
 export function stripPicture(input: StripInput): Picture & { frame: SkyFrame } {
-  const { band, profile, observed, sweep, width, height } = input;
+  const { band, profile, observed, width, height } = input;
   const frame = stripFrame(input);
   const unseen = rangesBetween(observed);
   const isUnseen = (azimuth: number) => unseen.some((gap) => isBetween(azimuth, gap));
@@ -52,7 +50,6 @@ export function stripPicture(input: StripInput): Picture & { frame: SkyFrame } {
       fill: { hatch: { angle: 45, spacing: 7, width: 3.4, ringed: true, tone: 'ink' } },
     },
     ...(profile ? obstructionMarks(frame, obstructionShapes(profile, new Map(), null)) : []),
-    { kind: 'path', lines: linesOf(frame, sweep), pen: { tone: 'accent', width: 3 } },
   ];
   return { width, height, frame, marks: [...marks, ...axis(frame)] };
 }
