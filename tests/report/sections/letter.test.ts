@@ -364,6 +364,38 @@ describe('with little or much to tell', () => {
     expect(sectionText(report, 'what-could-be-done')).toContain('this will stay: Garage next door');
   });
 
+  test('much in the way: all of it is told, the table has the four that take the most', async () => {
+    const things = Array.from({ length: 8 }, (_, i) => ({
+      id: `house-${i}`,
+      name: `House ${i + 1}`,
+      kind: 'building' as const,
+    }));
+    const around: Station = {
+      ...station,
+      observedOpen: [],
+      traces: things.map(({ id }, i) => ({
+        id: `t${i}`,
+        obstruction: id,
+        shape: 'skyline',
+        edge: 'drawn',
+        sightings: [0, 10, 20].map((turn) => ({
+          id: `${id}-${turn}`,
+          azimuth: 120 + 20 * i + turn,
+          elevation: 50,
+        })),
+      })),
+    };
+    const report = await quickReport({ ...withStations([around]), obstructions: things });
+    const { blocks } = letterSection(report, 'sun-and-roof');
+    const items = blocks.flatMap((block) => (block.kind === 'list' ? block.items : []));
+    for (const { name } of things)
+      expect(items.some((item) => item.startsWith(`Shade from ${name} `))).toBe(true);
+    const [table] = blocks.flatMap((block) => (block.kind === 'table' ? [block.table] : []));
+    const [{ obstructions }] = report.assessment.planes[0].stations;
+    const worst = [...obstructions].sort((x, y) => y.lossIfAlone - x.lossIfAlone).slice(0, 4);
+    expect(table.columns.slice(1).map(({ head }) => head)).toEqual(worst.map(({ name }) => name));
+  });
+
   test('without intervals no range is claimed', async () => {
     const report = await quickReport(survey, false);
     expect(answerOf(report, 'how-sure')).toBe('No range was worked out for this report.');
@@ -382,7 +414,7 @@ describe('with little or much to tell', () => {
     const text = letterText(report);
     expect(text).toMatch(/kWh\/ft²/);
     expect(text).not.toMatch(/kWh\/m²/);
-    expect(text).toMatch(/3 ft 3 in off the top/);
+    expect(text).toMatch(/3\sft\s3\sin off the top/);
     expect(text).toMatch(/from 6:\d\d AM to 9:\d\d AM/);
   });
 

@@ -35,8 +35,7 @@ export const sunAndRoof: SectionKind = {
   },
 };
 
-/** So many obstructions are told one by one; a table has room for fewer. */
-const MOST_TOLD = 6;
+/** A table has room for the hours of so many. */
 const MOST_COLUMNS = 4;
 
 /** One obstruction that takes a noticeable part, with when it does. */
@@ -97,16 +96,15 @@ function sentenceBlocks(
   const { words } = speech;
   const nameOf = obstructionNames(report);
   const known = obstructionsById(report.survey);
-  const told = shaders.slice(0, MOST_TOLD);
-  const items = told.map(({ row, times }) =>
+  const items = shaders.map(({ row, times }) =>
     times.stretches.length > 0
       ? shadeSentences(times, nameOf(row.id), roof.name, speech)
       : words['sun.never-the-sun'](nameOf(row.id)),
   );
-  const rest = stationOf(roof).obstructions.filter((row) => !told.some((one) => one.row === row));
+  const rest = stationOf(roof).obstructions.filter((row) => !shaders.some((one) => one.row === row));
   const little = rest.filter(({ lossIfAlone }) => lossIfAlone < NOTICEABLE);
   if (little.length > 0) items.push(words['sun.little'](speech.list(little.map(({ id }) => nameOf(id)))));
-  const hasLeaves = told.some(({ row }) => obstructionKind(known.get(row.id)?.kind ?? 'other').leaves);
+  const hasLeaves = shaders.some(({ row }) => obstructionKind(known.get(row.id)?.kind ?? 'other').leaves);
   return [
     ...(items.length > 0 ? [{ kind: 'list' as const, items }] : []),
     ...(hasLeaves ? [{ kind: 'paragraph' as const, text: words['sun.leaves'], small: true }] : []),
