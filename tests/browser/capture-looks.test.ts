@@ -126,7 +126,7 @@ describe('a desk without sensors', () => {
     await task(page, 'Heading');
     await goOn.and(page.locator(':enabled')).waitFor();
     await page.getByRole('button', { name: 'Take the shadow' }).tap();
-    await page.getByText(/north found ± \d/).waitFor();
+    await page.getByText(/north found ±\s\d/).waitFor();
     for (let place = 2; place <= 4; place++) {
       await goOn.tap();
       await cue(place);
