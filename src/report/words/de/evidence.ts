@@ -49,7 +49,7 @@ export const DE_EVIDENCE = {
   'places.planes-caption': 'Dachflächen',
   'places.size': 'Größe',
   'places.size-text': (width: string, slope: string) =>
-    `${width} entlang der Traufe, ${slope} in Dachneigung`,
+    `${width} entlang der Traufe, ${slope} in der Falllinie`,
   'places.outlined': (corners: number) => `Umriss mit ${corners} Ecken`,
   'places.unknown': 'nicht gemessen',
   'places.tilt-source': 'Bestimmung der Neigung',
@@ -60,7 +60,7 @@ export const DE_EVIDENCE = {
   'places.station': 'Standpunkt',
   'places.where': 'Lage',
   'places.on-plane': (plane: string, x: string, y: string) =>
-    `Fläche: ${plane}; ${x} entlang der Traufe, ${y} in Dachneigung aufwärts`,
+    `Fläche: ${plane}; ${x} entlang der Traufe, ${y} in der Falllinie aufwärts`,
   'places.local': (east: string, north: string, up: string) =>
     `Ost ${east}, Nord ${north}, Höhe ${up}, im örtlichen Koordinatensystem`,
   'places.height': 'Gerätehöhe über der Fläche',
@@ -154,7 +154,7 @@ export const DE_EVIDENCE = {
     `Monte-Carlo-Verfahren mit ${draws} Ziehungen und festem Startwert, über Zielgenauigkeit, Richtungsanschluss, Höhenindex, Lücken zwischen Zielungen, nicht beobachtete Azimute, Lichtdurchlass der Baumkronen und Diffusanteil der Klimadaten; Quantile 2,5\u00a0% und 97,5\u00a0%.`,
   'method.assumptions': 'Annahmen',
   'method.assumption-clear':
-    'Nicht Beobachtetes gilt im Wert als frei und wird im Intervall zufällig besetzt.',
+    'Nicht Beobachtetes gilt im Wert als frei; in das Intervall geht es als Zufallsgröße ein.',
   'method.assumption-reflection':
     'Was Hindernisse reflektieren, zählt nicht; der Horizont gilt außerhalb des Aufgenommenen als eben.',
   'method.assumption-disc':

@@ -34,7 +34,7 @@ export const DE_SUN = {
   'sun.at-changing-hours': 'zu wechselnden Zeiten',
   'sun.never-the-sun': (obstruction: string) =>
     `${obstruction}: Dahinter liegt ein Teil des hellen Himmels, aber nie die Sonne.`,
-  'sun.little': (names: string) => `Fast kein Licht nehmen: ${names}.`,
+  'sun.little': (names: string) => `Fast nichts geht verloren durch: ${names}.`,
   'sun.leaves': 'Bäume lassen etwas Licht durch, kahle Bäume noch mehr. Das ist mitgerechnet.',
   'sun.table-caption': (roof: string) => `${roof}: Stunden mit Schatten am 21. jedes Monats`,
   'sun.month': 'Monat',

@@ -26,7 +26,7 @@ export const ES_DONE = {
     `${obstruction}: no se midió a qué distancia está. Por eso no podemos decir qué se ganaría con una poda.`,
   'done.stays': (obstructions: string) => `Suponemos que esto se queda como está: ${obstructions}.`,
   'done.place': (roof: string, best: string, most: string, lowest: string, least: string) =>
-    `${roof}: el lugar importa. En «${best}» llega el ${most} de la luz del sol. En «${lowest}» llega el ${least}. Los paneles rinden más donde llega más luz.`,
+    `${roof}: importa el lugar. En el punto «${best}» llega el ${most} de la luz del sol. En el punto «${lowest}» llega el ${least}. Los paneles rinden más donde llega más luz.`,
   'done.before': 'Antes de cortar o mover nada',
   'done.owner':
     'Todo árbol tiene dueño. Pregunte primero. Si el árbol no es suyo, solo decide su dueño. No pedimos a nadie que renuncie a un árbol.',

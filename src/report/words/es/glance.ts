@@ -12,20 +12,22 @@ export const ES_GLANCE = {
     `${roof}: aquí todavía no ha medido nadie. Por eso no se sabe cuánto sol recibe.`,
   'glance.no-roof': 'Todavía no se ha medido ningún tejado.',
   'glance.several': (plural: Plural, count: number, best: string, light: string) =>
-    plural(count, { other: `De sus ${count} tejados, este recibe más sol: ${best}, con ${light} al año.` }),
+    plural(count, {
+      other: `De sus ${count} tejados, este es el que recibe más sol: ${best}, con ${light} al año.`,
+    }),
   'glance.several-unknown': 'Todavía no ha medido nadie en ninguno de estos tejados.',
   'glance.figures-of': (roof: string) => `${roof}, en cifras`,
   'glance.access': 'Luz del sol que llega',
   'glance.access-note': 'de la que llegaría si nada hiciera sombra',
-  'glance.facing': 'Cómo está orientado el tejado',
+  'glance.facing': 'Posición del tejado',
   'glance.facing-note': 'de lo que recibiría aquí un tejado con la mejor pendiente y dirección',
   'glance.light': 'Luz del sol en el tejado',
   'glance.light-note': 'en un año normal, con la sombra descontada',
   'glance.light-note-clear-sky': 'en un año sin nubes, con la sombra descontada',
   'glance.range-note': (plural: Plural, stations: number) =>
     plural(stations, {
-      one: 'Entre paréntesis está el margen en el que esperamos que se halle el valor real, 95 veces de cada 100. Se basa en un punto medido en el tejado.',
-      other: `Entre paréntesis está el margen en el que esperamos que se halle el valor real, 95 veces de cada 100. Se basa en ${stations} puntos medidos en el tejado.`,
+      one: 'El margen entre paréntesis es donde esperamos que esté el valor real, 95 veces de cada 100. Se basa en un punto medido en el tejado.',
+      other: `El margen entre paréntesis es donde esperamos que esté el valor real, 95 veces de cada 100. Se basa en ${stations} puntos medidos en el tejado.`,
     }),
   'glance.picture-caption':
     'La luz del sol en un año. En negro, la que llega. Rayada, la que quita la sombra. La línea fina con dos topes es el margen.',

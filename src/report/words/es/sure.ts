@@ -1,13 +1,13 @@
 /** The range, where it comes from, and what nobody could see. */
 export const ES_SURE = {
-  'sure.heading': '¿Qué seguridad tenemos?',
+  'sure.heading': '¿Hasta qué punto estamos seguros?',
   'sure.answer': (low: string, high: string, roof: string) =>
     `${roof}: esperamos que llegue entre el ${low} y el ${high} de la luz del sol.`,
   'sure.answer-same': (access: string, roof: string) =>
     `${roof}: esperamos que llegue el ${access} de la luz del sol, con un error de menos de uno entre cien.`,
   'sure.times': 'En un margen así debería estar el valor real 95 veces de cada 100.',
   'sure.answer-none': 'Para este informe no se calculó ningún margen.',
-  'sure.why': 'Lo que hace dudar de las cifras, primero lo que más pesa:',
+  'sure.why': 'Lo que resta certeza a las cifras, empezando por lo que más pesa:',
   'sure.source-heading': 'Hacia dónde apuntaba el teléfono. Una brújula nunca acierta del todo.',
   'sure.source-elevation-index': 'Lo que el teléfono toma por horizontal.',
   'sure.source-pointing': 'La mano que apunta. Tiembla un poco.',
@@ -31,7 +31,7 @@ export const ES_SURE = {
   'sure.unseen-note':
     'Hemos contado estas partes del cielo como despejadas. El margen tiene en cuenta que puede haber sombra ahí.',
   'sure.unseen-from': (roof: string, station: string, share: string, places: string) =>
-    `${roof}: visto desde «${station}», el ${share} de la luz viene de partes hacia las que no miró nadie. Están ${places}.`,
+    `${roof}: visto desde el punto «${station}», el ${share} de la luz viene de partes hacia las que no miró nadie. Están ${places}.`,
   'sure.unseen-place': (where: string, share: string) => `${where} (${share})`,
   'sure.unseen-least':
     'Si un tejado tiene más de un punto medido, este es el punto desde el que se vio menos.',

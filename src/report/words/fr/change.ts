@@ -2,7 +2,7 @@
 export const FR_CHANGE = {
   'change.heading': 'Qu’est-ce qui peut changer avec les années\u202f?',
   'change.answer-trees': 'Les arbres poussent, et leur ombre grandit avec eux.',
-  'change.answer': 'Tout seul, peu de chose change. Mais du nouveau à côté peut amener une ombre nouvelle.',
+  'change.answer': 'Peu de choses changent d’elles-mêmes. Mais du nouveau à côté peut amener de l’ombre.',
   'change.table-caption': (roof: string) =>
     `${roof}\u202f: lumière du soleil d’une année que prendrait un arbre en poussant`,
   'change.tree': 'Arbre',
@@ -14,11 +14,11 @@ export const FR_CHANGE = {
   'change.buildings':
     'Une nouvelle maison ou un étage de plus à côté peut amener de l’ombre. Demandez à votre mairie ce qui peut y être construit.',
   'change.own-trees': (side: string) =>
-    `Pensez au soleil avant de planter un arbre. S’il est planté vers ${side}, à côté de la maison, son ombre ne tombe pas du côté du toit.`,
+    `Pensez au soleil avant de planter un arbre. Si vous le plantez vers ${side} de la maison, son ombre s’éloigne du toit.`,
   'change.own-trees-tropics':
     'Pensez au soleil avant de planter un arbre. Ici, le soleil vient des deux côtés. Tout grand arbre proche peut donc faire de l’ombre sur le toit.',
   'change.years':
-    'Certaines années ont beaucoup de soleil, d’autres peu. Nos chiffres valent pour une année normale. Une année seule peut donner plus ou moins.',
+    'Certaines années ont beaucoup de soleil, d’autres peu. Nos chiffres valent pour une année normale. Une année donnée peut donner plus ou moins.',
   'change.again':
     'Quand des arbres auront poussé ou qu’une maison aura été construite, faites mesurer le toit de nouveau.',
 } as const;

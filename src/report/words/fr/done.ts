@@ -16,7 +16,7 @@ export const FR_DONE = {
   'done.moved': (obstruction: string) => `${obstruction}\u202f: à une autre place`,
   'done.lower': (obstruction: string, metres: string) => `${obstruction}\u202f: ${metres} de moins en haut`,
   'done.clear': (obstruction: string, metres: string) =>
-    `${obstruction}\u202f: ${metres} de moins en haut, et presque plus d’ombre`,
+    `${obstruction}\u202f: ${metres} de moins en haut, et il ne reste presque pas d’ombre`,
   'done.unless': (obstruction: string, others: string) =>
     `${obstruction}\u202f: enlever seulement cela ne sert à rien. Il faudrait enlever aussi\u202f: ${others}.`,
   'done.hidden': (obstruction: string) =>
@@ -27,7 +27,7 @@ export const FR_DONE = {
     `${obstruction}\u202f: la distance n’a pas été mesurée. Nous ne pouvons donc pas dire ce qu’une taille apporterait.`,
   'done.stays': (obstructions: string) => `Nous supposons que ceci restera\u202f: ${obstructions}.`,
   'done.place': (roof: string, best: string, most: string, lowest: string, least: string) =>
-    `${roof}\u202f: l’endroit compte. À «\u202f${best}\u202f», il arrive ${most} de la lumière du soleil. À «\u202f${lowest}\u202f», c’est ${least}. Les panneaux donnent plus là où il arrive plus de lumière.`,
+    `${roof}\u202f: l’endroit compte. Au point «\u202f${best}\u202f», il arrive ${most} de la lumière du soleil. Au point «\u202f${lowest}\u202f», c’est ${least}. Les panneaux donnent plus là où il arrive plus de lumière.`,
   'done.before': 'Avant de couper ou de déplacer quoi que ce soit',
   'done.owner':
     'Chaque arbre est à quelqu’un. Demandez d’abord. Si l’arbre n’est pas à vous, seul son propriétaire décide. Nous ne demandons à personne de renoncer à un arbre.',

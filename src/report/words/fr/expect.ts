@@ -19,5 +19,5 @@ export const FR_EXPECT = {
   'expect.not-power':
     'La lumière du soleil n’est pas encore de l’électricité. Les panneaux n’en changent qu’une partie en électricité pour la maison.',
   'expect.clear-sky':
-    'Ces chiffres valent pour un ciel sans nuages. En vrai, il arrive moins de lumière. La part que prend l’ombre reste un bon repère.',
+    'Ces chiffres valent pour un ciel sans nuages. En réalité, il arrive moins de lumière. La part que prend l’ombre reste un bon repère.',
 } as const;

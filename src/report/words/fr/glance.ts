@@ -20,15 +20,15 @@ export const FR_GLANCE = {
   'glance.figures-of': (roof: string) => `${roof}, en chiffres`,
   'glance.access': 'Lumière du soleil qui arrive',
   'glance.access-note': 'de celle qui viendrait si rien ne faisait d’ombre',
-  'glance.facing': 'Comment le toit est placé',
+  'glance.facing': 'Position du toit',
   'glance.facing-note': 'de ce que recevrait ici un toit avec la meilleure pente et la meilleure direction',
   'glance.light': 'Lumière du soleil sur le toit',
   'glance.light-note': 'dans une année normale, ombre déduite',
   'glance.light-note-clear-sky': 'dans une année sans nuages, ombre déduite',
   'glance.range-note': (plural: Plural, stations: number) =>
     plural(stations, {
-      one: 'Entre parenthèses, vous lisez la fourchette où nous attendons la vraie valeur, 95 fois sur 100. Elle repose sur un seul point mesuré sur le toit.',
-      other: `Entre parenthèses, vous lisez la fourchette où nous attendons la vraie valeur, 95 fois sur 100. Elle repose sur ${stations} points mesurés sur le toit.`,
+      one: 'La fourchette entre parenthèses est celle où la vraie valeur devrait se trouver, 95 fois sur 100. Elle repose sur un seul point mesuré sur le toit.',
+      other: `La fourchette entre parenthèses est celle où la vraie valeur devrait se trouver, 95 fois sur 100. Elle repose sur ${stations} points mesurés sur le toit.`,
     }),
   'glance.picture-caption':
     'La lumière du soleil en un an. En noir, ce qui arrive. En hachures, ce que prend l’ombre. Le trait fin à deux bouts est la fourchette.',

@@ -2,9 +2,9 @@
 export const FR_SURE = {
   'sure.heading': 'À quel point sommes-nous sûrs\u202f?',
   'sure.answer': (low: string, high: string, roof: string) =>
-    `${roof}\u202f: nous attendons qu’il y arrive entre ${low} et ${high} de la lumière du soleil.`,
+    `${roof}\u202f: nous pensons qu’il y arrive entre ${low} et ${high} de la lumière du soleil.`,
   'sure.answer-same': (access: string, roof: string) =>
-    `${roof}\u202f: nous attendons qu’il y arrive ${access} de la lumière du soleil, à moins d’un centième près.`,
+    `${roof}\u202f: nous pensons qu’il y arrive ${access} de la lumière du soleil, à moins d’un centième près.`,
   'sure.times': 'Une telle fourchette devrait contenir la vraie valeur 95 fois sur 100.',
   'sure.answer-none': 'Aucune fourchette n’a été calculée pour ce rapport.',
   'sure.why': 'Ce qui rend les chiffres moins sûrs, le plus important d’abord\u202f:',
@@ -32,7 +32,7 @@ export const FR_SURE = {
   'sure.unseen-note':
     'Nous avons compté ces parties du ciel comme dégagées. La fourchette tient compte d’une ombre possible là-bas.',
   'sure.unseen-from': (roof: string, station: string, share: string, places: string) =>
-    `${roof}\u202f: depuis «\u202f${station}\u202f», ${share} de la lumière vient de parties du ciel que personne n’a regardées. Elles se trouvent ${places}.`,
+    `${roof}\u202f: depuis le point «\u202f${station}\u202f», ${share} de la lumière vient de parties du ciel que personne n’a regardées. Elles se trouvent ${places}.`,
   'sure.unseen-place': (where: string, share: string) => `${where} (${share})`,
   'sure.unseen-least': 'Si un toit a plus d’un point mesuré, il s’agit de celui d’où l’on a vu le moins.',
   'sure.toward': (point: string) => `vers ${point}`,
