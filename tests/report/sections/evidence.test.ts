@@ -69,9 +69,7 @@ describe('the evidence of a terrace', () => {
     const us = { ...report, choices: { ...report.choices, units: 'us' as const } };
     const [planes] = tablesOf(sectionOf(us, 'planes-and-stations'));
     // 5.40 m is 17 ft 8.6 in, 6.10 m is 20 ft 0.2 in
-    expect(planes.rows[0][3]).toBe(
-      '17\u00a0ft 9\u00a0in along the eave, 20\u00a0ft up the slope',
-    );
+    expect(planes.rows[0][3]).toBe('17\u00a0ft 9\u00a0in along the eave, 20\u00a0ft up the slope');
   });
 
   test('names the climate, the methods and the whole fingerprint', () => {

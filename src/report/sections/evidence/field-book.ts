@@ -1,3 +1,4 @@
+import { pointedDirections } from '../../../core/horizon/station-horizon.ts';
 import type { PointedSighting } from '../../../core/pointing/pointed-survey.ts';
 import { obstructionKinds, traceEdge } from '../../../core/survey/obstruction-kinds.ts';
 import { ordered } from '../../../core/survey/order.ts';
@@ -33,7 +34,7 @@ function stationBlock(station: Station, report: ReportInput, speech: Speech): Bl
   const rows = [
     ...ordered(station.traces).map((trace) => traceRow(trace, report, speech)),
     ...markRows(station, report, speech),
-    ...openRows(station, speech),
+    ...openRows(station, report, speech),
   ];
   if (rows.length === 0)
     return { kind: 'paragraph', text: `${shownText(station.name)}: ${words['book.none']}` };
@@ -82,10 +83,21 @@ function markRows({ markSightings }: Station, { pointed }: ReportInput, speech: 
   return [[speech.words['book.marks'], '–', texts.join('; ')]];
 }
 
-function openRows({ observedOpen }: Station, speech: Speech): string[][] {
-  if (!observedOpen || observedOpen.length === 0) return [];
-  const ranges = observedOpen.map(([from, to]) =>
-    speech.range(speech.azimuth(from, 1), to - from >= 360 ? speech.angle(360, 1) : speech.azimuth(to, 1)),
-  );
-  return [[speech.words['book.open'], '–', ranges.join('; ')]];
+function openRows(
+  { observedOpen, openLooks }: Station,
+  { pointed }: ReportInput,
+  speech: Speech,
+): string[][] {
+  const directionOf = pointedDirections(pointed);
+  const read = ordered(openLooks ?? []).map((look) => rangeText(directionOf.openRange(look), speech));
+  const kept = (observedOpen ?? []).map((range) => rangeText(range, speech));
+  const ranges = [...read, ...kept];
+  return ranges.length > 0 ? [[speech.words['book.open'], '–', ranges.join('; ')]] : [];
+}
+
+function rangeText(range: readonly [number, number] | null, speech: Speech): string {
+  if (!range) return speech.words['book.undirected'];
+  const [from, to] = range;
+  const end = to - from >= 360 ? speech.angle(360, 1) : speech.azimuth(to, 1);
+  return speech.range(speech.azimuth(from, 1), end);
 }

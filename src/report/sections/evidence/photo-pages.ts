@@ -1,3 +1,4 @@
+import { photoAzimuth } from '../../../core/pointing/photo-azimuth.ts';
 import { ordered } from '../../../core/survey/order.ts';
 import type { Photo, Survey } from '../../../core/survey/survey.ts';
 import type { ContentsPhoto } from '../../contents/report-contents.ts';
@@ -20,14 +21,14 @@ export const photoPages: SectionKind = {
   },
 };
 
-function photoOf(photo: Photo, { survey, photos }: ReportInput, speech: Speech): ContentsPhoto {
+function photoOf(photo: Photo, { survey, pointed, photos }: ReportInput, speech: Speech): ContentsPhoto {
   const { words } = speech;
   const subject = subjectName(photo, survey, speech);
   const image = photos.get(photo.sha256) ?? null;
-  const direction =
-    photo.azimuth === undefined
-      ? []
-      : [words['photos.toward'](`${speech.compass(photo.azimuth)}, ${speech.azimuth(photo.azimuth)}`)];
+  const toward = photoAzimuth(photo, survey, pointed);
+  const direction = toward
+    ? [words['photos.toward'](`${speech.compass(toward.azimuth)}, ${speech.azimuth(toward.azimuth)}`)]
+    : [];
   const taken = speech.instant(Date.parse(photo.takenAt), survey.site.timeZone);
   const caption = [subject, ...direction, taken, ...(image ? [] : [words['photos.missing']])].join('; ');
   return { image, caption, alternative: [subject, ...direction].join(', ') };
