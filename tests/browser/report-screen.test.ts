@@ -41,7 +41,7 @@ describe('the report', () => {
     await open(page);
     const text = await letter(page).locator('body').innerText();
     for (const { name, solarAccess } of planes)
-      expect(text).toContain(`${name} gets ${Math.round(100 * solarAccess!.annual)}% of the sunlight`);
+      expect(text).toContain(`${name}: ${Math.round(100 * solarAccess!.annual)}% of its sunlight arrives`);
     const json = await saved(page, 'Figures as JSON');
     const figures = JSON.parse(json.text.toString()) as {
       figures: { quantity: string; plane_id: string; station: string; period: string; value: number }[];

@@ -41,8 +41,8 @@ function pairsOf(report: ReportInput, speech: Speech): { term: string; text: str
   const { name, reference } = transpositionOf(assessment.transposition);
   const interval = assessment.planes.find(({ solarAccess }) => solarAccess?.interval)?.solarAccess?.interval;
   const place = words['method.place-text'](
-    degreesText(site.latitude, 'N', 'S', speech),
-    degreesText(site.longitude, 'E', 'W', speech),
+    degreesText(site.latitude, [0, 4], speech),
+    degreesText(site.longitude, [2, 6], speech),
     speech.length(site.altitude ?? 0, 0),
   );
   const pairs: [string, string | undefined][] = [
@@ -67,8 +67,9 @@ function pairsOf(report: ReportInput, speech: Speech): { term: string; text: str
 
 const sentences = (...parts: string[]): string => parts.map((part) => shownText(part, 400)).join('. ');
 
-const degreesText = (degrees: number, above: string, below: string, speech: Speech): string =>
-  `${speech.angle(Math.abs(degrees), 5)} ${degrees < 0 ? below : above}`;
+/** `sides`: places in the compass of what is above and what is below zero. */
+const degreesText = (degrees: number, [above, below]: [number, number], speech: Speech): string =>
+  `${speech.angle(Math.abs(degrees), 5)} ${speech.words['compass.letters'][degrees < 0 ? below : above]}`;
 
 function notesOf({ survey, assessment }: ReportInput): string[] {
   return [
