@@ -4,6 +4,7 @@ import { clearSkyClimate } from '../../src/core/irradiance/clear-sky-climate.ts'
 import type { Block } from '../../src/report/contents/report-contents.ts';
 import { figuresOf } from '../../src/report/forms/figure-rows.ts';
 import { reportContents } from '../../src/report/report-contents.ts';
+import type { ReportInput } from '../../src/report/report-input.ts';
 import { CHOICES } from './report-of.ts';
 import { SAMPLE_FILES, sampleSurvey } from './sample-shades.ts';
 
@@ -21,7 +22,7 @@ describe('percentages of the letter', () => {
   it.each(SAMPLE_FILES)('of %s are rounded figures of its assessment', async (file) => {
     const survey = sampleSurvey(file);
     const evidence = await surveyEvidence(survey, clearSkyClimate('ineichen'), { stepMinutes: 15 });
-    const { sections } = reportContents({
+    const report: ReportInput = {
       ...evidence,
       survey,
       fingerprint: '0'.repeat(64),
@@ -31,8 +32,9 @@ describe('percentages of the letter', () => {
       firm: { name: '', lines: [], colour: null },
       compared: null,
       choices: CHOICES,
-    });
-    const shares = figuresOf({ assessment: evidence.assessment, compared: null })
+    };
+    const { sections } = reportContents(report);
+    const shares = figuresOf(report)
       .filter(
         ({ unit, period, obstruction }) => unit === 'share' && !obstruction && !/hour|azimuth/.test(period),
       )

@@ -1,27 +1,12 @@
-import type { FigureRow } from './figure-rows.ts';
-
-const COLUMNS = [
-  'quantity',
-  'plane',
-  'station',
-  'obstruction',
-  'period',
-  'value',
-  'low',
-  'high',
-  'unit',
-  'plane_id',
-  'station_id',
-  'obstruction_id',
-  'compared',
-] as const satisfies readonly (keyof FigureRow)[];
+import type { FigureRow } from './figure-row.ts';
+import { FIGURE_COLUMNS } from './figure-row.ts';
 
 /**
  * Figures as a CSV table (RFC 4180): a line of heads, lines ended by CR LF, decimal points whatever the language, nothing
  * where a figure is not known. UTF-8 without a mark before it.
  */
 export const figuresCsv = (rows: readonly FigureRow[]): string =>
-  [COLUMNS, ...rows.map((row) => COLUMNS.map((column) => row[column]))]
+  [FIGURE_COLUMNS, ...rows.map((row) => FIGURE_COLUMNS.map((column) => row[column]))]
     .map((cells) => `${cells.map(cell).join(',')}\r\n`)
     .join('');
 

@@ -1,7 +1,8 @@
 import type { ReportInput } from '../report-input.ts';
 import { shownText } from '../shown-text.ts';
-import type { FigureRow } from './figure-rows.ts';
-import { figuresOf, QUANTITIES } from './figure-rows.ts';
+import type { FigureRow } from './figure-row.ts';
+import { figuresOf } from './figure-rows.ts';
+import { QUANTITIES } from './quantities.ts';
 
 /** The figures of a report with what they are of and how they came about. */
 export interface FiguresDocument {
