@@ -128,7 +128,7 @@ describe('a phone whose angles are tied to magnetic north', () => {
     phone!.point(magneticLook(180, 20));
     await begin(page, 'Along the top edge');
     await way(page, 'Points');
-    const moving = phone!.move((at) => magneticLook(180 + 40 * at, 20), 2500);
+    const moving = phone!.move((at) => magneticLook(180 + 96 * at, 20), 6000);
     await page.getByRole('button', { name: 'First point' }).tap();
     await news(page)
       .getByText(/Not taken: the phone moved by \d+\.\d°/)
