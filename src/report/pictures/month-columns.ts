@@ -11,15 +11,15 @@ export interface MonthColumnsInput {
   imagined: readonly number[] | null;
   width: number;
   height: number;
+  textSize?: number;
 }
 
 /** A column a month: outline without obstructions, ink with them, hatched what an imagined change gives back. */
 export function monthColumns(
-  { unshaded, measured, imagined, width, height }: MonthColumnsInput,
+  { unshaded, measured, imagined, width, height, textSize: size = 11 }: MonthColumnsInput,
   words: PictureWords = ENGLISH,
 ): Picture {
-  const size = 11;
-  const [left, right, above, below] = [30, width - 2, 10, height - size - 8];
+  const [left, right, above, below] = [size * 2.7, width - 2, 10, height - size - 8];
   const step = roundStep(Math.max(...unshaded, 0.01) / 4);
   const top = Math.max(step, Math.ceil(Math.max(...unshaded) / step) * step);
   const yOf = (light: number) => below - (light / top) * (below - above);
@@ -47,7 +47,7 @@ export function monthColumns(
     },
     { kind: 'path', lines: [[left, below, right, below]], pen: { tone: 'ink', width: 1.6 } },
   );
-  (pitch > 30 ? words.months : words.initials).forEach((text, month) =>
+  (pitch > 2.75 * size ? words.months : words.initials).forEach((text, month) =>
     marks.push({
       kind: 'text',
       x: left + pitch * (month + 0.5),

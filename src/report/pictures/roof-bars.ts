@@ -24,7 +24,7 @@ export interface RoofBarsInput {
   width: number;
 }
 
-const SIZE = 12;
+const SIZE = 13.5;
 const BAR = 16;
 /** More bars than this have their names beside them, so that a page holds them. */
 const MOST_UNDER_NAMES = 3;
@@ -54,7 +54,7 @@ export function roofBars({ bars, axis, width }: RoofBarsInput, words: PictureWor
     marks: [
       ...bars.flatMap((bar, i) => barMarks(bar, i * layout.row, width, layout)),
       ...axisMarks(most, foot, layout, words),
-      { kind: 'text', x: layout.left, y: under, text: axis, size: SIZE - 1, tone: 'faint' },
+      { kind: 'text', x: layout.left, y: under, text: axis, size: SIZE, tone: 'faint' },
     ],
   };
 }
@@ -131,7 +131,7 @@ function axisMarks(most: number, foot: number, { xOf, right }: Layout, words: Pi
       x: xOf(light),
       y: foot + SIZE + 4,
       text: words.number(light),
-      size: SIZE - 1,
+      size: SIZE,
       anchor: i === 0 ? 'start' : 'middle',
     })),
   ];

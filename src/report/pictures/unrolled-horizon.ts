@@ -32,6 +32,8 @@ export interface HorizonInput {
   whole: boolean;
   /** Without contours and their numbers. */
   plain?: boolean;
+  /** Of the words; by the width where it is left out. */
+  textSize?: number;
 }
 
 export interface HorizonPicture extends Picture {
@@ -46,7 +48,7 @@ export interface HorizonPicture extends Picture {
  */
 export function unrolledHorizon(input: HorizonInput, words: PictureWords = ENGLISH): HorizonPicture {
   const { site, shade, density, days, hours, width, height } = input;
-  const size = width < 560 ? 11 : 13;
+  const { textSize: size = width < 560 ? 11 : 13 } = input;
   const paths = [...days, ...hours].flatMap(({ path }) => path);
   const frame = horizonFrame({
     latitude: site.latitude,

@@ -4,6 +4,7 @@ import { roofBars } from '../../pictures/roof-bars.ts';
 import type { ReportInput } from '../../report-input.ts';
 import type { Speech } from '../../speech.ts';
 import type { SectionKind } from '../section-kind.ts';
+import { PICTURE_WIDTH } from './picture-size.ts';
 import { pictureWords } from './picture-words.ts';
 import type { MeasuredRoof, Roof } from './roofs.ts';
 import { isClearSky, measuredRoofs, NOTICEABLE, rangeText, roofsOf } from './roofs.ts';
@@ -17,8 +18,6 @@ export const atAGlance: SectionKind = {
     blocks: glanceBlocks(report, speech),
   }),
 };
-
-const PICTURE_WIDTH = 640;
 
 function glanceBlocks(report: ReportInput, speech: Speech): Block[] {
   const { words } = speech;

@@ -2,6 +2,7 @@ import type { Block, Table } from '../../contents/report-contents.ts';
 import { monthColumns } from '../../pictures/month-columns.ts';
 import type { Speech } from '../../speech.ts';
 import type { SectionKind } from '../section-kind.ts';
+import { PICTURE_TEXT, PICTURE_WIDTH } from './picture-size.ts';
 import { pictureWords } from './picture-words.ts';
 import type { MeasuredRoof } from './roofs.ts';
 import { measuredRoofs, NOTICEABLE } from './roofs.ts';
@@ -31,7 +32,7 @@ export const monthByMonth: SectionKind = {
 
 /** A month with less light than this share of the brightest is as good as dark. */
 const AS_DARK = 0.005;
-const PICTURE = { width: 640, height: 210 };
+const PICTURE = { width: PICTURE_WIDTH, height: 190, textSize: PICTURE_TEXT };
 
 /** Light that arrives in each month, mean of the stations, kWh/m2. */
 function arriving({ plane }: MeasuredRoof): number[] {

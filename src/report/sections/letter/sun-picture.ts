@@ -7,6 +7,7 @@ import { dayLines, hourLines } from '../../pictures/sun-lines.ts';
 import { unrolledHorizon } from '../../pictures/unrolled-horizon.ts';
 import type { ReportInput } from '../../report-input.ts';
 import type { Speech } from '../../speech.ts';
+import { PICTURE_TEXT, PICTURE_WIDTH } from './picture-size.ts';
 import { pictureWords } from './picture-words.ts';
 import type { MeasuredRoof } from './roofs.ts';
 import { obstructionNames } from './roofs.ts';
@@ -23,7 +24,7 @@ export function sunOverSite({ survey }: ReportInput, speech: Speech): SunOverSit
   return { days: dayLines(survey.site, words), hours: hourLines(survey.site), words };
 }
 
-const PICTURE = { width: 640, height: 290 };
+const PICTURE = { width: PICTURE_WIDTH, height: 280, textSize: PICTURE_TEXT };
 
 /** The sky as a roof's darkest station sees it. */
 export function sunPicture(

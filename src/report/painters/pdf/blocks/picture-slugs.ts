@@ -7,14 +7,13 @@ import { textSlugs } from '../text-slugs.ts';
 
 /** A picture takes no more of a page's height than this, so that its caption and heading stand with it. */
 const HIGHEST = 0.68;
-/** A small picture is not blown up further. */
-const LARGEST_SCALE = 1.15;
+/** A picture is not blown up further: its words would grow over those of the page. */
+const LARGEST_SCALE = 0.85;
 
 /** A picture as wide as the text where it is made for that, with its caption under it. */
 export function pictureSlugs(picture: Picture, caption: string, setting: Setting): Slug[] {
   const { left, width, height } = setting;
   const scale = Math.min(width / picture.width, (height * HIGHEST) / picture.height, LARGEST_SCALE);
-  const x = left + (width - picture.width * scale) / 2;
   for (const text of textsOf(picture.marks))
     setting.setter.runs(text.text, { face: 'regular', size: text.size });
   const words = textSlugs(caption, STYLES.caption, setting, { gap: 6 });
@@ -22,7 +21,7 @@ export function pictureSlugs(picture: Picture, caption: string, setting: Setting
     height: picture.height * scale,
     gap: 14,
     keep: words.length > 0,
-    paint: (sheet, y) => paintPicture(sheet, picture, x, y, scale),
+    paint: (sheet, y) => paintPicture(sheet, picture, left, y, scale),
   };
   return [slug, ...words];
 }
