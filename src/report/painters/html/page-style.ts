@@ -1,16 +1,12 @@
 import type { ReportContents } from '../../contents/report-contents.ts';
 import { styleString } from '../markup-text.ts';
 
-/**
- * Paper and ink on a screen; print is always ink on white. After dark a picture stays ink on a slip of paper, since the words
- * about it speak of what is black.
- */
+/** Paper and ink on a screen, dark with the reader's device, pictures and all; print is always ink on white. */
 const INKS = `
 :root{color-scheme:light;--paper:#fbf8f0;--sheet:#f1ecdf;--ink:#14120d;--faint:#4d483c;--rule:#c4baa3;--firm:var(--ink);
 --serif:ui-serif,'Iowan Old Style','Palatino Linotype',Palatino,'Book Antiqua','Noto Serif','DejaVu Serif',serif;
 --plain:system-ui,'Segoe UI',Roboto,'Noto Sans',sans-serif}
-@media screen and (prefers-color-scheme:dark){:root{color-scheme:dark;--paper:#14120d;--sheet:#211e17;--ink:#f6f1e3;--faint:#c9c1ad;--rule:#4a4436}
-.picture{--paper:#ebe5d6;--sheet:#ddd5c1;--ink:#14120d;--faint:#453f33;--rule:#a99f88;padding:.75rem}}
+@media screen and (prefers-color-scheme:dark){:root{color-scheme:dark;--paper:#14120d;--sheet:#211e17;--ink:#f6f1e3;--faint:#c9c1ad;--rule:#4a4436}}
 @media print{:root{--paper:#fff;--sheet:#fff;--ink:#000;--faint:#33302a;--rule:#9c937d}}`;
 
 const TYPE = `
@@ -67,7 +63,6 @@ main>div:first-child>section:first-of-type{margin-top:1.75rem}
 @media (min-width:37.51em){.figures>div+div{border-left:1px solid var(--rule);padding-left:1.25rem}}
 figure{margin-top:1.5rem}
 figcaption{margin-top:.5rem;max-width:38rem}
-.picture{background:var(--paper)}
 .picture svg{display:block;width:100%;height:auto;margin:0 auto}
 .scroll{overflow-x:auto;overscroll-behavior-x:contain}
 table{border-collapse:collapse;width:100%;border-bottom:2px solid var(--ink);font-size:.9375rem;line-height:1.4;overflow-wrap:break-word}
@@ -141,7 +136,7 @@ table{font-size:9pt}
 th,td{padding-top:2.5pt;padding-bottom:2.5pt}
 .many th[scope=row]{min-width:0}.many td{min-width:0}
 .photos{grid-template-columns:1fr 1fr}
-.picture svg{max-height:170mm}
+.picture svg{max-height:170mm;max-width:150mm!important;margin:0}
 a{text-decoration:none}}`;
 
 /** The style sheet of a report's page. */

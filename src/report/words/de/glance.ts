@@ -29,7 +29,7 @@ export const DE_GLANCE = {
       other: `In Klammern steht die Spanne, in der wir den wahren Wert erwarten, in 95 von 100 Fällen. Sie beruht auf ${stations} Messstellen auf dem Dach.`,
     }),
   'glance.picture-caption':
-    'Das Sonnenlicht eines Jahres. Schwarz ist, was ankommt. Schraffiert ist, was der Schatten nimmt. Der dünne Strich mit zwei Enden ist die Spanne.',
+    'Das Sonnenlicht eines Jahres. Ausgefüllt ist, was ankommt. Schraffiert ist, was der Schatten nimmt. Der dünne Strich mit zwei Enden ist die Spanne.',
   'glance.axis': (unit: string) => `${unit} im Jahr`,
   'glance.bar-unknown': 'nicht gemessen',
 } as const;

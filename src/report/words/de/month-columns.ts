@@ -8,7 +8,7 @@ export const DE_MONTH_COLUMNS = {
   'columns.no-shade': 'Der Schatten nimmt in keinem Monat nennenswert Licht.',
   'columns.dark': (months: string) => `Im ${months} kommt kaum Sonne.`,
   'columns.caption': (unit: string) =>
-    `Sonnenlicht in jedem Monat, in ${unit}. Der Umriss zeigt, was ohne Hindernisse käme. Schwarz ist, was ankommt.`,
+    `Sonnenlicht in jedem Monat, in ${unit}. Der Umriss zeigt, was ohne Hindernisse käme. Ausgefüllt ist, was ankommt.`,
   'columns.alternative': (roof: string) =>
     `${roof}: zwölf Säulen. Die Zahlen stehen in der Tabelle darunter.`,
   'columns.table-caption': (roof: string, unit: string) => `${roof}: Sonnenlicht in jedem Monat, ${unit}`,

@@ -27,7 +27,7 @@ export const EN_GLANCE = {
       other: `The range in brackets is where we expect the truth, 95 times in 100. It comes from ${stations} places measured on the roof.`,
     }),
   'glance.picture-caption':
-    'Sunlight of a year. Black is what arrives. Hatched is what shade takes. The thin line with two ends is the range.',
+    'Sunlight of a year. The solid part is what arrives. Hatched is what shade takes. The thin line with two ends is the range.',
   'glance.axis': (unit: string) => `${unit} a year`,
   'glance.bar-unknown': 'not measured',
 } as const;

@@ -8,7 +8,7 @@ export const EN_MONTH_COLUMNS = {
   'columns.no-shade': 'Shade takes almost nothing in any month.',
   'columns.dark': (months: string) => `No sun worth naming comes in ${months}.`,
   'columns.caption': (unit: string) =>
-    `Sunlight of each month, in ${unit}. The outline is what would come with nothing in the way. Black is what arrives.`,
+    `Sunlight of each month, in ${unit}. The outline is what would come with nothing in the way. The solid part is what arrives.`,
   'columns.alternative': (roof: string) =>
     `Twelve columns for ${roof}. The figures stand in the table that follows.`,
   'columns.table-caption': (roof: string, unit: string) => `${roof}: sunlight of each month, ${unit}`,

@@ -30,7 +30,7 @@ export const ES_GLANCE = {
       other: `El margen entre paréntesis es donde esperamos que esté el valor real, 95 veces de cada 100. Se basa en ${stations} puntos medidos en el tejado.`,
     }),
   'glance.picture-caption':
-    'La luz del sol en un año. En negro, la que llega. Rayada, la que quita la sombra. La línea fina con dos topes es el margen.',
+    'La luz del sol en un año. La parte rellena es la que llega. La rayada, la que quita la sombra. La línea fina con dos topes es el margen.',
   'glance.axis': (unit: string) => `${unit} al año`,
   'glance.bar-unknown': 'sin medir',
 } as const;

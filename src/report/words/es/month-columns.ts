@@ -8,7 +8,7 @@ export const ES_MONTH_COLUMNS = {
   'columns.no-shade': 'La sombra no quita casi nada en ningún mes.',
   'columns.dark': (months: string) => `En ${months} casi no hay sol.`,
   'columns.caption': (unit: string) =>
-    `Luz del sol de cada mes, en ${unit}. El contorno es la que llegaría si nada hiciera sombra. En negro, la que llega.`,
+    `Luz del sol de cada mes, en ${unit}. El contorno es la que llegaría si nada hiciera sombra. La parte rellena es la que llega.`,
   'columns.alternative': (roof: string) => `${roof}: doce columnas. Las cifras están en la tabla que sigue.`,
   'columns.table-caption': (roof: string, unit: string) => `${roof}: luz del sol de cada mes, ${unit}`,
   'columns.month': 'Mes',

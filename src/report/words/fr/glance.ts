@@ -31,7 +31,7 @@ export const FR_GLANCE = {
       other: `La fourchette entre parenthèses est celle où la vraie valeur devrait se trouver, 95 fois sur 100. Elle repose sur ${stations} points mesurés sur le toit.`,
     }),
   'glance.picture-caption':
-    'La lumière du soleil en un an. En noir, ce qui arrive. En hachures, ce que prend l’ombre. Le trait fin à deux bouts est la fourchette.',
+    'La lumière du soleil en un an. La partie pleine est ce qui arrive. En hachures, ce que prend l’ombre. Le trait fin à deux bouts est la fourchette.',
   'glance.axis': (unit: string) => `${unit} par an`,
   'glance.bar-unknown': 'pas mesuré',
 } as const;

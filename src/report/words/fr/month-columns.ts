@@ -8,7 +8,7 @@ export const FR_MONTH_COLUMNS = {
   'columns.no-shade': 'L’ombre ne prend presque rien, quel que soit le mois.',
   'columns.dark': (months: string) => `Presque pas de soleil en ${months}.`,
   'columns.caption': (unit: string) =>
-    `Lumière du soleil de chaque mois, en ${unit}. Le contour montre ce qui viendrait si rien ne faisait d’ombre. En noir, ce qui arrive.`,
+    `Lumière du soleil de chaque mois, en ${unit}. Le contour montre ce qui viendrait si rien ne faisait d’ombre. La partie pleine est ce qui arrive.`,
   'columns.alternative': (roof: string) =>
     `${roof}\u202f: douze colonnes. Les chiffres sont dans le tableau qui suit.`,
   'columns.table-caption': (roof: string, unit: string) =>
