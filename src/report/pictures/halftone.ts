@@ -14,14 +14,25 @@ export function halftone(frame: SkyFrame, density: SmoothDensity, pitch: number)
   const largest = Math.sqrt((DARKEST * pitch * rowHeight) / Math.PI);
   const bySize = Array.from({ length: SIZES }, (): number[] => []);
   if (density.highest <= 0) return [];
+  const shifted = [pitch / 2, pitch].map((start) => acrossFrom(start, frame, pitch));
   let row = 0;
-  for (let y = frame.below - rowHeight / 2; y > frame.above; y -= rowHeight, row++)
-    for (let x = frame.left + (row % 2 ? pitch : pitch / 2); x < frame.right; x += pitch) {
-      const { azimuth, elevation } = directionAt(frame, x, y);
-      const size = Math.round(Math.sqrt(densityAt(density, azimuth, elevation) / density.highest) * SIZES);
-      if (size > 0) bySize[Math.min(size, SIZES) - 1].push(x, y);
+  for (let y = frame.below - rowHeight / 2; y > frame.above; y -= rowHeight, row++) {
+    const { xs, azimuths } = shifted[row % 2];
+    const { elevation } = directionAt(frame, frame.left, y);
+    for (let i = 0; i < xs.length; i++) {
+      const share = densityAt(density, azimuths[i], elevation) / density.highest;
+      const size = Math.min(SIZES, Math.round(Math.sqrt(share) * SIZES));
+      if (size > 0) bySize[size - 1].push(xs[i], y);
     }
+  }
   return bySize.flatMap((at, i): DotsMark[] =>
     at.length > 0 ? [{ kind: 'dots', at, radius: (largest * (i + 1)) / SIZES, tone: 'ink' }] : [],
   );
+}
+
+/** Places of the dots of a row, the same in every other row. */
+function acrossFrom(start: number, frame: SkyFrame, pitch: number): { xs: number[]; azimuths: number[] } {
+  const xs: number[] = [];
+  for (let x = frame.left + start; x < frame.right; x += pitch) xs.push(x);
+  return { xs, azimuths: xs.map((x) => directionAt(frame, x, frame.below).azimuth) };
 }

@@ -64,9 +64,10 @@ function areaOf(parts: readonly SilhouettePart[]): number {
 /** Shapes on the sheet; a part that runs over the far side of the circle is drawn at both ends. */
 export function outlinesOf(frame: SkyFrame, parts: readonly SilhouettePart[]): Line[] {
   return placed(frame, parts, ({ low, high }, xs) => {
-    const upper = xs.flatMap((x, i) => [x, yOf(frame, high[i])]);
-    const lower = xs.map((x, i) => [x, yOf(frame, low[i])]).reverse();
-    return [[...upper, ...lower.flat()]];
+    const line: Line = [];
+    for (let i = 0; i < xs.length; i++) line.push(xs[i], yOf(frame, high[i]));
+    for (let i = xs.length - 1; i >= 0; i--) line.push(xs[i], yOf(frame, low[i]));
+    return [line];
   });
 }
 
@@ -98,13 +99,15 @@ function thinned(frame: SkyFrame, { azimuth, low, high, walls }: SilhouettePart)
   const across = (frame.right - frame.left) / frame.span;
   const up = (frame.below - frame.above) / frame.top;
   let last = 0;
-  const kept = azimuth.flatMap((_, i) => {
-    const moved = (values: number[], scale: number) => Math.abs(values[i] - values[last]) * scale > FINEST;
-    const keep =
-      i === 0 || i === azimuth.length - 1 || moved(azimuth, across) || moved(low, up) || moved(high, up);
-    if (keep) last = i;
-    return keep ? [i] : [];
-  });
+  const kept: number[] = [];
+  const moved = (values: number[], i: number, scale: number) =>
+    Math.abs(values[i] - values[last]) * scale > FINEST;
+  for (let i = 0; i < azimuth.length; i++) {
+    const isEnd = i === 0 || i === azimuth.length - 1;
+    if (!(isEnd || moved(azimuth, i, across) || moved(low, i, up) || moved(high, i, up))) continue;
+    kept.push(i);
+    last = i;
+  }
   const pick = (values: number[]) => kept.map((i) => values[i]);
   return { azimuth: pick(azimuth), low: pick(low), high: pick(high), walls };
 }
@@ -129,7 +132,7 @@ function placed(frame: SkyFrame, parts: readonly SilhouettePart[], draw: Draw): 
 
 /** Whether nothing of a shape stands in the window. */
 export const isOutside = (frame: SkyFrame, { parts, before }: ObstructionShape): boolean =>
-  outlinesOf(frame, before ?? parts).length === 0;
+  placed(frame, before ?? parts, () => [[]]).length === 0;
 
 /** Hatched shapes; what passes light lets the drawing under it through, what is imagined away is a broken line. */
 export function obstructionMarks(frame: SkyFrame, shapes: readonly ObstructionShape[]): Mark[] {

@@ -40,13 +40,14 @@ export function dayLabels(
 ): Mark[] {
   return days.flatMap(({ label, path }): Mark[] => {
     const width = textWidth(label, size);
-    const spots = onSheet(frame, path)
-      .flatMap(spotsOf)
-      .filter((spot) => !hidden(spot));
+    const spots = onSheet(frame, path).flatMap(spotsOf);
     const middle = (frame.left + frame.right) / 2;
     const offset = (frame.right - frame.left) * 0.06;
     spots.sort((a, b) => Math.abs(a.x - middle + offset) - Math.abs(b.x - middle + offset));
-    const place = places.take(spots.map(({ x, y }) => boxAround(x, y + size * 0.35, width, size)));
+    const boxes = function* () {
+      for (const spot of spots) if (!hidden(spot)) yield boxAround(spot.x, spot.y + size * 0.35, width, size);
+    };
+    const place = places.take(boxes());
     return place
       ? [{ kind: 'text', x: place.x, y: place.y, text: label, size, anchor: 'middle', rim: true }]
       : [];

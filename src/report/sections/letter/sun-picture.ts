@@ -1,7 +1,7 @@
 import { rangesBetween } from '../../../core/angles/azimuth-ranges.ts';
 import type { Block } from '../../contents/report-contents.ts';
 import type { PictureWords } from '../../pictures/picture-words.ts';
-import { smoothDensity } from '../../pictures/smooth-density.ts';
+import { halved, smoothDensity } from '../../pictures/smooth-density.ts';
 import type { DayLine, HourLine } from '../../pictures/sun-lines.ts';
 import { dayLines, hourLines } from '../../pictures/sun-lines.ts';
 import { unrolledHorizon } from '../../pictures/unrolled-horizon.ts';
@@ -41,7 +41,7 @@ export function sunPicture(
     {
       site,
       shade,
-      density: smoothDensity(shade.density),
+      density: smoothDensity(halved(shade.density)),
       days,
       hours,
       names: new Map(obstructions.map(({ id }) => [id, nameOf(id)])),
