@@ -27,6 +27,7 @@ import { reportContents } from '../../src/report/report-contents.ts';
 import { exactness } from './exactness.ts';
 import { frameTimes, frameWords } from './frames.ts';
 import { assessMemory } from './memory.ts';
+import { pdfTimes, pdfWords } from './pdf-time.ts';
 import { builtSizes } from './sizes.ts';
 import { medians } from './timing.ts';
 
@@ -115,6 +116,7 @@ const times = medians(
 const built = await withBuiltApp(async (folder) => ({
   sizes: builtSizes(folder),
   frames: await frameTimes(folder),
+  pdf: await pdfTimes(folder),
 }));
 
 const results = {
@@ -133,6 +135,7 @@ const results = {
   assessMemoryMB: { value: assessMemory(SURVEY), bar: 200 },
   gzippedKB: { ...built.sizes, bars: { firstScreen: 90, precache: 1200 } },
   frames: built.frames,
+  pdf: built.pdf,
 };
 
 if (process.argv.includes('--json')) console.log(JSON.stringify(results, null, 2));
@@ -150,6 +153,7 @@ function print({
   assessMemoryMB,
   gzippedKB,
   frames,
+  pdf,
 }: typeof results): void {
   console.log(`T0, the library's positions for every minute of a year: ${t0Ms.toFixed(0)} ms`);
   console.log(`Steps of ${stepMinutes} minutes\n`);
@@ -173,6 +177,7 @@ function print({
   );
   console.log(`Whole offline app, gzipped: ${precache.toFixed(1)} kB (bar ${bars.precache})`);
   console.log(`\n${frameWords(frames)}`);
+  console.log(`\n${pdfWords(pdf)}`);
 }
 
 function surveyOf(text: string): Survey {
