@@ -34,18 +34,27 @@ export const compareStamps = (a: Stamp, b: Stamp): number => (a < b ? -1 : a > b
 /** The time in a stamp, Unix time [ms]. Throws RangeError for a text that is no stamp. */
 export const stampTime = (stamp: Stamp): number => read(stamp).timeMs;
 
+/** A stamp at another time, Unix time [ms], with the count and device it has. Throws RangeError like `nextStamp`. */
+export function withTime(stamp: Stamp, timeMs: number): Stamp {
+  const { count, device } = read(stamp);
+  return written(Math.floor(timeMs), count, device);
+}
+
+/** The device in a stamp. Throws RangeError for a text that is no stamp. */
+export const stampDevice = (stamp: Stamp): string => read(stamp).device;
+
 /** Whether a text from outside is a stamp. */
 export function isStamp(text: string): text is Stamp {
   const match = FORM.exec(text);
   return match !== null && !Number.isNaN(Date.parse(match[1]));
 }
 
-function read(stamp: Stamp): { timeMs: number; count: number } {
+function read(stamp: Stamp): { timeMs: number; count: number; device: string } {
   const match = FORM.exec(stamp);
   const timeMs = Date.parse(match?.[1] ?? '');
   if (!match || Number.isNaN(timeMs))
     throw new RangeError(`stamp must be a stamp, got ${JSON.stringify(stamp)}`);
-  return { timeMs, count: Number.parseInt(match[2], 36) };
+  return { timeMs, count: Number.parseInt(match[2], 36), device: match[3] };
 }
 
 function written(timeMs: number, count: number, device: string): Stamp {
