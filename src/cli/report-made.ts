@@ -85,7 +85,7 @@ async function comparison(
     message: `Its site lies ${Math.round(apart)} m from that of the report; it is assessed with the other's climate.`,
   };
   return {
-    value: { name, assessment },
+    value: { name, assessment, sameSurvey: false },
     warnings: apart > 200 ? [within(against, warning)] : [],
   };
 }

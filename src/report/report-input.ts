@@ -25,6 +25,8 @@ export interface ComparedAssessment {
   /** What it is, in the report's language or in the surveyor's own words. */
   name: string;
   assessment: Assessment;
+  /** This very survey with something thought away: both err alike, so that their difference is surer than their ranges. */
+  sameSurvey: boolean;
 }
 
 /** Who makes the report; all of it may be empty. */

@@ -22,11 +22,13 @@ export interface RoofBarsInput {
   /** Under the axis. */
   axis: string;
   width: number;
+  /** More bars than this have their names beside them. */
+  mostUnderNames?: number;
 }
 
 const SIZE = 13.5;
 const BAR = 16;
-/** More bars than this have their names beside them, so that a page holds them. */
+/** So that a page holds them. */
 const MOST_UNDER_NAMES = 3;
 const WIDEST_NAME = 0.34;
 
@@ -43,9 +45,12 @@ interface Layout {
  * A bar for each plane, as long as its light with nothing in the way: ink for what arrives, hatched for what shade takes, a
  * whisker for the range. A plane that nobody measured is an empty, broken outline.
  */
-export function roofBars({ bars, axis, width }: RoofBarsInput, words: PictureWords = ENGLISH): Picture {
+export function roofBars(
+  { bars, axis, width, mostUnderNames = MOST_UNDER_NAMES }: RoofBarsInput,
+  words: PictureWords = ENGLISH,
+): Picture {
   const most = Math.max(0.01, ...bars.map(({ unshaded }) => unshaded));
-  const layout = layoutOf(bars, most, width);
+  const layout = layoutOf(bars, most, width, bars.length > mostUnderNames);
   const foot = bars.length * layout.row;
   const under = foot + 2 * SIZE + 12;
   return {
@@ -59,13 +64,10 @@ export function roofBars({ bars, axis, width }: RoofBarsInput, words: PictureWor
   };
 }
 
-function layoutOf(bars: readonly RoofBar[], most: number, width: number): Layout {
+function layoutOf(bars: readonly RoofBar[], most: number, width: number, isBeside: boolean): Layout {
   const widest = (texts: string[]) => Math.max(0, ...texts.map((text) => textWidth(text, SIZE, true)));
   const values = widest(bars.map(({ value }) => value));
-  const names =
-    bars.length > MOST_UNDER_NAMES
-      ? Math.min(WIDEST_NAME * width, widest(bars.map(({ name }) => name)))
-      : null;
+  const names = isBeside ? Math.min(WIDEST_NAME * width, widest(bars.map(({ name }) => name))) : null;
   const left = names === null ? 1 : names + 10;
   const right = Math.max(left + width / 4, width - values - 12);
   return {

@@ -1,4 +1,3 @@
-import { compared } from './compared.ts';
 import { fieldBook } from './evidence/field-book.ts';
 import { headingEvidence } from './evidence/heading-evidence.ts';
 import { method } from './evidence/method.ts';
@@ -10,6 +9,7 @@ import { programmeTable } from './evidence/programme-table.ts';
 import { siteFacts } from './evidence/site-facts.ts';
 import { atAGlance } from './letter/at-a-glance.ts';
 import { cautions } from './letter/cautions.ts';
+import { compared } from './letter/compared.ts';
 import { howItMayChange } from './letter/how-it-may-change.ts';
 import { howSure } from './letter/how-sure.ts';
 import { monthByMonth } from './letter/month-by-month.ts';

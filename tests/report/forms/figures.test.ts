@@ -105,7 +105,7 @@ describe('figures of a report', () => {
 
   it('name what the survey is compared with', async () => {
     const report = await suburban();
-    const compared = { name: 'Visit of 2024', assessment: report.assessment };
+    const compared = { name: 'Visit of 2024', assessment: report.assessment, sameSurvey: false };
     const rows = figuresOf({ ...report, compared });
     expect(rows.filter(({ compared: name }) => name === 'Visit of 2024')).toEqual(
       assessmentFigures(report.assessment, 'Visit of 2024'),
@@ -140,7 +140,9 @@ describe('figures as CSV', () => {
       for (const entry of [plane, ...plane.stations, ...plane.stations.flatMap((one) => one.obstructions)])
         entry.name = name;
     for (const entry of [...survey.planes, ...survey.stations, ...survey.obstructions]) entry.name = name;
-    const rows = csvRows(figuresCsv(figuresOf({ ...report, compared: { name, assessment } })));
+    const rows = csvRows(
+      figuresCsv(figuresOf({ ...report, compared: { name, assessment, sameSurvey: false } })),
+    );
     expect(rows[0].slice(0, 3)).toEqual(['quantity', 'plane', 'station']);
     expect(rows.filter((row) => row.length !== rows[0].length)).toEqual([]);
     const formulas = rows

@@ -89,19 +89,3 @@ describe('a survey taken with a phone', () => {
     expect(textOf(sectionOf(report, 'method').blocks[0])).toContain('R. Vance');
   });
 });
-
-describe('beside another visit', () => {
-  test('months stand side by side, and ranges that meet are called what they are', async () => {
-    const survey = sampleSurvey('terrace-chimneys-mast-balcony.json');
-    const report = await reportOf(survey);
-    const open = await reportOf({ ...survey, stations: survey.stations.map((s) => ({ ...s, traces: [] })) });
-    const section = sectionOf(
-      { ...report, compared: { name: 'With nothing in the way', assessment: open.assessment } },
-      'compared',
-    );
-    expect(textOf(section.blocks[0])).toContain('less sunlight here');
-    const table = tablesOf(section)[0];
-    expect(table.rows.map((row) => row[2])).toEqual(Array(12).fill('100%'));
-    expect(table.sums![0][1]).toBe(`${Math.round(100 * report.assessment.planes[0].solarAccess!.annual)}%`);
-  });
-});

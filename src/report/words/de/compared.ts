@@ -10,6 +10,10 @@ export const DE_COMPARED = {
     `${roof}: Hier kommen ${now} des Sonnenlichts an, bei „${name}“ ebenso viel.`,
   'compared.not-sure':
     'Beide Werte haben eine Spanne, und die Spannen überschneiden sich. Der Unterschied kann also allein vom Messen kommen.',
+  'compared.shared':
+    'Beide Werte beruhen auf derselben Messung. Der Unterschied ist deshalb sicherer, als die Spannen vermuten lassen.',
+  'compared.not-both': (roof: string) =>
+    `${roof} wurde nicht in beiden Fällen gemessen. Ein Vergleich ist daher nicht möglich.`,
   'compared.this': 'Hier',
   'compared.months-caption': (roof: string) => `${roof}: Sonnenlicht, das ankommt, Monat für Monat`,
   'compared.month': 'Monat',

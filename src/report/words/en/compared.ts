@@ -10,6 +10,9 @@ export const EN_COMPARED = {
     `${roof} gets ${now} of its sunlight here, and the same in “${name}”.`,
   'compared.not-sure':
     'Both figures have a range, and the ranges meet. So the difference may come from measuring alone.',
+  'compared.shared':
+    'Both figures come from the same measuring. So the difference is surer than the ranges look.',
+  'compared.not-both': (roof: string) => `${roof} was not measured in both. So we cannot compare it.`,
   'compared.this': 'Here',
   'compared.months-caption': (roof: string) => `${roof}: sunlight that arrives, month by month`,
   'compared.month': 'Month',

@@ -10,6 +10,10 @@ export const ES_COMPARED = {
     `${roof}: aquí llega el ${now} de la luz del sol, y lo mismo en «${name}».`,
   'compared.not-sure':
     'Las dos cifras tienen un margen, y los márgenes se tocan. Así que la diferencia puede venir solo de la medición.',
+  'compared.shared':
+    'Las dos cifras salen de la misma medición. Por eso la diferencia es más segura de lo que hacen pensar los márgenes.',
+  'compared.not-both': (roof: string) =>
+    `${roof} no se midió en los dos casos. Así que no se puede comparar.`,
   'compared.this': 'Aquí',
   'compared.months-caption': (roof: string) => `${roof}: luz del sol que llega, mes a mes`,
   'compared.month': 'Mes',

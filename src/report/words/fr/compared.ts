@@ -10,6 +10,10 @@ export const FR_COMPARED = {
     `${roof}\u202f: ici, il arrive ${now} de la lumière du soleil, et autant dans «\u202f${name}\u202f».`,
   'compared.not-sure':
     'Les deux chiffres ont une fourchette, et les fourchettes se touchent. La différence peut donc venir de la mesure seule.',
+  'compared.shared':
+    'Les deux chiffres viennent de la même mesure. La différence est donc plus sûre que les fourchettes ne le laissent croire.',
+  'compared.not-both': (roof: string) =>
+    `${roof}\u202f: pas de mesure dans les deux cas. La comparaison n’est donc pas possible.`,
   'compared.this': 'Ici',
   'compared.months-caption': (roof: string) => `${roof}\u202f: lumière du soleil qui arrive, mois par mois`,
   'compared.month': 'Mois',

@@ -81,5 +81,5 @@ function comparedOf(
 ): ComparedAssessment {
   const { words } = LANGUAGES.find(({ id }) => id === language)!;
   const name = without === null ? (title ?? '') : words['compared.without'](without);
-  return { name, assessment };
+  return { name, assessment, sameSurvey: without !== null };
 }
