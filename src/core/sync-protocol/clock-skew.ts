@@ -38,6 +38,8 @@ export interface Rebase {
   skewMs: number;
   /** The server's time at contact, Unix time [ms]. */
   contactMs: number;
+  /** The newest stamp this device made or saw, from which it makes the next; null where there is none. */
+  last: Stamp | null;
   /** The newest stamp of this device at its last sending, or null: only later ones may move. */
   sentUpTo: Stamp | null;
 }
@@ -45,15 +47,14 @@ export interface Rebase {
 /**
  * New stamps for those that a device made by a wrong clock and never sent. Each moves by the skew (none within
  * `TOLERATED_SKEW_MS`), at most to the time of the contact, since nothing was written after it; their order stays, and
- * each stays later than the versions its writer had seen (`over`). Gives only stamps that move; the device's newest
- * stamp, from which it makes the next, moves with them.
+ * each stays later than what was sent before and than the versions its writer had seen (`over`). Gives only stamps that move, `last` with them.
  */
 export function rebasedStamps(rows: readonly Row[], rebase: Rebase): Map<Stamp, Stamp> {
   const { skewMs, contactMs } = rebase;
   const floors = ownStamps(rows, rebase);
   const shift = Math.abs(skewMs) > TOLERATED_SKEW_MS ? skewMs : 0;
   const moved = new Map<Stamp, Stamp>();
-  let last: Stamp | null = null;
+  let last = rebase.sentUpTo;
   for (const [stamp, seen] of [...floors].sort(([a], [b]) => compareStamps(a, b))) {
     const shifted = stampTime(stamp) + shift;
     const time = shifted > contactMs + (shift === 0 ? TOLERATED_SKEW_MS : 0) ? contactMs : shifted;
@@ -73,13 +74,14 @@ const stampAfter = (floor: Stamp | null, stamp: Stamp): Stamp =>
 const newer = (a: Stamp | null, b: Stamp): Stamp => (a === null || compareStamps(b, a) > 0 ? b : a);
 
 /** The unsent stamps of the device in rows, each with what its writers had seen. */
-function ownStamps(rows: readonly Row[], { device, sentUpTo }: Rebase): Map<Stamp, Stamp[]> {
+function ownStamps(rows: readonly Row[], { device, last, sentUpTo }: Rebase): Map<Stamp, Stamp[]> {
   const own = new Map<Stamp, Stamp[]>();
   const add = (stamp: Stamp | null | undefined, seen: readonly Stamp[] = []) => {
     if (!stamp || stampDevice(stamp) !== device) return;
     if (sentUpTo === null || compareStamps(stamp, sentUpTo) > 0)
       own.set(stamp, [...(own.get(stamp) ?? []), ...seen.filter((other) => other !== stamp)]);
   };
+  add(last);
   for (const row of rows)
     if (row.kind === 'reading') [row.removed, row.returned].forEach((stamp) => add(stamp));
     else if (row.kind !== 'field') add(row.stamp);

@@ -51,7 +51,7 @@ const row: fc.Arbitrary<Row> = fc.oneof(
         },
         { requiredKeys: ['key', 'reading', 'removed'] },
       )
-      .map((made) => ({ kind: 'reading', ...made }) as Row),
+      .map((made) => ({ kind: 'reading', ...made })),
   },
   {
     weight: 2,
