@@ -56,17 +56,15 @@ async function offlinePhone(): Promise<Page> {
 
 interface Spot {
   plane: string;
-  along: string;
-  up: string;
+  place: string;
   /** How high the houses opposite stand from here, degrees. */
   houses: number;
-  kind: string;
 }
 
 const SPOTS: Spot[] = [
-  { plane: 'South roof', along: '1', up: '1', houses: 14, kind: 'Building' },
-  { plane: 'South roof', along: '5', up: '2.5', houses: 11, kind: 'Building' },
-  { plane: 'West roof', along: '2', up: '2', houses: 17, kind: 'Building' },
+  { plane: 'South roof', place: 'lower left corner', houses: 14 },
+  { plane: 'South roof', place: 'centre', houses: 11 },
+  { plane: 'West roof', place: 'centre', houses: 17 },
 ];
 
 describe('a whole survey by one hand, offline', () => {
@@ -76,15 +74,20 @@ describe('a whole survey by one hand, offline', () => {
     const hand = new CountingHand(page);
     await start(page, hand);
     hand.lap('start');
-    await addPlane(page, hand, { tilt: '35', bearing: '180' });
-    await addPlane(page, hand, { tilt: '35', bearing: '270' });
+    await addPlane(page, hand, { tilt: '35', bearing: '180', width: '9.2', slopeLength: '4.8' });
+    await addPlane(page, hand, { tilt: '35', bearing: '270', width: '6', slopeLength: '4.8' });
     hand.lap('two planes');
     await hand.link('Stations');
+    await hand.link('Add a station');
     for (const [place, spot] of SPOTS.entries()) {
-      if (place > 0) await hand.link('All stations');
-      await sightFrom(page, hand, phone, spot);
+      const before = SPOTS[place - 1];
+      await addStation(page, hand, spot, before);
+      await sightFrom(page, hand, phone, spot, before);
+      if (place < SPOTS.length - 1) await hand.button('Next station');
       hand.lap(`station ${place + 1}`);
     }
+    await hand.button('Done');
+    await page.getByText('Has 1 trace').waitFor();
     phone.put();
     await hand.link('To do');
     await page.getByRole('heading', { name: 'Before you climb down' }).waitFor();
@@ -119,42 +122,46 @@ async function start(page: Page, hand: CountingHand): Promise<void> {
   await page.getByRole('heading', { name: 'Roof planes' }).waitFor();
 }
 
-async function addPlane(page: Page, hand: CountingHand, typed: { tilt: string; bearing: string }) {
+async function addPlane(
+  page: Page,
+  hand: CountingHand,
+  typed: Record<'tilt' | 'bearing' | 'width' | 'slopeLength', string>,
+) {
   await hand.button('Add a plane');
   await hand.type('Tilt', typed.tilt);
   await hand.type('Bearing (degrees)', typed.bearing);
+  await hand.type('Width along the eave (metres)', typed.width);
+  await hand.type('Length up the slope (metres)', typed.slopeLength);
   await hand.button('Add the plane');
   await page.getByRole('button', { name: 'Add a plane' }).waitFor();
 }
 
-/** Adds a station, checks the heading by a mark, sweeps along the houses opposite, and calls the rest open. */
-async function sightFrom(page: Page, hand: CountingHand, phone: HeldPhone, spot: Spot): Promise<void> {
-  await hand.link('Add a station');
-  await hand.choose('Place', `On ${spot.plane}`);
-  await page.getByLabel('Along the eave').fill(spot.along);
-  await page.getByLabel('Up the slope').fill(spot.up);
-  hand.taps += 2;
-  hand.keys += spot.along.length + spot.up.length;
+/** Stands a station on a corner or the centre of its plane; the plane of the station before is chosen already. */
+async function addStation(page: Page, hand: CountingHand, spot: Spot, before?: Spot): Promise<void> {
+  await page.getByLabel('Place', { exact: true }).waitFor();
+  if (before?.plane !== spot.plane) await hand.choose('Place', `On ${spot.plane}`);
+  await hand.button(spot.place);
   await hand.button('Add, and sight from it');
+}
+
+/** Checks the heading by a mark, sweeps along the houses opposite, and calls the rest open. */
+async function sightFrom(page: Page, hand: CountingHand, phone: HeldPhone, spot: Spot, before?: Spot) {
   phone.point(look(MARK_BEARING, spot.houses));
-  await hand.button('With the camera');
+  if (!before) await hand.button('With the camera');
   await page.locator('.huge').first().waitFor();
+  await checkHeading(page, hand, before === undefined);
 
-  await hand.button('Heading');
-  await hand.tap(page.getByRole('group', { name: 'Way of checking' }).getByRole('button', { name: 'Mark' }));
-  await hand.type('Mark', 'church');
-  await hand.type('Bearing, degrees', String(MARK_BEARING));
-  await hand.button('Sight the mark');
-  await news(page).getByText('Heading check stored').waitFor();
-
-  await hand.button('Trace');
   phone.point(look(70, 1));
   await nearAzimuth(page, 70);
   await hand.button('Start sweep');
   await phone.move((at) => look(70 + 220 * at, 1 + spot.houses * Math.sin(Math.PI * at)), 5000);
   await hand.button('End sweep');
   await page.getByRole('dialog', { name: 'What is it?' }).waitFor();
-  await hand.tap(page.getByRole('button', { name: spot.kind }).first());
+  await hand.tap(
+    before
+      ? page.getByRole('button', { name: 'Same as last: Building' })
+      : page.getByRole('button', { name: 'Building' }).first(),
+  );
   await news(page).getByText('traced').waitFor();
 
   await hand.button('Open');
@@ -165,8 +172,24 @@ async function sightFrom(page: Page, hand: CountingHand, phone: HeldPhone, spot:
   await nearAzimuth(page, 72);
   await hand.button('Open up to here');
   await news(page).getByText('Looked, and open').waitFor();
-  await hand.button('Done');
-  await page.getByText('Has 1 trace').waitFor();
+}
+
+/** By the church: at the first station it is named, at the others the screen opens with it and goes on by itself. */
+async function checkHeading(page: Page, hand: CountingHand, isFirst: boolean): Promise<void> {
+  if (isFirst) {
+    await hand.button('Heading');
+    await hand.tap(
+      page.getByRole('group', { name: 'Way of checking' }).getByRole('button', { name: 'Mark' }),
+    );
+    await hand.type('Mark', 'church');
+  } else {
+    await hand.tap(page.getByRole('group', { name: 'Named before' }).getByRole('button', { name: 'church' }));
+    expect(await page.getByLabel('Bearing, degrees').inputValue()).toBe('');
+  }
+  await hand.type('Bearing, degrees', String(MARK_BEARING));
+  await hand.button('Sight the mark');
+  await news(page).getByText('Heading check stored').waitFor();
+  if (isFirst) await hand.button('Trace');
 }
 
 const nearAzimuth = (page: Page, azimuth: number) =>

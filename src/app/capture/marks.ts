@@ -1,5 +1,7 @@
-import type { Sighting, Station, Survey } from '../../core/survey/survey.ts';
+import { ordered } from '../../core/survey/order.ts';
+import type { HeadingCheck, Sighting, Station, Survey } from '../../core/survey/survey.ts';
 import type { CaptureSession } from './capture-session.ts';
+import { checksOf } from './last-ways.ts';
 import { nextOrder, stationOf, withOwnSighting, withStation } from './station-edits.ts';
 
 /** Names of marks sighted anywhere in the survey. */
@@ -8,6 +10,26 @@ export function marksOf({ stations }: Pick<Survey, 'stations'>): string[] {
     [...traces.flatMap(({ sightings }) => sightings), ...markSightings].flatMap(({ mark }) => mark ?? []),
   );
   return [...new Set(names)];
+}
+
+/** Marks a heading may be checked by: those of earlier checks, the last one first, then those sighted. */
+export const checkMarksOf = (survey: Pick<Survey, 'stations'>): string[] => [
+  ...new Set([
+    ...checksOf(survey)
+      .flatMap(({ mark }) => mark ?? [])
+      .reverse(),
+    ...marksOf(survey),
+  ]),
+];
+
+/** The bearing of a mark as it was given at that station last; null where it was not. */
+export function bearingFrom(
+  { headingChecks = [] }: Station,
+  mark: string,
+): { bearing: number; frame: NonNullable<HeadingCheck['frame']> } | null {
+  const { bearing, frame = 'true' } =
+    ordered(headingChecks).findLast((one) => one.mark === mark && one.bearing !== undefined) ?? {};
+  return bearing === undefined ? null : { bearing, frame };
 }
 
 /** A name for one more mark: `M` and the next number that is free. */

@@ -18,7 +18,7 @@ describe('what is unseen of the sun’s band, in one line', () => {
   });
 
   it('leaves out what lies outside the band and what is narrower than a degree', () => {
-    const nothing = 'All of the sun’s band here has been looked at.';
+    const nothing = 'All of the sun’s band has been seen.';
     expect(unseenInBand([part(310, 50, 0.06, false), part(180, 180.9, 0.01)])).toBe(nothing);
     expect(unseenInBand([])).toBe(nothing);
   });

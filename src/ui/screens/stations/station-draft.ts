@@ -1,5 +1,7 @@
 import { freeStationName, type StationFacts } from '../../../app/capture/edit-station.ts';
+import { arrayPlacesOf } from '../../../core/survey/array-places.ts';
 import type { LengthUnit } from '../../../core/pointing/tape-length.ts';
+import { ordered } from '../../../core/survey/order.ts';
 import type { RoofPlane, Station, StationPosition, Survey } from '../../../core/survey/survey.ts';
 import { inUnit, offsetInput, typedOffset } from '../../length-text.ts';
 import { faultOf, valueOf, type Typed } from '../../typed.ts';
@@ -28,15 +30,43 @@ const onPlane = (station: Station | null) =>
 const inFrame = (station: Station | null) =>
   station?.position && !('on' in station.position) ? station.position : undefined;
 
-/** The texts that show a station; a new one stands on the plane somebody comes from, or on the only one. */
+/** The plane a new station is likely to stand on: the one somebody comes from, the last station's, or the only one. */
+function likelyPlane(survey: Survey, plane: string | undefined): RoofPlane | undefined {
+  const { planes } = survey;
+  const last = onPlane(ordered(survey.stations).at(-1) ?? null)?.on;
+  return (
+    planes.find(({ id }) => id === plane) ??
+    planes.find(({ id }) => id === last) ??
+    (planes.length === 1 ? planes[0] : undefined)
+  );
+}
+
+/** A name after the place, unless somebody has typed another one or a station has it already. */
+export function proposedName(
+  draft: StationDraft,
+  survey: Survey,
+  plane: RoofPlane,
+  place: string,
+): Pick<StationDraft, 'name'> {
+  const { name } = draft;
+  const isProposed =
+    name === freeStationName(survey) ||
+    survey.planes.some((one) =>
+      arrayPlacesOf(survey, one).some((known) => name === `${one.name}, ${known.name}`),
+    );
+  const wanted = `${plane.name}, ${place}`;
+  const isTaken = survey.stations.some((station) => station.name === wanted);
+  return { name: !isProposed ? name : isTaken ? freeStationName(survey) : wanted };
+}
+
+/** The texts that show a station; a new one stands on its likely plane. */
 export function stationDraft(
   station: Station | null,
   survey: Survey,
   unit: LengthUnit,
   plane?: string,
 ): StationDraft {
-  const { planes } = survey;
-  const from = planes.find(({ id }) => id === plane) ?? (planes.length === 1 ? planes[0] : undefined);
+  const from = likelyPlane(survey, plane);
   const [place, frame] = [onPlane(station), inFrame(station)];
   const offset = (metres: number | undefined) => offsetInput(metres, unit);
   return {

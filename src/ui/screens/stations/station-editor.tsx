@@ -12,6 +12,7 @@ import { UnitChoice } from '../../components/lengths/unit-choice.tsx';
 import { lengthUnit } from '../../device/length-unit.ts';
 import { navigate } from '../../router.ts';
 import type { SectionProps } from '../../section.ts';
+import { PlaceChoice } from './place-choice.tsx';
 import {
   IN_FRAME,
   nearPlanes,
@@ -44,6 +45,7 @@ export function StationEditor(props: SectionProps & { station: Station | null; p
   const [tried, setTried] = useState(false);
   const { facts, faults } = typedStation(draft, station, survey);
   const serves = draft.serves ?? nearPlanes(draft.on, survey);
+  const plane = survey.planes.find(({ id }) => id === draft.on);
   const submit = async () => {
     setTried(true);
     if (!facts) return false;
@@ -59,7 +61,7 @@ export function StationEditor(props: SectionProps & { station: Station | null; p
     { value: IN_FRAME, label: 'From the site’s one point' },
   ];
   return (
-    <div class="stack">
+    <div class="stack station-form">
       <h2>{station ? `Change ${station.name}` : 'New station'}</h2>
       <Form
         label={station ? 'Station' : 'New station'}
@@ -76,6 +78,7 @@ export function StationEditor(props: SectionProps & { station: Station | null; p
           maxLength={200}
         />
         <ChoiceField label="Place" value={draft.on} options={places} onChoose={(on) => change({ on })} />
+        {!station && plane && <PlaceChoice draft={draft} survey={survey} plane={plane} onChange={change} />}
         <UnitChoice />
         <StationPlace
           draft={draft}

@@ -1,5 +1,8 @@
 import { useMemo } from 'preact/hooks';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
+import { checksOf } from '../../../../app/capture/last-ways.ts';
+import { stationOf } from '../../../../app/capture/station-edits.ts';
+import { isEmpty } from '../../../../core/completeness/kinds/station-empty.ts';
 import type { Station } from '../../../../core/survey/survey.ts';
 import { navigate } from '../../../router.ts';
 import type { SectionProps } from '../../../section.ts';
@@ -50,6 +53,14 @@ function subjectOf({ task, choice }: Sitting, { survey, station }: Pick<Props, '
 
 function sittingFor(session: CaptureSession, stationId: string, start: string | undefined): Sitting {
   const sitting = new Sitting(session, stationId);
+  const { survey } = session.record;
+  const station = stationOf(survey, stationId);
+  sitting.headingFirst =
+    start === undefined &&
+    isEmpty(station) &&
+    (station.headingChecks ?? []).length === 0 &&
+    checksOf(survey).length > 0;
+  if (sitting.headingFirst) sitting.task.value = 'check';
   if (start === 'mark') sitting.task.value = 'mark';
   if (start === 'check' || start === 'faces') sitting.task.value = 'check';
   if (start === 'faces') sitting.checkWay.value = 'two-face';

@@ -7,6 +7,7 @@ import { faultOf, typedNumber, valueOf } from '../../../typed.ts';
 import { checkWords } from '../heading-words.ts';
 import { utmZone } from '../../../../core/pointing/utm.ts';
 import { FacesPanel } from './faces-panel.tsx';
+import { KnownMarks } from './known-marks.tsx';
 import { ShadowHours } from './shadow-hours.tsx';
 import type { CheckWay, Sitting } from './sitting.ts';
 import { Switches, Thumb } from './thumb.tsx';
@@ -30,9 +31,10 @@ export function CheckPanel({ sitting }: { sitting: Sitting }) {
   const way = sitting.checkWay.value;
   useEffect(() => {
     // a shadow is laid along the phone's edge: nobody needs to look towards the sun, nor the camera
+    if (way !== 'sun-shadow') return;
     const before = session.axis.value;
     sitting.sightingAxis = before;
-    if (way === 'sun-shadow') session.axis.value = 'top-edge';
+    session.axis.value = 'top-edge';
     return () => {
       session.axis.value = before;
     };
@@ -109,6 +111,21 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
             <Measured label="Bearing, degrees" value={bearing} onInput={setBearing} />
           )}
         </div>
+      )}
+      {needsBearing && (
+        <KnownMarks
+          sitting={sitting}
+          mark={mark.trim()}
+          onMark={setMark}
+          onBearing={
+            method === 'known-mark'
+              ? (known) => {
+                  setBearing(String(known.bearing));
+                  setFrame(known.frame);
+                }
+              : undefined
+          }
+        />
       )}
       {method === 'known-mark' && (
         <Switches label="North of the bearing" value={frame} options={FRAMES} onChoose={setFrame} />

@@ -1,3 +1,4 @@
+import type { ComponentChildren } from 'preact';
 import type { StoredNews } from '../../../../app/capture/capture-news.ts';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import { newsWords } from './capture-words.ts';
@@ -13,17 +14,19 @@ function phaseWords({ phase, news }: CaptureSession): string | null {
 }
 
 /** What came of the last tap, and how many readings are safe on the device. */
-export function NewsLine({ session }: { session: CaptureSession }) {
+export function NewsLine(props: { session: CaptureSession; children?: ComponentChildren }) {
+  const { session } = props;
   const news = session.news.value;
   const { stored } = session;
   return (
     <div class="news" data-kind={news?.kind}>
       <p role="status" class="news-text">
-        {phaseWords(session) ?? (news ? newsWords(news) : 'Ready.')}
+        {phaseWords(session) ?? (news ? newsWords(news) : 'Ready. Feet safe, eyes off the sun.')}
       </p>
       <p class="small faint news-count">
         <span class="stored-count">{stored}</span> on this device
       </p>
+      {props.children}
     </div>
   );
 }

@@ -30,6 +30,15 @@ export function SightView({ capture, session }: { capture: Capture; session: Cap
       ) : (
         <TopEdge noCamera={noCamera} />
       )}
+      <button
+        type="button"
+        class="sight-way"
+        aria-label={byCamera ? 'Sight along the top edge' : 'Sight with the camera'}
+        disabled={session.phase.value !== 'idle'}
+        onClick={() => capture.sightWith(byCamera ? 'top-edge' : 'camera')}
+      >
+        {byCamera ? 'Top edge' : 'Camera'}
+      </button>
     </div>
   );
 }

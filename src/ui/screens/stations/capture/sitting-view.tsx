@@ -11,6 +11,7 @@ import { CheckPanel } from './check-panel.tsx';
 import { Figures } from './figures.tsx';
 import { HeadingBanner } from './heading-banner.tsx';
 import { MarkPanel } from './mark-panel.tsx';
+import { NextStation } from './next-station.tsx';
 import { NewsLine } from './news-line.tsx';
 import { OpenPanel } from './open-panel.tsx';
 import { RecordingBar } from './recording-bar.tsx';
@@ -55,7 +56,9 @@ export function SittingView(props: Props) {
         {task !== 'check' && (
           <HeadingBanner session={session} onCheck={() => (sitting.task.value = 'check')} />
         )}
-        <NewsLine session={session} />
+        <NewsLine session={session}>
+          <NextStation {...props} live={strip.live} />
+        </NewsLine>
         <Switches
           label="Task"
           value={task}

@@ -1,6 +1,7 @@
 import { signal } from '@preact/signals';
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
 import { FacesTake } from '../../../../app/capture/faces-take.ts';
+import { checkMethodLast, checksOf, tracedLast } from '../../../../app/capture/last-ways.ts';
 import { OpenTake } from '../../../../app/capture/open-take.ts';
 import { PointTrace } from '../../../../app/capture/point-trace.ts';
 import { SweepTake } from '../../../../app/capture/sweep-take.ts';
@@ -16,6 +17,8 @@ export type Task = 'trace' | 'open' | 'mark' | 'check';
 export class Sitting {
   readonly task = signal<Task>('trace');
   readonly checkWay = signal<CheckWay>('sun-shadow');
+  /** Opened with the heading, as at the stations before: a good check leads on to tracing. */
+  headingFirst = false;
   readonly choice = signal<TraceChoice>({
     obstruction: null,
     shape: 'skyline',
@@ -30,9 +33,8 @@ export class Sitting {
   readonly faces: FacesTake;
   /** The heading check taken last. */
   readonly lastCheck = signal<string | null>(null);
-  /** What things are sighted with, whatever a shadow is laid along. */
+  /** What things are sighted with while a shadow is laid along the phone's edge. */
   sightingAxis: SightingAxis;
-
   constructor(
     readonly session: CaptureSession,
     readonly stationId: string,
@@ -42,6 +44,9 @@ export class Sitting {
     this.open = new OpenTake(session, stationId);
     this.faces = new FacesTake(session, stationId);
     this.sightingAxis = session.axis.peek();
+    const { survey } = session.record;
+    this.checkWay.value = checkMethodLast(survey) ?? 'sun-shadow';
+    this.last.value = tracedLast(survey);
   }
 
   /** Whether the shadow of the sun is laid along the phone's edge: nobody needs a picture then. */
@@ -49,13 +54,29 @@ export class Sitting {
     return this.task.value === 'check' && this.checkWay.value === 'sun-shadow';
   }
 
-  /** After a heading check: on to the two-face check, where this phone has none yet. */
+  /** After a heading check: once in a survey on to the two-face check; else on to tracing, if the check was good. */
   checked({ id, reading }: { id: string; reading: Reading }, mark: string): void {
     this.lastCheck.value = id;
     const axis = reading.axis ?? 'camera';
-    const isOfMark = mark !== '' && axis === this.sightingAxis;
-    if (this.faces.leadOn(this.sightingAxis, isOfMark ? reading : null, mark))
+    const { session } = this;
+    const sighted = this.byShadow ? this.sightingAxis : session.axis.value;
+    const isOfMark = mark !== '' && axis === sighted;
+    const isFirst = checksOf(session.record.survey).length === 1;
+    if (isFirst && this.faces.leadOn(sighted, isOfMark ? reading : null, mark))
       this.checkWay.value = 'two-face';
+    else if (this.headingFirst && this.isGood(id)) this.task.value = 'trace';
+  }
+
+  /** Whether a check counts and nothing speaks against it. */
+  private isGood(id: string): boolean {
+    const pointed = this.session.pointed.value;
+    const found = pointed?.runs.flatMap(({ checks }) => checks).find(({ check }) => check === id);
+    return (
+      found !== undefined &&
+      found.offset !== null &&
+      !found.refused &&
+      !pointed?.warnings.some(({ path }) => path.startsWith(found.path))
+    );
   }
 
   choose(part: Partial<TraceChoice>): void {

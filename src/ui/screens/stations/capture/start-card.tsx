@@ -1,6 +1,12 @@
 import type { CaptureSession } from '../../../../app/capture/capture-session.ts';
+import { sightingWay } from '../../../device/sighting-way.ts';
 import { SENSOR_FAILED } from './capture-words.ts';
 import type { Capture } from './use-capture.ts';
+
+const WAYS = [
+  { axis: 'top-edge', label: 'Along the top edge' },
+  { axis: 'camera', label: 'With the camera' },
+] as const;
 
 /** The first tap: it may ask for permission, and says how to sight. */
 export function StartCard({ capture, children }: { capture: Capture; children?: preact.ComponentChildren }) {
@@ -26,17 +32,17 @@ export function StartCard({ capture, children }: { capture: Capture; children?: 
       )}
       <p role="status">{waiting ? 'Asking the sensor…' : ''}</p>
       <div class="thumbs">
-        <button type="button" class="thumb" disabled={waiting} onClick={() => capture.begin('top-edge')}>
-          Along the top edge
-        </button>
-        <button
-          type="button"
-          class={`thumb ${capture.mayPlay ? '' : 'main'}`}
-          disabled={waiting}
-          onClick={() => capture.begin('camera')}
-        >
-          With the camera
-        </button>
+        {WAYS.map(({ axis, label }) => (
+          <button
+            key={axis}
+            type="button"
+            class={`thumb ${!capture.mayPlay && axis === sightingWay.value ? 'main' : ''}`}
+            disabled={waiting}
+            onClick={() => capture.begin(axis)}
+          >
+            {label}
+          </button>
+        ))}
       </div>
     </div>
   );

@@ -7,12 +7,16 @@ const NARROWEST = 1;
 
 const whole = (azimuth: number) => Math.round(azimuth) % 360;
 
-/** What of the sun's band nobody has looked at, the greatest share of the light, in one line; the picture shows all. */
-export function unseenInBand(unseen: readonly UnseenRange[]): string {
-  const open = unseen
+/** What of the sun's band nobody has looked at, the greatest share of the light first. */
+export const unseenRanges = (unseen: readonly UnseenRange[]): UnseenRange[] =>
+  unseen
     .filter(({ from, to, inSunBand }) => inSunBand && widthOf(from, to) >= NARROWEST)
     .sort((a, b) => b.share - a.share);
-  if (open.length === 0) return 'All of the sun’s band here has been looked at.';
+
+/** What of the sun's band nobody has looked at, the greatest share of the light, in one line; the picture shows all. */
+export function unseenInBand(unseen: readonly UnseenRange[]): string {
+  const open = unseenRanges(unseen);
+  if (open.length === 0) return 'All of the sun’s band has been seen.';
   const [{ from, to, share }] = open;
   const more = open.length > 1 ? `; ${open.length - 1} more` : '';
   return `Unseen: ${whole(from)}° to ${whole(to)}°, ${percentText(share)} of light${more}.`;
