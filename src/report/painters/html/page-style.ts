@@ -126,8 +126,8 @@ section{margin-top:18pt;padding-top:7pt}
 main>div:first-child>.starts-page:first-child{break-before:auto}
 h2,h3,.part,.answer,caption,.figures dt,p:has(+figure),p:has(+.scroll){break-after:avoid}
 p,li,dd{orphans:3;widows:3}
-.answer,figure,.short,.figures,.figures>div,tr,.pairs>div,.caution,.photos figure{break-inside:avoid}
-figcaption,caption{break-before:avoid}
+.answer,figure,.short,.scroll:has(.short),p:has(+.scroll),.figures,.figures>div,tr,.pairs>div,.caution,.photos figure{break-inside:avoid}
+figcaption,li+li:last-child{break-before:avoid}
 .scroll{overflow:visible}
 thead{display:table-header-group}
 table{font-size:9pt}

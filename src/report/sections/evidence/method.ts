@@ -51,7 +51,7 @@ function pairsOf(report: ReportInput, speech: Speech): { term: string; text: str
     [words['method.place'], place],
     [words['method.clock'], site.timeZone],
     [words['method.climate'], sentences(assessment.climate.name, assessment.climate.reference)],
-    [words['method.transposition'], sentences(name, reference)],
+    [words['method.transposition'], reference.startsWith(name) ? reference : sentences(name, reference)],
     [words['method.sun'], words['method.sun-text'](assessment.stepMinutes)],
     [words['method.albedo'], speech.percent(site.albedo ?? 0.2)],
     [

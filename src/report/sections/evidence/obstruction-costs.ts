@@ -52,8 +52,8 @@ function costTable(plane: string, station: StationAssessment, survey: Survey, sp
       { head: words['costs.obstruction'] },
       { head: words['costs.gain'], number: true },
       { head: words['costs.loss'], number: true },
-      { head: words['costs.distance'] },
-      { head: words['costs.passes'] },
+      { head: words['costs.distance'], number: true },
+      { head: words['costs.passes'], number: true },
     ],
     rows: station.obstructions.map(({ id, name, gainIfRemoved, lossIfAlone }) => {
       const obstruction = known.get(id);

@@ -4,6 +4,7 @@ import type { SectionKind } from '../section-kind.ts';
 export const cautions: SectionKind = {
   id: 'cautions',
   part: 'letter',
+  startsPage: true,
   write: (_report, { words }) => ({
     heading: words['cautions.heading'],
     blocks: [

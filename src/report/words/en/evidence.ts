@@ -6,7 +6,7 @@ export const EN_EVIDENCE = {
   'programme.tilt': 'Tilt',
   'programme.azimuth': 'Azimuth',
   'programme.access': 'Solar access',
-  'programme.interval': '95 % interval',
+  'programme.interval': '95% interval',
   'programme.orientation': 'Orientation factor',
   'programme.product': 'Access × orientation',
   'programme.explained':
@@ -22,7 +22,7 @@ export const EN_EVIDENCE = {
   'programme.met': (value: string) => `${value}, met`,
   'programme.not-met': (value: string) => `${value}, not met`,
   'programme.within-interval': (value: string) =>
-    `${value}; the least asked for lies inside the 95 % interval, so this is not certain`,
+    `${value}; the least asked for lies inside the 95% interval, so this is not certain`,
   'programme.unknown': 'not known',
 
   'costs.heading': 'What each obstruction takes',
@@ -149,7 +149,7 @@ export const EN_EVIDENCE = {
   'method.declination-text': 'World Magnetic Model, its current epoch; applied to magnetic azimuths only.',
   'method.interval': 'Intervals',
   'method.interval-text': (draws: number) =>
-    `Monte Carlo, ${draws} draws with a fixed seed, over pointing, heading, inclination, gaps between sightings, azimuths nobody looked at, what crowns let through, and the climate’s diffuse share; 2.5 % and 97.5 % quantiles.`,
+    `Monte Carlo, ${draws} draws with a fixed seed, over pointing, heading, inclination, gaps between sightings, azimuths nobody looked at, what crowns let through, and the climate’s diffuse share; 2.5% and 97.5% quantiles.`,
   'method.assumptions': 'Assumptions',
   'method.assumption-clear':
     'What nobody looked at counts as clear in the value, and is drawn in the interval.',

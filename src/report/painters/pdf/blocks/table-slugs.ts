@@ -15,6 +15,10 @@ const LEADING = 1.36;
 /** Between columns, in points for each point of type. */
 const BETWEEN = 1.25;
 
+/** After a column of numbers, which end at its right edge, before one of words; beside what stands between columns. */
+const AFTER_NUMBERS = 1;
+/** Up to this many rows a table stands on one page: the months of a year with their sum. */
+const FEW_ROWS = 14;
 /** Heads that take more than this share of a page stand only once. */
 const HIGHEST_REPEATED = 0.3;
 
@@ -43,6 +47,7 @@ export function tableSlugs(table: Table, setting: Setting): Slug[] {
   const body = [...rows, ...sums];
   // no row stands alone at the foot or the head of a page
   for (const row of [rows[0], rows.at(-2)]) if (row) row.keep = true;
+  if (body.length <= FEW_ROWS) for (const row of body.slice(0, -1)) row.keep = true;
   // sums stand with the last row they sum up
   if (rows.length > 0 && sums.length > 0) rows.at(-1)!.keep = true;
   return [
@@ -56,13 +61,21 @@ export function tableSlugs(table: Table, setting: Setting): Slug[] {
 function fitTable(table: Table, setting: Setting): TableSetting {
   for (const size of SIZES) {
     const between = size * BETWEEN;
-    const room = setting.width - between * (table.columns.length - 1);
+    const gaps = table.columns.map(({ number }, column) => {
+      if (column === 0) return 0;
+      return between + (table.columns[column - 1].number && !number ? size * AFTER_NUMBERS : 0);
+    });
+    const room = setting.width - gaps.reduce((sum, gap) => sum + gap, 0);
     const needs = table.columns.map((_, column) => columnNeed(table, column, size, setting));
     const fits = needs.reduce((total, { word }) => total + word, 0) <= room;
     if (!fits && size !== SIZES.at(-1)) continue;
     const widths = tableWidths(needs, Math.max(room, 0));
     let x = setting.left;
-    const lefts = widths.map((width) => (x += width + between) - width - between);
+    const lefts = widths.map((width, column) => {
+      const left = x + gaps[column];
+      x = left + width;
+      return left;
+    });
     return { setting, table, size, lefts, widths };
   }
   throw new RangeError('sizes of a table');
