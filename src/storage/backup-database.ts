@@ -1,13 +1,15 @@
 import { AppError } from '../app/app-error.ts';
 import type { BackupStore, MergeResult, SurveyRows } from '../app/backup/backup-store.ts';
-import { isRecord } from '../core/survey/json-value.ts';
+import { isRecord, type JsonValue } from '../core/survey/json-value.ts';
 import type { Parsed } from '../core/survey/problem.ts';
 import { sameJson } from '../core/survey/same-json.ts';
 import type { Survey } from '../core/survey/survey.ts';
+import { joinVersions } from '../core/sync-protocol/field-versions.ts';
+import { joinReadings, type ReadingState } from '../core/sync-protocol/reading-state.ts';
 import { compareStamps, type Stamp } from '../core/sync-protocol/stamp.ts';
 import type { Connection } from './connection.ts';
-import type { SurveyRow } from './schema.ts';
-import { keysOf, storedDocument, summaryOf } from './survey-rows.ts';
+import type { FieldRow, ReadingRow, SurveyRow } from './schema.ts';
+import { keysOf, storedDocument, summaryOf, versionsIn } from './survey-rows.ts';
 import { reading, writing, type Writing } from './transaction.ts';
 
 export interface BackupDatabaseNeeds {
@@ -20,42 +22,51 @@ export interface BackupDatabaseNeeds {
 const isLater = (stamp: Stamp, than: Stamp | null | undefined): boolean =>
   than === null || than === undefined || compareStamps(stamp, than) > 0;
 
-/** Writes the fields that are later than the stored ones; the number of them. */
+/** Writes the fields in which something is new; the number of them. */
 async function mergeFields(transaction: Writing, { id: survey, fields }: SurveyRows): Promise<number> {
   const store = transaction.objectStore('fields');
-  const stored = new Map((await store.getAll(keysOf(survey))).map((row) => [row.path, row.stamp]));
-  const later = fields.filter(({ path, stamp }) => isLater(stamp, stored.get(path)));
-  await Promise.all(later.map((field) => store.put({ survey, ...field })));
-  return later.length;
+  const stored = new Map((await store.getAll(keysOf(survey))).map((row) => [row.path, row]));
+  const merged = fields.flatMap(({ path, ...field }): FieldRow[] => {
+    const known = stored.get(path);
+    const row = { survey, path, ...joinVersions(known ? versionsIn(known) : field, field) };
+    return known && isSameRow(row, known) ? [] : [row];
+  });
+  await Promise.all(merged.map((row) => store.put(row)));
+  return merged.length;
 }
 
-/**
- * Adds the readings that are not stored; the number of them. One that stands in either copy stands: it is evidence,
- * and something may refer to it.
- */
+/** Joins the readings with those stored; the number of rows in which something is new. */
 async function mergeReadings(transaction: Writing, { id: survey, readings }: SurveyRows): Promise<number> {
   const store = transaction.objectStore('readings');
   const stored = new Map((await store.getAll(keysOf(survey))).map((row) => [row.id, row]));
   let changed = 0;
-  for (const row of readings) {
-    const known = stored.get(row.id);
-    if (known && !sameJson(known.reading, row.reading))
-      throw new AppError('reading-conflict', `${survey}: ${row.id}`);
-    const returns = known && known.removed !== null && row.removed === null;
-    if (known && !returns) continue;
+  for (const { id, ...reading } of readings) {
+    const known = stored.get(id);
+    const row = { survey, id, ...joinReadings(known ?? reading, reading) };
+    if (row.others) throw new AppError('reading-conflict', `${survey}: ${id}`);
+    if (known && isSameRow(row, known)) continue;
     changed++;
-    await store.put({ survey, ...row });
+    await store.put(row);
   }
   return changed;
 }
 
+function readingIn(row: ReadingRow): ReadingState {
+  const { reading, others, removed, returned } = row;
+  return { reading, ...(others && { others }), removed, ...(returned && { returned }) };
+}
+
+const isSameRow = (a: FieldRow | ReadingRow, b: FieldRow | ReadingRow): boolean =>
+  sameJson(a as unknown as JsonValue, b as unknown as JsonValue);
+
 /** Stamps this device gives from now on come after all that came in. */
-async function heedStamps(transaction: Writing, { fields, deletionStamp }: SurveyRows): Promise<void> {
+async function heedStamps(transaction: Writing, rows: SurveyRows): Promise<void> {
+  const marks = rows.readings.flatMap(({ removed, returned }) => [removed, returned]);
   const store = transaction.objectStore('device');
   const last = await store.get('last-stamp');
   let newest = last?.name === 'last-stamp' ? last.stamp : null;
-  for (const stamp of [...fields.map((field) => field.stamp), ...(deletionStamp ? [deletionStamp] : [])])
-    if (isLater(stamp, newest)) newest = stamp;
+  for (const stamp of [...rows.fields.map((field) => field.stamp), ...marks, rows.deletionStamp])
+    if (stamp && isLater(stamp, newest)) newest = stamp;
   if (newest) await store.put({ name: 'last-stamp', stamp: newest });
 }
 
@@ -95,16 +106,8 @@ export function backupDatabase({ connection, checker, now }: BackupDatabaseNeeds
           id,
           deletedAt: row.deletedAt,
           deletionStamp: row.deletionStamp,
-          fields: fields.map(({ path, stamp, value }) => ({
-            path,
-            stamp,
-            ...(value !== undefined && { value }),
-          })),
-          readings: readings.map(({ id: reading_, reading: value, removed }) => ({
-            id: reading_,
-            reading: value,
-            removed,
-          })),
+          fields: fields.map((row) => ({ path: row.path, ...versionsIn(row) })),
+          readings: readings.map((row) => ({ id: row.id, ...readingIn(row) })),
         };
       }),
 

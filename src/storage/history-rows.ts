@@ -1,7 +1,8 @@
 import type { Step, StepRecord, Steps } from '../app/survey-store.ts';
 import type { FieldChange } from '../core/survey/field-changes.ts';
+import { isReadingPath } from '../core/sync-protocol/reading-state.ts';
 import type { HistoryRow } from './schema.ts';
-import { isReadingPath, keysOf } from './survey-rows.ts';
+import { keysOf } from './survey-rows.ts';
 import type { Reading, Writing } from './transaction.ts';
 
 /** Steps kept for each survey; older ones can no longer be taken back. */

@@ -1,5 +1,6 @@
 import type { DBSchema } from 'idb';
-import type { JsonValue } from '../core/survey/json-value.ts';
+import type { FieldVersions } from '../core/sync-protocol/field-versions.ts';
+import type { ReadingState } from '../core/sync-protocol/reading-state.ts';
 import type { Stamp } from '../core/sync-protocol/stamp.ts';
 import type { FieldChange } from '../core/survey/field-changes.ts';
 import type { FormDraft } from '../app/draft-store.ts';
@@ -17,19 +18,15 @@ export interface SurveyRow extends SurveySummary {
 }
 
 /** A field of a survey. A cleared field keeps its row, without `value`, so that its stamp still counts. */
-export interface FieldRow {
+export interface FieldRow extends FieldVersions {
   survey: string;
   path: string;
-  stamp: Stamp;
-  value?: JsonValue;
 }
 
-/** A raw reading: evidence. Its contents are written once; only the mark that it was taken out may change. */
-export interface ReadingRow {
+/** A raw reading: evidence. Its contents are written once; only the marks that it was taken out or put back change. */
+export interface ReadingRow extends ReadingState {
   survey: string;
   id: string;
-  reading: JsonValue;
-  removed: Stamp | null;
 }
 
 /**

@@ -4,6 +4,7 @@ import { fieldsOf, type FieldChange } from '../core/survey/field-changes.ts';
 import { problemInWords } from '../core/survey/path-words.ts';
 import type { Parsed } from '../core/survey/problem.ts';
 import type { Survey } from '../core/survey/survey.ts';
+import type { Stamp } from '../core/sync-protocol/stamp.ts';
 import type { Connection } from './connection.ts';
 import { stampOfAct } from './device-stamps.ts';
 import { addStep, changesOfMove, rowsToMove, stepOf, stepsOf } from './history-rows.ts';
@@ -36,11 +37,13 @@ function lineOf(row: SurveyRow): SurveySummary {
 
 /** Surveys in the database: stamped fields and reading rows, of which the document is the projection. */
 export function surveyDatabase({ connection, checker, now, newId }: SurveyDatabaseNeeds): SurveyStore {
-  const act = <T>(work: (transaction: Writing) => Promise<T>) =>
+  const inOne = <T>(work: (transaction: Writing) => Promise<T>) =>
     connection.run((database) => writing(database, work));
 
-  async function change(transaction: Writing, id: string, changes: FieldChange[]) {
-    await writeChanges(transaction, id, changes, await stampOfAct(transaction, now(), newId));
+  async function change(transaction: Writing, id: string, changes: FieldChange[]): Promise<Stamp> {
+    const stamp = await stampOfAct(transaction, now(), newId);
+    await writeChanges(transaction, id, changes, stamp);
+    return stamp;
   }
 
   /** Writes the line of the list that a document gives. */
@@ -55,20 +58,21 @@ export function surveyDatabase({ connection, checker, now, newId }: SurveyDataba
   }
 
   const markDeleted = (id: string, deletedAt: number | null) =>
-    act(async (transaction) => {
+    inOne(async (transaction) => {
       const row = await rowOf(transaction, id);
       const deletionStamp = await stampOfAct(transaction, now(), newId);
       await transaction.objectStore('surveys').put({ ...row, deletedAt, deletionStamp });
     });
 
-  /** After a change: refuses it where the survey cannot be read any more, and writes the line of the list. */
+  /** After an act's changes: refuses it where the survey cannot be read any more, and writes the line of the list. */
   async function changed(
     transaction: Writing,
     id: string,
     row: SurveyRow,
+    act: Stamp,
     check?: (document: unknown) => Parsed<Survey>,
   ) {
-    const document = await storedDocument(transaction, id);
+    const document = await storedDocument(transaction, id, check && act);
     const parsed = check?.(document);
     if (parsed && !parsed.ok)
       throw new AppError('change-refused', problemInWords(parsed.problems[0], document));
@@ -77,12 +81,12 @@ export function surveyDatabase({ connection, checker, now, newId }: SurveyDataba
 
   async function move(id: string, way: 'undo' | 'redo', number?: number): Promise<Step | null> {
     const check = await checker();
-    return act(async (transaction) => {
+    return inOne(async (transaction) => {
       const row = await rowOf(transaction, id);
       const found = (await rowsToMove(transaction, id))[way];
       if (!found || (number !== undefined && found.number !== number)) return null;
-      await change(transaction, id, await changesOfMove(transaction, found, way));
-      await changed(transaction, id, row, check);
+      const act = await change(transaction, id, await changesOfMove(transaction, found, way));
+      await changed(transaction, id, row, act, check);
       await transaction.objectStore('history').put({ ...found, undone: way === 'undo' });
       return stepOf(found);
     });
@@ -110,7 +114,7 @@ export function surveyDatabase({ connection, checker, now, newId }: SurveyDataba
     },
 
     create: (survey) =>
-      act(async (transaction) => {
+      inOne(async (transaction) => {
         const { id } = survey;
         if (await transaction.objectStore('surveys').get(id)) throw new AppError('survey-exists', id);
         await transaction.objectStore('erased').delete(id);
@@ -120,11 +124,11 @@ export function surveyDatabase({ connection, checker, now, newId }: SurveyDataba
 
     applyChanges: async (id, changes, step) => {
       const check = step && (await checker());
-      return act(async (transaction) => {
+      return inOne(async (transaction) => {
         const row = await rowOf(transaction, id);
-        await change(transaction, id, changes);
+        const act = await change(transaction, id, changes);
         // readings come several times a second: the survey is not read for each, only its time is moved on
-        if (check || changes.some(touchesLine)) await changed(transaction, id, row, check);
+        if (check || changes.some(touchesLine)) await changed(transaction, id, row, act, check);
         else await transaction.objectStore('surveys').put({ ...row, changedAt: now() });
         return step ? addStep(transaction, id, changes, step) : null;
       });
@@ -141,7 +145,7 @@ export function surveyDatabase({ connection, checker, now, newId }: SurveyDataba
     restore: (id) => markDeleted(id, null),
 
     erase: (id) =>
-      act(async (transaction) => {
+      inOne(async (transaction) => {
         await rowOf(transaction, id);
         const stamp = await stampOfAct(transaction, now(), newId);
         await Promise.all([

@@ -2,7 +2,10 @@ import type { FieldChange } from '../core/survey/field-changes.ts';
 import { surveyOf } from '../core/survey/field-changes.ts';
 import { isRecord, type JsonRecord } from '../core/survey/json-value.ts';
 import type { SurveySummary } from '../app/survey-store.ts';
-import type { FieldRow, ReadingRow } from './schema.ts';
+import type { FieldVersions } from '../core/sync-protocol/field-versions.ts';
+import type { Stamp } from '../core/sync-protocol/stamp.ts';
+import { standingFields } from '../core/sync-protocol/standing-fields.ts';
+import type { FieldRow } from './schema.ts';
 import type { Reading, Writing } from './transaction.ts';
 
 /** All keys `[survey, …]` of one survey: a list sorts after every text. */
@@ -10,32 +13,37 @@ export function keysOf(survey: string): IDBKeyRange {
   return IDBKeyRange.bound([survey], [survey, []]);
 }
 
-const READING_PATH = /^readings\/[^/]+$/;
-
-/** Whether a path is that of a raw reading, which has a row of its own and is never put over. */
-export const isReadingPath = (path: string): boolean => READING_PATH.test(path);
-
 const LINE_PATH = /^(?:title|surveyedOn|site(?:\/.*)?|(?:planes|stations|obstructions)(?:\/[^/]+\/id)?)$/;
 
 /** Whether a change of a field may change the survey's line in the list. */
 export const touchesLine = ({ path }: FieldChange): boolean => LINE_PATH.test(path);
 
-function fieldOf({ path, value }: FieldRow): FieldChange {
-  return { path, value };
+/** What a field's row holds beside its key. */
+export function versionsIn(row: FieldRow): FieldVersions {
+  const field: FieldVersions & Partial<FieldRow> = { ...row };
+  delete field.survey;
+  delete field.path;
+  return field;
 }
 
-function readingField({ id, reading, removed }: ReadingRow): FieldChange {
-  return { path: id, value: removed === null ? reading : undefined };
-}
-
-/** The document that a survey's rows make. */
-export async function storedDocument(transaction: Reading | Writing, survey: string): Promise<unknown> {
+/** The document that a survey's rows make; with `act`, what that act deleted is not brought back. */
+export async function storedDocument(
+  transaction: Reading | Writing,
+  survey: string,
+  act?: Stamp,
+): Promise<unknown> {
   const keys = keysOf(survey);
   const [fields, readings] = await Promise.all([
     (transaction as Reading).objectStore('fields').getAll(keys),
     (transaction as Reading).objectStore('readings').getAll(keys),
   ]);
-  return surveyOf([...fields.map(fieldOf), ...readings.map(readingField)]);
+  return surveyOf(
+    standingFields(
+      fields.map((row) => [row.path, row] as const),
+      readings.map((row) => [row.id, row] as const),
+      act,
+    ).fields,
+  );
 }
 
 const textOf = (value: unknown): string | undefined => (typeof value === 'string' ? value : undefined);

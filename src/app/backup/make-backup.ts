@@ -1,5 +1,6 @@
 import { surveyOf } from '../../core/survey/field-changes.ts';
 import { isRecord } from '../../core/survey/json-value.ts';
+import { standingFields } from '../../core/sync-protocol/standing-fields.ts';
 import { fileNameOf } from '../actions/export-survey.ts';
 import { AppError } from '../app-error.ts';
 import type { AppServices } from '../app-services.ts';
@@ -16,11 +17,11 @@ export const archiver = () =>
 
 /** The document that stored rows make. */
 function documentOf({ fields, readings }: SurveyRows): unknown {
-  const standing = readings.map(({ id, reading, removed }) => ({
-    path: id,
-    value: removed === null ? reading : undefined,
-  }));
-  return surveyOf([...fields.map(({ path, value }) => ({ path, value })), ...standing]);
+  const standing = standingFields(
+    fields.map((row) => [row.path, row] as const),
+    readings.map((row) => [row.id, row] as const),
+  );
+  return surveyOf(standing.fields);
 }
 
 /** Hashes of the photos that a document shows. */

@@ -1,10 +1,8 @@
 import { isRecord } from '../../core/survey/json-value.ts';
 import type { Parsed } from '../../core/survey/problem.ts';
+import { isRow } from '../../core/sync-protocol/row-schema.ts';
 import { isStamp } from '../../core/sync-protocol/stamp.ts';
 import type { SurveyRows } from './backup-store.ts';
-
-/** A raw reading has a row of its own. */
-const READING_PATH = /^readings\/[^/]+$/;
 
 const isStampText = (value: unknown): boolean => typeof value === 'string' && isStamp(value);
 
@@ -29,20 +27,11 @@ export function parseRows(text: string, path: string, id: string): Parsed<Survey
   if (deletionStamp !== null && !isStampText(deletionStamp))
     return refused('deletionStamp', 'A stamp or null is needed.');
   const field = fields.findIndex(
-    (row: unknown) =>
-      !isRecord(row) ||
-      typeof row.path !== 'string' ||
-      READING_PATH.test(row.path) ||
-      !isStampText(row.stamp),
+    (row: unknown) => !isRecord(row) || !isRow({ ...row, kind: 'field', key: row.path }),
   );
   if (field >= 0) return refused(`fields[${field}]`, 'A path and a stamp are needed.');
   const reading = readings.findIndex(
-    (row: unknown) =>
-      !isRecord(row) ||
-      typeof row.id !== 'string' ||
-      !READING_PATH.test(row.id) ||
-      !isRecord(row.reading) ||
-      (row.removed !== null && !isStampText(row.removed)),
+    (row: unknown) => !isRecord(row) || !isRow({ ...row, kind: 'reading', key: row.id }),
   );
   if (reading >= 0) return refused(`readings[${reading}]`, 'An id and a raw reading are needed.');
   return { ok: true, value: value as unknown as SurveyRows, warnings: [] };

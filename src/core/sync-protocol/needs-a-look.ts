@@ -32,7 +32,11 @@ const readingRows = (state: SurveyState): ReadingRow[] =>
   [...state.values()].filter((row) => row.kind === 'reading');
 
 /** The fields that stand in a state, for `surveyOf`. */
-export const standingIn = (state: SurveyState) => standingFields(fieldRows(state), readingRows(state));
+export const standingIn = (state: SurveyState) =>
+  standingFields(
+    fieldRows(state).map((row) => [row.key, row] as const),
+    readingRows(state).map((row) => [row.key, row] as const),
+  );
 
 /** What in a state someone should look at. A state without disagreements gives empty lists. */
 export function needsALook(state: SurveyState): NeedsALook {

@@ -4,6 +4,7 @@ import { isRecord } from '../survey/json-value.ts';
 import { LIMITS } from '../survey/limits.ts';
 import { MOST_VERSIONS } from './field-versions.ts';
 import { isReadingPath } from './reading-state.ts';
+import type { Row } from './rows.ts';
 import { isStamp } from './stamp.ts';
 
 /** What one message and one row may hold. */
@@ -123,3 +124,6 @@ export const rowSchema = v.lazy((row) =>
     ? KNOWN[row.kind as keyof typeof KNOWN]
     : otherRow,
 );
+
+/** Whether a value from outside has the shape of a row. */
+export const isRow = (value: unknown): value is Row => v.is(rowSchema, value);

@@ -12,8 +12,8 @@ export interface StandingFields {
   broughtBack: string[];
 }
 
-type Fields = Iterable<Readonly<FieldVersions & { key: string }>>;
-type Readings = Iterable<Readonly<ReadingState & { key: string }>>;
+type Fields = Iterable<readonly [path: string, row: Readonly<FieldVersions>]>;
+type Readings = Iterable<readonly [path: string, row: Readonly<ReadingState>]>;
 
 /** A row's place in its list is no content. */
 const isPlace = (step: string): boolean => step === PLACE || step === 'order';
@@ -27,19 +27,21 @@ const isPlace = (step: string): boolean => step === PLACE || step === 'order';
  *
  * An earlier edit of a field that the deletion took is among that field's lost versions. Deleting the entry once more
  * deletes it for good, since then all of it was seen. Depends on the rows alone, so that all devices show the same.
+ *
+ * With `act`, what that act deleted stays deleted: so a store finds out whether an act leaves a readable survey.
  */
-export function standingFields(fields: Fields, readings: Readings): StandingFields {
-  const rows = new Map([...fields].map((row) => [row.key, row]));
-  const raw = new Map([...readings].map((row) => [row.key, row]));
+export function standingFields(fields: Fields, readings: Readings, act?: Stamp): StandingFields {
+  const rows = new Map(fields);
+  const raw = new Map(readings);
   const values = new Map<string, JsonValue | undefined>();
   const deleted = new Map<string, Stamp>();
   for (const [path, { value, stamp }] of rows) {
     values.set(path, value);
-    if (value === undefined && path.endsWith('/id')) deleted.set(path.slice(0, -3), stamp);
+    if (value === undefined && stamp !== act && path.endsWith('/id')) deleted.set(path.slice(0, -3), stamp);
   }
   for (const [path, row] of raw) {
     values.set(path, isStanding(row) ? row.reading : undefined);
-    if (!isStanding(row) && row.removed) deleted.set(path, row.removed);
+    if (!isStanding(row) && row.removed && row.removed !== act) deleted.set(path, row.removed);
   }
   const broughtBack: string[] = [];
 
@@ -58,7 +60,7 @@ export function standingFields(fields: Fields, readings: Readings): StandingFiel
   }
 
   if (deleted.size > 0) {
-    for (const entry of enteredSince(rows.values(), deleted)) bringBack(entry);
+    for (const entry of enteredSince(rows, deleted)) bringBack(entry);
     let named: string[];
     do {
       named = [...values]
@@ -73,8 +75,8 @@ export function standingFields(fields: Fields, readings: Readings): StandingFiel
 /** Deleted entries in which something was written that the deletion did not see. */
 function enteredSince(fields: Fields, deleted: ReadonlyMap<string, Stamp>): string[] {
   const entries = new Set<string>();
-  for (const { key, value, stamp } of fields) {
-    const steps = key.split('/');
+  for (const [path, { value, stamp }] of fields) {
+    const steps = path.split('/');
     if (isPlace(steps[steps.length - 1])) continue;
     for (let depth = steps.length - 1; depth >= 2; depth--) {
       const entry = steps.slice(0, depth).join('/');

@@ -51,7 +51,7 @@ const row: fc.Arbitrary<Row> = fc.oneof(
         },
         { requiredKeys: ['key', 'reading', 'removed'] },
       )
-      .map((made) => ({ kind: 'reading', ...made })),
+      .map((made): Row => ({ kind: 'reading', ...made })),
   },
   {
     weight: 2,
