@@ -73,8 +73,10 @@ describe('a device that gets full in the middle of a capture', () => {
       await page.getByRole('button', { name: 'Next point' }).tap();
       await news(page).getByText(`Point ${count} stored`).or(refused).waitFor();
     }
-    const alert = page.getByRole('alert').getByText('There is no room left on this device').first();
+    const told = page.getByText('There is no room left on this device').filter({ visible: true });
+    const alert = page.getByRole('alert').filter({ has: told });
     await alert.waitFor();
+    expect(await told.count()).toBe(1);
     const confirmed = await storedCount(page);
     expect(await readingsStored(page)).toBeGreaterThanOrEqual(confirmed);
 
