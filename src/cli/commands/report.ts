@@ -24,12 +24,14 @@ export const report: Command = {
   --html                       one page that needs nothing beside it, to read, send and print
   --pdf                        the same as a PDF file, with its typeface inside; letters that it lacks are boxes
   --csv                        every figure as a table: quantity, plane, station, obstruction, period, value,
-                               low, high, unit, ids, and what it is compared with; unrounded, decimal points
+                               low, high, unit, ids, what it is compared with, run, item, and metres of
+                               change; unrounded, decimal points. --json says what each quantity means
   --json                       the same on standard output (or in --out): { format: "noonmark-figures",
                                version, survey: { id, title, surveyedOn, fingerprint }, madeOn, program,
                                climate, transposition, stepMinutes, quantities, figures: [ … ] }; value is
                                null in a month without sun; period is "year", "month 06", "month 06 hour 13"
-                               (local standard time) or "year azimuth 20 to 41.5"
+                               (local standard time), "year azimuth 20 to 41.5", "month 06 day 21 span 1" and
+                               "stretch 1" for hours and days of shade, an instant for a heading check, or empty
   --out FILE                   where to; for one form at a time. Without it beside the survey, as
                                NAME-report.html, NAME-report.pdf, NAME-figures.csv
   --replace                    writes over a former report of the same name; any other file is left as it is
