@@ -41,7 +41,7 @@ function planeText(plane: PlaneAssessment): string {
   return [
     `${shownName(plane.name)}: tilt ${plane.surfaceTilt}°, facing ${plane.surfaceAzimuth}°`,
     verdict(plane),
-    `Orientation factor ${percent(plane.orientationFactor)} %: a plane lying best here, tilt ${Math.round(bestPlane.surfaceTilt)}°, facing ${Math.round(bestPlane.surfaceAzimuth)}°, is 100 %.`,
+    `Orientation factor ${withInterval(plane.orientationFactor, plane.orientationInterval)} %: a plane lying best here, tilt ${Math.round(bestPlane.surfaceTilt)}°, facing ${Math.round(bestPlane.surfaceAzimuth)}°, is 100 %.`,
     '',
     monthsTable(rows),
     ...plane.stations.map(stationText),

@@ -3,7 +3,7 @@ import type { AccessInterval } from '../core/shading/assessment.ts';
 import { percent } from './table.ts';
 
 /** An access with its interval, percent: "94.2 (92.9 to 95.3)". */
-export const withInterval = (annual: number, interval?: AccessInterval): string =>
+export const withInterval = (annual: number, interval?: Pick<AccessInterval, 'low' | 'high'>): string =>
   interval ? `${percent(annual)} (${percent(interval.low)} to ${percent(interval.high)})` : percent(annual);
 
 /** What the interval mostly comes from, and what would shrink it. */

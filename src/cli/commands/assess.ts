@@ -21,7 +21,8 @@ export const assess: Command = {
   help: `
 ${ASSESS_OPTIONS_HELP}
   --json                       { surveys: [ { file, problems?, climate, transposition, stepMinutes, warnings,
-                                 planes: [ { id, orientationFactor, unshaded, solarAccess, stations } ] } ] }
+                                 planes: [ { id, orientationFactor, orientationInterval, unshaded,
+                                 solarAccess, stations } ] } ] }
                                irradiation in kWh/m2, shares 0 to 1, null for a month without sun;
                                hours are local standard time; solarAccess of planes and stations has
                                interval: { low, high, standardDeviation, draws, sources: [ { source,

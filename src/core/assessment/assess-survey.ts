@@ -9,6 +9,7 @@ import type { RoofPlane, Station, Survey, TranspositionId } from '../survey/surv
 import type { PointedSurvey } from '../pointing/pointed-survey.ts';
 import type { DrawnAccess, DrawnSurvey } from '../uncertainty/access-interval.ts';
 import { accessInterval, drawAccess, drawnSurvey } from '../uncertainty/access-interval.ts';
+import { orientationInterval } from '../uncertainty/orientation-interval.ts';
 import { uncertainStation } from '../uncertainty/uncertain-station.ts';
 import type { Assessment, PlaneAccess, PlaneAssessment, StationAssessment } from '../shading/assessment.ts';
 import { assessStation } from '../shading/assess-station.ts';
@@ -124,8 +125,11 @@ async function assessPlane(
     stations.push(result);
   }
   const result = planeAssessment(plane, map, light.orientation, stations);
-  if (drawn && result.solarAccess) result.solarAccess.interval = accessInterval(draws, drawn);
-  return result;
+  if (!drawn) return result;
+  if (result.solarAccess) result.solarAccess.interval = accessInterval(draws, drawn);
+  const read = pointed.planes.find(({ id }) => id === plane.id);
+  const lies = orientationInterval(light.orientation, plane, read, survey.id);
+  return lies ? { ...result, orientationInterval: lies } : result;
 }
 
 function planeAssessment(

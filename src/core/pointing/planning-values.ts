@@ -39,4 +39,7 @@ export const PLANNING = {
   typedElevation: 0.5,
   typedHeading: 2,
   typedIndex: 0.3,
+  /** A plane's angles where none of its own readings tells them: typed from a plan, a pitch gauge or a compass. */
+  typedTilt: 1,
+  typedFacing: 2,
 } as const;

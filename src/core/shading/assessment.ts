@@ -22,6 +22,11 @@ export interface PlaneAssessment {
   surfaceAzimuth: number;
   /** Unshaded irradiation on the plane, over that on the best-lying plane at this site. */
   orientationFactor: number;
+  /**
+   * Where the factor is expected 95 times in 100, by how well tilt and azimuth are known; left out where no intervals were
+   * asked for, and at a site without light.
+   */
+  orientationInterval?: { low: number; high: number };
   /** How the best-lying plane lies. */
   bestPlane: { surfaceTilt: number; surfaceAzimuth: number };
   unshaded: Irradiation;

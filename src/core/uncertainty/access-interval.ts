@@ -6,6 +6,7 @@ import { AccessAccount } from './access-account.ts';
 import type { IntervalSourceId } from './interval-source.ts';
 import { INTERVAL_SOURCES } from './interval-source.ts';
 import { DRAWS, LEFT_AFTER, SOURCE_DRAWS } from './planning-values.ts';
+import { quantile } from './quantile.ts';
 import { cureOf, diffuseLeft, diffuseSpread, varianceLeft } from './source-cures.ts';
 import type { DrawnLosses } from './station-draws.ts';
 import { StationDraws } from './station-draws.ts';
@@ -184,13 +185,6 @@ function meanOf(
   const mean = new Float64Array(count);
   for (const row of rows) for (let i = 0; i < count; i++) mean[i] += row[i] / rows.length;
   return mean;
-}
-
-/** Value below which a share of sorted values lies, straight between neighbours. */
-function quantile(sorted: Float64Array, share: number): number {
-  const at = share * (sorted.length - 1);
-  const low = Math.floor(at);
-  return sorted[low] + (at - low) * (sorted[Math.min(low + 1, sorted.length - 1)] - sorted[low]);
 }
 
 function variance(values: Float64Array, count: number): number {
