@@ -15,11 +15,11 @@ export function emptyBrowser(): void {
 }
 
 /** One tab of the app: its connection and its stores, with a clock that moves on by a second an act. */
-export function tab(report: ConnectionReport = () => undefined) {
+export function tab(report: ConnectionReport = () => undefined, name = 'device') {
   let timeMs = Date.UTC(2026, 4, 14, 9, 30);
   let made = 0;
   const now = () => (timeMs += 1000);
-  const newId = () => `device-${++made}`;
+  const newId = () => `${name}-${++made}`;
   const connection = new Connection(report);
   const checker = () => Promise.resolve(surveyFromJson);
   return {
