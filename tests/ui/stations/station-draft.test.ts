@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { Station } from '../../../src/core/survey/survey.ts';
 import {
+  proposedName,
   stationDraft,
   stationDraftIn,
   typedStation,
@@ -24,6 +25,32 @@ describe('a new station', () => {
     expect(stationDraft(null, survey, 'metres', 'gone').on).toBe('');
     expect(stationDraft(null, inventedSurvey(), 'metres').on).toBe(south.id);
     expect(typed({ on: '' }).facts?.serves).toEqual([south.id, 'shed']);
+  });
+
+  it('stands on the plane of the last station, where somebody comes from none', () => {
+    const last = {
+      id: 'B',
+      order: 9,
+      name: 'B',
+      position: { on: 'shed', x: 1, y: 1 },
+      serves: ['shed'],
+      traces: [],
+    };
+    const stations = [...survey.stations, last];
+    const draft = stationDraft(null, { ...survey, stations }, 'metres');
+    expect(draft).toMatchObject({ on: 'shed', x: '', y: '' });
+    expect(stationDraft(null, { ...survey, stations }, 'metres', south.id).on).toBe(south.id);
+  });
+
+  it('is named after its place, but not over a typed name nor with one that is taken', () => {
+    const shed = survey.planes[1];
+    const draft = stationDraft(null, survey, 'metres', 'shed');
+    const named = { ...draft, ...proposedName(draft, survey, shed, 'centre') };
+    expect(named.name).toBe('Shed, centre');
+    expect(proposedName(named, survey, shed, 'lower left corner').name).toBe('Shed, lower left corner');
+    expect(proposedName({ ...draft, name: 'Ladder' }, survey, shed, 'centre').name).toBe('Ladder');
+    const stations = [{ ...survey.stations[0], name: 'Shed, centre' }];
+    expect(proposedName(named, { ...survey, stations }, shed, 'centre').name).toMatch(/^Station /);
   });
 
   // The foot is 0.3048 m, the inch 0.0254 m (international yard and pound agreement, 1959).
