@@ -10,10 +10,11 @@ function show(path: string): void {
   pathname.value = path;
 }
 
-/** Goes to another place of the app. */
-export function navigate(path: string): void {
+/** Goes to another place of the app; `instead` of the one shown, where Back must not come to that again. */
+export function navigate(path: string, instead = false): void {
   if (path === location.pathname) return;
-  history.pushState(null, '', path);
+  if (instead) history.replaceState(null, '', path);
+  else history.pushState(null, '', path);
   show(path);
   scrollTo(0, 0);
 }

@@ -23,6 +23,9 @@ describe('a new survey', () => {
     expect(await page.getByText(/Magnetic declination/).innerText()).toMatch(/\d\.\d° west ± 0\.\d°.*2025/);
     await page.getByRole('button', { name: 'Start the survey' }).tap();
     await page.getByRole('heading', { name: 'Roof planes' }).waitFor();
+    await page.goBack(); // to the list, not to a form for yet another one
+    await page.getByRole('heading', { level: 1, name: 'Surveys' }).waitFor();
+    await page.goForward();
     await page.getByRole('heading', { level: 1, name: /^Survey of 20\d\d-\d\d-\d\d$/ }).waitFor();
     await page.reload();
     await page.getByRole('link', { name: 'Site', exact: true }).tap();

@@ -36,7 +36,7 @@ export function NewSurveyScreen({ services }: { services: AppServices }) {
     const site = { ...place.site, ...(address.trim() && { address: address.trim() }) };
     return attempt(state, async () => {
       const id = await startSurvey(services, { title, site, notes });
-      navigate(surveyPath(id, 'roof'));
+      navigate(surveyPath(id, 'roof'), true); // Back leads to the list, not to a form for yet another one
     });
   };
   return (

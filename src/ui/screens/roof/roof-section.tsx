@@ -7,6 +7,7 @@ import { withoutPlane } from '../../../core/survey/removed-entries.ts';
 import type { RoofPlane } from '../../../core/survey/survey.ts';
 import { copyTitle } from '../../../app/actions/duplicate-survey.ts';
 import { EditHeading } from '../../components/edit-heading.tsx';
+import { useBackCloses } from '../../components/form/use-back-closes.ts';
 import { UnfinishedForms } from '../../components/form/unfinished-forms.tsx';
 import { focusHeading } from '../../components/screen-heading.tsx';
 import { roofPlan } from '../../../report/pictures/roof-plan.ts';
@@ -33,7 +34,8 @@ export function RoofSection({ survey, services }: SectionProps) {
   ) => attempt(services.state, () => changeSurvey(services, survey, after, code, name));
 
   const save = async (plane: RoofPlane) => {
-    const isNew = edited?.plane === null;
+    // One that was deleted meanwhile, in another tab, comes back with what was typed.
+    const isNew = !survey.planes.some((other) => other.id === plane.id);
     const list = isNew
       ? [...survey.planes, plane]
       : survey.planes.map((other) => (other.id === plane.id ? plane : other));
@@ -63,6 +65,8 @@ export function RoofSection({ survey, services }: SectionProps) {
   const remove = async ({ id, name }: RoofPlane) => {
     if (await store(withoutPlane(survey, id), 'entry-deleted', name)) focusHeading();
   };
+
+  useBackCloses(edited !== null, close);
 
   /** What goes on with a form that was typed into and not saved. */
   const opens = (form: string): (() => void) | null => {
@@ -100,7 +104,10 @@ export function RoofSection({ survey, services }: SectionProps) {
         </div>
       )}
       {planes.length === 0 && (
-        <p>No roof plane yet. Type one from a plan or a tape; then it can also be measured with the phone.</p>
+        <p>
+          No roof plane yet. Add one with its tilt and bearing as far as you know them; the phone can then
+          measure both.
+        </p>
       )}
       {planes.length > 0 && (
         <ul class="entries" aria-label="Roof planes">

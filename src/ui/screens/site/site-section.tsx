@@ -9,6 +9,7 @@ import type { Obstruction, Survey } from '../../../core/survey/survey.ts';
 import { EditHeading } from '../../components/edit-heading.tsx';
 import { PhotoSpace } from '../../components/photos/photo-space.tsx';
 import { PhotoStrip } from '../../components/photos/photo-strip.tsx';
+import { useBackCloses } from '../../components/form/use-back-closes.ts';
 import { UnfinishedForms } from '../../components/form/unfinished-forms.tsx';
 import { focusHeading } from '../../components/screen-heading.tsx';
 import type { SectionProps } from '../../section.ts';
@@ -42,18 +43,22 @@ export function SiteSection({ survey, services }: SectionProps) {
     if (isDone) close();
     return isDone;
   };
-  const saveObstruction = (obstruction: Obstruction, isNew: boolean) => {
+  const saveObstruction = (obstruction: Obstruction) => {
     const { obstructions } = survey;
-    const list = isNew
+    // One that was deleted meanwhile, in another tab, comes back with what was typed.
+    const isMissing = !obstructions.some((other) => other.id === obstruction.id);
+    const list = isMissing
       ? [...obstructions, obstruction]
       : obstructions.map((other) => (other.id === obstruction.id ? obstruction : other));
     return saved(
-      store({ ...survey, obstructions: list }, isNew ? 'entry-added' : 'entry-changed', obstruction.name),
+      store({ ...survey, obstructions: list }, isMissing ? 'entry-added' : 'entry-changed', obstruction.name),
     );
   };
   const remove = async ({ id, name }: Obstruction) => {
     if (await store(withoutObstruction(survey, id), 'entry-deleted', name)) focusHeading();
   };
+
+  useBackCloses(editing !== null, close);
 
   /** What goes on with a form that was typed into and not saved. */
   const opens = (form: string): (() => void) | null => {
@@ -106,7 +111,7 @@ export function SiteSection({ survey, services }: SectionProps) {
           order={nextOrder(survey.obstructions)}
           latitude={survey.site.latitude}
           taken={survey.obstructions.filter((other) => other !== editing.obstruction).map(({ name }) => name)}
-          onSave={(obstruction) => saveObstruction(obstruction, editing.obstruction === null)}
+          onSave={saveObstruction}
           onCancel={close}
         />
       </div>
