@@ -18,6 +18,8 @@ export interface Notice {
     | 'weather-file-forgotten';
   title: string;
   undo?: () => Promise<void>;
+  /** The step of a survey it tells of; once that is no longer the last one, its undo would do nothing. */
+  of?: { survey: string; step: number };
 }
 
 /** What came of one picked file. */

@@ -127,6 +127,54 @@ describe('the roof', () => {
       inventedSurvey('invented-1', { planes: [{ ...south, surfaceTilt: 35 }] }),
     );
   });
+
+  it('goes back from a form to the list, and keeps what was typed', async () => {
+    const page = await openedAt('Roof');
+    await page.getByRole('button', { name: 'Change South roof' }).click();
+    await page.getByLabel('Tilt').fill('41');
+    await page.goBack();
+    await page.getByRole('heading', { name: 'Roof planes' }).waitFor();
+    await page.getByText('Not saved yet').waitFor();
+    await page.getByRole('button', { name: /^Go on/ }).click();
+    expect(await page.getByLabel('Tilt').inputValue()).toBe('41');
+    await page.getByRole('button', { name: 'Save the plane' }).click();
+    await page.getByText('“South roof” is changed.').waitFor();
+    await page.getByText('41.0°').waitFor();
+  });
+
+  it('offers the undo of an act only until another section is read or something else is done', async () => {
+    const page = await openedAt('Roof');
+    const copied = page.getByText('“South roof, copy” is added.');
+    await page.getByRole('button', { name: 'Duplicate South roof' }).click();
+    await copied.waitFor();
+    await page.getByRole('link', { name: 'Site', exact: true }).click();
+    await copied.waitFor({ state: 'detached' });
+    await page.getByRole('link', { name: 'Roof', exact: true }).click();
+    await page.getByRole('button', { name: /^Take back/ }).click();
+    await page.getByRole('heading', { name: 'South roof, copy' }).waitFor({ state: 'detached' });
+    await page.getByText('Taken back: “South roof, copy”.').waitFor();
+
+    await page.getByRole('button', { name: 'Duplicate South roof' }).click();
+    await copied.waitFor();
+    const other = await page.context().newPage();
+    await other.goto(page.url());
+    await other.getByRole('button', { name: 'Delete South roof', exact: true }).click();
+    await other.getByText('“South roof” is deleted.').waitFor();
+    await copied.waitFor({ state: 'detached' }); // its undo would do nothing any more
+  });
+
+  it('brings a plane back that another tab deleted while it was being changed here', async () => {
+    const page = await openedAt('Roof');
+    await page.getByRole('button', { name: 'Change South roof' }).click();
+    await page.getByLabel('Name').fill('South roof, mended');
+    const other = await page.context().newPage();
+    await other.goto(page.url());
+    await other.getByRole('button', { name: 'Delete South roof' }).click();
+    await other.getByText('“South roof” is deleted.').waitFor();
+    await other.close();
+    await page.getByRole('button', { name: 'Save the plane' }).click();
+    await page.getByRole('heading', { name: 'South roof, mended' }).waitFor();
+  });
 });
 
 describe('obstructions and the field book', () => {

@@ -28,5 +28,6 @@ export async function changeSurvey(
     code,
     title: subject,
     undo: () => undoStep(services, after.id, number ?? undefined),
+    ...(number !== null && { of: { survey: after.id, step: number } }),
   };
 }

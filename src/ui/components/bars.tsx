@@ -1,3 +1,4 @@
+import type { AppState, Notice } from '../../app/app-state.ts';
 import { attempt } from '../../app/attempt.ts';
 import { useApp } from '../app-context.ts';
 import { ERROR_MESSAGES, noticeText } from '../messages.ts';
@@ -49,10 +50,15 @@ function UpdateBar() {
   );
 }
 
+/** Whether the survey on screen has gone on since: another step would be the one taken back. */
+function isPast({ of }: Notice, { open, steps }: AppState): boolean {
+  return of !== undefined && open.value?.id === of.survey && steps.value.undo?.number !== of.step;
+}
+
 function NoticeBar() {
   const { state } = useApp();
   const notice = state.notice.value;
-  if (!notice) return null;
+  if (!notice || isPast(notice, state)) return null;
   const takeBack = async () => {
     state.notice.value = null;
     if (notice.undo) await attempt(state, notice.undo);

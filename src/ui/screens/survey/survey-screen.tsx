@@ -17,12 +17,21 @@ import { SurveyTitle } from './survey-title.tsx';
 import './survey.css';
 
 function Sections({ id, shown }: { id: string; shown: SurveySection }) {
+  const { notice } = useApp().state;
+  // Who goes to another section has read what was done in this one; Take back stands under each of them.
+  const goOn = () => {
+    if (notice.value?.of) notice.value = null;
+  };
   return (
     <nav aria-label="Sections of this survey">
       <ul class="sections">
         {SURVEY_SECTIONS.map(({ path, label }) => (
           <li key={path}>
-            <a href={surveyPath(id, path)} aria-current={path === shown.path ? 'page' : undefined}>
+            <a
+              href={surveyPath(id, path)}
+              aria-current={path === shown.path ? 'page' : undefined}
+              onClick={goOn}
+            >
               {label}
             </a>
           </li>
