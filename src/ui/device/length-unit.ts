@@ -3,9 +3,13 @@ import type { LengthUnit } from '../../core/pointing/tape-length.ts';
 
 const KEY = 'noonmark-lengths';
 
+/** What tapes show where this device is set up for: feet in the United States. */
+export const usualUnit = (language: string): LengthUnit => (/-US\b/i.test(language) ? 'feet' : 'metres');
+
 function stored(): LengthUnit {
   try {
-    return localStorage.getItem(KEY) === 'feet' ? 'feet' : 'metres';
+    const kept = localStorage.getItem(KEY);
+    return kept === 'feet' || kept === 'metres' ? kept : usualUnit(navigator.language);
   } catch {
     // Storage is refused: metres stand.
     return 'metres';

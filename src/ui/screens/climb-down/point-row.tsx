@@ -26,7 +26,7 @@ function Effect({ point: { kind, effect } }: { point: OpenPoint }) {
   if (effect === null) return <span class="open-point-effect faint small">not counted</span>;
   return (
     <span class="open-point-effect">
-      <b>{effect.toFixed(1)}</b>
+      <b>{effect < 0.05 ? '<\u200a0.1' : effect.toFixed(1)}</b>
       <span class="small">points</span>
     </span>
   );

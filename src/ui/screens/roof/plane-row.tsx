@@ -1,7 +1,7 @@
 import type { RoofPlane, Survey } from '../../../core/survey/survey.ts';
 import { PhotoStrip } from '../../components/photos/photo-strip.tsx';
 import { lengthUnit } from '../../device/length-unit.ts';
-import { lengthText } from '../../length-text.ts';
+import { lengthInput, lengthText } from '../../length-text.ts';
 import { degreesText } from '../../value-text.ts';
 import { measurePath, newStationPath } from '../stations/station-path.ts';
 
@@ -13,7 +13,7 @@ function sizeOf({ width, slopeLength, outline }: RoofPlane): string {
   if (slopeLength === undefined) return `${lengthText(width, unit)} wide, length not measured`;
   return unit === 'feet'
     ? `${lengthText(width, unit)} × ${lengthText(slopeLength, unit)}`
-    : `${width} × ${slopeLength} m`;
+    : `${lengthInput(width, unit)} × ${lengthText(slopeLength, unit)}`;
 }
 
 /** A plane of the list: how it lies, how large it is, and what can be done with it. */

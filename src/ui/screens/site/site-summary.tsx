@@ -16,7 +16,10 @@ function factsOf({ site, climate, surveyedOn, surveyor, notes }: Survey): [term:
   const facts: [string, string | undefined][] = [
     ['Address', site.address],
     ['Position', placeText(site.latitude, site.longitude)],
-    ['Altitude', `${site.altitude ?? 0} m above the sea`],
+    [
+      'Altitude',
+      site.altitude === undefined ? 'not given, counted as 0 m' : `${site.altitude} m above the sea`,
+    ],
     ['Time zone', site.timeZone],
     ['Ground reflects', percentText(site.albedo ?? 0.2)],
     ['Climate', climateText(climate)],

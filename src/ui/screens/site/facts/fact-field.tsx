@@ -1,6 +1,7 @@
 import { useId, useState } from 'preact/hooks';
 import type { FactRow } from '../../../../core/survey/site-facts-general.ts';
 import { dropOwnChoice, ownChoices } from '../../../device/own-choices.ts';
+import { NONE, withChoice } from './several-choices.ts';
 import { TextField } from '../../../components/form/text-field.tsx';
 
 const OTHER = ' other';
@@ -92,8 +93,8 @@ function SeveralAnswers({ row, stored, value, onChange }: FactFieldProps) {
             checked={ticked.includes(choice)}
             onChange={({ currentTarget }) =>
               put(
-                currentTarget.checked ? [...ticked, choice] : ticked.filter((one) => one !== choice),
-                written,
+                currentTarget.checked ? withChoice(ticked, choice) : ticked.filter((one) => one !== choice),
+                choice === NONE && currentTarget.checked ? '' : written,
               )
             }
           />
@@ -104,7 +105,7 @@ function SeveralAnswers({ row, stored, value, onChange }: FactFieldProps) {
         label={`${row.label}, something else`}
         value={written}
         maxLength={1000}
-        onInput={(text) => put(ticked, text)}
+        onInput={(text) => put(text === '' ? ticked : ticked.filter((one) => one !== NONE), text)}
       />
       {row.hint && <p class="faint small">{row.hint}</p>}
     </fieldset>
