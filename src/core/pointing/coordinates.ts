@@ -14,7 +14,7 @@ const MARKS = ['°', "'", '"'];
 const TOKEN = /\s*(?:([-+]?\d+(?:\.\d+)?)\s*(°|'|")?|([NSEW])|[,;/|()])/gy;
 
 /**
- * Reads a place as people write it: decimal degrees, degrees and minutes, degrees, minutes and seconds; signs or the
+ * Reads a place as people write it: decimal degrees, degrees and minutes, degrees, minutes and seconds, with colons between them too; signs or the
  * letters N S E W before or after; decimal points or commas; a `geo:` address or a link that holds a pair; a place on the
  * UTM grid, by metres or by lettered square. Without letters the latitude comes first. Degrees, north and east positive,
  * rounded to 1e-7 (a centimetre); warnings where a grid reference is coarse or lies outside its zone.
@@ -66,7 +66,10 @@ function angleOf(value: number): TypedAngle {
 
 /** The two angles of a text, or what is wrong with it. */
 function anglesOf(text: string): [TypedAngle, TypedAngle] | string {
-  const bare = text.replace(/\b(lat|lon|lng|long|latitude|longitude)\b\.?\s*[:=]?/gi, ' ').toUpperCase();
+  const bare = text
+    .replace(/\b(lat|lon|lng|long|latitude|longitude)\b\.?\s*[:=]?/gi, ' ')
+    .replace(/(?<=\d):(?=\d)/g, ' ')
+    .toUpperCase();
   const numbers: { text: string; mark?: string }[] = [];
   const letters: { letter: string; after: number }[] = [];
   TOKEN.lastIndex = 0;
