@@ -40,7 +40,7 @@ describe('the roof', () => {
     await addPlane(page);
     await page.getByLabel('Tilt').fill('6/12');
     await page.getByText('= 26.6° from the horizontal').waitFor();
-    await page.getByLabel('Known is').selectOption('eave');
+    await page.getByLabel('What you know of it').selectOption('eave');
     await bearing(page).fill('95');
     await page.getByLabel('Square to the eave, it faces').selectOption('right');
     await page.getByText('The plane then faces 185.0°.').waitFor();
@@ -96,6 +96,8 @@ describe('the roof', () => {
     await addPlane(page);
     await page.getByLabel('Width along the eave').fill('52');
     await page.getByText('If that was 52.0 feet, it is 15.8 m').waitFor();
+    await page.getByLabel('Length up the slope').fill('500');
+    await page.getByText('That is more than usual; check the number.').waitFor();
     await page.getByRole('button', { name: 'Add the plane' }).click();
     await page.getByText('The tilt is needed').waitFor();
     expect(await page.evaluate(() => document.activeElement?.getAttribute('aria-invalid'))).toBe('true');

@@ -25,8 +25,9 @@ export function LengthField(props: {
   const typed = (props.signed ? typedOffset : typedLength)(props.value, unit, props.stored);
   const metres = valueOf(typed);
   const doubt = metres === undefined || unit === 'feet' ? null : feetDoubt(Math.abs(metres), props.usual);
-  const repeated =
-    metres === undefined ? undefined : `= ${shown(metres, unit === 'feet' ? 'metres' : 'feet')}`;
+  const same = metres === undefined ? undefined : `= ${shown(metres, unit === 'feet' ? 'metres' : 'feet')}`;
+  const isMuch = metres !== undefined && Math.abs(metres) > props.usual;
+  const repeated = isMuch ? `${same}. That is more than usual; check the number.` : same;
   return (
     <div class="length-field">
       <TextField

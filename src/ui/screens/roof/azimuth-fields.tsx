@@ -40,7 +40,7 @@ export function AzimuthFields(props: {
     <fieldset class="fields">
       <legend>Azimuth</legend>
       <ChoiceField
-        label="Known is"
+        label="What you know of it"
         value={draft.bearingOf}
         options={[
           { value: 'facing', label: 'The bearing it faces' },

@@ -39,7 +39,7 @@ export function ImportFiles() {
             currentTarget.value = '';
           }}
         />
-        <button type="button" class="main" disabled={busy} onClick={() => input.current?.click()}>
+        <button type="button" disabled={busy} onClick={() => input.current?.click()}>
           {busy ? 'Reading…' : 'Import survey files'}
         </button>
       </div>

@@ -50,7 +50,7 @@ export function FactGroups(props: {
         return (
           <details key={group.id} class="fold">
             <summary>
-              {group.label} ({answered} of {group.rows.length})
+              {group.label} ({answered}&nbsp;of&nbsp;{group.rows.length})
             </summary>
             <div class="stack">
               {group.id === 'electrical' && (
@@ -64,7 +64,6 @@ export function FactGroups(props: {
               <p class="small">
                 What is offered can be changed: <a href="/firm-lists">Firm’s lists</a>.
               </p>
-              <Answers survey={survey} group={group} />
               <div class="form-actions">
                 <button
                   type="button"
@@ -74,6 +73,7 @@ export function FactGroups(props: {
                   Answer
                 </button>
               </div>
+              <Answers survey={survey} group={group} />
             </div>
           </details>
         );
