@@ -88,7 +88,8 @@ function ownStamps(rows: readonly Row[], { device, last, sentUpTo }: Rebase): Ma
     else
       for (const { stamp, over, since } of versionsOf(row)) {
         add(stamp, over);
-        add(since);
+        // Also such as are only named: of versions that were carried on since.
+        for (const named of [since, ...(over ?? [])]) add(named);
       }
   return own;
 }

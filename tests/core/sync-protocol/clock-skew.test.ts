@@ -7,6 +7,7 @@ import {
 } from '../../../src/core/sync-protocol/clock-skew.ts';
 import { merge, stateOf } from '../../../src/core/sync-protocol/merge.ts';
 import { standingIn } from '../../../src/core/sync-protocol/needs-a-look.ts';
+import type { FieldRow } from '../../../src/core/sync-protocol/rows.ts';
 import { nextStamp, stampTime, type Stamp } from '../../../src/core/sync-protocol/stamp.ts';
 import { inventedSurvey } from '../../app/invented-survey.ts';
 import { acted, created } from './two-copies.ts';
@@ -104,4 +105,20 @@ it('a small skew, what was sent, and stamps of others move nothing', () => {
   expect(rebasedStamps(all, { ...contact, last: stamp, skewMs: TOLERATED_SKEW_MS }).size).toBe(0);
   expect(rebasedStamps(all, { ...contact, last: stamp, skewMs: HOUR, sentUpTo: stamp }).size).toBe(0);
   expect(rebasedStamps(all, { ...contact, last: stamp, skewMs: HOUR, device: 'tablet' }).size).toBe(0);
+});
+
+it('a stamp that is only named any more moves too, so that nothing is held in the future by it', () => {
+  let state = created(inventedSurvey(), 'office', '09:00');
+  const title = (value: string | undefined) => [{ path: 'title', value }];
+  // Set, cleared and set again by a clock five hours ahead: the first value is carried on by the third.
+  state = acted(state, 'phone', '15:00', title('A'));
+  state = acted(state, 'phone', '15:10', title(undefined));
+  state = acted(state, 'phone', '15:20', title('B'));
+  const moved = rebasedStamps([...state.values()], { ...contact, skewMs: -5 * HOUR });
+  const { stamp, replaced } = rebased(state, moved).get('field title') as FieldRow;
+  expect(stamp).toBe('2026-05-14T10:20:00.000Z-0000-phone');
+  expect(replaced?.[0]).toMatchObject({
+    stamp: '2026-05-14T10:10:00.000Z-0000-phone',
+    over: ['2026-05-14T10:00:00.000Z-0000-phone'],
+  });
 });
