@@ -1,3 +1,4 @@
+import { accessTimesOrientation } from '../../core/assessment/access-times-orientation.ts';
 import type {
   AccessInterval,
   Assessment,
@@ -21,30 +22,33 @@ export const assessmentFigures = ({ planes }: Assessment, compared: string): Fig
   });
 
 function planeFigures(plane: PlaneAssessment, at: Subject): FigureRow[] {
-  const { surfaceTilt, surfaceAzimuth, bestPlane, orientationFactor, unshaded, solarAccess } = plane;
+  const {
+    surfaceTilt,
+    surfaceAzimuth,
+    bestPlane,
+    orientationFactor,
+    orientationInterval,
+    unshaded,
+    solarAccess,
+  } = plane;
   const year = { ...at, period: 'year' };
   const rows = [
     figure(year, 'surface-tilt', surfaceTilt, 'degrees'),
     figure(year, 'surface-azimuth', surfaceAzimuth, 'degrees'),
     figure(year, 'best-tilt', bestPlane.surfaceTilt, 'degrees'),
     figure(year, 'best-azimuth', bestPlane.surfaceAzimuth, 'degrees'),
-    figure(year, 'orientation-factor', orientationFactor),
+    figure(year, 'orientation-factor', orientationFactor, 'share', orientationInterval),
     figure(year, 'unshaded-irradiation', unshaded.annual, 'kWh/m2'),
     ...monthFigures(at, 'unshaded-irradiation', unshaded.monthly, 'kWh/m2'),
   ];
   if (!solarAccess) return rows;
   const { annual, monthly, interval, lowest, count } = solarAccess;
+  const product = accessTimesOrientation(plane)!;
   const light = monthly.map((share, month) => (share === null ? null : share * unshaded.monthly[month]));
   return [
     ...rows,
     ...accessFigures(at, annual, monthly, interval),
-    figure(
-      year,
-      'access-times-orientation',
-      annual * orientationFactor,
-      'share',
-      times(interval, orientationFactor),
-    ),
+    figure(year, 'access-times-orientation', product.value, 'share', interval && product),
     figure(year, 'irradiation', annual * unshaded.annual, 'kWh/m2', times(interval, unshaded.annual)),
     ...monthFigures(at, 'irradiation', light, 'kWh/m2'),
     figure(year, 'lowest-access', lowest),

@@ -21,7 +21,7 @@ describe('the evidence of a terrace', () => {
   });
 
   test('gives programmes access, orientation and their product as assessed', () => {
-    const [annual, monthly] = tablesOf(sectionOf(report, 'programme-table'));
+    const [annual, intervals, monthly] = tablesOf(sectionOf(report, 'programme-table'));
     const [plane] = report.assessment.planes;
     const percent = (share: number) => `${(100 * share).toFixed(1)}%`;
     const access = plane.solarAccess!;
@@ -31,11 +31,13 @@ describe('the evidence of a terrace', () => {
         '38.0°',
         '200.0°',
         percent(access.annual),
-        `${percent(access.interval!.low)} to ${percent(access.interval!.high)}`,
         percent(plane.orientationFactor),
         percent(access.annual * plane.orientationFactor),
       ],
     ]);
+    expect(intervals.rows[0][1]).toBe(
+      `${percent(access.interval!.low)} to ${percent(access.interval!.high)}`,
+    );
     expect(monthly.rows.map(([, share]) => share)).toEqual(access.monthly.map((share) => percent(share!)));
     expect(monthly.sums).toEqual([['Year', percent(access.annual)]]);
   });
@@ -47,8 +49,8 @@ describe('the evidence of a terrace', () => {
           { ...report, choices: { ...report.choices, thresholds: { solarAccess } } },
           'programme-table',
         ),
-      )[1].rows[0][3];
-    expect(tablesOf(sectionOf(report, 'programme-table'))).toHaveLength(2);
+      )[2].rows[0][3];
+    expect(tablesOf(sectionOf(report, 'programme-table'))).toHaveLength(3);
     expect(asked(0.8)).toMatch(/, met$/);
     expect(asked(0.995)).toMatch(/, not met$/);
     const { low, high } = report.assessment.planes[0].solarAccess!.interval!;

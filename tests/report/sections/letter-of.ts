@@ -59,7 +59,7 @@ export function letterText(report: ReportInput): string {
     .concat('\n');
 }
 
-function linesOf(block: Block): string[] {
+export function linesOf(block: Block): string[] {
   if (block.kind === 'table') {
     const { caption, columns, rows, sums = [] } = block.table;
     return [caption, ...[columns.map(({ head }) => head), ...rows, ...sums].map((row) => row.join(' | '))];

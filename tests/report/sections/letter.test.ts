@@ -128,7 +128,7 @@ describe('what every letter keeps to', () => {
 
 /** Shares as the letter may write them: whole, or with one decimal. */
 function knownShares({ assessment, planes }: ReportInput): Set<string> {
-  const shares = assessment.planes.flatMap(({ orientationFactor, solarAccess, stations }, p) => {
+  const shares = assessment.planes.flatMap(({ orientationFactor, orientationInterval: lies, solarAccess, stations }, p) => {
     const { obstructions, groups } = planes[p].prospects;
     const mean = (gains: number[]) => gains.reduce((sum, gain) => sum + gain, 0) / stations.length;
     const gains = obstructions.map(({ id }) =>
@@ -141,6 +141,7 @@ function knownShares({ assessment, planes }: ReportInput): Set<string> {
     );
     return [
       orientationFactor,
+      ...(lies ? [lies.low, lies.high] : []),
       solarAccess!.annual,
       solarAccess!.interval!.low,
       solarAccess!.interval!.high,

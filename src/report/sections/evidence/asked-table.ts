@@ -1,23 +1,19 @@
+import type { ValueBetween } from '../../../core/assessment/access-times-orientation.ts';
+import {
+  accessBetween,
+  accessTimesOrientation,
+  orientationBetween,
+} from '../../../core/assessment/access-times-orientation.ts';
 import type { PlaneAssessment } from '../../../core/shading/assessment.ts';
 import type { Table } from '../../contents/report-contents.ts';
 import type { Thresholds } from '../../report-input.ts';
 import { shownText } from '../../shown-text.ts';
 import type { Speech } from '../../speech.ts';
 
-/** A quantity of a plane with the interval it lies in, shares. */
-interface Found {
-  value: number;
-  low: number;
-  high: number;
-}
-
 const QUANTITIES = {
-  solarAccess: { word: 'programme.access', of: accessOf },
-  orientationFactor: {
-    word: 'programme.orientation',
-    of: ({ orientationFactor: value }: PlaneAssessment): Found => ({ value, low: value, high: value }),
-  },
-  product: { word: 'programme.product', of: productOf },
+  solarAccess: { word: 'programme.access', of: accessBetween },
+  orientationFactor: { word: 'programme.orientation', of: orientationBetween },
+  product: { word: 'programme.product', of: accessTimesOrientation },
 } as const;
 
 /** What a programme asks for at least and what was found; null where nothing is asked. */
@@ -48,22 +44,10 @@ export function askedTable(
   return { caption: words['programme.asked-caption'], columns, rows };
 }
 
-function resultText(found: Found | null, least: number, speech: Speech): string {
+function resultText(found: ValueBetween | null, least: number, speech: Speech): string {
   const { words } = speech;
   if (!found) return words['programme.unknown'];
   const value = speech.percent(found.value, 1);
   if (found.low < least && found.high > least) return words['programme.within-interval'](value);
   return found.value >= least ? words['programme.met'](value) : words['programme.not-met'](value);
-}
-
-function accessOf({ solarAccess }: PlaneAssessment): Found | null {
-  if (!solarAccess) return null;
-  const { annual: value, interval } = solarAccess;
-  return { value, low: interval?.low ?? value, high: interval?.high ?? value };
-}
-
-function productOf(plane: PlaneAssessment): Found | null {
-  const access = accessOf(plane);
-  const factor = plane.orientationFactor;
-  return access && { value: access.value * factor, low: access.low * factor, high: access.high * factor };
 }

@@ -1,3 +1,8 @@
+import {
+  accessBetween,
+  accessTimesOrientation,
+  orientationBetween,
+} from '../../../core/assessment/access-times-orientation.ts';
 import type { PlaneAssessment } from '../../../core/shading/assessment.ts';
 import type { Block, Table } from '../../contents/report-contents.ts';
 import type { ReportInput } from '../../report-input.ts';
@@ -18,6 +23,7 @@ export const programmeTable: SectionKind = {
     const asked = askedTable(planes, choices.thresholds, speech);
     const blocks: Block[] = [
       { kind: 'table', table: annualTable(planes, speech) },
+      ...(hasIntervals(planes) ? [{ kind: 'table' as const, table: intervalTable(planes, speech) }] : []),
       { kind: 'paragraph', text: methodText(planes, survey, speech), small: true },
       { kind: 'paragraph', text: words['programme.explained'], small: true },
       ...(asked ? [{ kind: 'table' as const, table: asked }] : []),
@@ -29,31 +35,57 @@ export const programmeTable: SectionKind = {
 
 function annualTable(planes: readonly PlaneAssessment[], speech: Speech): Table {
   const { words } = speech;
-  const share = (value: number | undefined) =>
-    value === undefined ? words['programme.unknown'] : speech.percent(value, 1);
   return {
     caption: words['programme.caption'],
     columns: [
       { head: words['programme.plane'] },
-      ...(['tilt', 'azimuth', 'access', 'interval', 'orientation', 'product'] as const).map((column) => ({
+      ...(['tilt', 'azimuth', 'access', 'orientation', 'product'] as const).map((column) => ({
         head: words[`programme.${column}`],
         number: true,
       })),
     ],
-    rows: planes.map(({ name, surfaceTilt, surfaceAzimuth, solarAccess, orientationFactor }) => {
-      const interval = solarAccess?.interval;
-      return [
-        shownText(name),
-        speech.angle(surfaceTilt, 1),
-        speech.azimuth(surfaceAzimuth, 1),
-        share(solarAccess?.annual),
-        interval ? speech.range(share(interval.low), share(interval.high)) : words['programme.unknown'],
-        share(orientationFactor),
-        share(solarAccess ? solarAccess.annual * orientationFactor : undefined),
-      ];
-    }),
+    rows: planes.map((plane) => [
+      shownText(plane.name),
+      speech.angle(plane.surfaceTilt, 1),
+      speech.azimuth(plane.surfaceAzimuth, 1),
+      ...annualFigures(plane).map((found) =>
+        found ? speech.percent(found.value, 1) : words['programme.unknown'],
+      ),
+    ]),
   };
 }
+
+function intervalTable(planes: readonly PlaneAssessment[], speech: Speech): Table {
+  const { words } = speech;
+  const share = (value: number) => speech.percent(value, 1);
+  return {
+    caption: words['programme.interval'],
+    columns: [
+      { head: words['programme.plane'] },
+      ...(['access', 'orientation', 'product'] as const).map((column) => ({
+        head: words[`programme.${column}`],
+        number: true,
+      })),
+    ],
+    rows: planes.map((plane) => [
+      shownText(plane.name),
+      ...annualFigures(plane).map((found) =>
+        found ? speech.range(share(found.low), share(found.high)) : words['programme.unknown'],
+      ),
+    ]),
+  };
+}
+
+/** Solar access, orientation factor and their product. */
+const annualFigures = (plane: PlaneAssessment) => [
+  accessBetween(plane),
+  orientationBetween(plane),
+  accessTimesOrientation(plane),
+];
+
+/** Whether intervals were asked for. */
+const hasIntervals = (planes: readonly PlaneAssessment[]): boolean =>
+  planes.some(({ orientationInterval }) => orientationInterval);
 
 function monthlyTable(planes: readonly PlaneAssessment[], speech: Speech): Table {
   const { words } = speech;

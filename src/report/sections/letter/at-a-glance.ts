@@ -66,7 +66,7 @@ function lineOf(roof: Roof, speech: Speech): string {
 }
 
 function keyFigures(
-  { access: { annual, interval }, plane: { orientationFactor, unshaded } }: MeasuredRoof,
+  { access: { annual, interval }, plane: { orientationFactor, orientationInterval, unshaded } }: MeasuredRoof,
   clearSky: boolean,
   speech: Speech,
 ): KeyFigure[] {
@@ -83,7 +83,7 @@ function keyFigures(
     {
       label: words['glance.facing'],
       value: percent(orientationFactor),
-      range: null,
+      range: percentRange(orientationInterval, speech),
       note: words['glance.facing-note'],
     },
     {
@@ -96,7 +96,10 @@ function keyFigures(
 }
 
 /** With a decimal where the ends would look the same without. */
-function percentRange(interval: AccessInterval | undefined, speech: Speech): string | null {
+function percentRange(
+  interval: Pick<AccessInterval, 'low' | 'high'> | undefined,
+  speech: Speech,
+): string | null {
   const [whole, finer] = [0, 1].map((decimals) => (share: number) => speech.percent(share, decimals));
   const isNarrow = interval && whole(interval.low) === whole(interval.high);
   return rangeText(interval, speech, isNarrow ? finer : whole);
