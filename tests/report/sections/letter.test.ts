@@ -128,35 +128,41 @@ describe('what every letter keeps to', () => {
 
 /** Shares as the letter may write them: whole, or with one decimal. */
 function knownShares({ assessment, planes }: ReportInput): Set<string> {
-  const shares = assessment.planes.flatMap(({ orientationFactor, orientationInterval: lies, solarAccess, stations }, p) => {
-    const { obstructions, groups } = planes[p].prospects;
-    const mean = (gains: number[]) => gains.reduce((sum, gain) => sum + gain, 0) / stations.length;
-    const gains = obstructions.map(({ id }) =>
-      mean(stations.map((station) => station.obstructions.find((row) => row.id === id)?.gainIfRemoved ?? 0)),
-    );
-    const byPoint = stations.flatMap(({ unseen }) =>
-      unseen.flatMap((_, i) =>
-        unseen.slice(i).map((__, j) => unseen.slice(i, i + j + 1).reduce((sum, { share }) => sum + share, 0)),
-      ),
-    );
-    return [
-      orientationFactor,
-      ...(lies ? [lies.low, lies.high] : []),
-      solarAccess!.annual,
-      solarAccess!.interval!.low,
-      solarAccess!.interval!.high,
-      ...solarAccess!.monthly.map((share) => share ?? 0),
-      ...stations.flatMap(({ solarAccess: { annual }, coverage }) => [annual, 1 - coverage]),
-      ...byPoint,
-      ...gains,
-      ...groups.map(({ gainIfAllRemoved }) => gainIfAllRemoved),
-      ...obstructions.flatMap(({ lower, clear, grown }) => [
-        ...lower.map(({ gain }) => gain),
-        ...(clear ? [clear.gain] : []),
-        ...grown.map(({ loss }) => loss),
-      ]),
-    ];
-  });
+  const shares = assessment.planes.flatMap(
+    ({ orientationFactor, orientationInterval: lies, solarAccess, stations }, p) => {
+      const { obstructions, groups } = planes[p].prospects;
+      const mean = (gains: number[]) => gains.reduce((sum, gain) => sum + gain, 0) / stations.length;
+      const gains = obstructions.map(({ id }) =>
+        mean(
+          stations.map((station) => station.obstructions.find((row) => row.id === id)?.gainIfRemoved ?? 0),
+        ),
+      );
+      const byPoint = stations.flatMap(({ unseen }) =>
+        unseen.flatMap((_, i) =>
+          unseen
+            .slice(i)
+            .map((__, j) => unseen.slice(i, i + j + 1).reduce((sum, { share }) => sum + share, 0)),
+        ),
+      );
+      return [
+        orientationFactor,
+        ...(lies ? [lies.low, lies.high] : []),
+        solarAccess!.annual,
+        solarAccess!.interval!.low,
+        solarAccess!.interval!.high,
+        ...solarAccess!.monthly.map((share) => share ?? 0),
+        ...stations.flatMap(({ solarAccess: { annual }, coverage }) => [annual, 1 - coverage]),
+        ...byPoint,
+        ...gains,
+        ...groups.map(({ gainIfAllRemoved }) => gainIfAllRemoved),
+        ...obstructions.flatMap(({ lower, clear, grown }) => [
+          ...lower.map(({ gain }) => gain),
+          ...(clear ? [clear.gain] : []),
+          ...grown.map(({ loss }) => loss),
+        ]),
+      ];
+    },
+  );
   const written = (share: number, digits: number) =>
     new Intl.NumberFormat('en-GB', {
       style: 'percent',
