@@ -97,6 +97,7 @@ function ownStamps(rows: readonly Row[], { device, last, sentUpTo }: Rebase): Ma
 /**
  * Rows with their stamps moved (see `rebasedStamps`). A version keeps the stamp it had by the device's own clock as
  * `made`; the contents of raw readings, their times among them, are never touched.
+ * A device takes all changes from the start after this: what a stamp too late had pushed off a field comes back so.
  */
 export const rebased = (state: SurveyState, moved: ReadonlyMap<Stamp, Stamp>): SurveyState =>
   stateOf([...state.values()].map((row) => rebasedRow(row, moved)));

@@ -117,6 +117,7 @@ export class World {
       sentUpTo: device.sentUpTo,
     });
     device.correctionMs += skewMs;
+    if (moved.size > 0) device.pulled = 0;
     const after = rebased(state, moved);
     const changed = changedRows(state, after).filter((row) => mentions(row, moved));
     const numbered = new Map(device.replica.surveys.get(SURVEY));
