@@ -2,7 +2,7 @@ import { useState } from 'preact/hooks';
 import { addObstruction } from '../../../../app/capture/obstruction-edits.ts';
 import { obstructionKinds, type ObstructionKindRow } from '../../../../core/survey/obstruction-kinds.ts';
 import { ordered } from '../../../../core/survey/order.ts';
-import type { ObstructionKind, TraceShape } from '../../../../core/survey/survey.ts';
+import type { Obstruction, ObstructionKind, TraceShape } from '../../../../core/survey/survey.ts';
 import { Dialog } from '../../../components/dialog.tsx';
 import { percentText } from '../../../value-text.ts';
 import type { Sitting } from './sitting.ts';
@@ -49,22 +49,8 @@ export function ObstructionSheet({ sitting, onChosen, onCancel, onLater }: Props
   return (
     <Dialog title="What is it?" onCancel={onCancel}>
       <ShapeChoice sitting={sitting} />
-      {last && (
-        <button type="button" class="thumb main" onClick={() => onChosen(last.id)}>
-          Same as last: {last.name}
-        </button>
-      )}
-      {obstructions.length > 0 && (
-        <div class="sheet-list" role="group" aria-label="Known already">
-          {ordered(obstructions)
-            .filter(({ id }) => id !== last?.id)
-            .map(({ id, name: known }) => (
-              <button key={id} type="button" onClick={() => onChosen(id)}>
-                {known}
-              </button>
-            ))}
-        </div>
-      )}
+      {obstructions.length > 0 && <KnownOnes known={obstructions} last={last} onChosen={onChosen} />}
+      <h3 id="new-ones">New</h3>
       <label class="sheet-name">
         Name of a new one, if it needs one
         <input
@@ -75,7 +61,7 @@ export function ObstructionSheet({ sitting, onChosen, onCancel, onLater }: Props
           onInput={({ currentTarget }) => setName(currentTarget.value)}
         />
       </label>
-      <div class="sheet-list" role="group" aria-label="A new one">
+      <div class="sheet-list" role="group" aria-labelledby="new-ones">
         {obstructionKinds.map((row) => (
           <button key={row.kind} type="button" onClick={() => void add(row.kind)}>
             <span>{row.name}</span>
@@ -94,6 +80,34 @@ export function ObstructionSheet({ sitting, onChosen, onCancel, onLater }: Props
         </button>
       </div>
     </Dialog>
+  );
+}
+
+/** Those that are known, the one traced last as the main one. */
+function KnownOnes(props: {
+  known: readonly Obstruction[];
+  last: Obstruction | undefined;
+  onChosen: Props['onChosen'];
+}) {
+  const { known, last, onChosen } = props;
+  return (
+    <>
+      <h3 id="known-ones">Same as before</h3>
+      {last && (
+        <button type="button" class="thumb main" onClick={() => onChosen(last.id)}>
+          Same as last: {last.name}
+        </button>
+      )}
+      <div class="sheet-list" role="group" aria-labelledby="known-ones">
+        {ordered(known)
+          .filter(({ id }) => id !== last?.id)
+          .map(({ id, name }) => (
+            <button key={id} type="button" onClick={() => onChosen(id)}>
+              {name}
+            </button>
+          ))}
+      </div>
+    </>
   );
 }
 
