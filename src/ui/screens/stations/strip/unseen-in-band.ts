@@ -13,11 +13,23 @@ export const unseenRanges = (unseen: readonly UnseenRange[]): UnseenRange[] =>
     .filter(({ from, to, inSunBand }) => inSunBand && widthOf(from, to) >= NARROWEST)
     .sort((a, b) => b.share - a.share);
 
-/** What of the sun's band nobody has looked at, the greatest share of the light, in one line; the picture shows all. */
+/** Share of the light that comes from beside the sun's band, from where nobody has looked. */
+const shareOutside = (unseen: readonly UnseenRange[]): number =>
+  unseen.reduce((sum, { inSunBand, share }) => (inSunBand ? sum : sum + share), 0);
+
+/** Smaller shares show as nothing in whole percent. */
+const LEAST_SHARE = 0.005;
+
+/**
+ * What of the sun's band nobody has looked at, the greatest share of the light, in one line, and how much of the light
+ * lies outside the band; the picture shows all.
+ */
 export function unseenInBand(unseen: readonly UnseenRange[]): string {
   const open = unseenRanges(unseen);
-  if (open.length === 0) return 'All of the sun’s band has been seen.';
+  const outside = shareOutside(unseen);
+  const beside = outside < LEAST_SHARE ? '' : `${percentText(outside)} outside the sun’s band`;
+  if (open.length === 0) return `All of the sun’s band has been seen${beside && `; unseen: ${beside}`}.`;
   const [{ from, to, share }] = open;
   const more = open.length > 1 ? `; ${open.length - 1} more` : '';
-  return `Unseen: ${whole(from)}° to ${whole(to)}°, ${percentText(share)} of light${more}.`;
+  return `Unseen: ${whole(from)}° to ${whole(to)}°, ${percentText(share)} of light${more}${beside && `, and ${beside}`}.`;
 }
