@@ -27,18 +27,27 @@ export function FacesPanel({ sitting }: { sitting: Sitting }) {
       ) : (
         <FacesWords sitting={sitting} />
       )}
-      <div class="thumbs">
-        {(led || found) && (
-          <button type="button" class="thumb" onClick={leave}>
-            {found ? 'Go on tracing' : 'Skip'}
+      {found && !upright ? (
+        <div class="thumbs">
+          <Thumb session={session} label="Once more" minor onPress={() => void faces.take()} />
+          <button type="button" class="thumb main" onClick={leave}>
+            Go on tracing
           </button>
-        )}
-        <Thumb
-          session={session}
-          label={upright ? 'Second face' : found ? 'Once more' : 'First face'}
-          onPress={() => void faces.take()}
-        />
-      </div>
+        </div>
+      ) : (
+        <div class="thumbs">
+          {(led || found) && (
+            <button type="button" class="thumb" onClick={leave}>
+              {found ? 'Go on tracing' : 'Skip'}
+            </button>
+          )}
+          <Thumb
+            session={session}
+            label={upright ? 'Second face' : 'First face'}
+            onPress={() => void faces.take()}
+          />
+        </div>
+      )}
     </>
   );
 }

@@ -6,13 +6,15 @@ export function Thumb(props: {
   label: string;
   onPress: () => void;
   disabled?: boolean;
+  /** Another button beside it is the way on. */
+  minor?: boolean;
 }) {
   const phase = props.session.phase.value;
   const busy = phase === 'holding' || phase === 'storing';
   return (
     <button
       type="button"
-      class="thumb main"
+      class={props.minor ? 'thumb' : 'thumb main'}
       aria-busy={busy}
       disabled={props.disabled}
       onClick={() => !busy && props.onPress()}
