@@ -28,6 +28,13 @@ export function headingWords({ heading, refused }: PointedRun): string {
 export const closureWords = ({ mark, minutes, azimuth, elevation }: Closure): string =>
   `Error of closure on ${mark} after ${minutes.toFixed(0)} min: azimuth ${signed(azimuth)}, elevation ${signed(elevation)}.`;
 
+/** Which way the compass is off, where a check found more of the circle than it by `against` degrees. */
+function compassWords(against: number): string {
+  const degrees = Math.abs(against).toFixed(1);
+  if (degrees === '0.0') return 'the compass agrees';
+  return `compass ${degrees}° too far ${against < 0 ? 'clockwise' : 'anticlockwise'}`;
+}
+
 /** What a heading check found. */
 export function checkWords({
   method,
@@ -39,6 +46,6 @@ export function checkWords({
   const { name } = headingMethod(method);
   if (refused) return `${name}: ${refused}`;
   if (offset === null) return `${name}: stored; its bearing is still to be given.`;
-  const compass = againstCompass === null ? '' : `, compass off by ${signed(-againstCompass)}`;
+  const compass = againstCompass === null ? '' : `, ${compassWords(againstCompass)}`;
   return `${name}: north found ${within(standardDeviation)}${compass}.`;
 }

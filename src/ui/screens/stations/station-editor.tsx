@@ -99,7 +99,7 @@ export function StationEditor(props: SectionProps & { station: Station | null; p
         />
         {survey.planes.length > 0 && (
           <fieldset class="fields">
-            <legend>Speaks for</legend>
+            <legend>Counts for</legend>
             {survey.planes.map((plane) => (
               <label key={plane.id} class="tick">
                 <input

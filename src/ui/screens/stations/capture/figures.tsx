@@ -39,5 +39,5 @@ function degrees(value: number | null, circle?: number): string {
 function plusMinus(deviation: number | null): string {
   if (deviation === null) return 'no north yet';
   const width = 2 * deviation;
-  return width > 90 ? '± any' : `± ${width.toFixed(1)}°`;
+  return width > 90 ? '–' : `± ${width.toFixed(1)}°`;
 }
