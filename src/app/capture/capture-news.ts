@@ -47,4 +47,10 @@ export type RefusedWhy =
   | 'no-picture'
   /** The phone is not flat enough for its compass. */
   | 'not-flat'
+  /** The axis pointed so steeply that it has no azimuth to compare. */
+  | 'too-steep'
+  /** A mark is known by its name. */
+  | 'mark-unnamed'
+  /** A known mark's bearing is not typed, or not a bearing. */
+  | 'no-bearing'
   | 'nothing-to-undo';

@@ -21,11 +21,15 @@ export interface Act {
  */
 export class CaptureRecord {
   private queue: Promise<unknown> = Promise.resolve();
+  /** The newest step when this sitting began; null for none. */
+  private readonly begunAfter: number | null;
 
   constructor(
     private readonly services: Needs,
     readonly surveyId: string,
-  ) {}
+  ) {
+    this.begunAfter = services.state.steps.value.undo?.number ?? null;
+  }
 
   /** The survey as last stored. Throws AppError where it is not open and readable. */
   get survey(): Survey {
@@ -61,6 +65,11 @@ export class CaptureRecord {
       this.show(after);
       if (number !== null) state.steps.value = { undo: { number, code, title }, redo: null };
     });
+  }
+
+  /** Whether a step was made since this sitting began. */
+  isOfSitting(step: number): boolean {
+    return this.begunAfter === null || step > this.begunAfter;
   }
 
   /** Resolves when all that was asked for is written or refused. */

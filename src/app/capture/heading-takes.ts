@@ -1,3 +1,5 @@
+import { isTooSteep } from '../../core/pointing/check-results.ts';
+import { pointingOfReading } from '../../core/pointing/reading-direction.ts';
 import type { HeadingCheck, Reading, Survey } from '../../core/survey/survey.ts';
 import type { CaptureSession } from './capture-session.ts';
 import { nextOrder, withOwnSighting, withStation } from './station-edits.ts';
@@ -18,12 +20,16 @@ export async function takeCheck(
   facts: CheckFacts,
 ): Promise<{ id: string; reading: Reading } | null> {
   const id = session.services.newId();
-  const reading = await session.takeHeld((reading) => ({
-    edit: (survey) => withCheck(survey, stationId, { ...facts, id, reading: reading.id }),
-    code: 'entry-added',
-    title: 'Heading check',
-    news: { what: 'check' },
-  }));
+  const reading = await session.takeHeld((reading) => {
+    const pointing = pointingOfReading(reading);
+    if (pointing && isTooSteep(pointing.elevation)) return 'too-steep';
+    return {
+      edit: (survey) => withCheck(survey, stationId, { ...facts, id, reading: reading.id }),
+      code: 'entry-added',
+      title: 'Heading check',
+      news: { what: 'check' },
+    };
+  });
   return reading && { id, reading };
 }
 

@@ -11,6 +11,9 @@ import type { MarkPointing } from './mark-pointings.ts';
 /** An axis steeper than this has no azimuth to compare, degrees. */
 const STEEPEST = 70;
 
+/** Whether an axis at this elevation [degrees] is too steep for its azimuth to be compared. */
+export const isTooSteep = (elevation: number): boolean => Math.abs(elevation) > STEEPEST;
+
 export interface CheckInput {
   survey: Survey;
   readings: ReadonlyMap<string, Reading>;
@@ -76,7 +79,7 @@ function resultOf(
     againstCompass: null,
   };
   const none = { ...known, offset: null, standardDeviation: 0 };
-  if (Math.abs(elevation) > STEEPEST)
+  if (isTooSteep(elevation))
     return {
       ...none,
       refused: `The axis pointed ${Math.abs(elevation).toFixed(0)}° ${elevation > 0 ? 'up' : 'down'}, too steeply to have a direction. Take the check again with the phone’s top edge, or nearer to level.`,

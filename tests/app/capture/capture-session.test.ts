@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { turnBetween } from '../../../src/core/angles/angles.ts';
 import { AppError } from '../../../src/app/app-error.ts';
+import { CaptureSession } from '../../../src/app/capture/capture-session.ts';
 import { takeCheck, takeMark } from '../../../src/app/capture/heading-takes.ts';
 import { OpenTake } from '../../../src/app/capture/open-take.ts';
 import { takePlacing } from '../../../src/app/capture/plane-takes.ts';
@@ -200,9 +201,29 @@ describe('points', () => {
     expect((await sitting.stored()).stations[0].traces[0].sightings).toHaveLength(2);
     expect((await sitting.stored()).readings).toHaveLength(3);
   });
+
+  it('are taken back no further than this sitting goes: an earlier act is left alone', async () => {
+    const sitting = await inventedSitting();
+    await sight(sitting, new PointTrace(sitting.session, 'A'), 100, { way: 'points' });
+    const { services, sensor, feedback, stored } = sitting;
+    const next = new CaptureSession(services, sensor, feedback, 'bare');
+    await undoLast(services, next);
+    expect(next.news.value).toMatchObject({ kind: 'refused', why: 'nothing-to-undo' });
+    expect(services.state.steps.value.undo).not.toBeNull();
+    expect((await stored()).stations).toHaveLength(1);
+  });
 });
 
 describe('a heading check', () => {
+  it('pointed too steeply to have a direction is refused, and no check is kept', async () => {
+    const { session, sensor, stored } = await inventedSitting();
+    const taking = takeCheck(session, 'A', { method: 'known-mark', mark: 'church', bearing: 150 });
+    sensor.give(held(140, 81), 700);
+    expect(await taking).toBeNull();
+    expect(session.news.value).toMatchObject({ kind: 'refused', why: 'too-steep' });
+    expect((await stored()).stations[0].headingChecks).toBeUndefined();
+  });
+
   it('corrects earlier sightings of its run, and moves the open ranges with them', async () => {
     const { session, sensor, stored } = await inventedSitting();
     const open = new OpenTake(session, 'A');

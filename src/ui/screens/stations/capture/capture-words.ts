@@ -35,7 +35,11 @@ const REFUSED: Record<RefusedWhy, (degrees?: number) => string> = {
     'Not taken as part of this trace: half the horizon lies between. Sight a point in between first.',
   'no-picture': () => 'Not taken: the camera gave no picture. Tap again.',
   'not-flat': () => 'Not taken: lay the phone flat in your hand, screen up, and tap again.',
-  'nothing-to-undo': () => 'Nothing to take back.',
+  'too-steep': () =>
+    'Not taken: the phone pointed too steeply to have a direction. Hold it nearer to level, along the shadow or at the mark, and tap again.',
+  'mark-unnamed': () => 'Not taken: name the mark first, so that it is known again when it is sighted again.',
+  'no-bearing': () => 'Not taken: type the bearing of the mark first, 0 to 360 degrees.',
+  'nothing-to-undo': () => 'Nothing of this sitting to take back.',
 };
 
 /** What came of the last tap, as a sentence. */

@@ -1,8 +1,10 @@
 import { useEffect, useState } from 'preact/hooks';
 import type { CheckFacts } from '../../../../app/capture/heading-takes.ts';
 import { takeCheck } from '../../../../app/capture/heading-takes.ts';
+import { undoLast } from '../../../../app/capture/undo-last.ts';
 import { headingMethod } from '../../../../core/pointing/heading-methods.ts';
 import type { HeadingMethodId } from '../../../../core/survey/survey.ts';
+import { useApp } from '../../../app-context.ts';
 import { faultOf, typedNumber, valueOf } from '../../../typed.ts';
 import { checkWords } from '../heading-words.ts';
 import { utmZone } from '../../../../core/pointing/utm.ts';
@@ -64,6 +66,8 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
   const metres = { least: 0.01, most: 1000, unit: ' m', optional: true };
   const [tall, long] = [typedNumber(height, metres), typedNumber(length, metres)];
   const typed = typedNumber(bearing, { least: 0, most: 360, unit: '°', optional: method !== 'known-mark' });
+  const isUnnamed = method !== 'sun-shadow' && mark.trim() === '';
+  const missing = isUnnamed ? 'mark-unnamed' : faultOf(typed) !== null ? 'no-bearing' : null;
   const take = async () => {
     const facts: CheckFacts = {
       method,
@@ -136,11 +140,8 @@ function MethodPanel({ sitting, method }: { sitting: Sitting; method: HeadingMet
       <Thumb
         session={session}
         label={method === 'sun-shadow' ? 'Take the shadow' : 'Sight the mark'}
-        disabled={
-          [typed, tall, long].some((one) => faultOf(one) !== null) ||
-          (method !== 'sun-shadow' && mark.trim() === '')
-        }
-        onPress={() => void take()}
+        disabled={[tall, long].some((one) => faultOf(one) !== null)}
+        onPress={() => (missing ? session.refuse(missing) : void take())}
       />
     </>
   );
@@ -163,14 +164,24 @@ function Measured(props: { label: string; value: string; onInput: (value: string
 
 /** What the last check found, and what speaks against it. */
 function CheckResult({ sitting }: { sitting: Sitting }) {
+  const services = useApp();
   const id = sitting.lastCheck.value;
   const pointed = sitting.session.pointed.value;
   const found = pointed?.runs.flatMap(({ checks }) => checks).find(({ check }) => check === id);
   if (!pointed || !found) return null;
   const warning = pointed.warnings.find(({ path }) => path.startsWith(found.path))?.message;
   return (
-    <p class="banner" role="status">
-      {checkWords(found)} {warning !== found.refused && warning}
-    </p>
+    <div class="banner row" role="status">
+      <p>
+        {checkWords(found)} {warning !== found.refused && warning}
+      </p>
+      <button
+        type="button"
+        onClick={() => void undoLast(services, sitting.session)}
+        aria-label="Undo the last"
+      >
+        Undo
+      </button>
+    </div>
   );
 }

@@ -41,8 +41,11 @@ export function MarkPanel({ sitting }: { sitting: Sitting }) {
       <Thumb
         session={session}
         label={marks.includes(name.trim()) ? 'Sight it again' : 'Sight the mark'}
-        disabled={name.trim() === ''}
-        onPress={() => void takeMark(session, sitting.stationId, name.trim())}
+        onPress={() =>
+          name.trim() === ''
+            ? session.refuse('mark-unnamed')
+            : void takeMark(session, sitting.stationId, name.trim())
+        }
       />
     </>
   );
