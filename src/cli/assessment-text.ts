@@ -39,7 +39,7 @@ function planeText(plane: PlaneAssessment): string {
       cells: [...solarAccess.monthly.map(percent), percent(solarAccess.annual)],
     });
   return [
-    `${shownName(plane.name)}: tilt ${plane.surfaceTilt}°, facing ${plane.surfaceAzimuth}°`,
+    `${shownName(plane.name)}: tilt ${rounded(plane.surfaceTilt)}°, facing ${rounded(plane.surfaceAzimuth)}°`,
     verdict(plane),
     `Orientation factor ${withInterval(plane.orientationFactor, plane.orientationInterval)} %: a plane lying best here, tilt ${Math.round(bestPlane.surfaceTilt)}°, facing ${Math.round(bestPlane.surfaceAzimuth)}°, is 100 %.`,
     '',
@@ -76,3 +76,6 @@ function stationText(station: StationAssessment): string {
   ];
   return `${heading}\n${table(columns, rows)}${groups.join('')}`;
 }
+
+/** To a tenth, and without it where it is none. */
+const rounded = (degrees: number): string => String(Math.round(degrees * 10) / 10);
