@@ -35,13 +35,20 @@ describe('words of a station', () => {
         [0, 10],
         [20, 30],
       ] as [number, number][],
-      markSightings: [{ id: 'm', mark: 'tip' }, { id: 'l' }],
+      markSightings: [{ id: 'm', mark: 'tip' }, { id: 'l' }, { id: 's', readings: ['r1', 'r2'] }],
     };
-    expect(hasParts(more)).toEqual(['1 trace', '2 open ranges', '1 mark', '1 sighting in no trace yet']);
+    expect(hasParts(more)).toEqual([
+      '1 trace',
+      '2 open ranges',
+      '1 mark',
+      '1 interrupted sweep',
+      '1 sighting in no trace yet',
+    ]);
   });
 
   it('say where it stands', () => {
-    expect(placeWords(station, survey)).toBe('Place unknown');
+    expect(placeWords({ ...station, serves: [] }, survey)).toBe('Place unknown');
+    expect(placeWords({ ...station, serves: ['south'] }, survey)).toBe('Not measured on South roof');
     expect(placeWords({ ...station, position: { on: 'south', x: 1, y: 2 } }, survey)).toBe(
       'On South roof, 1 m along the eave, 2 m up the slope',
     );

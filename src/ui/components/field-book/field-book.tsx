@@ -15,6 +15,7 @@ import { WideTable } from '../wide-table.tsx';
 import { BookDialog } from './book-dialog.tsx';
 import type { BookEdit } from './book-edit.ts';
 import { hasReading } from './sighting-form.tsx';
+import { unmeasuredPlace } from './unmeasured-place.ts';
 import './field-book.css';
 
 const SHAPES: Record<Trace['shape'], string> = {
@@ -98,7 +99,7 @@ function SightingRows(props: {
         <tr>
           <td colSpan={4}>
             <button type="button" onClick={() => setShown(Infinity)}>
-              Show {hidden} more sightings
+              Show {hidden} more {hidden === 1 ? 'sighting' : 'sightings'}
             </button>
           </td>
         </tr>
@@ -131,8 +132,9 @@ function aboutTrace({ shape, fullCircle, angularWidth }: Trace): string {
     .join(', ');
 }
 
-function placeOf({ position }: Station, survey: Survey): string {
-  if (position === undefined) return 'Place unknown';
+function placeOf(station: Station, survey: Survey): string {
+  const { position } = station;
+  if (position === undefined) return unmeasuredPlace(station, survey);
   if (!('on' in position)) return `${position.east} m east, ${position.north} m north, ${position.up} m up`;
   const plane = survey.planes.find(({ id }) => id === position.on);
   return `On ${plane?.name ?? position.on}: ${position.x} m along the eave, ${position.y} m up the slope`;

@@ -6,7 +6,7 @@ import { navigate } from '../../router.ts';
 import type { SectionProps } from '../../section.ts';
 import { percentText } from '../../value-text.ts';
 import { startPractice } from './practice.ts';
-import { hasParts, placeWords, servedNames } from './station-facts.ts';
+import { counted, hasParts, placeWords, servedNames } from './station-facts.ts';
 import { editStationPath, measurePath, newStationPath, stationForm, stationPath } from './station-path.ts';
 import { useAssessment } from './use-assessment.ts';
 
@@ -98,8 +98,8 @@ function PlaneLinks({ surveyId, survey }: { surveyId: string; survey: Survey }) 
                   Tilt {surfaceTilt.toFixed(1)}°, facing {surfaceAzimuth.toFixed(1)}°.
                 </span>
                 <span class="faint small">
-                  {(tiltPlacings ?? []).length} placings, {(azimuthSightings ?? []).length} sightings along
-                  edges.
+                  {counted((tiltPlacings ?? []).length, 'placing')},{' '}
+                  {counted((azimuthSightings ?? []).length, 'sighting')} along edges.
                 </span>
               </a>
             </li>

@@ -9,7 +9,8 @@ import { FieldBook } from '../../components/field-book/field-book.tsx';
 import { navigate } from '../../router.ts';
 import type { SectionProps } from '../../section.ts';
 import { BearingForm } from './bearing-form.tsx';
-import { hasParts, placeWords, servedNames, withoutNorth } from './station-facts.ts';
+import { deviceName } from './device-words.ts';
+import { hasParts, placeWords, servedNames, sweptLoose, withoutNorth } from './station-facts.ts';
 import { capturePath, editStationPath, stationsPath } from './station-path.ts';
 import { checkWords, closureWords, headingWords } from './heading-words.ts';
 
@@ -34,6 +35,7 @@ export function StationPage(props: SectionProps & { station: Station }) {
         {placeWords(station, survey)}. Speaks for {servedNames(station, survey).join(', ') || 'no plane'}.
       </p>
       <p>{has.length > 0 ? `Has ${has.join(', ')}.` : 'Nothing sighted from here yet.'}</p>
+      {sweptLoose(station).length > 0 && <p class="caution">A sweep was interrupted: say what it was.</p>}
       {lost > 0 && (
         <p class="caution">
           {lost === 1 ? 'One sighting points' : `${lost} sightings point`} nowhere yet: the phone had no
@@ -98,7 +100,7 @@ function Headings({
 }) {
   const mine = runsOf(station, pointed);
   if (mine.length === 0) return null;
-  const deviceOf = (id: string) => runs.find((run) => run.id === id)?.device ?? 'a phone';
+  const deviceOf = (id: string) => deviceName(runs.find((run) => run.id === id)?.device, navigator.userAgent);
   return (
     <>
       <h3>Heading</h3>

@@ -14,14 +14,20 @@ function phaseWords({ phase, news }: CaptureSession): string | null {
 }
 
 /** What came of the last tap, and how many readings are safe on the device. */
-export function NewsLine(props: { session: CaptureSession; children?: ComponentChildren }) {
+export function NewsLine(props: {
+  session: CaptureSession;
+  /** Told while there is no news, in place of that all is ready. */
+  waiting?: string | null;
+  children?: ComponentChildren;
+}) {
   const { session } = props;
   const news = session.news.value;
   const { stored } = session;
   return (
     <div class="news" data-kind={news?.kind}>
       <p role="status" class="news-text">
-        {phaseWords(session) ?? (news ? newsWords(news) : 'Ready. Feet safe, eyes off the sun.')}
+        {phaseWords(session) ??
+          (news ? newsWords(news) : (props.waiting ?? 'Ready. Feet safe, eyes off the sun.'))}
       </p>
       <p class="small faint news-count">
         <span class="stored-count">{stored}</span> on this device

@@ -34,6 +34,10 @@ type Props = SectionProps & { station: Station; capture: Capture; sitting: Sitti
 const planeOf = ({ survey, station }: Props): RoofPlane | null =>
   survey.planes.find(({ id }) => station.serves.includes(id)) ?? survey.planes[0] ?? null;
 
+/** What a sweep that was cut off asks for; null where there is none. */
+const waitingWords = ({ sweep }: Sitting): string | null =>
+  sweep.unfinished() ? 'A sweep was interrupted: say what it was, under Trace.' : null;
+
 /** A sitting at work: picture, figures, strip, and the panel of the task in hand. */
 export function SittingView(props: Props) {
   const { capture, sitting, survey } = props;
@@ -56,7 +60,7 @@ export function SittingView(props: Props) {
         {task !== 'check' && (
           <HeadingBanner session={session} onCheck={() => (sitting.task.value = 'check')} />
         )}
-        <NewsLine session={session}>
+        <NewsLine session={session} waiting={waitingWords(sitting)}>
           <NextStation {...props} live={strip.live} />
         </NewsLine>
         <Switches
