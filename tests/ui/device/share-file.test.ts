@@ -2,8 +2,11 @@ import { afterEach, describe, expect, it, vi } from 'vitest';
 import { canShareFiles, shareFile } from '../../../src/ui/device/share-file.ts';
 
 const file = new File(['x'], 'report.pdf', { type: 'application/pdf' });
-const device = (share: () => Promise<void>) =>
-  vi.stubGlobal('navigator', { canShare: () => true, share: vi.fn(share) });
+function device(answer: () => Promise<void>) {
+  const share = vi.fn(answer);
+  vi.stubGlobal('navigator', { canShare: () => true, share });
+  return share;
+}
 const closed = (name: string) => () => Promise.reject(new DOMException('', name));
 
 afterEach(() => vi.unstubAllGlobals());
@@ -19,9 +22,9 @@ describe('the share sheet', () => {
   });
 
   it('gets the file; closing it is no fault, and a tap too long ago asks for another (Web Share, 2.1.2)', async () => {
-    device(() => Promise.resolve());
+    const share = device(() => Promise.resolve());
     expect(await shareFile(file)).toBe('shared');
-    expect(navigator.share).toHaveBeenCalledWith({ files: [file], title: 'report.pdf' });
+    expect(share).toHaveBeenCalledWith({ files: [file], title: 'report.pdf' });
     device(closed('AbortError'));
     expect(await shareFile(file)).toBe('left');
     device(closed('NotAllowedError'));
