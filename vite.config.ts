@@ -104,6 +104,8 @@ export default defineConfig({
           include: ['tests/browser/**/*.test.ts'],
           globalSetup: ['tests/browser/build-once.ts'],
           environment: 'node',
+          // a busy machine calculates for seconds
+          expect: { poll: { timeout: 20_000 } },
           testTimeout: 240_000,
           hookTimeout: 180_000,
           ...sharedWorkers,

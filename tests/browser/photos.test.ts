@@ -127,7 +127,8 @@ describe('photos', () => {
     const buffer = Buffer.concat([base.buffer, Buffer.alloc(40_000_000)]);
     const strip = page.getByRole('group', { name: 'Photos of the site' });
     await strip.locator('input[type=file]').setInputFiles({ ...base, buffer });
-    await page.getByRole('button', { name: 'Photo 1 of the site' }).tap();
+    // 40 MB take their time through the browser's debugging port
+    await page.getByRole('button', { name: 'Photo 1 of the site' }).tap({ timeout: 120_000 });
     await page.getByText('1600 × 1067 dots').waitFor();
   });
 
